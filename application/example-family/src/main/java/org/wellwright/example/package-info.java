@@ -1,0 +1,2 @@
+/** A potential family added from outside, as a third party would. */
+package org.wellwright.example;

@@ -1,0 +1,2 @@
+/** The name and the house look: chart theme and colour scales. */
+package org.wellwright.branding;

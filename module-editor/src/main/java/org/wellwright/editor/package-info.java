@@ -1,0 +1,2 @@
+/** Windows that change a project. */
+package org.wellwright.editor;

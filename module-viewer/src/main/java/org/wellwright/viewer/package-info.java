@@ -1,0 +1,2 @@
+/** Windows and figures that show results. */
+package org.wellwright.viewer;
