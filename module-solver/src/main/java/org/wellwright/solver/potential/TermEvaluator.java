@@ -45,4 +45,9 @@ public interface TermEvaluator {
 
     /** Behaviour at r → ∞. */
     TailBehaviour tail();
+
+    /** Radii beyond which V is infinite (hard sphere, hard outer wall); none as a rule. */
+    default HardWalls walls() {
+        return HardWalls.NONE;
+    }
 }
