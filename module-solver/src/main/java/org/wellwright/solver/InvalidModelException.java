@@ -1,6 +1,9 @@
 package org.wellwright.solver;
 
-/** Something typed by the user cannot be used: a formula, a unit, a particle, a parameter, a project record. Exit status 2. */
+/**
+ * Something typed by the user cannot be used: a formula, a unit, a particle, a parameter, a project record. Exit status
+ * 2.
+ */
 public final class InvalidModelException extends WellwrightException {
     private static final long serialVersionUID = 1L;
 

@@ -1,6 +1,9 @@
 package org.wellwright.solver.potential;
 
-/** The operator on angles and spins that multiplies a term's V(r). {@code model.Assembly} computes its matrix elements between channels. */
+/**
+ * The operator on angles and spins that multiplies a term's V(r). {@code model.Assembly} computes its matrix elements
+ * between channels.
+ */
 public enum AngularFactor {
     /** 1: the same in every channel, couples none. */
     UNITY,

@@ -2,7 +2,10 @@ package org.wellwright.solver.potential;
 
 import java.util.Objects;
 
-/** What a term puts in for one of its parameters: a parameter of the project's pool, or a number. {@code model.Assembly} turns it into a value. */
+/**
+ * What a term puts in for one of its parameters: a parameter of the project's pool, or a number. {@code model.Assembly}
+ * turns it into a value.
+ */
 public sealed interface Argument {
     /** The number 0. */
     Argument ZERO = new Literal(0, "");
@@ -41,7 +44,8 @@ public sealed interface Argument {
      * A number.
      *
      * @param value the number as typed, in {@code unit}; not NaN
-     * @param unit symbol of the unit ("eV", "a0^-1"); empty for the unit of its place: the project's unit system, or the table's own units
+     * @param unit symbol of the unit ("eV", "a0^-1"); empty for the unit of its place: the project's unit system, or
+     *     the table's own units
      */
     record Literal(double value, String unit) implements Argument {
         /** Checks the number. */

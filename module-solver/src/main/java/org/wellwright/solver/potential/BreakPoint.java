@@ -8,7 +8,8 @@ import java.util.List;
  * @param radius where, in the problem's length unit, > 0
  * @param kind what is not smooth there
  * @param jump V(radius⁺) − V(radius⁻) in the problem's energy unit; 0 unless the kind is JUMP
- * @param radiusGradient d radius/d p_j for each parameter of the term, in the term's order; empty when the radius does not move with any of them
+ * @param radiusGradient d radius/d p_j for each parameter of the term, in the term's order; empty when the radius does
+ *     not move with any of them
  */
 public record BreakPoint(double radius, Kind kind, double jump, List<Double> radiusGradient) {
     /** What is not smooth: the value, the slope, or a higher derivative. */

@@ -17,7 +17,8 @@ public record ChannelFilter(int orbitalFrom, int orbitalTo, List<Integer> twiceT
     /** Checks the order of the limits and copies the lists. */
     public ChannelFilter {
         if (orbitalFrom < 0 || orbitalTo < orbitalFrom) {
-            throw new IllegalArgumentException("a channel filter needs 0 <= from <= to, got %d, %d".formatted(orbitalFrom, orbitalTo));
+            throw new IllegalArgumentException(
+                    "a channel filter needs 0 <= from <= to, got %d, %d".formatted(orbitalFrom, orbitalTo));
         }
         twiceTotals = List.copyOf(twiceTotals);
         twiceSpins = List.copyOf(twiceSpins);

@@ -10,7 +10,8 @@ import java.util.Objects;
  *
  * @param frame what surrounds it
  * @param family id of the family
- * @param arguments what stands for each of the family's parameters, by {@link FamilyParameter#name()}; the order is kept
+ * @param arguments what stands for each of the family's parameters, by {@link FamilyParameter#name()}; the order is
+ *     kept
  */
 public record FamilyTerm(TermFrame frame, String family, Map<String, Argument> arguments) implements Term {
     /** Copies the arguments. */

@@ -6,7 +6,8 @@ import java.util.Map;
 import java.util.Objects;
 
 /**
- * A formula V(r); its numbers are in the project's unit system. It may be mistyped: a faulty formula is kept with its project and fails when used.
+ * A formula V(r); its numbers are in the project's unit system. It may be mistyped: a faulty formula is kept with its
+ * project and fails when used.
  *
  * @param frame what surrounds it
  * @param text the formula as typed

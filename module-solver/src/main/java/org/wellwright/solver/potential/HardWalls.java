@@ -3,8 +3,8 @@ package org.wellwright.solver.potential;
 import java.util.List;
 
 /**
- * Radii beyond which a term is infinite. {@code model.Assembly} makes them the walls of the radial problem (the tightest of all terms); the evaluator's
- * own {@code value} stays finite there.
+ * Radii beyond which a term is infinite. {@code model.Assembly} makes them the walls of the radial problem (the
+ * tightest of all terms); the evaluator's own {@code value} stays finite there.
  *
  * @param inner u = 0 for r ≤ inner; 0 for none
  * @param outer u = 0 for r ≥ outer; +∞ for none

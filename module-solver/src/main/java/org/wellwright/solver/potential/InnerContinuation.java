@@ -3,10 +3,12 @@ package org.wellwright.solver.potential;
 import java.util.Objects;
 
 /**
- * How a table goes on below its first knot r₁. Every kind but the wall joins the table with its value and slope, which fix a and b.
+ * How a table goes on below its first knot r₁. Every kind but the wall joins the table with its value and slope, which
+ * fix a and b.
  *
  * @param kind the shape
- * @param steepness n of the power (pure number) or c of the exponential (inverse of the table's radius unit); not 0; of no meaning for the wall
+ * @param steepness n of the power (pure number) or c of the exponential (inverse of the table's radius unit); not 0; of
+ *     no meaning for the wall
  */
 public record InnerContinuation(Kind kind, Argument steepness) {
     /** An impenetrable wall at the first knot. */

@@ -13,7 +13,8 @@ public record Interval(double lower, double upper) {
     /** Checks the order of the ends. */
     public Interval {
         if (!(lower <= upper)) {
-            throw new IllegalArgumentException("an interval needs lower <= upper, got [%s, %s]".formatted(lower, upper));
+            throw new IllegalArgumentException(
+                    "an interval needs lower <= upper, got [%s, %s]".formatted(lower, upper));
         }
     }
 

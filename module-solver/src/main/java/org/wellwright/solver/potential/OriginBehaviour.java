@@ -4,7 +4,8 @@ package org.wellwright.solver.potential;
  * How a potential starts at r → 0⁺: V(r) = inverseSquare/r² + coefficient·r^power + less singular terms.
  *
  * @param inverseSquare coefficient of r⁻², energy·length²; joins the centrifugal term
- * @param power exponent of the most singular remaining part; below −2 for a core that dominates the centrifugal term; 0 if V is finite or logarithmic
+ * @param power exponent of the most singular remaining part; below −2 for a core that dominates the centrifugal term; 0
+ *     if V is finite or logarithmic
  * @param coefficient its coefficient; 0 if V is finite or logarithmic
  * @param known false when the behaviour could not be derived and a solver must look for itself
  */
@@ -20,7 +21,9 @@ public record OriginBehaviour(double inverseSquare, double power, double coeffic
         if (coefficient == 0 || power >= 0) {
             return FINITE;
         }
-        return power == -2 ? new OriginBehaviour(coefficient, 0, 0, true) : new OriginBehaviour(0, power, coefficient, true);
+        return power == -2
+                ? new OriginBehaviour(coefficient, 0, 0, true)
+                : new OriginBehaviour(0, power, coefficient, true);
     }
 
     /** The behaviour of the sum of two potentials. */

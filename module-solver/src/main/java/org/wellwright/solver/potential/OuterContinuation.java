@@ -6,7 +6,8 @@ import java.util.Objects;
  * How a table goes on above its last knot r_N: V = limit + coefficient/rⁿ.
  *
  * @param kind the shape
- * @param limit the limit at r → ∞ in the table's value unit; V jumps at r_N where limit and table do not meet. {@link Kind#JOINED_POWER} ignores it
+ * @param limit the limit at r → ∞ in the table's value unit; V jumps at r_N where limit and table do not meet.
+ *     {@link Kind#JOINED_POWER} ignores it
  * @param coefficient coefficient of r⁻ⁿ (negative for an attractive tail), value unit · (radius unit)ⁿ
  * @param exponent n > 0
  */

@@ -3,8 +3,8 @@ package org.wellwright.solver.potential;
 import java.util.List;
 
 /**
- * A named kind of potential. Registered with {@code @ServiceProvider(service = PotentialFamily.class)} and found through the Lookup, so that a third
- * party adds one by dropping in a module.
+ * A named kind of potential. Registered with {@code @ServiceProvider(service = PotentialFamily.class)} and found
+ * through the Lookup, so that a third party adds one by dropping in a module.
  */
 public interface PotentialFamily {
     /** Lower-case identifier used in project files, unique ("woods-saxon"). */
@@ -35,7 +35,8 @@ public interface PotentialFamily {
      *
      * @param values one value per parameter, in the problem's energy and length unit; copied
      * @param channel the channel it will act in
-     * @throws org.wellwright.solver.InvalidModelException if a value is outside the family's domain; names the parameter
+     * @throws org.wellwright.solver.InvalidModelException if a value is outside the family's domain; names the
+     *     parameter
      */
     TermEvaluator bind(double[] values, ChannelFacts channel);
 }

@@ -34,7 +34,9 @@ public record TableInterpolation(Quantity quantity, Abscissa abscissa, Spline sp
     public enum Spline {
         /** Twice continuously differentiable, second derivative zero at both ends. */
         NATURAL,
-        /** Twice continuously differentiable, slopes at the ends those of the cubic through the four outermost knots. */
+        /**
+         * Twice continuously differentiable, slopes at the ends those of the cubic through the four outermost knots.
+         */
         CLAMPED,
         /** Continuously differentiable, without wiggles between knots (Fritsch and Butland 1984). */
         MONOTONE

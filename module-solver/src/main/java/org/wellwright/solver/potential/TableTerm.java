@@ -4,7 +4,8 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * A table of V(r) with its interpolation and its continuation at both ends. Numbers are kept as typed, in the table's own units.
+ * A table of V(r) with its interpolation and its continuation at both ends. Numbers are kept as typed, in the table's
+ * own units.
  *
  * @param frame what surrounds it
  * @param radiusUnit symbol of the unit of the radii; empty for the project's
@@ -39,7 +40,8 @@ public record TableTerm(
         for (int i = 1; i < knots.size(); i++) {
             if (!(knots.get(i).radius() > knots.get(i - 1).radius())) {
                 throw new IllegalArgumentException("the radii of a table must ascend: point %d has %s after %s"
-                        .formatted(i + 1, knots.get(i).radius(), knots.get(i - 1).radius()));
+                        .formatted(
+                                i + 1, knots.get(i).radius(), knots.get(i - 1).radius()));
             }
         }
     }

@@ -3,8 +3,9 @@ package org.wellwright.solver.potential;
 /**
  * How a potential ends at r → ∞: V(r) = limit + coefficient·r^power + smaller.
  *
- * <p>With power below 0 V tends to {@code limit}; power = −∞ means faster than any power (then coefficient is 0). With power above 0 V tends to ±∞ by
- * the sign of {@code coefficient}; power = +∞ means faster than any power. A logarithm has power 0 and the sign of its coefficient.
+ * <p>With power below 0 V tends to {@code limit}; power = −∞ means faster than any power (then coefficient is 0). With
+ * power above 0 V tends to ±∞ by the sign of {@code coefficient}; power = +∞ means faster than any power. A logarithm
+ * has power 0 and the sign of its coefficient.
  *
  * @param limit the limit, energy; 0 when there is none
  * @param power exponent of the leading deviation

@@ -3,13 +3,18 @@ package org.wellwright.solver.potential;
 import java.util.List;
 
 /**
- * Computes one central potential V(r; p) with its parameters bound to values, in the problem's own energy and length unit.
+ * Computes one central potential V(r; p) with its parameters bound to values, in the problem's own energy and length
+ * unit.
  *
- * <p>Implementations are immutable and safe for use by several threads. A value that overflows or is undefined is returned as it comes (±∞ or NaN); the
- * solver checks what it samples and refuses with the radius. At a break point the value from either side may be returned.
+ * <p>Implementations are immutable and safe for use by several threads. A value that overflows or is undefined is
+ * returned as it comes (±∞ or NaN); the solver checks what it samples and refuses with the radius. At a break point the
+ * value from either side may be returned.
  */
 public interface TermEvaluator {
-    /** Identity: two evaluators with equal texts compute the same bits. Numbers are written with {@link Double#toHexString}. */
+    /**
+     * Identity: two evaluators with equal texts compute the same bits. Numbers are written with
+     * {@link Double#toHexString}.
+     */
     String canonical();
 
     /** Number of parameters, 0 or more. */
@@ -18,7 +23,10 @@ public interface TermEvaluator {
     /** V(r), r > 0. */
     double value(double r);
 
-    /** V at {@code count} radii: {@code into[i] = V(radii[i])}; override where a loop over the whole array is faster, with the same bits. */
+    /**
+     * V at {@code count} radii: {@code into[i] = V(radii[i])}; override where a loop over the whole array is faster,
+     * with the same bits.
+     */
     default void values(double[] radii, double[] into, int count) {
         for (int i = 0; i < count; i++) {
             into[i] = value(radii[i]);
@@ -34,7 +42,10 @@ public interface TermEvaluator {
     /** Radii where V is not smooth, ascending. */
     List<BreakPoint> breakPoints();
 
-    /** An interval that surely contains V(r) for all r in [from, to], 0 < from ≤ to ≤ ∞; {@link Interval#ENTIRE} if unknown. */
+    /**
+     * An interval that surely contains V(r) for all r in [from, to], 0 < from ≤ to ≤ ∞; {@link Interval#ENTIRE} if
+     * unknown.
+     */
     Interval enclose(double from, double to);
 
     /** A bound on |computed V(r) − exact V(r)| due to rounding inside {@link #value}, ≥ 0. */

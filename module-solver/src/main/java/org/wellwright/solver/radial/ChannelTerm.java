@@ -4,7 +4,8 @@ import java.util.Objects;
 import org.wellwright.solver.potential.TermEvaluator;
 
 /**
- * A potential that acts in one channel only (row = column) or couples two of them (both elements of the symmetric matrix).
+ * A potential that acts in one channel only (row = column) or couples two of them (both elements of the symmetric
+ * matrix).
  *
  * @param row channel index, 0 ≤ row ≤ column
  * @param column channel index
@@ -15,7 +16,8 @@ public record ChannelTerm(int row, int column, TermEvaluator potential) {
     public ChannelTerm {
         Objects.requireNonNull(potential, "potential");
         if (row < 0 || column < row) {
-            throw new IllegalArgumentException("a channel term needs 0 <= row <= column, got %d, %d".formatted(row, column));
+            throw new IllegalArgumentException(
+                    "a channel term needs 0 <= row <= column, got %d, %d".formatted(row, column));
         }
     }
 }

@@ -1,9 +1,11 @@
 package org.wellwright.solver.radial;
 
 /**
- * dE/dp of one level for everything that a problem contains (Hellmann 1937; Feynman 1939), edges that move included. Immutable.
+ * dE/dp of one level for everything that a problem contains (Hellmann 1937; Feynman 1939), edges that move included.
+ * Immutable.
  *
- * <p>For a range end, step or well radius R: dE/dR = [V(R⁻) − V(R⁺)] Σ u(R)²; for a hard outer wall −κ Σ u′(R)², for a hard inner wall +κ Σ u′(R)².
+ * <p>For a range end, step or well radius R: dE/dR = [V(R⁻) − V(R⁺)] Σ u(R)²; for a hard outer wall −κ Σ u′(R)², for a
+ * hard inner wall +κ Σ u′(R)².
  */
 public final class EnergyGradient {
     private final double kinetic;
@@ -13,8 +15,12 @@ public final class EnergyGradient {
     private final double innerWall;
     private final double outerWall;
 
-    /** Copies all arrays: {@code common[j]} per parameter of the common potential, {@code rest[i][j]} per parameter of the i-th channel term. */
-    public EnergyGradient(double kinetic, double[] common, double[][] rest, double[] thresholds, double innerWall, double outerWall) {
+    /**
+     * Copies all arrays: {@code common[j]} per parameter of the common potential, {@code rest[i][j]} per parameter of
+     * the i-th channel term.
+     */
+    public EnergyGradient(
+            double kinetic, double[] common, double[][] rest, double[] thresholds, double innerWall, double outerWall) {
         this.kinetic = kinetic;
         this.common = common.clone();
         this.rest = new double[rest.length][];

@@ -36,8 +36,9 @@ public record Level(
     /** Checks the order of the three energies. */
     public Level {
         if (index < 0 || !(lower <= energy && energy <= upper)) {
-            throw new IllegalArgumentException("a level needs index >= 0 and lower <= energy <= upper, got %d, %s, %s, %s"
-                    .formatted(index, lower, energy, upper));
+            throw new IllegalArgumentException(
+                    "a level needs index >= 0 and lower <= energy <= upper, got %d, %s, %s, %s"
+                            .formatted(index, lower, energy, upper));
         }
     }
 

@@ -5,7 +5,8 @@ package org.wellwright.solver.radial;
  *
  * @param count the first {@code count} levels; {@link #ALL} for every one below {@code below}
  * @param below only levels below this energy; +∞ means below the lowest threshold
- * @param tolerance half-width of the bounds asked for, relative to max(|E|, ⟨T⟩ + ⟨|V|⟩); {@link #FULL} asks for the limit of the arithmetic
+ * @param tolerance half-width of the bounds asked for, relative to max(|E|, ⟨T⟩ + ⟨|V|⟩); {@link #FULL} asks for the
+ *     limit of the arithmetic
  */
 public record LevelSearch(int count, double below, double tolerance) {
     /** No limit on the number of levels. */
@@ -17,8 +18,9 @@ public record LevelSearch(int count, double below, double tolerance) {
     /** Checks the numbers. */
     public LevelSearch {
         if (count < 1 || Double.isNaN(below) || !(tolerance >= 0 && tolerance < 1)) {
-            throw new IllegalArgumentException("a search needs count >= 1, an energy and 0 <= tolerance < 1, got %d, %s, %s"
-                    .formatted(count, below, tolerance));
+            throw new IllegalArgumentException(
+                    "a search needs count >= 1, an energy and 0 <= tolerance < 1, got %d, %s, %s"
+                            .formatted(count, below, tolerance));
         }
     }
 

@@ -11,8 +11,9 @@ public record RadialChannel(int orbital, double centrifugal, double threshold) {
     /** Checks that the numbers are usable. */
     public RadialChannel {
         if (orbital < 0 || !Double.isFinite(centrifugal) || !Double.isFinite(threshold)) {
-            throw new IllegalArgumentException("a channel needs l >= 0 and finite numbers, got l = %d, centrifugal %s, threshold %s"
-                    .formatted(orbital, centrifugal, threshold));
+            throw new IllegalArgumentException(
+                    "a channel needs l >= 0 and finite numbers, got l = %d, centrifugal %s, threshold %s"
+                            .formatted(orbital, centrifugal, threshold));
         }
     }
 

@@ -21,7 +21,12 @@ import org.wellwright.solver.potential.TermEvaluator;
  * @param outerWall radius of a hard wall, or +∞
  */
 public record RadialProblem(
-        double kinetic, List<RadialChannel> channels, TermEvaluator common, List<ChannelTerm> rest, double innerWall, double outerWall) {
+        double kinetic,
+        List<RadialChannel> channels,
+        TermEvaluator common,
+        List<ChannelTerm> rest,
+        double innerWall,
+        double outerWall) {
 
     /** Checks the numbers and copies the lists. */
     public RadialProblem {
@@ -35,32 +40,46 @@ public record RadialProblem(
             throw new IllegalArgumentException("a problem needs at least one channel");
         }
         if (!(innerWall >= 0) || !(outerWall > innerWall)) {
-            throw new IllegalArgumentException("walls need 0 <= inner < outer, got %s, %s".formatted(innerWall, outerWall));
+            throw new IllegalArgumentException(
+                    "walls need 0 <= inner < outer, got %s, %s".formatted(innerWall, outerWall));
         }
         for (ChannelTerm term : rest) {
             if (term.column() >= channels.size()) {
-                throw new IllegalArgumentException("a channel term names channel %d of %d".formatted(term.column(), channels.size()));
+                throw new IllegalArgumentException(
+                        "a channel term names channel %d of %d".formatted(term.column(), channels.size()));
             }
         }
     }
 
     /** A single channel l from the origin to infinity. */
     public static RadialProblem single(double kinetic, int orbital, TermEvaluator potential) {
-        return new RadialProblem(kinetic, List.of(RadialChannel.of(orbital)), potential, List.of(), 0, Double.POSITIVE_INFINITY);
+        return new RadialProblem(
+                kinetic, List.of(RadialChannel.of(orbital)), potential, List.of(), 0, Double.POSITIVE_INFINITY);
     }
 
     /** The complete text of the problem; numbers are written exactly. */
     public String canonical() {
         StringBuilder text = new StringBuilder(160);
         text.append("kinetic ").append(Double.toHexString(kinetic));
-        text.append("\nwalls ").append(Double.toHexString(innerWall)).append(' ').append(Double.toHexString(outerWall));
+        text.append("\nwalls ")
+                .append(Double.toHexString(innerWall))
+                .append(' ')
+                .append(Double.toHexString(outerWall));
         for (RadialChannel channel : channels) {
-            text.append("\nchannel ").append(channel.orbital()).append(' ').append(Double.toHexString(channel.centrifugal()));
+            text.append("\nchannel ")
+                    .append(channel.orbital())
+                    .append(' ')
+                    .append(Double.toHexString(channel.centrifugal()));
             text.append(' ').append(Double.toHexString(channel.threshold()));
         }
         text.append("\ncommon ").append(common.canonical());
         for (ChannelTerm term : rest) {
-            text.append("\nterm ").append(term.row()).append(' ').append(term.column()).append(' ').append(term.potential().canonical());
+            text.append("\nterm ")
+                    .append(term.row())
+                    .append(' ')
+                    .append(term.column())
+                    .append(' ')
+                    .append(term.potential().canonical());
         }
         return text.toString();
     }
@@ -68,7 +87,8 @@ public record RadialProblem(
     /** SHA-256 of {@link #canonical}, 64 hexadecimal digits. */
     public String digest() {
         try {
-            byte[] hash = MessageDigest.getInstance("SHA-256").digest(canonical().getBytes(StandardCharsets.UTF_8));
+            byte[] hash =
+                    MessageDigest.getInstance("SHA-256").digest(canonical().getBytes(StandardCharsets.UTF_8));
             return HexFormat.of().formatHex(hash);
         } catch (NoSuchAlgorithmException e) {
             throw new IllegalStateException("every Java platform has SHA-256", e);

@@ -1,6 +1,9 @@
 package org.wellwright.solver.radial;
 
-/** A method that finds the levels of a {@link RadialProblem}. Implementations are immutable and depend on nothing but their arguments. */
+/**
+ * A method that finds the levels of a {@link RadialProblem}. Implementations are immutable and depend on nothing but
+ * their arguments.
+ */
 public interface RadialSolver {
     /** Name of the method for reports. */
     String method();
@@ -8,8 +11,8 @@ public interface RadialSolver {
     /**
      * Finds levels.
      *
-     * @throws org.wellwright.solver.InvalidModelException if the problem has no answer: an endless series without a count, a fall to the centre
-     *     (names l), V not finite at a radius
+     * @throws org.wellwright.solver.InvalidModelException if the problem has no answer: an endless series without a
+     *     count, a fall to the centre (names l), V not finite at a radius
      * @throws org.wellwright.solver.SolverException if nothing could be computed
      * @throws java.util.concurrent.CancellationException if the monitor says so
      */

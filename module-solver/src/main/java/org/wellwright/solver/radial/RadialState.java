@@ -3,9 +3,11 @@ package org.wellwright.solver.radial;
 import java.util.function.DoubleUnaryOperator;
 
 /**
- * The reduced radial functions u_c(r) of one bound level, one per channel, with ∫ Σ_c u_c² dr = 1. Immutable, thread-safe.
+ * The reduced radial functions u_c(r) of one bound level, one per channel, with ∫ Σ_c u_c² dr = 1. Immutable,
+ * thread-safe.
  *
- * <p>Beyond {@link #outerRadius()} u is below what the level's bounds can see; values there follow the decay and may be 0.
+ * <p>Beyond {@link #outerRadius()} u is below what the level's bounds can see; values there follow the decay and may be
+ * 0.
  */
 public interface RadialState {
     /** The problem it solves. */
@@ -29,7 +31,10 @@ public interface RadialState {
     /** Edges of the mesh elements in ascending order (a copy); u is a polynomial (or r^s times one) in each. */
     double[] elementEdges();
 
-    /** ∫ weight(r) Σ_c u_c(r)² dr; the weight may be singular at 0 as long as the integral exists, ~r^k with k > −(2l+3). */
+    /**
+     * ∫ weight(r) Σ_c u_c(r)² dr; the weight may be singular at 0 as long as the integral exists, ~r^k with k >
+     * −(2l+3).
+     */
     double expectation(DoubleUnaryOperator weight);
 
     /** ∫ weight(r) u_c(r) v_d(r) dr with a state v of this or another problem, whatever its mesh. */

@@ -5,7 +5,9 @@ import java.util.List;
 import java.util.Objects;
 import java.util.OptionalInt;
 
-/** The levels of one problem in the order of energy, with their states and the evidence that none was missed. Immutable. */
+/**
+ * The levels of one problem in the order of energy, with their states and the evidence that none was missed. Immutable.
+ */
 public final class Spectrum {
     private final RadialProblem problem;
     private final LevelSearch search;
@@ -29,7 +31,8 @@ public final class Spectrum {
      * A spectrum.
      *
      * @param outcomes one per wanted level, by index
-     * @param states the state of each outcome that is a {@link Level}, in the same order; empty if the method makes none
+     * @param states the state of each outcome that is a {@link Level}, in the same order; empty if the method makes
+     *     none
      * @param searchedBelow every level below this energy is among the outcomes
      * @param message why the spectrum is not complete, or what the user should know; empty as a rule
      */

@@ -5,8 +5,8 @@ import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
 /**
- * The solver as the rest of the application sees it: {@code Lookup.getDefault().lookup(SolverService.class)}. Another module may register its own.
- * Thread-safe.
+ * The solver as the rest of the application sees it: {@code Lookup.getDefault().lookup(SolverService.class)}. Another
+ * module may register its own. Thread-safe.
  */
 public interface SolverService {
     /** Identifier for options and run records. */
@@ -21,12 +21,16 @@ public interface SolverService {
     /**
      * Solves one problem; equal requests give equal bits on one machine.
      *
-     * @throws org.wellwright.solver.InvalidModelException if the problem has no answer; see {@link org.wellwright.solver.radial.RadialSolver#solve}
+     * @throws org.wellwright.solver.InvalidModelException if the problem has no answer; see
+     *     {@link org.wellwright.solver.radial.RadialSolver#solve}
      * @throws org.wellwright.solver.SolverException if nothing could be computed, or the second method disputes a digit
      * @throws java.util.concurrent.CancellationException if the monitor says so
      */
     Spectrum solve(SolveRequest request, SolveMonitor monitor);
 
-    /** Solves independent problems on all cores; the i-th result belongs to the i-th request. Fails as {@link #solve} does, with the first fault in order. */
+    /**
+     * Solves independent problems on all cores; the i-th result belongs to the i-th request. Fails as {@link #solve}
+     * does, with the first fault in order.
+     */
     List<Spectrum> solveAll(List<SolveRequest> requests, SolveMonitor monitor);
 }

@@ -1,0 +1,46 @@
+package org.wellwright.solver.model;
+
+import java.util.Objects;
+import org.wellwright.solver.units.ExactNumber;
+
+/**
+ * One adjustable number of a parameter, in the parameter's unit.
+ *
+ * @param value its value
+ * @param free whether a fit may change it
+ * @param lower lower bound, or null
+ * @param upper upper bound, or null
+ * @param prior what is known of it from elsewhere, or null
+ */
+public record Setting(ExactNumber value, boolean free, ExactNumber lower, ExactNumber upper, Prior prior) {
+    /** Checks that the value lies within its bounds. */
+    public Setting {
+        Objects.requireNonNull(value, "value");
+        if (lower != null && upper != null && !(lower.value() < upper.value())) {
+            throw new IllegalArgumentException("bounds need lower < upper, got %s, %s".formatted(lower, upper));
+        }
+        if (lower != null && value.value() < lower.value() || upper != null && value.value() > upper.value()) {
+            throw new IllegalArgumentException("the value %s lies outside its bounds".formatted(value));
+        }
+    }
+
+    /** A number that a fit leaves alone. */
+    public static Setting fixed(ExactNumber value) {
+        return new Setting(value, false, null, null, null);
+    }
+
+    /** A number that a fit may change, without bounds. */
+    public static Setting free(ExactNumber value) {
+        return new Setting(value, true, null, null, null);
+    }
+
+    /** The same with another value. */
+    public Setting withValue(ExactNumber newValue) {
+        return new Setting(newValue, free, lower, upper, prior);
+    }
+
+    /** The same, free or fixed. */
+    public Setting withFree(boolean nowFree) {
+        return new Setting(value, nowFree, lower, upper, prior);
+    }
+}
