@@ -1,10 +1,11 @@
 package org.wellwright.solver.angular;
 
 /**
- * Coupling coefficients as doubles, to a few units of the last place whatever their size: the alternating sums are done in integers.
+ * Coupling coefficients as doubles, to a few units of the last place whatever their size: the alternating sums are done
+ * in integers.
  *
- * <p>All arguments are twice the quantum number. A coefficient that a selection rule forbids is 0. Definitions: Edmonds (1957), eqs. 3.6.10 (⟨..|..⟩),
- * 3.7.3 (3j), 6.2.2 (6j), 6.4.3 (9j). Every triad must have j₁ + j₂ + j₃ below 999.
+ * <p>All arguments are twice the quantum number. A coefficient that a selection rule forbids is 0. Definitions: Edmonds
+ * (1957), eqs. 3.6.10 (⟨..|..⟩), 3.7.3 (3j), 6.2.2 (6j), 6.4.3 (9j). Every triad must have j₁ + j₂ + j₃ below 999.
  */
 public final class Coupling {
     private Coupling() {}
@@ -14,7 +15,8 @@ public final class Coupling {
      *
      * @throws IllegalArgumentException if a j is negative or too large
      */
-    public static double clebschGordan(int twiceJ1, int twiceM1, int twiceJ2, int twiceM2, int twiceTotal, int twiceTotalM) {
+    public static double clebschGordan(
+            int twiceJ1, int twiceM1, int twiceJ2, int twiceM2, int twiceTotal, int twiceTotalM) {
         double symbol = threeJ(twiceJ1, twiceJ2, twiceTotal, twiceM1, twiceM2, -twiceTotalM);
         return symbol == 0 ? 0 : sign(twiceJ1 - twiceJ2 + twiceTotalM) * Math.sqrt(twiceTotal + 1.0) * symbol;
     }
@@ -42,17 +44,28 @@ public final class Coupling {
     }
 
     /**
-     * The 9j symbol with rows (j₁ j₂ j₃), (j₄ j₅ j₆), (j₇ j₈ j₉), as a sum of products of three 6j symbols; absolute error about 1e-16.
+     * The 9j symbol with rows (j₁ j₂ j₃), (j₄ j₅ j₆), (j₇ j₈ j₉), as a sum of products of three 6j symbols; absolute
+     * error about 1e-16.
      *
      * @throws IllegalArgumentException if a j is negative or too large
      */
     public static double nineJ(
-            int twiceJ1, int twiceJ2, int twiceJ3, int twiceJ4, int twiceJ5, int twiceJ6, int twiceJ7, int twiceJ8, int twiceJ9) {
+            int twiceJ1,
+            int twiceJ2,
+            int twiceJ3,
+            int twiceJ4,
+            int twiceJ5,
+            int twiceJ6,
+            int twiceJ7,
+            int twiceJ8,
+            int twiceJ9) {
         check(twiceJ1, twiceJ2, twiceJ3, twiceJ4, twiceJ5, twiceJ6, twiceJ7, twiceJ8, twiceJ9);
-        if (!ExactCoupling.nineTriangles(twiceJ1, twiceJ2, twiceJ3, twiceJ4, twiceJ5, twiceJ6, twiceJ7, twiceJ8, twiceJ9)) {
+        if (!ExactCoupling.nineTriangles(
+                twiceJ1, twiceJ2, twiceJ3, twiceJ4, twiceJ5, twiceJ6, twiceJ7, twiceJ8, twiceJ9)) {
             return 0;
         }
-        int from = Math.max(Math.abs(twiceJ1 - twiceJ9), Math.max(Math.abs(twiceJ4 - twiceJ8), Math.abs(twiceJ2 - twiceJ6)));
+        int from = Math.max(
+                Math.abs(twiceJ1 - twiceJ9), Math.max(Math.abs(twiceJ4 - twiceJ8), Math.abs(twiceJ2 - twiceJ6)));
         int to = Math.min(twiceJ1 + twiceJ9, Math.min(twiceJ4 + twiceJ8, twiceJ2 + twiceJ6));
         double sum = 0;
         for (int x = from; x <= to; x += 2) {
@@ -82,7 +95,8 @@ public final class Coupling {
     static void check(int... twice) {
         for (int j : twice) {
             if (j < 0 || 3 * j / 2 >= RacahSum.LARGEST) {
-                throw new IllegalArgumentException("twice an angular momentum must be 0 to %d, got %d".formatted(2 * RacahSum.LARGEST / 3, j));
+                throw new IllegalArgumentException(
+                        "twice an angular momentum must be 0 to %d, got %d".formatted(2 * RacahSum.LARGEST / 3, j));
             }
         }
     }

@@ -8,10 +8,13 @@ public final class ExactCoupling {
     private ExactCoupling() {}
 
     /** The Clebsch–Gordan coefficient ⟨j₁m₁j₂m₂|JM⟩. */
-    public static RootOfRational clebschGordan(int twiceJ1, int twiceM1, int twiceJ2, int twiceM2, int twiceTotal, int twiceTotalM) {
+    public static RootOfRational clebschGordan(
+            int twiceJ1, int twiceM1, int twiceJ2, int twiceM2, int twiceTotal, int twiceTotalM) {
         RootOfRational symbol = threeJ(twiceJ1, twiceJ2, twiceTotal, twiceM1, twiceM2, -twiceTotalM);
-        return symbol.sign() == 0 ? symbol : new RootOfRational(symbol.signedSquare()
-                .multiply(Coupling.sign(twiceJ1 - twiceJ2 + twiceTotalM) * (twiceTotal + 1)));
+        return symbol.sign() == 0
+                ? symbol
+                : new RootOfRational(symbol.signedSquare()
+                        .multiply(Coupling.sign(twiceJ1 - twiceJ2 + twiceTotalM) * (twiceTotal + 1)));
     }
 
     /** The 3j symbol (j₁ j₂ j₃; m₁ m₂ m₃). */

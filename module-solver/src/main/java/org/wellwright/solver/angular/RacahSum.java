@@ -4,10 +4,11 @@ import java.math.BigInteger;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * A coupling coefficient as √(Π over! / Π under!) · sum with an exact integer sum, which alternates and would lose all digits in floating arithmetic.
+ * A coupling coefficient as √(Π over! / Π under!) · sum with an exact integer sum, which alternates and would lose all
+ * digits in floating arithmetic.
  *
- * <p>Racah's sums (Racah 1942, eqs. 15 and 36) written with binomials, so that every term is an integer (Wei 1999); each term follows from the one before
- * by an exact ratio of small integers.
+ * <p>Racah's sums (Racah 1942, eqs. 15 and 36) written with binomials, so that every term is an integer (Wei 1999);
+ * each term follows from the one before by an exact ratio of small integers.
  */
 final class RacahSum {
     /** Largest argument of a factorial: j₁ + j₂ + j₃ + 1 of any triad. */
@@ -45,7 +46,11 @@ final class RacahSum {
 
     /** The 3j symbol (all arguments doubled), or null where a selection rule makes it 0. */
     static RacahSum threeJ(int j1, int j2, int j3, int m1, int m2, int m3) {
-        if (m1 + m2 + m3 != 0 || !triangle(j1, j2, j3) || !projection(j1, m1) || !projection(j2, m2) || !projection(j3, m3)) {
+        if (m1 + m2 + m3 != 0
+                || !triangle(j1, j2, j3)
+                || !projection(j1, m1)
+                || !projection(j2, m2)
+                || !projection(j3, m3)) {
             return null;
         }
         int a = (j1 + j2 - j3) / 2;
@@ -76,9 +81,21 @@ final class RacahSum {
         if (!triangle(a, b, c) || !triangle(a, e, f) || !triangle(d, b, f) || !triangle(d, e, c)) {
             return null;
         }
-        int[] over = {half(a, e, -f), half(a, -e, f), half(-a, e, f), half(d, b, -f), half(d, -b, f), half(-d, b, f), half(d, e, -c), half(d, -e, c),
-            half(-d, e, c), half(a, b, c) + 1};
-        int[] under = {half(a, e, f) + 1, half(d, b, f) + 1, half(d, e, c) + 1, half(a, b, -c), half(a, -b, c), half(-a, b, c)};
+        int[] over = {
+            half(a, e, -f),
+            half(a, -e, f),
+            half(-a, e, f),
+            half(d, b, -f),
+            half(d, -b, f),
+            half(-d, b, f),
+            half(d, e, -c),
+            half(d, -e, c),
+            half(-d, e, c),
+            half(a, b, c) + 1
+        };
+        int[] under = {
+            half(a, e, f) + 1, half(d, b, f) + 1, half(d, e, c) + 1, half(a, b, -c), half(a, -b, c), half(-a, b, c)
+        };
         return new RacahSum(over, under, sixJSum(a, b, c, d, e, f));
     }
 
@@ -110,7 +127,8 @@ final class RacahSum {
 
     /** Δ²(abc) = (a+b−c)! (a−b+c)! (−a+b+c)! / (a+b+c+1)!, arguments doubled. */
     static BigFraction deltaSquared(int a, int b, int c) {
-        BigInteger over = factorial(half(a, b, -c)).multiply(factorial(half(a, -b, c))).multiply(factorial(half(-a, b, c)));
+        BigInteger over =
+                factorial(half(a, b, -c)).multiply(factorial(half(a, -b, c))).multiply(factorial(half(-a, b, c)));
         return new BigFraction(over, factorial(half(a, b, c) + 1));
     }
 

@@ -3,10 +3,11 @@ package org.wellwright.solver.angular;
 import org.apache.commons.math3.complex.Complex;
 
 /**
- * Rotation matrices of angular momentum: d^j_{m'm}(β) = ⟨jm'|e^{−iβJ_y}|jm⟩ and D^j_{m'm}(α, β, γ) = e^{−im'α} d^j_{m'm}(β) e^{−imγ}.
+ * Rotation matrices of angular momentum: d^j_{m'm}(β) = ⟨jm'|e^{−iβJ_y}|jm⟩ and D^j_{m'm}(α, β, γ) = e^{−im'α}
+ * d^j_{m'm}(β) e^{−imγ}.
  *
- * <p>d rises from j = max(|m|, |m'|) by its three-term recurrence in j (Varshalovich, Moskalev and Khersonskii 1988, sec. 4.8); β may be any real angle.
- * Quantum numbers are passed doubled.
+ * <p>d rises from j = max(|m|, |m'|) by its three-term recurrence in j (Varshalovich, Moskalev and Khersonskii 1988,
+ * sec. 4.8); β may be any real angle. Quantum numbers are passed doubled.
  */
 public final class Rotations {
     private Rotations() {}
@@ -103,7 +104,8 @@ public final class Rotations {
 
     private static void check(int twiceJ, int twiceM) {
         if (twiceJ < 0 || Math.abs(twiceM) > twiceJ || (twiceJ - twiceM) % 2 != 0) {
-            throw new IllegalArgumentException("a projection must be one of -j, -j+1, ..., j, got 2j = %d, 2m = %d".formatted(twiceJ, twiceM));
+            throw new IllegalArgumentException(
+                    "a projection must be one of -j, -j+1, ..., j, got 2j = %d, 2m = %d".formatted(twiceJ, twiceM));
         }
     }
 }

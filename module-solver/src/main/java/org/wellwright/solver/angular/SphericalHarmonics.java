@@ -3,11 +3,12 @@ package org.wellwright.solver.angular;
 import org.apache.commons.math3.complex.Complex;
 
 /**
- * Spherical harmonics Y_lm(θ, φ) = Θ_lm(θ) e^{imφ} with ∫|Y|² dΩ = 1 and the phase of Condon and Shortley, and their real combinations.
+ * Spherical harmonics Y_lm(θ, φ) = Θ_lm(θ) e^{imφ} with ∫|Y|² dΩ = 1 and the phase of Condon and Shortley, and their
+ * real combinations.
  *
- * <p>Θ_lm rises from l = |m| by the three-term recurrence of the normalised associated Legendre functions (Holmes and Featherstone 2002, eq. 11). The start
- * Θ_mm ∝ sin^m θ is kept as mantissa and exponent, so nothing overflows and nothing underflows before the end. Relative error about (l + |m|)·2e-16 of the
- * largest value near by.
+ * <p>Θ_lm rises from l = |m| by the three-term recurrence of the normalised associated Legendre functions (Holmes and
+ * Featherstone 2002, eq. 11). The start Θ_mm ∝ sin^m θ is kept as mantissa and exponent, so nothing overflows and
+ * nothing underflows before the end. Relative error about (l + |m|)·2e-16 of the largest value near by.
  */
 public final class SphericalHarmonics {
     private static final double ROOT_HALF_OVER_PI = 0.5 / Math.sqrt(Math.PI);
@@ -26,14 +27,16 @@ public final class SphericalHarmonics {
     public static double polar(int orbital, int magnetic, double cosine, double sine) {
         int m = Math.abs(magnetic);
         if (m > orbital) {
-            throw new IllegalArgumentException("a spherical harmonic needs |m| <= l, got l = %d, m = %d".formatted(orbital, magnetic));
+            throw new IllegalArgumentException(
+                    "a spherical harmonic needs |m| <= l, got l = %d, m = %d".formatted(orbital, magnetic));
         }
         double before = 0;
         double here = 1;
         for (int l = m + 1; l <= orbital; l++) {
             double top = (double) l * l - (double) m * m;
             double last = (l - 1.0) * (l - 1.0) - (double) m * m;
-            double next = Math.sqrt((4.0 * l * l - 1) / top) * (cosine * here - Math.sqrt(last / (4 * (l - 1.0) * (l - 1.0) - 1)) * before);
+            double next = Math.sqrt((4.0 * l * l - 1) / top)
+                    * (cosine * here - Math.sqrt(last / (4 * (l - 1.0) * (l - 1.0) - 1)) * before);
             before = here;
             here = next;
         }
@@ -58,8 +61,8 @@ public final class SphericalHarmonics {
     }
 
     /**
-     * The real spherical harmonic: √2 |Θ| cos mφ for m > 0, Θ_l0 for m = 0, √2 |Θ| sin |m|φ for m < 0, with the sign that makes l = 1 the
-     * functions √(3/4π) x/r (m = 1), y/r (m = −1) and z/r (m = 0).
+     * The real spherical harmonic: √2 |Θ| cos mφ for m > 0, Θ_l0 for m = 0, √2 |Θ| sin |m|φ for m < 0, with the sign
+     * that makes l = 1 the functions √(3/4π) x/r (m = 1), y/r (m = −1) and z/r (m = 0).
      *
      * @throws IllegalArgumentException if |m| > l
      */

@@ -15,18 +15,23 @@ public final class SpinOperators {
     }
 
     /**
-     * ⟨(L'S)J|S₁₂|(LS)J⟩ of the tensor operator S₁₂ = 2[3(S·n)² − S²], which for two spins ½ is 3(σ₁·n)(σ₂·n) − σ₁·σ₂; 0 for S < 1 or where
-     * L' − L is odd.
+     * ⟨(L'S)J|S₁₂|(LS)J⟩ of the tensor operator S₁₂ = 2[3(S·n)² − S²], which for two spins ½ is 3(σ₁·n)(σ₂·n) − σ₁·σ₂;
+     * 0 for S < 1 or where L' − L is odd.
      *
-     * <p>S₁₂ = 2√6 [S⊗S]⁽²⁾·C⁽²⁾, evaluated by Edmonds (1957), eqs. 5.4.1, 5.4.5, 7.1.1 and 7.1.6. Not defined by this for states whose S differs.
+     * <p>S₁₂ = 2√6 [S⊗S]⁽²⁾·C⁽²⁾, evaluated by Edmonds (1957), eqs. 5.4.1, 5.4.5, 7.1.1 and 7.1.6. Not defined by this
+     * for states whose S differs.
      */
     public static double tensor(int orbitalPrime, int orbital, int twiceSpin, int twiceTotal) {
         int l1 = 2 * orbitalPrime;
         int l2 = 2 * orbital;
         double spin = casimir(twiceSpin) * (twiceSpin + 1);
-        double spinTensor = Coupling.sign(2 * twiceSpin) * Math.sqrt(5) * Coupling.sixJ(2, 2, 4, twiceSpin, twiceSpin, twiceSpin) * spin;
+        double spinTensor = Coupling.sign(2 * twiceSpin)
+                * Math.sqrt(5)
+                * Coupling.sixJ(2, 2, 4, twiceSpin, twiceSpin, twiceSpin)
+                * spin;
         double harmonic = Coupling.sign(l1) * Math.sqrt((l1 + 1.0) * (l2 + 1.0)) * Coupling.threeJ(l1, 4, l2, 0, 0, 0);
-        double recoupling = Coupling.sign(l2 + twiceSpin + twiceTotal) * Coupling.sixJ(twiceTotal, twiceSpin, l1, 4, l2, twiceSpin);
+        double recoupling =
+                Coupling.sign(l2 + twiceSpin + twiceTotal) * Coupling.sixJ(twiceTotal, twiceSpin, l1, 4, l2, twiceSpin);
         return 2 * Math.sqrt(6) * recoupling * harmonic * spinTensor;
     }
 

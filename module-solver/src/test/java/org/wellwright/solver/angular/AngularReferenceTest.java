@@ -15,7 +15,9 @@ class AngularReferenceTest {
     void agreesWithPublishedValues(String id, String function, String arguments, BigDecimal value) {
         assertThat(evaluate(function, arguments)).as(id).isCloseTo(value.doubleValue(), within(4e-15));
         if (function.endsWith("J") || function.equals("clebschGordan")) {
-            assertThat(exact(function, arguments).decimal().subtract(value).abs()).as(id).isLessThan(new BigDecimal("1e-25"));
+            assertThat(exact(function, arguments).decimal().subtract(value).abs())
+                    .as(id)
+                    .isLessThan(new BigDecimal("1e-25"));
         }
     }
 
@@ -24,12 +26,16 @@ class AngularReferenceTest {
     void agreesWithExactArithmeticAtLargeQuantumNumbers(String function, String arguments, BigDecimal value) {
         double size = Math.abs(value.doubleValue());
         if (function.equals("smallD")) {
-            // Oscillating values are known to 2j rounding errors of the largest one, 1; decaying ones relative to themselves.
-            assertThat(evaluate(function, arguments)).isCloseTo(value.doubleValue(), within(Math.min(3e-14, 3e-13 * size)));
+            // Oscillating values are known to 2j rounding errors of the largest one, 1; decaying ones relative to
+            // themselves.
+            assertThat(evaluate(function, arguments))
+                    .isCloseTo(value.doubleValue(), within(Math.min(3e-14, 3e-13 * size)));
             return;
         }
-        assertThat(evaluate(function, arguments)).isCloseTo(value.doubleValue(), within(function.equals("nineJ") ? 2e-17 : 4e-15 * size));
-        assertThat(exact(function, arguments).decimal().subtract(value).abs().doubleValue()).isLessThan(1e-23 * size);
+        assertThat(evaluate(function, arguments))
+                .isCloseTo(value.doubleValue(), within(function.equals("nineJ") ? 2e-17 : 4e-15 * size));
+        assertThat(exact(function, arguments).decimal().subtract(value).abs().doubleValue())
+                .isLessThan(1e-23 * size);
     }
 
     @ParameterizedTest
@@ -46,13 +52,17 @@ class AngularReferenceTest {
         return switch (function) {
             case "threeJ" -> Coupling.threeJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
             case "sixJ" -> Coupling.sixJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
-            case "nineJ" -> Coupling.nineJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]), d(a[6]), d(a[7]), d(a[8]));
+            case "nineJ" ->
+                Coupling.nineJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]), d(a[6]), d(a[7]), d(a[8]));
             case "clebschGordan" -> Coupling.clebschGordan(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
             case "gaunt" -> Coupling.gaunt((int) a[0], (int) a[1], (int) a[2], (int) a[3], (int) a[4], (int) a[5]);
             case "smallD" -> Rotations.smallD(d(a[0]), d(a[1]), d(a[2]), a[3]);
-            case "bigDReal" -> Rotations.bigD(d(a[0]), d(a[1]), d(a[2]), a[3], a[4], a[5]).getReal();
-            case "harmonicReal" -> SphericalHarmonics.complex((int) a[0], (int) a[1], a[2], a[3]).getReal();
-            case "harmonicImaginary" -> SphericalHarmonics.complex((int) a[0], (int) a[1], a[2], a[3]).getImaginary();
+            case "bigDReal" ->
+                Rotations.bigD(d(a[0]), d(a[1]), d(a[2]), a[3], a[4], a[5]).getReal();
+            case "harmonicReal" ->
+                SphericalHarmonics.complex((int) a[0], (int) a[1], a[2], a[3]).getReal();
+            case "harmonicImaginary" ->
+                SphericalHarmonics.complex((int) a[0], (int) a[1], a[2], a[3]).getImaginary();
             case "spinOrbit" -> SpinOperators.spinOrbit((int) a[0], d(a[1]), d(a[2]));
             case "tensor" -> SpinOperators.tensor((int) a[0], (int) a[1], d(a[2]), d(a[3]));
             default -> throw new AssertionError("no function " + function);
@@ -64,14 +74,17 @@ class AngularReferenceTest {
         return switch (function) {
             case "threeJ" -> ExactCoupling.threeJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
             case "sixJ" -> ExactCoupling.sixJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
-            case "nineJ" -> ExactCoupling.nineJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]), d(a[6]), d(a[7]), d(a[8]));
+            case "nineJ" ->
+                ExactCoupling.nineJ(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]), d(a[6]), d(a[7]), d(a[8]));
             case "clebschGordan" -> ExactCoupling.clebschGordan(d(a[0]), d(a[1]), d(a[2]), d(a[3]), d(a[4]), d(a[5]));
             default -> throw new AssertionError("no exact function " + function);
         };
     }
 
     private static double[] numbers(String arguments) {
-        return Arrays.stream(arguments.split(" ")).mapToDouble(Double::parseDouble).toArray();
+        return Arrays.stream(arguments.split(" "))
+                .mapToDouble(Double::parseDouble)
+                .toArray();
     }
 
     private static int d(double quantumNumber) {

@@ -20,7 +20,8 @@ class CouplingTest {
             int m = Math.min(total, other) - 2 * random.nextInt(Math.min(total, other) + 1);
             double sum = 0;
             for (int m1 = -j1; m1 <= j1; m1 += 2) {
-                sum += Coupling.clebschGordan(j1, m1, j2, m - m1, total, m) * Coupling.clebschGordan(j1, m1, j2, m - m1, other, m);
+                sum += Coupling.clebschGordan(j1, m1, j2, m - m1, total, m)
+                        * Coupling.clebschGordan(j1, m1, j2, m - m1, other, m);
             }
             assertThat(sum).as("%d %d %d %d", j1, j2, total, other).isCloseTo(total == other ? 1 : 0, within(1e-13));
         }
@@ -78,7 +79,9 @@ class CouplingTest {
         int c = 20;
         int d = 33;
         int f = 15;
-        double expected = ((b + c + e + f) / 2 % 2 == 0 ? 1 : -1) * Coupling.sixJ(a, b, e, d, c, f) / Math.sqrt((e + 1.0) * (f + 1.0));
+        double expected = ((b + c + e + f) / 2 % 2 == 0 ? 1 : -1)
+                * Coupling.sixJ(a, b, e, d, c, f)
+                / Math.sqrt((e + 1.0) * (f + 1.0));
         assertThat(expected).isNotZero();
         assertThat(Coupling.nineJ(a, b, e, c, d, e, f, f, 0)).isCloseTo(expected, within(1e-17));
         assertThat(ExactCoupling.nineJ(a, b, e, c, d, e, f, f, 0).value()).isCloseTo(expected, within(1e-17));
@@ -96,15 +99,21 @@ class CouplingTest {
 
     @Test
     void refusesNegativeAndTooLargeNamingTheValue() {
-        assertThatThrownBy(() -> Coupling.threeJ(-2, 2, 2, 0, 0, 0)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("-2");
-        assertThatThrownBy(() -> Coupling.sixJ(2, 2, 2, 2, 2, 5000)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("5000");
+        assertThatThrownBy(() -> Coupling.threeJ(-2, 2, 2, 0, 0, 0))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("-2");
+        assertThatThrownBy(() -> Coupling.sixJ(2, 2, 2, 2, 2, 5000))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("5000");
     }
 
     @Test
     void exactValuesAreReadable() {
         assertThat(ExactCoupling.threeJ(4, 4, 4, 0, 0, 0)).hasToString("-sqrt(2/35)");
         assertThat(ExactCoupling.sixJ(2, 2, 2, 2, 2, 2)).hasToString("1/6");
-        assertThat(ExactCoupling.clebschGordan(2, 2, 1, -1, 1, 1).times(ExactCoupling.clebschGordan(2, 2, 1, -1, 1, 1)).square())
+        assertThat(ExactCoupling.clebschGordan(2, 2, 1, -1, 1, 1)
+                        .times(ExactCoupling.clebschGordan(2, 2, 1, -1, 1, 1))
+                        .square())
                 .isEqualTo(new BigFraction(4, 9));
     }
 

@@ -25,7 +25,9 @@ class RotationsTest {
             for (int m = -j; m <= j; m += 2) {
                 sum += Rotations.smallD(j, first, m, beta) * Rotations.smallD(j, second, m, beta);
             }
-            assertThat(sum).as("2j = %d, rows %d %d, beta %s", j, first, second, beta).isCloseTo(first == second ? 1 : 0, within(1e-13));
+            assertThat(sum)
+                    .as("2j = %d, rows %d %d, beta %s", j, first, second, beta)
+                    .isCloseTo(first == second ? 1 : 0, within(1e-13));
         }
     }
 
@@ -48,8 +50,10 @@ class RotationsTest {
 
     @Test
     void aFullTurnChangesTheSignOfHalfIntegerSpin() {
-        assertThat(Rotations.smallD(3, 3, 1, 0.4 + 2 * Math.PI)).isCloseTo(-Rotations.smallD(3, 3, 1, 0.4), within(1e-15));
-        assertThat(Rotations.smallD(4, 4, 2, 0.4 + 2 * Math.PI)).isCloseTo(Rotations.smallD(4, 4, 2, 0.4), within(1e-15));
+        assertThat(Rotations.smallD(3, 3, 1, 0.4 + 2 * Math.PI))
+                .isCloseTo(-Rotations.smallD(3, 3, 1, 0.4), within(1e-15));
+        assertThat(Rotations.smallD(4, 4, 2, 0.4 + 2 * Math.PI))
+                .isCloseTo(Rotations.smallD(4, 4, 2, 0.4), within(1e-15));
     }
 
     @Test
@@ -66,7 +70,8 @@ class RotationsTest {
             Vector3D back = rotation.applyInverseTo(point);
             Complex sum = Complex.ZERO;
             for (int k = -l; k <= l; k++) {
-                sum = sum.add(Rotations.bigD(2 * l, 2 * k, 2 * m, alpha, beta, gamma).multiply(at(l, k, point)));
+                sum = sum.add(
+                        Rotations.bigD(2 * l, 2 * k, 2 * m, alpha, beta, gamma).multiply(at(l, k, point)));
             }
             assertThat(sum.subtract(at(l, m, back)).abs()).as("l %d m %d", l, m).isLessThan(1e-12);
         }
@@ -74,8 +79,12 @@ class RotationsTest {
 
     @Test
     void refusesAProjectionOutOfStepNamingIt() {
-        assertThatThrownBy(() -> Rotations.smallD(3, 2, 1, 0.1)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("2m = 2");
-        assertThatThrownBy(() -> Rotations.smallD(2, 4, 0, 0.1)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("2m = 4");
+        assertThatThrownBy(() -> Rotations.smallD(3, 2, 1, 0.1))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("2m = 2");
+        assertThatThrownBy(() -> Rotations.smallD(2, 4, 0, 0.1))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("2m = 4");
     }
 
     private static Complex at(int l, int m, Vector3D point) {

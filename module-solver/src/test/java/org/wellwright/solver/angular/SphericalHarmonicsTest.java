@@ -18,8 +18,10 @@ class SphericalHarmonicsTest {
             int m = random.nextInt(200);
             int first = m + random.nextInt(201 - m);
             int second = trial % 2 == 0 ? first : m + random.nextInt(201 - m);
-            double integral = 2 * Math.PI * rule.integrate(x -> SphericalHarmonics.polar(first, m, x, Math.sqrt((1 - x) * (1 + x)))
-                    * SphericalHarmonics.polar(second, m, x, Math.sqrt((1 - x) * (1 + x))));
+            double integral = 2
+                    * Math.PI
+                    * rule.integrate(x -> SphericalHarmonics.polar(first, m, x, Math.sqrt((1 - x) * (1 + x)))
+                            * SphericalHarmonics.polar(second, m, x, Math.sqrt((1 - x) * (1 + x))));
             assertThat(integral).as("l %d %d m %d", first, second, m).isCloseTo(first == second ? 1 : 0, within(1e-12));
         }
     }
@@ -46,8 +48,10 @@ class SphericalHarmonicsTest {
         double theta = 0.9;
         double phi = 2.1;
         double root = Math.sqrt(3 / (4 * Math.PI));
-        assertThat(SphericalHarmonics.real(1, 1, theta, phi)).isCloseTo(root * Math.sin(theta) * Math.cos(phi), within(1e-15));
-        assertThat(SphericalHarmonics.real(1, -1, theta, phi)).isCloseTo(root * Math.sin(theta) * Math.sin(phi), within(1e-15));
+        assertThat(SphericalHarmonics.real(1, 1, theta, phi))
+                .isCloseTo(root * Math.sin(theta) * Math.cos(phi), within(1e-15));
+        assertThat(SphericalHarmonics.real(1, -1, theta, phi))
+                .isCloseTo(root * Math.sin(theta) * Math.sin(phi), within(1e-15));
         assertThat(SphericalHarmonics.real(1, 0, theta, phi)).isCloseTo(root * Math.cos(theta), within(1e-15));
     }
 
@@ -57,7 +61,8 @@ class SphericalHarmonicsTest {
             for (int m = -l; m <= l; m += 5) {
                 for (double theta : new double[] {0, 1e-300, 1e-9, 0.5, Math.PI / 2, Math.PI - 1e-9, Math.PI}) {
                     double value = SphericalHarmonics.polar(l, m, Math.cos(theta), Math.sin(theta));
-                    assertThat(Math.abs(value)).isLessThanOrEqualTo(Math.sqrt((2 * l + 1) / (4 * Math.PI)) * (1 + 1e-12));
+                    assertThat(Math.abs(value))
+                            .isLessThanOrEqualTo(Math.sqrt((2 * l + 1) / (4 * Math.PI)) * (1 + 1e-12));
                 }
             }
         }
@@ -67,6 +72,8 @@ class SphericalHarmonicsTest {
 
     @Test
     void refusesTooLargeAnOrderNamingIt() {
-        assertThatThrownBy(() -> SphericalHarmonics.polar(2, -3, 1, 0)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("m = -3");
+        assertThatThrownBy(() -> SphericalHarmonics.polar(2, -3, 1, 0))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("m = -3");
     }
 }

@@ -6,7 +6,10 @@ import static org.assertj.core.api.Assertions.within;
 import org.junit.jupiter.api.Test;
 
 class SpinOperatorsTest {
-    /** The closed forms for two spins ½ in the triplet (Bethe and Salpeter 1957, sec. 12, and handbooks of nuclear physics; from memory). */
+    /**
+     * The closed forms for two spins ½ in the triplet (Bethe and Salpeter 1957, sec. 12, and handbooks of nuclear
+     * physics; from memory).
+     */
     @Test
     void tensorHasTheClosedFormsOfTheTriplet() {
         for (int l = 1; l <= 12; l++) {
@@ -34,7 +37,8 @@ class SpinOperatorsTest {
             orbit += SpinOperators.spinOrbit(1, 3, j) * (j + 1);
         }
         assertThat(orbit).isCloseTo(0, within(1e-14));
-        assertThat(3 * SpinOperators.spinSpin(1, 1, 2) + SpinOperators.spinSpin(1, 1, 0)).isCloseTo(0, within(1e-15));
+        assertThat(3 * SpinOperators.spinSpin(1, 1, 2) + SpinOperators.spinSpin(1, 1, 0))
+                .isCloseTo(0, within(1e-15));
         assertThat(SpinOperators.spinSpin(1, 1, 2)).isEqualTo(0.25);
     }
 }
