@@ -1,2 +1,0 @@
-/** Windows that change a project. */
-package org.wellwright.editor;

@@ -1,2 +1,0 @@
-/** Windows and figures that show results. */
-package org.wellwright.viewer;
