@@ -39,7 +39,7 @@ public interface TermEvaluator {
     /** ∂V/∂p_j at r at fixed break points (moving edges are in {@link BreakPoint#radiusGradient}). */
     double parameterDerivative(int parameter, double r);
 
-    /** Radii where V is not smooth, ascending. */
+    /** Radii where V is not smooth, ascending; edges that move with different parameters may share one radius. */
     List<BreakPoint> breakPoints();
 
     /**
