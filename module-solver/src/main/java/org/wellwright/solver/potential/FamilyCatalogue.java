@@ -33,7 +33,6 @@ public final class FamilyCatalogue {
         return find(id).orElseThrow(() -> new InvalidModelException(
                 "the family of potentials '" + id + "' is not known",
                 "",
-                "use one of "
-                        + families().stream().map(PotentialFamily::id).collect(Collectors.joining(", "))));
+                "use one of " + families().stream().map(PotentialFamily::id).collect(Collectors.joining(", "))));
     }
 }

@@ -3,9 +3,10 @@ package org.wellwright.solver.potential;
 /**
  * A closed interval [lower, upper] of real numbers with outward-rounded arithmetic; ends may be infinite, never NaN.
  *
- * <p>Every operation returns an interval that surely contains f(x, y) for all real x, y of its operands where f is defined (Moore 1966). The four
- * basic operations and the square root are widened only where the rounded end is not exact. Library functions are widened by two units in the last
- * place, the hyperbolic ones by four; their documented errors are one and two and a half. Elementary functions are in {@link IntervalFunctions}.
+ * <p>Every operation returns an interval that surely contains f(x, y) for all real x, y of its operands where f is
+ * defined (Moore 1966). The four basic operations and the square root are widened only where the rounded end is not
+ * exact. Library functions are widened by two units in the last place, the hyperbolic ones by four; their documented
+ * errors are one and two and a half. Elementary functions are in {@link IntervalFunctions}.
  *
  * @param lower lower end
  * @param upper upper end, at least {@code lower}
@@ -30,7 +31,10 @@ public record Interval(double lower, double upper) {
         return new Interval(value, value);
     }
 
-    /** [value − radius, value + radius] rounded outward; every number if {@code value} or {@code radius} is NaN or {@code radius} infinite. */
+    /**
+     * [value − radius, value + radius] rounded outward; every number if {@code value} or {@code radius} is NaN or
+     * {@code radius} infinite.
+     */
     public static Interval around(double value, double radius) {
         if (Double.isNaN(value) || !(radius < Double.POSITIVE_INFINITY)) {
             return ENTIRE;

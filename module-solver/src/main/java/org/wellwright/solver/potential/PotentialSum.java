@@ -5,7 +5,10 @@ import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
 
-/** The sum of several terms, added in their order. Its parameters are those of the first term, then those of the second, and so on. */
+/**
+ * The sum of several terms, added in their order. Its parameters are those of the first term, then those of the second,
+ * and so on.
+ */
 public final class PotentialSum implements TermEvaluator {
     private final List<TermEvaluator> terms;
     private final int[] starts;

@@ -6,8 +6,8 @@ import java.util.List;
 import java.util.Objects;
 
 /**
- * scale · V(r) for from ≤ r ≤ to, 0 elsewhere. Its parameters are those of the inner term, then scale, from, to; the last two act through the
- * gradients of their break points alone.
+ * scale · V(r) for from ≤ r ≤ to, 0 elsewhere. Its parameters are those of the inner term, then scale, from, to; the
+ * last two act through the gradients of their break points alone.
  */
 public final class RangedTerm implements TermEvaluator {
     private final TermEvaluator inner;
@@ -35,8 +35,8 @@ public final class RangedTerm implements TermEvaluator {
 
     @Override
     public String canonical() {
-        return "ranged(" + Double.toHexString(scale) + ',' + Double.toHexString(from) + ',' + Double.toHexString(to) + ','
-                + inner.canonical() + ')';
+        return "ranged(" + Double.toHexString(scale) + ',' + Double.toHexString(from) + ',' + Double.toHexString(to)
+                + ',' + inner.canonical() + ')';
     }
 
     @Override
@@ -129,7 +129,9 @@ public final class RangedTerm implements TermEvaluator {
             return 0;
         }
         double product = Math.abs(scale) * inner.roundingBound(r);
-        return scale == 1 ? product : (product + Rounding.UNIT * Math.abs(scale * inner.value(r))) * Rounding.SLACK + Double.MIN_VALUE;
+        return scale == 1
+                ? product
+                : (product + Rounding.UNIT * Math.abs(scale * inner.value(r))) * Rounding.SLACK + Double.MIN_VALUE;
     }
 
     @Override

@@ -68,7 +68,8 @@ abstract class BuiltInFamily implements PotentialFamily {
     @Override
     public final TermEvaluator bind(double[] values, ChannelFacts channel) {
         if (values.length != parameters.size()) {
-            throw new IllegalArgumentException("family %s takes %d values, got %d".formatted(id(), parameters.size(), values.length));
+            throw new IllegalArgumentException(
+                    "family %s takes %d values, got %d".formatted(id(), parameters.size(), values.length));
         }
         for (int i = 0; i < values.length; i++) {
             require(Double.isFinite(values[i]), i, "finite", values[i]);
@@ -83,7 +84,8 @@ abstract class BuiltInFamily implements PotentialFamily {
     final void require(boolean holds, int parameter, String rule, double value) {
         if (!holds) {
             throw new InvalidModelException(
-                    "the parameter '%s' must be %s, got %s".formatted(parameters.get(parameter).name(), rule, value),
+                    "the parameter '%s' must be %s, got %s"
+                            .formatted(parameters.get(parameter).name(), rule, value),
                     "family " + id(),
                     "change its value");
         }

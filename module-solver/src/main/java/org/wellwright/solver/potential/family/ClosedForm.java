@@ -7,8 +7,8 @@ import org.wellwright.solver.potential.TailBehaviour;
 import org.wellwright.solver.potential.TermEvaluator;
 
 /**
- * A potential in closed form whose stationary radii are known, so that its extremes over an interval are those of a few points: sharp up to the
- * rounding bound.
+ * A potential in closed form whose stationary radii are known, so that its extremes over an interval are those of a few
+ * points: sharp up to the rounding bound.
  */
 abstract class ClosedForm implements TermEvaluator {
     private static final double[] NONE = {};
@@ -51,7 +51,8 @@ abstract class ClosedForm implements TermEvaluator {
     public Interval enclose(double from, double to) {
         Interval hull = at(from).hull(to == Double.POSITIVE_INFINITY ? atInfinity() : at(to));
         for (double radius : stationaryRadii()) {
-            // A computed radius may be off by some roundings; V there differs in second order only, below its rounding bound.
+            // A computed radius may be off by some roundings; V there differs in second order only, below its rounding
+            // bound.
             if (from < radius * (1 + 1e-14) && radius * (1 - 1e-14) < to) {
                 hull = hull.hull(at(radius));
             }

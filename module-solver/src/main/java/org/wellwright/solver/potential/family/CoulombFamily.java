@@ -22,7 +22,11 @@ public final class CoulombFamily extends BuiltInFamily {
                         "Two point charges at rest; k = Z1 Z2 e^2/(4 pi eps0 epsr) for opposite charges.",
                         "Coulomb 1785"),
                 new FamilyParameter(
-                        "strength", "k", ENERGY_LENGTH, 1, "positive attracts; in atomic units the product of the charges"));
+                        "strength",
+                        "k",
+                        ENERGY_LENGTH,
+                        1,
+                        "positive attracts; in atomic units the product of the charges"));
     }
 
     @Override

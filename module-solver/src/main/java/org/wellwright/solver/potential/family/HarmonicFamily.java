@@ -22,7 +22,8 @@ public final class HarmonicFamily extends BuiltInFamily {
                         "k/2*(r-r0)^2",
                         "Isotropic oscillator with r0 = 0, small vibrations about r0 otherwise; k = mu omega^2.",
                         "Hooke 1678"),
-                new FamilyParameter("stiffness", "k", Dimension.ENERGY.times(Dimension.LENGTH.power(-2)), 1, "force constant"),
+                new FamilyParameter(
+                        "stiffness", "k", Dimension.ENERGY.times(Dimension.LENGTH.power(-2)), 1, "force constant"),
                 new FamilyParameter("centre", "r0", Dimension.LENGTH, 0, "radius of the minimum"));
     }
 

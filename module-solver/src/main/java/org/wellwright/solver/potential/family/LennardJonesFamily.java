@@ -24,7 +24,12 @@ public final class LennardJonesFamily extends BuiltInFamily {
                         "4*eps*((sigma/r)^12-(sigma/r)^6)",
                         "Two closed-shell atoms: dispersion tail, steep core.",
                         "Lennard-Jones 1924, 1931"),
-                new FamilyParameter("depth", "eps", Dimension.ENERGY, 0.001, "from the limit (V = 0) to the minimum at 2^(1/6) sigma"),
+                new FamilyParameter(
+                        "depth",
+                        "eps",
+                        Dimension.ENERGY,
+                        0.001,
+                        "from the limit (V = 0) to the minimum at 2^(1/6) sigma"),
                 new FamilyParameter("diameter", "sigma", Dimension.LENGTH, 5, "radius where V = 0, positive"));
     }
 
@@ -76,9 +81,12 @@ public final class LennardJonesFamily extends BuiltInFamily {
         @Override
         public double roundingBound(double r) {
             double s = sixth(p[1] / r);
-            double relativeOfS = 11 * Rounding.UNIT * Rounding.SLACK; // six times u of the quotient, five multiplications' worth
+            double relativeOfS =
+                    11 * Rounding.UNIT * Rounding.SLACK; // six times u of the quotient, five multiplications' worth
             double slope = s * (Math.abs(2 * s - 1) + 2 * s * relativeOfS);
-            double bound = 4 * Math.abs(p[0]) * (slope * relativeOfS + 3 * Rounding.UNIT * s * Math.abs(s - 1) + 4 * Double.MIN_VALUE);
+            double bound = 4
+                    * Math.abs(p[0])
+                    * (slope * relativeOfS + 3 * Rounding.UNIT * s * Math.abs(s - 1) + 4 * Double.MIN_VALUE);
             return Double.isNaN(bound) ? Double.POSITIVE_INFINITY : bound * Rounding.SLACK + Double.MIN_VALUE;
         }
 

@@ -22,7 +22,8 @@ public final class MorseFamily extends BuiltInFamily {
                         "D*((1-exp(-a*(r-re)))^2-1)",
                         "Vibration of a diatomic molecule near its minimum; zero at dissociation, finite at r = 0.",
                         "Morse 1929"),
-                new FamilyParameter("depth", "D", Dimension.ENERGY, 0.1, "from the dissociation limit (V = 0) to the minimum"),
+                new FamilyParameter(
+                        "depth", "D", Dimension.ENERGY, 0.1, "from the dissociation limit (V = 0) to the minimum"),
                 new FamilyParameter("steepness", "a", INVERSE_LENGTH, 1, "positive"),
                 new FamilyParameter("equilibrium", "re", Dimension.LENGTH, 2, "radius of the minimum"));
     }

@@ -23,7 +23,8 @@ public final class PowerFamily extends BuiltInFamily {
                         "Any power of r; A is the value at r = b. With nu <= -2 and A < 0 the pair falls to the centre.",
                         "Quigg and Rosner 1979"),
                 new FamilyParameter("amplitude", "A", Dimension.ENERGY, 1, "value at r = b"),
-                new FamilyParameter("unitRadius", "b", Dimension.LENGTH, 1, "radius that scales r, positive; fixed as a rule"),
+                new FamilyParameter(
+                        "unitRadius", "b", Dimension.LENGTH, 1, "radius that scales r, positive; fixed as a rule"),
                 new FamilyParameter("exponent", "nu", Dimension.NONE, 1, "any number"));
     }
 
