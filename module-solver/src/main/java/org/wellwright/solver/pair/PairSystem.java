@@ -1,7 +1,11 @@
 package org.wellwright.solver.pair;
 
 import java.util.Objects;
+import java.util.function.ToDoubleFunction;
+import org.wellwright.solver.units.Dimension;
 import org.wellwright.solver.units.ExactNumber;
+import org.wellwright.solver.units.UnitExpression;
+import org.wellwright.solver.units.UnitSystem;
 
 /**
  * A pair of bodies bound by a central force. Isotopologues are systems of one project.
@@ -48,5 +52,44 @@ public record PairSystem(
     public static PairSystem of(String id, Body first, Body second) {
         return new PairSystem(
                 id, "", first, second, MassConvention.ATOMIC, ExchangeSymmetry.DISTINGUISHABLE, ExactNumber.ONE, null);
+    }
+
+    /**
+     * The mass of one body in the mass unit of a unit system, by this system's convention.
+     *
+     * @param body one of the two bodies
+     * @param parameters value of a parameter of the pool in the mass unit of {@code units}
+     * @throws org.wellwright.solver.InvalidModelException if the particle or the unit is not known
+     */
+    public double mass(
+            Body body, ParticleCatalogue catalogue, UnitSystem units, ToDoubleFunction<String> parameters) {
+        if (body.mass() instanceof BodyMass.Catalogued catalogued) {
+            Particle particle = catalogue.find(catalogued.particle());
+            double factor = UnitExpression.parse(particle.unit()).factorTo(units, Dimension.MASS);
+            return particle.mass(massConvention, body.charge().value()).value() * factor;
+        }
+        if (body.mass() instanceof BodyMass.Typed typed) {
+            return typed.value().value() * UnitExpression.parse(typed.unit()).factorTo(units, Dimension.MASS);
+        }
+        return parameters.applyAsDouble(((BodyMass.FromParameter) body.mass()).parameter());
+    }
+
+    /**
+     * The reduced mass m₁m₂/(m₁ + m₂) in the mass unit of a unit system.
+     *
+     * @param parameters value of a parameter of the pool in the mass unit of {@code units}
+     * @throws org.wellwright.solver.InvalidModelException if a particle or unit is not known
+     */
+    public double reducedMass(ParticleCatalogue catalogue, UnitSystem units, ToDoubleFunction<String> parameters) {
+        double one = mass(first, catalogue, units, parameters);
+        double other = mass(second, catalogue, units, parameters);
+        return one * (other / (one + other));
+    }
+
+    /** The reduced mass of a system whose masses are not parameters, with the standard mass table. */
+    public double reducedMass(UnitSystem units) {
+        return reducedMass(ParticleCatalogue.STANDARD, units, name -> {
+            throw new IllegalArgumentException("the mass '%s' is a parameter of the pool".formatted(name));
+        });
     }
 }
