@@ -61,8 +61,7 @@ public record PairSystem(
      * @param parameters value of a parameter of the pool in the mass unit of {@code units}
      * @throws org.wellwright.solver.InvalidModelException if the particle or the unit is not known
      */
-    public double mass(
-            Body body, ParticleCatalogue catalogue, UnitSystem units, ToDoubleFunction<String> parameters) {
+    public double mass(Body body, ParticleCatalogue catalogue, UnitSystem units, ToDoubleFunction<String> parameters) {
         if (body.mass() instanceof BodyMass.Catalogued catalogued) {
             Particle particle = catalogue.find(catalogued.particle());
             double factor = UnitExpression.parse(particle.unit()).factorTo(units, Dimension.MASS);

@@ -65,18 +65,18 @@ public record Particle(
         if (kind != Kind.ATOM) {
             return mass;
         }
-        double electrons =
-                switch (convention) {
-                    case NUCLEAR -> protons;
-                    case ION -> bodyCharge;
-                    case ATOMIC, EFFECTIVE, MODEL_PARAMETER -> 0;
-                };
+        double electrons = switch (convention) {
+            case NUCLEAR -> protons;
+            case ION -> bodyCharge;
+            case ATOMIC, EFFECTIVE, MODEL_PARAMETER -> 0;
+        };
         if (electrons == 0) {
             return mass;
         }
         // Atoms are tabulated in u, where the electron's mass is its relative atomic mass.
-        BigDecimal removed =
-                BigDecimal.valueOf(electrons).multiply(Constants.ELECTRON_RELATIVE_MASS.value().decimal());
-        return new ExactNumber(mass.decimal().subtract(removed, MathContext.DECIMAL64).toString());
+        BigDecimal removed = BigDecimal.valueOf(electrons)
+                .multiply(Constants.ELECTRON_RELATIVE_MASS.value().decimal());
+        return new ExactNumber(
+                mass.decimal().subtract(removed, MathContext.DECIMAL64).toString());
     }
 }

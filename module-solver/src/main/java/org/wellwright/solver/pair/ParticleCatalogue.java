@@ -12,8 +12,8 @@ import org.wellwright.solver.units.Names;
 /**
  * The mass table: leptons, mesons, light nuclei, and atoms. Immutable.
  *
- * <p>Masses of leptons and light nuclei: CODATA 2022. Atoms: the atomic mass evaluation AME 2020 (Wang, Huang, Kondev, Audi
- * and Naimi 2021, Chin. Phys. C 45, 030003).
+ * <p>Masses of leptons and light nuclei: CODATA 2022. Atoms: the atomic mass evaluation AME 2020 (Wang, Huang, Kondev,
+ * Audi and Naimi 2021, Chin. Phys. C 45, 030003).
  */
 public final class ParticleCatalogue {
     /** Edition of the table, as projects pin it. */

@@ -6,12 +6,12 @@ import java.math.RoundingMode;
 import java.util.List;
 
 /**
- * The constants of nature that everything is computed with: CODATA 2022 (Mohr, Newell, Taylor and Tiesinga 2025, Rev. Mod.
- * Phys. 97, 025002).
+ * The constants of nature that everything is computed with: CODATA 2022 (Mohr, Newell, Taylor and Tiesinga 2025, Rev.
+ * Mod. Phys. 97, 025002).
  *
- * <p>h, c, e, k and N_A are exact by the definition of the SI. Measured are R∞, a₀ and A_r(e); the hartree is 2 h c R∞, the
- * electron's rest energy ħ²c²/(E_h a₀²), u = m_e/A_r(e). So the units agree with each other to the last bit, and every
- * derived value agrees with the recommended one in all printed digits.
+ * <p>h, c, e, k and N_A are exact by the definition of the SI. Measured are R∞, a₀ and A_r(e); the hartree is 2 h c R∞,
+ * the electron's rest energy ħ²c²/(E_h a₀²), u = m_e/A_r(e). So the units agree with each other to the last bit, and
+ * every derived value agrees with the recommended one in all printed digits.
  */
 public final class Constants {
     /** The edition, as projects pin it. */
@@ -36,8 +36,7 @@ public final class Constants {
     public static final Constant AVOGADRO = exact("Avogadro constant", "N_A", "6.02214076e23", "1/mol");
 
     /** Rydberg constant, 1/m. */
-    public static final Constant RYDBERG =
-            measured("Rydberg constant", "R_inf", "10973731.568157", "0.000012", "1/m");
+    public static final Constant RYDBERG = measured("Rydberg constant", "R_inf", "10973731.568157", "0.000012", "1/m");
 
     /** Bohr radius, m. */
     public static final Constant BOHR_RADIUS =
@@ -71,17 +70,17 @@ public final class Constants {
             new BigDecimal("3.14159265358979323846264338327950288419716939937510582097494");
 
     /** hc, eV m. */
-    static final BigDecimal PLANCK_LIGHT = PLANCK.decimal()
-            .multiply(LIGHT_SPEED.decimal())
-            .divide(ELEMENTARY_CHARGE.decimal(), PRECISION);
+    static final BigDecimal PLANCK_LIGHT =
+            PLANCK.decimal().multiply(LIGHT_SPEED.decimal()).divide(ELEMENTARY_CHARGE.decimal(), PRECISION);
 
     /** ħc, eV m. */
-    static final BigDecimal REDUCED_PLANCK_LIGHT =
-            PLANCK_LIGHT.divide(PI.multiply(BigDecimal.valueOf(2)), PRECISION);
+    static final BigDecimal REDUCED_PLANCK_LIGHT = PLANCK_LIGHT.divide(PI.multiply(BigDecimal.valueOf(2)), PRECISION);
 
     /** The hartree 2 h c R∞, eV. */
-    static final BigDecimal HARTREE =
-            PLANCK_LIGHT.multiply(RYDBERG.decimal()).multiply(BigDecimal.valueOf(2)).round(PRECISION);
+    static final BigDecimal HARTREE = PLANCK_LIGHT
+            .multiply(RYDBERG.decimal())
+            .multiply(BigDecimal.valueOf(2))
+            .round(PRECISION);
 
     /** Rest energy of the electron, ħ²c²/(E_h a₀²), eV. */
     static final BigDecimal ELECTRON_REST_ENERGY = REDUCED_PLANCK_LIGHT

@@ -34,10 +34,7 @@ public enum EnergyUnit implements Unit {
     /** Terahertz. */
     TERAHERTZ("THz", "THz", hertz("1e12")),
     /** Kelvin, k·K. */
-    KELVIN(
-            "K",
-            "K",
-            Constants.BOLTZMANN.decimal().divide(Constants.ELEMENTARY_CHARGE.decimal(), Constants.PRECISION)),
+    KELVIN("K", "K", Constants.BOLTZMANN.decimal().divide(Constants.ELEMENTARY_CHARGE.decimal(), Constants.PRECISION)),
     /** Joule. */
     JOULE("J", "J", BigDecimal.ONE.divide(Constants.ELEMENTARY_CHARGE.decimal(), Constants.PRECISION)),
     /** Kilojoule per mole. */
@@ -73,7 +70,10 @@ public enum EnergyUnit implements Unit {
         return this == HERTZ || this == KILOHERTZ || this == MEGAHERTZ || this == GIGAHERTZ || this == TERAHERTZ;
     }
 
-    /** Whether it is an electronvolt or a multiple, which also serves as a unit of mass and, with ħ = c = 1, of inverse length. */
+    /**
+     * Whether it is an electronvolt or a multiple, which also serves as a unit of mass and, with ħ = c = 1, of inverse
+     * length.
+     */
     boolean electronvolt() {
         return symbol.endsWith("eV");
     }

@@ -13,10 +13,7 @@ public enum MassUnit implements Unit {
     KILOGRAM(
             "kg",
             "kg",
-            Constants.LIGHT_SPEED
-                    .decimal()
-                    .pow(2)
-                    .divide(Constants.ELEMENTARY_CHARGE.decimal(), Constants.PRECISION)),
+            Constants.LIGHT_SPEED.decimal().pow(2).divide(Constants.ELEMENTARY_CHARGE.decimal(), Constants.PRECISION)),
     /** eV/c². */
     EV("eV/c^2", "eV/c²", BigDecimal.ONE, "eV/c2"),
     /** keV/c². */

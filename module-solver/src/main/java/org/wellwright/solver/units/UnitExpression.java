@@ -10,16 +10,16 @@ import java.util.regex.Pattern;
 import org.wellwright.solver.InvalidModelException;
 
 /**
- * A product of powers of units: "eV nm", "1/angstrom", "cm^-1 angstrom^2", "GeV^2". Factors are separated by a space, "*" or
- * "·"; "/" divides by the next factor only. Immutable.
+ * A product of powers of units: "eV nm", "1/angstrom", "cm^-1 angstrom^2", "GeV^2". Factors are separated by a space,
+ * "*" or "·"; "/" divides by the next factor only. Immutable.
  *
- * <p>"cm^-1" is read as an energy or as an inverse length, whichever fits its place. Electronvolts count as masses where a
- * mass is asked for, and powers of electronvolts alone also as lengths (ħ = c = 1).
+ * <p>"cm^-1" is read as an energy or as an inverse length, whichever fits its place. Electronvolts count as masses
+ * where a mass is asked for, and powers of electronvolts alone also as lengths (ħ = c = 1).
  */
 public final class UnitExpression {
     private static final Map<String, Unit> UNITS = units();
-    private static final Pattern FACTOR =
-            Pattern.compile("\\s*([*·/]?)\\s*([^\\s*·/^⁻⁰¹²³⁴-⁹()]+)\\s*(?:\\^\\s*\\(?\\s*([+-]?\\d{1,2})\\s*\\)?|([⁻⁰¹²³⁴-⁹]+))?");
+    private static final Pattern FACTOR = Pattern.compile(
+            "\\s*([*·/]?)\\s*([^\\s*·/^⁻⁰¹²³⁴-⁹()]+)\\s*(?:\\^\\s*\\(?\\s*([+-]?\\d{1,2})\\s*\\)?|([⁻⁰¹²³⁴-⁹]+))?");
     private static final int MOST_FACTORS = 12;
 
     /** Factors as typed: unit and exponent. */
@@ -172,8 +172,7 @@ public final class UnitExpression {
             return size;
         }
         // m c² = E: both are kept in eV.
-        if (own.length() == expected.length()
-                && own.energy() + own.mass() == expected.energy() + expected.mass()) {
+        if (own.length() == expected.length() && own.energy() + own.mass() == expected.energy() + expected.mass()) {
             return size;
         }
         int power = own.energy() + own.mass() - own.length();

@@ -38,8 +38,8 @@ public record UnitSystem(
             new UnitSystem("MeV-fm", "MeV, fm", EnergyUnit.MEGA_EV, LengthUnit.FEMTOMETRE, MassUnit.MEGA_EV, false);
 
     /** GeV, GeV⁻¹, GeV/c², ħ = c = 1. */
-    public static final UnitSystem GEV =
-            new UnitSystem("GeV", "GeV, GeV⁻¹ (ħ = c = 1)", EnergyUnit.GIGA_EV, LengthUnit.PER_GEV, MassUnit.GIGA_EV, true);
+    public static final UnitSystem GEV = new UnitSystem(
+            "GeV", "GeV, GeV⁻¹ (ħ = c = 1)", EnergyUnit.GIGA_EV, LengthUnit.PER_GEV, MassUnit.GIGA_EV, true);
 
     /** GeV, fm, GeV/c². */
     public static final UnitSystem GEV_FM =
@@ -67,12 +67,13 @@ public record UnitSystem(
         throw new InvalidModelException(
                 "the unit system '%s' is not known".formatted(Names.shortened(id)),
                 "",
-                "use one of " + String.join(", ", ALL.stream().map(UnitSystem::id).toList()));
+                "use one of "
+                        + String.join(", ", ALL.stream().map(UnitSystem::id).toList()));
     }
 
     /**
-     * ħ²/2m for m = 1 in these units, energy·length²·mass: κ = kineticFactor·(1/m₁ + 1/m₂). Exactly ½ in atomic units and
-     * with ħ = c = 1.
+     * ħ²/2m for m = 1 in these units, energy·length²·mass: κ = kineticFactor·(1/m₁ + 1/m₂). Exactly ½ in atomic units
+     * and with ħ = c = 1.
      */
     public double kineticFactor() {
         BigDecimal hbarc = Constants.REDUCED_PLANCK_LIGHT;
