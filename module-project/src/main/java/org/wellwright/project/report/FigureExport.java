@@ -1,0 +1,58 @@
+package org.wellwright.project.report;
+
+import java.io.IOException;
+import java.nio.file.AtomicMoveNotSupportedException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.Optional;
+import org.openide.util.lookup.ServiceProvider;
+import org.wellwright.project.FigureProvider;
+import org.wellwright.project.FigureRequest;
+import org.wellwright.project.FigureWriter;
+import org.wellwright.solver.InvalidModelException;
+import org.wellwright.solver.Problem;
+
+/**
+ * Writes figures as PNG, SVG and PDF with the project, model, state and version in the metadata. Equal requests give
+ * equal bytes.
+ */
+@ServiceProvider(service = FigureWriter.class)
+public final class FigureExport implements FigureWriter {
+    @Override
+    public void write(FigureProvider figure, FigureRequest request, Sheet sheet, Path file) throws IOException {
+        byte[] bytes = bytes(figure, request, sheet);
+        Path folder = file.toAbsolutePath().getParent();
+        Path fresh = Files.createTempFile(folder, ".figure", ".tmp");
+        try {
+            Files.write(fresh, bytes);
+            try {
+                Files.move(fresh, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+            } catch (AtomicMoveNotSupportedException e) {
+                Files.move(fresh, file, StandardCopyOption.REPLACE_EXISTING);
+            }
+        } finally {
+            Files.deleteIfExists(fresh);
+        }
+    }
+
+    @Override
+    public byte[] bytes(FigureProvider figure, FigureRequest request, Sheet sheet) throws IOException {
+        FigureRequest dressed = request.withFont(FigureFont.sized(sheet.width(), sheet.height()));
+        Optional<Problem> missing = figure.missing(dressed);
+        if (missing.isPresent()) {
+            throw new InvalidModelException(missing.get());
+        }
+        FigureFacts facts = FigureFacts.of(figure, dressed, version());
+        return switch (sheet.format()) {
+            case PNG -> PngFigure.bytes(figure, dressed, sheet, facts);
+            case SVG -> SvgFigure.bytes(figure, dressed, sheet, facts);
+            case PDF -> PdfFigure.bytes(figure, dressed, sheet, facts);
+        };
+    }
+
+    private static String version() {
+        String version = FigureExport.class.getPackage().getImplementationVersion();
+        return version == null ? "development" : version;
+    }
+}
