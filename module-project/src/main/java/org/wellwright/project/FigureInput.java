@@ -2,6 +2,8 @@ package org.wellwright.project;
 
 import java.util.List;
 import java.util.Objects;
+import org.wellwright.solver.fit.Comparison;
+import org.wellwright.solver.fit.ModelComparison;
 import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.units.UnitSystem;
 
@@ -13,8 +15,7 @@ import org.wellwright.solver.units.UnitSystem;
  * @param document the document
  * @param models what solving gave, in the order of the document's models
  * @param measured levels that the data fix
- * @param comparison every datum beside what the models say
- * @param scores how well each model agrees
+ * @param comparison every datum beside what the models say, or null
  * @param lines predicted and measured lines
  */
 public record FigureInput(
@@ -23,8 +24,7 @@ public record FigureInput(
         ModelDocument document,
         List<SolvedModel> models,
         List<MeasuredLevel> measured,
-        List<DatumComparison> comparison,
-        List<ModelScore> scores,
+        Comparison comparison,
         List<SpectralLine> lines) {
 
     /** Copies the lists. */
@@ -34,8 +34,6 @@ public record FigureInput(
         Objects.requireNonNull(document, "document");
         models = List.copyOf(models);
         measured = List.copyOf(measured);
-        comparison = List.copyOf(comparison);
-        scores = List.copyOf(scores);
         lines = List.copyOf(lines);
     }
 
@@ -54,11 +52,13 @@ public record FigureInput(
         return null;
     }
 
-    /** How well a model agrees, or null. */
-    public ModelScore score(String model) {
-        for (ModelScore score : scores) {
-            if (score.model().equals(model)) {
-                return score;
+    /** A model beside the data, or null. */
+    public ModelComparison compared(String model) {
+        if (comparison != null) {
+            for (ModelComparison one : comparison.models()) {
+                if (one.model().equals(model)) {
+                    return one;
+                }
             }
         }
         return null;
