@@ -26,7 +26,18 @@ public enum DatumColumn {
     /** The levels under the fraction bar of a ratio. */
     DENOMINATOR("denominator", List.of()),
     /** The value, with or without its uncertainty and unit: "1.23456(12) eV". */
-    VALUE("value", List.of("energy", "measured", "observed", "obs", "position", "wavenumber", "wavelength", "frequency", "mass")),
+    VALUE(
+            "value",
+            List.of(
+                    "energy",
+                    "measured",
+                    "observed",
+                    "obs",
+                    "position",
+                    "wavenumber",
+                    "wavelength",
+                    "frequency",
+                    "mass")),
     /** The standard uncertainty. */
     SIGMA("sigma", List.of("uncertainty", "unc", "error", "err", "u", "±", "σ", "standard uncertainty")),
     /** The standard uncertainty downward. */
@@ -78,7 +89,10 @@ public enum DatumColumn {
         return NONE;
     }
 
-    /** The unit in brackets at the end of a heading: "value (cm^-1)", "value / cm^-1", "value [eV]"; empty if there is none. */
+    /**
+     * The unit in brackets at the end of a heading: "value (cm^-1)", "value / cm^-1", "value [eV]"; empty if there is
+     * none.
+     */
     public static String unitOfHeading(String heading) {
         String text = heading.strip();
         String name = withoutUnit(text);

@@ -43,7 +43,8 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
 
         /** Energies in the project's unit. */
         public static Defaults of(ModelDocument document) {
-            return new Defaults(Transform.NONE, UnitSystem.named(document.units()).energy().symbol(), List.of(), "");
+            return new Defaults(
+                    Transform.NONE, UnitSystem.named(document.units()).energy().symbol(), List.of(), "");
         }
     }
 
@@ -75,8 +76,8 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
     }
 
     /**
-     * What the columns of a table seem to hold: by its headings if the first row has them, else levels first, the value in the first column of
-     * numbers, the uncertainty in the next.
+     * What the columns of a table seem to hold: by its headings if the first row has them, else levels first, the value
+     * in the first column of numbers, the uncertainty in the next.
      */
     public static List<DatumColumn> guess(DelimitedText table) {
         List<DatumColumn> columns = new ArrayList<>();
@@ -192,9 +193,13 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
             at[0] = DatumColumn.SIGMA;
             ExactNumber both = sigma(cells.get(DatumColumn.SIGMA), measured.value());
             at[0] = DatumColumn.SIGMA_MINUS;
-            minus = cells.containsKey(DatumColumn.SIGMA_MINUS) ? sigma(cells.get(DatumColumn.SIGMA_MINUS), measured.value()) : both;
+            minus = cells.containsKey(DatumColumn.SIGMA_MINUS)
+                    ? sigma(cells.get(DatumColumn.SIGMA_MINUS), measured.value())
+                    : both;
             at[0] = DatumColumn.SIGMA_PLUS;
-            plus = cells.containsKey(DatumColumn.SIGMA_PLUS) ? sigma(cells.get(DatumColumn.SIGMA_PLUS), measured.value()) : both;
+            plus = cells.containsKey(DatumColumn.SIGMA_PLUS)
+                    ? sigma(cells.get(DatumColumn.SIGMA_PLUS), measured.value())
+                    : both;
         }
         at[0] = DatumColumn.UNIT;
         String unit = unit(cells, measured, headingUnit, transform);
@@ -205,7 +210,8 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
         at[0] = DatumColumn.ID;
         String id = cells.getOrDefault(DatumColumn.ID, "");
         if (ids.contains(id)) {
-            throw new InvalidModelException("there is a datum '%s' already".formatted(Names.shortened(id)), "", "give it another id");
+            throw new InvalidModelException(
+                    "there is a datum '%s' already".formatted(Names.shortened(id)), "", "give it another id");
         }
         at[0] = DatumColumn.VALUE;
         return new Datum(
@@ -264,7 +270,9 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
 
     /** Puts the system before each level of a line. */
     private static String prefixed(String text, String prefix) {
-        return prefix + text.replaceAll("(\\s[-+\u2212]\\s|\\s*(?:->|→)\\s*)", "$1" + java.util.regex.Matcher.quoteReplacement(prefix));
+        return prefix
+                + text.replaceAll(
+                        "(\\s[-+\u2212]\\s|\\s*(?:->|→)\\s*)", "$1" + java.util.regex.Matcher.quoteReplacement(prefix));
     }
 
     private static ExactNumber sigma(String text, ExactNumber value) {
@@ -272,27 +280,36 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
             return null;
         }
         if (text.strip().endsWith("%")) {
-            ExactNumber percent = Typed.split(text.strip().substring(0, text.strip().length() - 1)).number();
+            ExactNumber percent = Typed.split(
+                            text.strip().substring(0, text.strip().length() - 1))
+                    .number();
             return ExactNumber.of(Math.abs(value.value() * percent.value() / 100));
         }
         Typed typed = Typed.split(text);
         if (!typed.rest().isEmpty()) {
             throw new InvalidModelException(
-                    "'%s' is not an uncertainty".formatted(Typed.shortened(text)), "", "write a number in the unit of the value");
+                    "'%s' is not an uncertainty".formatted(Typed.shortened(text)),
+                    "",
+                    "write a number in the unit of the value");
         }
         if (typed.number().sign() <= 0) {
             throw new InvalidModelException(
-                    "the uncertainty %s is not positive".formatted(typed.number()), "", "leave it out where it is not known");
+                    "the uncertainty %s is not positive".formatted(typed.number()),
+                    "",
+                    "leave it out where it is not known");
         }
         return typed.number();
     }
 
-    private String unit(Map<DatumColumn, String> cells, MeasuredText measured, String headingUnit, Transform transform) {
+    private String unit(
+            Map<DatumColumn, String> cells, MeasuredText measured, String headingUnit, Transform transform) {
         String unit = measured.unit();
         if (unit.isEmpty()) {
             unit = cells.getOrDefault(DatumColumn.UNIT, headingUnit.isEmpty() ? defaults.unit() : headingUnit);
         }
-        if (transform == Transform.RATIO && !cells.containsKey(DatumColumn.UNIT) && measured.unit().isEmpty()) {
+        if (transform == Transform.RATIO
+                && !cells.containsKey(DatumColumn.UNIT)
+                && measured.unit().isEmpty()) {
             return "";
         }
         return UnitExpression.parse(unit).text();
@@ -323,8 +340,9 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
         return switch (text.toLowerCase(Locale.ROOT)) {
             case "yes", "y", "1", "true", "x", "used" -> true;
             case "no", "n", "0", "false", "-", "unused" -> false;
-            default -> throw new InvalidModelException(
-                    "'%s' says neither yes nor no".formatted(Typed.shortened(text)), "", "write yes or no");
+            default ->
+                throw new InvalidModelException(
+                        "'%s' says neither yes nor no".formatted(Typed.shortened(text)), "", "write yes or no");
         };
     }
 }

@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Rows of cells as spreadsheets and programs write them: separated by tabs, semicolons, commas or runs of blanks, cells with separators in quotes
- * (RFC 4180), comment lines with '#' left out. Immutable.
+ * Rows of cells as spreadsheets and programs write them: separated by tabs, semicolons, commas or runs of blanks, cells
+ * with separators in quotes (RFC 4180), comment lines with '#' left out. Immutable.
  *
  * @param separator what separates the cells; a blank stands for a run of them
  * @param rows the rows that are not empty, cells without blanks around them
@@ -37,7 +37,10 @@ public record DelimitedText(char separator, List<Row> rows) {
         rows = List.copyOf(rows);
     }
 
-    /** Splits a text at the separator that fits it best: a tab if there is one, else the one that gives the same number of cells in most rows. */
+    /**
+     * Splits a text at the separator that fits it best: a tab if there is one, else the one that gives the same number
+     * of cells in most rows.
+     */
     public static DelimitedText parse(String text) {
         if (text.indexOf('\t') >= 0) {
             return parse(text, '\t');
@@ -116,7 +119,9 @@ public record DelimitedText(char separator, List<Row> rows) {
         long best = 0;
         for (int columns = 2; columns <= columns(); columns++) {
             int wanted = columns;
-            best = Math.max(best, rows.stream().filter(row -> row.cells().size() == wanted).count());
+            best = Math.max(
+                    best,
+                    rows.stream().filter(row -> row.cells().size() == wanted).count());
         }
         return best;
     }

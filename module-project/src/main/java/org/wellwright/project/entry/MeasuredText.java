@@ -10,11 +10,11 @@ import org.wellwright.solver.model.Datum;
 import org.wellwright.solver.units.ExactNumber;
 
 /**
- * A measured value as people write it: {@code 1.23456(12)}, {@code 1.23456 ± 0.00012}, {@code 1.2(3)e4 cm^-1}, {@code 12.3 +0.4 -0.2},
- * {@code < 3.5}.
+ * A measured value as people write it: {@code 1.23456(12)}, {@code 1.23456 ± 0.00012}, {@code 1.2(3)e4 cm^-1},
+ * {@code 12.3 +0.4 -0.2}, {@code < 3.5}.
  *
- * <p>Digits in parentheses count in units of the value's last digit (JCGM 100:2008, 7.2.2); a number with a point in parentheses is meant as it
- * stands. Digits are kept as typed.
+ * <p>Digits in parentheses count in units of the value's last digit (JCGM 100:2008, 7.2.2); a number with a point in
+ * parentheses is meant as it stands. Digits are kept as typed.
  *
  * @param value the value
  * @param sigmaMinus standard uncertainty downward, > 0, or null if none is stated
@@ -31,8 +31,8 @@ public record MeasuredText(
             "([+-]?(?:\\d+\\.?\\d*|\\.\\d+))\\s?\\((\\d+\\.?\\d*|\\.\\d+)\\)((?:[eE][+-]?\\d{1,4})?)(.*)");
     private static final Pattern SYMMETRIC =
             Pattern.compile("(" + Typed.NUMBER + ")\\s*" + PLUS_MINUS + "\\s*(" + UNSIGNED + ")(.*)");
-    private static final Pattern BRACKETED = Pattern.compile(
-            "\\(\\s*(" + Typed.NUMBER + ")\\s*" + PLUS_MINUS + "\\s*(" + UNSIGNED + ")\\s*\\)((?:[eE][+-]?\\d{1,4})?)(.*)");
+    private static final Pattern BRACKETED = Pattern.compile("\\(\\s*(" + Typed.NUMBER + ")\\s*" + PLUS_MINUS + "\\s*("
+            + UNSIGNED + ")\\s*\\)((?:[eE][+-]?\\d{1,4})?)(.*)");
     private static final Pattern TWO_SIDED =
             Pattern.compile("(" + Typed.NUMBER + ")\\s*\\+\\s*(" + UNSIGNED + ")\\s*/?\\s*-\\s*(" + UNSIGNED + ")(.*)");
 
@@ -95,7 +95,10 @@ public record MeasuredText(
         return new MeasuredText(typed.number(), null, null, Datum.Limit.NONE, typed.rest());
     }
 
-    /** The short form: digits in parentheses where the uncertainty fills at most three of the value's last places, "v ± s" otherwise. */
+    /**
+     * The short form: digits in parentheses where the uncertainty fills at most three of the value's last places, "v ±
+     * s" otherwise.
+     */
     public static String format(ExactNumber value, ExactNumber sigmaMinus, ExactNumber sigmaPlus, Datum.Limit limit) {
         if (limit != Datum.Limit.NONE) {
             return (limit == Datum.Limit.UPPER ? "< " : "> ") + value;

@@ -11,8 +11,8 @@ public final class QuantityText {
     private QuantityText() {}
 
     /**
-     * The number in the field's unit. A number without a unit, or with the field's own, keeps every digit as typed; another unit is converted with
-     * one rounding.
+     * The number in the field's unit. A number without a unit, or with the field's own, keeps every digit as typed;
+     * another unit is converted with one rounding.
      *
      * @param text what was typed
      * @param fieldUnit unit expression of the field; empty for a pure number
@@ -27,7 +27,8 @@ public final class QuantityText {
         double factor = factor(typed.rest(), fieldUnit, system);
         double converted = typed.number().value() * factor;
         if (!Double.isFinite(converted)) {
-            throw new InvalidModelException("'%s' is too large in %s".formatted(text.strip(), fieldUnit), "", "check the unit");
+            throw new InvalidModelException(
+                    "'%s' is too large in %s".formatted(text.strip(), fieldUnit), "", "check the unit");
         }
         return factor == 1 ? typed.number() : ExactNumber.of(converted);
     }

@@ -28,7 +28,10 @@ public final class TransformText {
         };
     }
 
-    /** The unit that comes to mind first: wavelengths in nm, frequencies in THz; empty where it is the project's energy, length or none. */
+    /**
+     * The unit that comes to mind first: wavelengths in nm, frequencies in THz; empty where it is the project's energy,
+     * length or none.
+     */
     public static String usualUnit(Transform transform) {
         return switch (transform) {
             case VACUUM_WAVELENGTH, AIR_WAVELENGTH -> "nm";
@@ -47,7 +50,8 @@ public final class TransformText {
         List<String> titles = new ArrayList<>();
         for (Transform transform : Transform.values()) {
             titles.add(title(transform));
-            if (wanted.equals(title(transform)) || wanted.equals(transform.name().toLowerCase(Locale.ROOT).replace('_', ' '))) {
+            if (wanted.equals(title(transform))
+                    || wanted.equals(transform.name().toLowerCase(Locale.ROOT).replace('_', ' '))) {
                 return transform;
             }
         }

@@ -29,12 +29,16 @@ record Typed(ExactNumber number, String rest) {
         }
         if (DECIMAL_COMMA.matcher(plain).matches()) {
             throw new InvalidModelException(
-                    "'%s' has a comma in its number".formatted(shortened(plain)), "", "write the decimals after a point");
+                    "'%s' has a comma in its number".formatted(shortened(plain)),
+                    "",
+                    "write the decimals after a point");
         }
         Matcher matcher = LEADING.matcher(plain);
         if (!matcher.matches()) {
             throw new InvalidModelException(
-                    "'%s' does not start with a number".formatted(shortened(plain)), "", "type one, as 1.25 or 1.25 eV");
+                    "'%s' does not start with a number".formatted(shortened(plain)),
+                    "",
+                    "type one, as 1.25 or 1.25 eV");
         }
         return new Typed(exact(matcher.group(1)), matcher.group(2).strip());
     }
@@ -48,7 +52,9 @@ record Typed(ExactNumber number, String rest) {
         }
     }
 
-    /** Typographic minus signs and blanks inside numbers, as spreadsheets and papers print them, in plain characters. */
+    /**
+     * Typographic minus signs and blanks inside numbers, as spreadsheets and papers print them, in plain characters.
+     */
     static String plain(String text) {
         return text.replace('\u2212', '-')
                 .replace('\u2013', '-')

@@ -17,11 +17,21 @@ import org.wellwright.solver.units.ExactNumber;
 class DatumTableTest {
     private static ModelDocument document(LabelConvention labels, String... systems) {
         List<PairSystem> pairs = List.of(systems).stream()
-                .map(id -> PairSystem.of(id, ParticleCatalogue.STANDARD.body("e-"), ParticleCatalogue.STANDARD.body("p")))
+                .map(id ->
+                        PairSystem.of(id, ParticleCatalogue.STANDARD.body("e-"), ParticleCatalogue.STANDARD.body("p")))
                 .toList();
         DataGroup lamp = new DataGroup("lamp", "", DataGroup.Kind.PLAIN, null, "");
         return new ModelDocument(
-                "", "", "spectroscopic", labels, Weighting.KNOWN, pairs, List.of(), List.of(), List.of(), List.of(lamp));
+                "",
+                "",
+                "spectroscopic",
+                labels,
+                Weighting.KNOWN,
+                pairs,
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(lamp));
     }
 
     private static List<DatumTable.Outcome> read(String text, ModelDocument document) {
@@ -75,9 +85,11 @@ class DatumTableTest {
     @Test
     void putsTheSystemBeforeEachLevelOfALine() {
         List<DatumTable.Outcome> rows = read(
-                "system\tlevels\tvalue\nb\tv=1 J=0 - v=0 J=0\t2143.27\n", document(LabelConvention.VIBRATIONAL, "a", "b"));
+                "system\tlevels\tvalue\nb\tv=1 J=0 - v=0 J=0\t2143.27\n",
+                document(LabelConvention.VIBRATIONAL, "a", "b"));
         assertThat(rows.get(0).problem()).isNull();
-        assertThat(rows.get(0).datum().levels()).allMatch(c -> c.level().system().equals("b"));
+        assertThat(rows.get(0).datum().levels())
+                .allMatch(c -> c.level().system().equals("b"));
     }
 
     @Test
@@ -98,8 +110,13 @@ class DatumTableTest {
 
     @Test
     void findsTheSeparator() {
-        assertThat(DelimitedText.parse("3p   1.25  0.02\n4p   1.5   0.02").rows().get(0).cells()).containsExactly("3p", "1.25", "0.02");
-        assertThat(DelimitedText.parse("3p - 3s;1,25;0,02\n4p - 3s;1,5;0,02").separator()).isEqualTo(';');
+        assertThat(DelimitedText.parse("3p   1.25  0.02\n4p   1.5   0.02")
+                        .rows()
+                        .get(0)
+                        .cells())
+                .containsExactly("3p", "1.25", "0.02");
+        assertThat(DelimitedText.parse("3p - 3s;1,25;0,02\n4p - 3s;1,5;0,02").separator())
+                .isEqualTo(';');
         assertThat(DelimitedText.parse("").rows()).isEmpty();
     }
 }

@@ -74,7 +74,8 @@ class MeasuredTextTest {
     })
     void printsTheShortForm(String value, String sigma, String text) {
         ExactNumber s = new ExactNumber(sigma);
-        assertThat(MeasuredText.format(new ExactNumber(value), s, s, Datum.Limit.NONE)).isEqualTo(text);
+        assertThat(MeasuredText.format(new ExactNumber(value), s, s, Datum.Limit.NONE))
+                .isEqualTo(text);
         MeasuredText back = MeasuredText.parse(text);
         assertThat(back.value().text()).isEqualTo(value);
         assertThat(back.sigmaPlus().decimal()).isEqualByComparingTo(sigma);

@@ -13,14 +13,19 @@ import org.wellwright.solver.units.UnitSystem;
 class QuantityTextTest {
     @Test
     void keepsADigitForDigitNumberWithoutUnit() {
-        assertThat(QuantityText.parse(" 0.5200 ", "cm^-1", UnitSystem.SPECTROSCOPIC).text()).isEqualTo("0.5200");
-        assertThat(QuantityText.parse("0.5200 cm^-1", "cm^-1", UnitSystem.SPECTROSCOPIC).text()).isEqualTo("0.5200");
+        assertThat(QuantityText.parse(" 0.5200 ", "cm^-1", UnitSystem.SPECTROSCOPIC)
+                        .text())
+                .isEqualTo("0.5200");
+        assertThat(QuantityText.parse("0.5200 cm^-1", "cm^-1", UnitSystem.SPECTROSCOPIC)
+                        .text())
+                .isEqualTo("0.5200");
     }
 
     /** 1 eV = 8065.543937… cm⁻¹ (CODATA 2022, eV-inverse meter relationship 8.065 543 937... x 10^5 m^-1, exact). */
     @Test
     void convertsElectronvoltsIntoAFieldOfWavenumbers() {
-        assertThat(QuantityText.parse("1.2 eV", "cm^-1", UnitSystem.SPECTROSCOPIC).value())
+        assertThat(QuantityText.parse("1.2 eV", "cm^-1", UnitSystem.SPECTROSCOPIC)
+                        .value())
                 .isCloseTo(1.2 * 8065.543937, within(1e-5));
     }
 
@@ -40,7 +45,8 @@ class QuantityTextTest {
 
     @Test
     void readsInverseLengthsBesideWavenumbers() {
-        assertThat(QuantityText.parse("2 nm^-1", "angstrom^-1", UnitSystem.SPECTROSCOPIC).value())
+        assertThat(QuantityText.parse("2 nm^-1", "angstrom^-1", UnitSystem.SPECTROSCOPIC)
+                        .value())
                 .isCloseTo(0.2, within(1e-15));
     }
 }

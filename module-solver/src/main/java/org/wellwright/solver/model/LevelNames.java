@@ -13,18 +13,18 @@ import org.wellwright.solver.pair.PairSystem;
 import org.wellwright.solver.units.Names;
 
 /**
- * The names of levels in one document, by its convention and the label rules of its curves: "3p", "3p3/2", "1^3P_1", "v=0 J=1". Where
- * there are several systems or curves, they stand in front: "HD: v=0 J=1", "HD/upper: v=0 J=1". Immutable.
+ * The names of levels in one document, by its convention and the label rules of its curves: "3p", "3p3/2", "1^3P_1",
+ * "v=0 J=1". Where there are several systems or curves, they stand in front: "HD: v=0 J=1", "HD/upper: v=0 J=1".
+ * Immutable.
  *
  * <p>Every name that {@link #name} gives is understood by {@link #parse}, which also takes "l=1 n_r=0 j=3/2" under any
  * convention, and superscripts and subscripts as papers print them.
  */
 public final class LevelNames {
     private static final String TOTAL = "(?:_?(?<total>\\d+(?:/2)?))?";
-    private static final Pattern LETTERED =
-            Pattern.compile("(?<number>\\d+)\\s*(?<letter>[A-Za-z])" + TOTAL);
-    private static final Pattern LETTERED_WITH_SPIN = Pattern.compile(
-            "(?<number>\\d+)(?:\\s+|\\s*\\^)(?<multiplicity>\\d+)\\s*(?<letter>[A-Za-z])" + TOTAL);
+    private static final Pattern LETTERED = Pattern.compile("(?<number>\\d+)\\s*(?<letter>[A-Za-z])" + TOTAL);
+    private static final Pattern LETTERED_WITH_SPIN =
+            Pattern.compile("(?<number>\\d+)(?:\\s+|\\s*\\^)(?<multiplicity>\\d+)\\s*(?<letter>[A-Za-z])" + TOTAL);
     private static final Pattern VIBRATIONAL =
             Pattern.compile("\\(?\\s*(?:v\\s*=\\s*)?(\\d+)[\\s,]+(?:[JN]\\s*=\\s*)?(\\d+)\\s*\\)?");
     private static final Pattern COUPLED =
@@ -61,7 +61,8 @@ public final class LevelNames {
 
     /** The name with system and curve in front where there are several, or where they are not the document's. */
     public String name(LevelKey key) {
-        boolean showCurve = curves.size() > 1 || curves.size() == 1 && !curves.get(0).name().equals(key.curve());
+        boolean showCurve =
+                curves.size() > 1 || curves.size() == 1 && !curves.get(0).name().equals(key.curve());
         boolean showSystem = systems.size() != 1 || !systems.get(0).equals(key.system());
         if (showCurve) {
             return key.system() + "/" + key.curve() + ": " + shortName(key);
@@ -78,7 +79,8 @@ public final class LevelNames {
         LabelRule rule = rule(key.curve());
         int orbital = channel.orbital();
         if (document.labels() == LabelConvention.VIBRATIONAL) {
-            StringBuilder text = new StringBuilder("v=%d J=%d".formatted(key.index() + rule.vibrationalOffset(), orbital));
+            StringBuilder text =
+                    new StringBuilder("v=%d J=%d".formatted(key.index() + rule.vibrationalOffset(), orbital));
             if (channel.twiceSpin() > 1) {
                 text.append(" S=").append(half(channel.twiceSpin()));
             }
@@ -122,7 +124,10 @@ public final class LevelNames {
     private String system(String named, String whole) {
         if (!named.isEmpty()) {
             if (!systems.contains(named)) {
-                throw fault("the system '%s' is not in this project".formatted(Names.shortened(named)), whole, Names.remedy(named, systems));
+                throw fault(
+                        "the system '%s' is not in this project".formatted(Names.shortened(named)),
+                        whole,
+                        Names.remedy(named, systems));
             }
             return named;
         }
@@ -130,7 +135,10 @@ public final class LevelNames {
             throw fault("there is no pair system yet", whole, "add one first");
         }
         if (systems.size() > 1) {
-            throw fault("there are several systems", whole, "write which one is meant, as '%s: %s'".formatted(systems.get(0), whole));
+            throw fault(
+                    "there are several systems",
+                    whole,
+                    "write which one is meant, as '%s: %s'".formatted(systems.get(0), whole));
         }
         return systems.get(0);
     }
@@ -140,7 +148,10 @@ public final class LevelNames {
             return curves.isEmpty() ? "V" : curves.get(0).name();
         }
         if (curve(named) == null) {
-            throw fault("no model has a curve '%s'".formatted(Names.shortened(named)), whole, Names.remedy(named, curves.stream().map(Curve::name).toList()));
+            throw fault(
+                    "no model has a curve '%s'".formatted(Names.shortened(named)),
+                    whole,
+                    Names.remedy(named, curves.stream().map(Curve::name).toList()));
         }
         return named;
     }
@@ -149,7 +160,8 @@ public final class LevelNames {
         try {
             Matcher matcher = COUPLED.matcher(label);
             if (matcher.matches()) {
-                ChannelKey channel = new ChannelKey(-1, twice(matcher.group(1)), -1, "-".equals(matcher.group(2)) ? -1 : 1);
+                ChannelKey channel =
+                        new ChannelKey(-1, twice(matcher.group(1)), -1, "-".equals(matcher.group(2)) ? -1 : 1);
                 return new LevelKey(system, curve, channel, Integer.parseInt(matcher.group(3)));
             }
             matcher = EXPLICIT.matcher(label);
@@ -172,7 +184,8 @@ public final class LevelNames {
         String base = label;
         int spin = -1;
         int total = -1;
-        Matcher spins = Pattern.compile("(.*?)(?:\\s+S=(\\d+(?:/2)?))?(?:\\s+j=(\\d+(?:/2)?))").matcher(label);
+        Matcher spins = Pattern.compile("(.*?)(?:\\s+S=(\\d+(?:/2)?))?(?:\\s+j=(\\d+(?:/2)?))")
+                .matcher(label);
         if (spins.matches()) {
             base = spins.group(1);
             spin = spins.group(2) == null ? -1 : twice(spins.group(2));
@@ -184,9 +197,14 @@ public final class LevelNames {
         }
         int index = Integer.parseInt(matcher.group(1)) - rule(curve).vibrationalOffset();
         if (index < 0) {
-            throw fault("the lowest level of '%s' is v = %d".formatted(curve, rule(curve).vibrationalOffset()), whole, "");
+            throw fault(
+                    "the lowest level of '%s' is v = %d"
+                            .formatted(curve, rule(curve).vibrationalOffset()),
+                    whole,
+                    "");
         }
-        return new LevelKey(system, curve, channel(Integer.parseInt(matcher.group(2)), spin, total, curve, whole), index);
+        return new LevelKey(
+                system, curve, channel(Integer.parseInt(matcher.group(2)), spin, total, curve, whole), index);
     }
 
     private LevelKey lettered(String label, String whole, String system, String curve) {
@@ -198,16 +216,22 @@ public final class LevelNames {
                 throw fault(
                         "'%s' names no level".formatted(Names.shortened(label)),
                         whole,
-                        document.labels() == LabelConvention.ATOMIC ? "write n and the letter of l, as '3p' or '3p3/2'" : "write n and the letter of L, as '1P'");
+                        document.labels() == LabelConvention.ATOMIC
+                                ? "write n and the letter of l, as '3p' or '3p3/2'"
+                                : "write n and the letter of L, as '1P'");
             }
         }
         int orbital = ChannelLetters.orbital(matcher.group("letter").charAt(0));
         if (orbital < 0) {
-            throw fault("'%s' is not the letter of an l".formatted(matcher.group("letter")), whole, "they are s, p, d, f, g, h, i, k, ...");
+            throw fault(
+                    "'%s' is not the letter of an l".formatted(matcher.group("letter")),
+                    whole,
+                    "they are s, p, d, f, g, h, i, k, ...");
         }
         int multiplicity = withSpin ? Integer.parseInt(matcher.group("multiplicity")) : 0;
         int total = matcher.group("total") == null ? -1 : twice(matcher.group("total"));
-        int lowest = 1 + rule(curve).principalOffset(orbital) + (document.labels() == LabelConvention.ATOMIC ? orbital : 0);
+        int lowest =
+                1 + rule(curve).principalOffset(orbital) + (document.labels() == LabelConvention.ATOMIC ? orbital : 0);
         int index = Integer.parseInt(matcher.group("number")) - lowest;
         if (index < 0) {
             throw fault(
@@ -221,12 +245,17 @@ public final class LevelNames {
     private ChannelKey channel(int orbital, int twiceSpin, int twiceTotal, String curve, String whole) {
         Curve known = curve(curve);
         SpinScheme scheme = known == null
-                ? (twiceSpin >= 0 && twiceTotal >= 0 ? SpinScheme.TWO_SPINS : twiceTotal >= 0 ? SpinScheme.ONE_SPIN : SpinScheme.NONE)
+                ? (twiceSpin >= 0 && twiceTotal >= 0
+                        ? SpinScheme.TWO_SPINS
+                        : twiceTotal >= 0 ? SpinScheme.ONE_SPIN : SpinScheme.NONE)
                 : known.spinScheme();
         return switch (scheme) {
             case NONE -> {
                 if (twiceSpin > 0 || twiceTotal >= 0) {
-                    throw fault("the curve '%s' has no spin".formatted(curve), whole, "leave j out, or give the curve its spins");
+                    throw fault(
+                            "the curve '%s' has no spin".formatted(curve),
+                            whole,
+                            "leave j out, or give the curve its spins");
                 }
                 yield ChannelKey.ofOrbital(orbital);
             }
@@ -236,7 +265,10 @@ public final class LevelNames {
                     throw fault("j is missing", whole, "add it, as '%s%s'".formatted(whole, half(2 * orbital + 1)));
                 }
                 if (total % 2 == 0 || total > 2 * orbital + 1 || total < 2 * orbital - 1) {
-                    throw fault("j = %s does not go with l = %d".formatted(half(total), orbital), whole, "j is l + 1/2 or l - 1/2");
+                    throw fault(
+                            "j = %s does not go with l = %d".formatted(half(total), orbital),
+                            whole,
+                            "j is l + 1/2 or l - 1/2");
                 }
                 yield ChannelKey.ofTotal(orbital, total);
             }
@@ -244,8 +276,14 @@ public final class LevelNames {
                 if (twiceSpin < 0 || twiceTotal < 0) {
                     throw fault("S and J are missing", whole, "write them, as '1^3P_1'");
                 }
-                if (twiceTotal > 2 * orbital + twiceSpin || twiceTotal < Math.abs(2 * orbital - twiceSpin) || (twiceTotal - twiceSpin) % 2 != 0) {
-                    throw fault("J = %s does not go with l = %d, S = %s".formatted(half(twiceTotal), orbital, half(twiceSpin)), whole, "");
+                if (twiceTotal > 2 * orbital + twiceSpin
+                        || twiceTotal < Math.abs(2 * orbital - twiceSpin)
+                        || (twiceTotal - twiceSpin) % 2 != 0) {
+                    throw fault(
+                            "J = %s does not go with l = %d, S = %s"
+                                    .formatted(half(twiceTotal), orbital, half(twiceSpin)),
+                            whole,
+                            "");
                 }
                 yield ChannelKey.ofSpins(orbital, twiceSpin, twiceTotal);
             }
@@ -280,7 +318,9 @@ public final class LevelNames {
     }
 
     private static int twice(String text) {
-        return text.endsWith("/2") ? Integer.parseInt(text.substring(0, text.length() - 2)) : 2 * Integer.parseInt(text);
+        return text.endsWith("/2")
+                ? Integer.parseInt(text.substring(0, text.length() - 2))
+                : 2 * Integer.parseInt(text);
     }
 
     private static String plain(String text) {

@@ -10,8 +10,8 @@ import org.wellwright.solver.units.ExactNumber;
 import org.wellwright.solver.units.Names;
 
 /**
- * Combinations of levels as text: "3p - 3s", "3p → 3s" (the same), "1/3 * 2p1/2 + 2/3 * 2p3/2 - 1s". A coefficient is a decimal
- * number or a fraction of whole numbers.
+ * Combinations of levels as text: "3p - 3s", "3p → 3s" (the same), "1/3 * 2p1/2 + 2/3 * 2p3/2 - 1s". A coefficient is a
+ * decimal number or a fraction of whole numbers.
  */
 public final class LevelSums {
     private static final Pattern COEFFICIENT =
@@ -46,7 +46,8 @@ public final class LevelSums {
      * @throws InvalidModelException if it is empty or a level in it cannot be read
      */
     public static List<Datum.Contribution> parse(String text, LevelNames names) {
-        String plain = text.strip().replace('\u2212', '-').replace('\u2013', '-').replace("->", "→");
+        String plain =
+                text.strip().replace('\u2212', '-').replace('\u2013', '-').replace("->", "→");
         if (plain.isEmpty()) {
             throw new InvalidModelException("no level is named", "", "write one, or a difference of two");
         }
@@ -70,7 +71,9 @@ public final class LevelSums {
         return List.copyOf(found);
     }
 
-    /** A sign ends a level only if what stands before it is one: names of systems and coupled channels hold signs too. */
+    /**
+     * A sign ends a level only if what stands before it is one: names of systems and coupled channels hold signs too.
+     */
     private static boolean readable(String term, LevelNames names) {
         try {
             contribution(term, 1, names);
@@ -91,7 +94,10 @@ public final class LevelSums {
         LevelKey key = names.parse(level);
         ExactNumber coefficient = number(size, sign);
         if (coefficient.sign() == 0) {
-            throw new InvalidModelException("the coefficient of a level is 0", "'" + Names.shortened(term.strip()) + "'", "leave the level out");
+            throw new InvalidModelException(
+                    "the coefficient of a level is 0",
+                    "'" + Names.shortened(term.strip()) + "'",
+                    "leave the level out");
         }
         return new Datum.Contribution(coefficient, key);
     }

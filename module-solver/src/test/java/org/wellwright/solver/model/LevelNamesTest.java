@@ -20,7 +20,8 @@ class LevelNamesTest {
             pairs.add(PairSystem.of(id, ParticleCatalogue.STANDARD.body("e-"), ParticleCatalogue.STANDARD.body("p")));
         }
         List<Model> models = curves.length == 0 ? List.of() : List.of(Model.of("m", List.of(curves)));
-        return new ModelDocument("", "", "atomic", labels, Weighting.KNOWN, pairs, List.of(), models, List.of(), List.of());
+        return new ModelDocument(
+                "", "", "atomic", labels, Weighting.KNOWN, pairs, List.of(), models, List.of(), List.of());
     }
 
     private static Curve curve(String name, SpinScheme scheme, LabelRule rule) {
@@ -42,8 +43,10 @@ class LevelNamesTest {
     @Test
     void hiddenShellsShiftThePrincipalNumber() {
         LabelRule rule = new LabelRule(List.of(new LabelRule.PrincipalOffset(0, 2)), 0);
-        LevelNames names = LevelNames.of(document(LabelConvention.ATOMIC, List.of("x"), curve("V", SpinScheme.NONE, rule)));
-        assertThat(names.shortName(new LevelKey("x", "V", ChannelKey.ofOrbital(0), 0))).isEqualTo("3s");
+        LevelNames names =
+                LevelNames.of(document(LabelConvention.ATOMIC, List.of("x"), curve("V", SpinScheme.NONE, rule)));
+        assertThat(names.shortName(new LevelKey("x", "V", ChannelKey.ofOrbital(0), 0)))
+                .isEqualTo("3s");
         assertThatThrownBy(() -> names.parse("2s")).hasMessageContaining("lowest level with l = 0 is 3s");
     }
 
@@ -54,7 +57,9 @@ class LevelNamesTest {
         assertThat(names.parse("3p3/2").channel()).isEqualTo(ChannelKey.ofTotal(1, 3));
         assertThat(names.name(names.parse("3p3/2"))).isEqualTo("3p3/2");
         assertThat(names.parse("3s").channel()).isEqualTo(ChannelKey.ofTotal(0, 1));
-        assertThatThrownBy(() -> names.parse("3p")).hasMessageContaining("j is missing").hasMessageContaining("3p3/2");
+        assertThatThrownBy(() -> names.parse("3p"))
+                .hasMessageContaining("j is missing")
+                .hasMessageContaining("3p3/2");
         assertThatThrownBy(() -> names.parse("3p5/2")).hasMessageContaining("does not go with l = 1");
     }
 
@@ -88,7 +93,9 @@ class LevelNamesTest {
         assertThat(names.name(key)).isEqualTo("A-2/upper: v=1 J=3");
         assertThat(names.parse("A-2/upper: v=1 J=3")).isEqualTo(key);
         assertThatThrownBy(() -> names.parse("v=1 J=3")).hasMessageContaining("several systems");
-        assertThatThrownBy(() -> names.parse("A-3: v=1 J=3")).hasMessageContaining("A-3").hasMessageContaining("did you mean");
+        assertThatThrownBy(() -> names.parse("A-3: v=1 J=3"))
+                .hasMessageContaining("A-3")
+                .hasMessageContaining("did you mean");
     }
 
     @Test
@@ -116,7 +123,8 @@ class LevelNamesTest {
         assertThat(sum).hasSize(2);
         assertThat(sum.get(1).level().system()).isEqualTo("K-39");
         assertThat(sum.get(1).coefficient().value()).isEqualTo(-1);
-        assertThat(LevelSums.parse("[J=1,-] 0", LevelNames.of(document(LabelConvention.RADIAL, List.of("x"))))).hasSize(1);
+        assertThat(LevelSums.parse("[J=1,-] 0", LevelNames.of(document(LabelConvention.RADIAL, List.of("x")))))
+                .hasSize(1);
     }
 
     @ParameterizedTest
