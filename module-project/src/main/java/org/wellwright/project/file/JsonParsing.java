@@ -74,10 +74,18 @@ final class JsonParsing {
             }
             return new JsonDocument(root, Map.copyOf(parsing.lines));
         } catch (StreamConstraintsException e) {
-            throw new ProjectFileException(new Problem(constraint(e), place(file, e, text), "write it plainer"), e);
+            throw new ProjectFileException(new Problem(constraint(e), file + " line " + parsingLine(e, text), "write it plainer"), e);
         } catch (JacksonException e) {
             throw new ProjectFileException(
                     new Problem("this is not JSON: " + plain(e), place(file, e, text), "mend the line or restore " + SafeFile.backupName(file)), e);
+        }
+    }
+
+    /** A value from a text that {@link JsonWriting#compact} wrote. */
+    static JsonValue fragment(String json) {
+        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), json)) {
+            parser.nextToken();
+            return new JsonParsing(parser).value("");
         }
     }
 
