@@ -44,6 +44,7 @@ final class JsonParsing {
 
     private final JsonParser parser;
     private final Map<String, Integer> lines = new HashMap<>();
+    private int line = 1;
 
     private JsonParsing(JsonParser parser) {
         this.parser = parser;
@@ -62,8 +63,10 @@ final class JsonParsing {
             throw new ProjectFileException(
                     new Problem("the file is empty", file, "restore it from " + SafeFile.backupName(file) + " or start a new project"));
         }
-        try (JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text)) {
-            JsonParsing parsing = new JsonParsing(parser);
+        // A parser of a text in memory holds nothing that must be closed.
+        JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text);
+        JsonParsing parsing = new JsonParsing(parser);
+        try {
             parser.nextToken();
             JsonValue root = parsing.value("");
             if (parser.nextToken() != null) {
@@ -74,7 +77,7 @@ final class JsonParsing {
             }
             return new JsonDocument(root, Map.copyOf(parsing.lines));
         } catch (StreamConstraintsException e) {
-            throw new ProjectFileException(new Problem(constraint(e), file + " line " + parsingLine(e, text), "write it plainer"), e);
+            throw new ProjectFileException(new Problem(constraint(e), file + " line " + parsing.line, "write it plainer"), e);
         } catch (JacksonException e) {
             throw new ProjectFileException(
                     new Problem("this is not JSON: " + plain(e), place(file, e, text), "mend the line or restore " + SafeFile.backupName(file)), e);
@@ -153,7 +156,8 @@ final class JsonParsing {
     }
 
     private void mark(String pointer) {
-        lines.putIfAbsent(pointer, parser.currentTokenLocation().getLineNr());
+        line = parser.currentTokenLocation().getLineNr();
+        lines.putIfAbsent(pointer, line);
     }
 
     private static String constraint(StreamConstraintsException e) {

@@ -25,7 +25,7 @@ final class ProjectFormat {
     /** What version 1 means where a file does not pin an edition; never changed, or old files would change their levels. */
     private static final String CONSTANTS = "CODATA 2022";
 
-    private static final String MASSES = "AME 2020";
+    private static final String MASSES = "CODATA 2022, AME 2020";
 
     private ProjectFormat() {}
 

@@ -21,6 +21,9 @@ final class Spins {
 
     private static int twice(ObjectIn in, String key, JsonValue value) {
         String text = value instanceof JsonText t ? t.value() : value instanceof JsonNumber n ? n.text() : "";
+        if (text.equals("none")) {
+            return -1;
+        }
         try {
             int twice;
             if (text.endsWith("/2")) {

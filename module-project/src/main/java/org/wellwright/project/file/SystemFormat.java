@@ -6,6 +6,7 @@ import org.wellwright.solver.pair.BodyMass;
 import org.wellwright.solver.pair.ExchangeSymmetry;
 import org.wellwright.solver.pair.MassConvention;
 import org.wellwright.solver.pair.PairSystem;
+import org.wellwright.solver.pair.ParticleCatalogue;
 import org.wellwright.solver.units.ExactNumber;
 
 /** Pair systems in project files. */
@@ -33,9 +34,10 @@ final class SystemFormat {
             throw in.fault("a body needs a particle of the catalogue or a mass, and only one of them", "see 'wellwright-batch particles'");
         }
         BodyMass mass = in.has("particle") ? in.make(() -> new BodyMass.Catalogued(in.text("particle"))) : mass(in);
-        String label = in.text("label", label(mass));
-        ExactNumber charge = in.number("charge", ExactNumber.ZERO);
-        int spin = Spins.twice(in, "spin");
+        Body usual = usual(mass);
+        String label = in.text("label", usual.label());
+        ExactNumber charge = in.number("charge", usual.charge());
+        int spin = in.has("spin") ? Spins.twice(in, "spin") : usual.twiceSpin();
         return in.make(() -> new Body(label, mass, charge, spin));
     }
 
@@ -50,11 +52,16 @@ final class SystemFormat {
         return typed.make(() -> new BodyMass.Typed(value, sigma, unit));
     }
 
-    private static String label(BodyMass mass) {
+    /** What a body is where the file says no more than its mass. */
+    private static Body usual(BodyMass mass) {
         if (mass instanceof BodyMass.Catalogued catalogued) {
-            return catalogued.particle();
+            String particle = catalogued.particle();
+            return ParticleCatalogue.STANDARD.contains(particle)
+                    ? ParticleCatalogue.STANDARD.body(particle)
+                    : new Body(particle, mass, ExactNumber.ZERO, -1);
         }
-        return mass instanceof BodyMass.FromParameter parameter ? parameter.parameter() : "";
+        String label = mass instanceof BodyMass.FromParameter parameter ? parameter.parameter() : "";
+        return new Body(label, mass, ExactNumber.ZERO, -1);
     }
 
     static void write(ObjectOut out, PairSystem system) {
@@ -71,7 +78,8 @@ final class SystemFormat {
     }
 
     private static void body(ObjectOut out, Body body) {
-        out.text("label", body.label(), label(body.mass()));
+        Body usual = usual(body.mass());
+        out.text("label", body.label(), usual.label());
         if (body.mass() instanceof BodyMass.Catalogued catalogued) {
             out.text("particle", catalogued.particle());
         } else if (body.mass() instanceof BodyMass.FromParameter parameter) {
@@ -81,6 +89,7 @@ final class SystemFormat {
                     .number("sigma", mass.sigma())
                     .text("unit", mass.unit()));
         }
-        out.number("charge", body.charge(), ExactNumber.ZERO).put("spin", Spins.json(body.twiceSpin()));
+        JsonValue spin = body.twiceSpin() < 0 ? new JsonText("none") : Spins.json(body.twiceSpin());
+        out.number("charge", body.charge(), usual.charge()).put("spin", body.twiceSpin() == usual.twiceSpin() ? null : spin);
     }
 }
