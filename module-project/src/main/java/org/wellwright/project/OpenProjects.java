@@ -8,7 +8,8 @@ import org.openide.util.Lookup;
 /**
  * The projects that are open: {@code Lookup.getDefault().lookup(OpenProjects.class)}.
  *
- * <p>Its own Lookup holds the selected {@link ProjectSession} and the {@link Selection} in it; every window listens to that. Safe for use by any thread.
+ * <p>Its own Lookup holds the selected {@link ProjectSession} and the {@link FigureSelection} in it; every window
+ * listens to that. Safe for use by any thread.
  */
 public interface OpenProjects extends Lookup.Provider {
     /** All of them, in the order they were opened. */
@@ -21,7 +22,7 @@ public interface OpenProjects extends Lookup.Provider {
     void select(ProjectSession session);
 
     /** Selects a model and levels in the selected project. */
-    void select(Selection selection);
+    void select(FigureSelection selection);
 
     /**
      * Opens a file and selects it; one that is open already is only selected.
@@ -36,12 +37,14 @@ public interface OpenProjects extends Lookup.Provider {
     /**
      * Saves a project in its file.
      *
-     * @throws org.wellwright.solver.WellwrightException if it has none, if the file was changed by someone else since, or cannot be written
+     * @throws org.wellwright.solver.WellwrightException if it has none, if the file was changed by someone else since,
+     *     or cannot be written
      */
     void save(ProjectSession session);
 
     /**
-     * Saves a project in a file, whatever is there; the previous content is kept as NAME.bak. The session then belongs to that file.
+     * Saves a project in a file, whatever is there; the previous content is kept as NAME.bak. The session then belongs
+     * to that file.
      *
      * @throws org.wellwright.solver.WellwrightException if it cannot be written
      */

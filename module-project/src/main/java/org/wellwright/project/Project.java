@@ -19,7 +19,8 @@ import org.wellwright.solver.model.ModelDocument;
  * @param views state of windows by the id of its {@link ViewStateProvider}: cameras, axes, selections; in no digest
  * @param trace what the file said beyond the model
  */
-public record Project(String title, ModelDocument document, String notes, Map<String, Map<String, String>> views, FileTrace trace) {
+public record Project(
+        String title, ModelDocument document, String notes, Map<String, Map<String, String>> views, FileTrace trace) {
     /** Copies the views. */
     public Project {
         Objects.requireNonNull(title, "title");
@@ -61,15 +62,22 @@ public record Project(String title, ModelDocument document, String notes, Map<St
         return new Project(title, document, notes, views, newTrace);
     }
 
-    /** SHA-256 of the document: 64 hexadecimal digits, equal for all projects that give the same levels, comparison and fit. */
+    /**
+     * SHA-256 of the document: 64 hexadecimal digits, equal for all projects that give the same levels, comparison and
+     * fit.
+     */
     public String digest() {
-        // The document is records, lists and ordered maps all the way down, so its text is complete and the same everywhere.
+        // The document is records, lists and ordered maps all the way down, so its text is complete and the same
+        // everywhere.
         return sha256(document.toString());
     }
 
     /** Whether two projects hold the same but for their views. */
     public boolean sameContent(Project other) {
-        return title.equals(other.title) && notes.equals(other.notes) && document.equals(other.document) && trace.equals(other.trace);
+        return title.equals(other.title)
+                && notes.equals(other.notes)
+                && document.equals(other.document)
+                && trace.equals(other.trace);
     }
 
     private static String sha256(String text) {

@@ -12,8 +12,8 @@ import org.openide.util.lookup.AbstractLookup;
 import org.openide.util.lookup.InstanceContent;
 
 /**
- * One open project: the present snapshot, what can be undone and redone, and whether it is saved. Safe for use by any thread; listeners are called on the
- * thread that made the change.
+ * One open project: the present snapshot, what can be undone and redone, and whether it is saved. Safe for use by any
+ * thread; listeners are called on the thread that made the change.
  *
  * <p>Its Lookup holds what others publish about it, such as solved spectra; {@link #content} is how they do that.
  */
@@ -37,7 +37,8 @@ public final class ProjectSession implements Lookup.Provider {
      * @param file where it was read from, or null if it never was in a file
      */
     public ProjectSession(Project project, Path file) {
-        this.state = new AtomicReference<>(new State(Objects.requireNonNull(project, "project"), project, file, null, null));
+        this.state =
+                new AtomicReference<>(new State(Objects.requireNonNull(project, "project"), project, file, null, null));
     }
 
     /** The present snapshot. */
@@ -68,7 +69,8 @@ public final class ProjectSession implements Lookup.Provider {
     /**
      * Changes the project as one undoable step.
      *
-     * @param change makes the next snapshot from the present one; called again if another thread was faster, so it must depend on nothing else
+     * @param change makes the next snapshot from the present one; called again if another thread was faster, so it must
+     *     depend on nothing else
      * @return whether the project is different now
      */
     public boolean edit(String label, UnaryOperator<Project> change) {
@@ -76,7 +78,8 @@ public final class ProjectSession implements Lookup.Provider {
     }
 
     /**
-     * Changes the project; consecutive changes by the same gesture (a drag, a burst of typing in one field) are one undoable step.
+     * Changes the project; consecutive changes by the same gesture (a drag, a burst of typing in one field) are one
+     * undoable step.
      *
      * @param gesture identity of the gesture, compared with equals; null for a step of its own
      * @return whether the project is different now
@@ -86,7 +89,8 @@ public final class ProjectSession implements Lookup.Provider {
     }
 
     /**
-     * Changes the project as one undoable step, unless its document is no longer the one that the change was computed from.
+     * Changes the project as one undoable step, unless its document is no longer the one that the change was computed
+     * from.
      *
      * @param digest {@link Project#digest} of the project that the change belongs to
      * @return false if the document has another digest by now; nothing is changed then
@@ -106,7 +110,9 @@ public final class ProjectSession implements Lookup.Provider {
             if (next.equals(now.project())) {
                 return false;
             }
-            boolean merged = gesture != null && now.undo() != null && gesture.equals(now.undo().gesture());
+            boolean merged = gesture != null
+                    && now.undo() != null
+                    && gesture.equals(now.undo().gesture());
             Step undo = merged ? now.undo() : step(label, gesture, now.project(), now.undo());
             if (state.compareAndSet(now, new State(next, now.saved(), now.file(), undo, null))) {
                 fire();
@@ -173,8 +179,8 @@ public final class ProjectSession implements Lookup.Provider {
 
     /** Puts the state of the windows into the snapshot: no step, no mark for unsaved changes. */
     public void putViews(java.util.Map<String, java.util.Map<String, String>> views) {
-        state.updateAndGet(now ->
-                new State(now.project().withViews(views), now.saved(), now.file(), now.undo(), now.redo()));
+        state.updateAndGet(
+                now -> new State(now.project().withViews(views), now.saved(), now.file(), now.undo(), now.redo()));
     }
 
     /**
@@ -183,7 +189,8 @@ public final class ProjectSession implements Lookup.Provider {
      * @param file where it is now
      */
     public void markSaved(Project project, Path file) {
-        state.updateAndGet(now -> new State(now.project(), project, Objects.requireNonNull(file, "file"), now.undo(), now.redo()));
+        state.updateAndGet(
+                now -> new State(now.project(), project, Objects.requireNonNull(file, "file"), now.undo(), now.redo()));
         fire();
     }
 

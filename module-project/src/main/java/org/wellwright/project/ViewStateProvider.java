@@ -2,7 +2,10 @@ package org.wellwright.project;
 
 import java.util.Map;
 
-/** A window whose state (camera, axes, selection) is kept with a project. Found by Lookup when a project is saved and after it was opened. */
+/**
+ * A window whose state (camera, axes, selection) is kept with a project. Found by Lookup when a project is saved and
+ * after it was opened.
+ */
 public interface ViewStateProvider {
     /** Identifier in project files, unique and stable ("org.wellwright.viewer.levels"). */
     String id();

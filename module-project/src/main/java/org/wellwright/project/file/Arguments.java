@@ -9,7 +9,10 @@ import org.wellwright.project.file.JsonValue.JsonText;
 import org.wellwright.solver.potential.Argument;
 import org.wellwright.solver.units.ExactNumber;
 
-/** What stands for a parameter of a term: a name of the pool, a number, or {"value": number, "unit": text}; null is "no limit". */
+/**
+ * What stands for a parameter of a term: a name of the pool, a number, or {"value": number, "unit": text}; null is "no
+ * limit".
+ */
 final class Arguments {
     private Arguments() {}
 

@@ -24,12 +24,27 @@ final class DatumFormat {
      */
     static Datum read(ObjectIn in, String onlySystem) {
         in.knowing(
-                "id", "levels", "denominator", "transform", "radiusPower", "multipole", "value", "unit", "sigma", "sigmaMinus", "sigmaPlus",
-                "limit", "groups", "source", "used", "reason");
+                "id",
+                "levels",
+                "denominator",
+                "transform",
+                "radiusPower",
+                "multipole",
+                "value",
+                "unit",
+                "sigma",
+                "sigmaMinus",
+                "sigmaPlus",
+                "limit",
+                "groups",
+                "source",
+                "used",
+                "reason");
         Transform transform = in.choice("transform", Transform.class, Transform.NONE);
         List<Datum.Contribution> levels = in.items("levels", item -> contribution(item, onlySystem));
         List<Datum.Contribution> denominator = in.items("denominator", item -> contribution(item, onlySystem));
-        if (levels.size() < in.list("levels").size() || denominator.size() < in.list("denominator").size()) {
+        if (levels.size() < in.list("levels").size()
+                || denominator.size() < in.list("denominator").size()) {
             throw new Faults.Noted();
         }
         Datum.Detail usual = Datum.Detail.STANDARD;
@@ -41,7 +56,8 @@ final class DatumFormat {
             throw in.fault("'unit' is missing", "add the unit of the value");
         }
         if (in.has("sigma") && (in.has("sigmaMinus") || in.has("sigmaPlus"))) {
-            throw in.fault("sigma", "'sigma' stands beside 'sigmaMinus' or 'sigmaPlus'", "keep 'sigma', or both others");
+            throw in.fault(
+                    "sigma", "'sigma' stands beside 'sigmaMinus' or 'sigmaPlus'", "keep 'sigma', or both others");
         }
         ExactNumber both = in.number("sigma", null);
         ExactNumber minus = in.number("sigmaMinus", both);
@@ -52,8 +68,20 @@ final class DatumFormat {
         boolean used = in.flag("used", true);
         String reason = in.text("reason", "");
         return in.make(() -> new Datum(
-                in.name(), levels, denominator, transform, new Datum.Detail(power, multipole), value, unit, minus, plus, limit, groups, source,
-                used, reason));
+                in.name(),
+                levels,
+                denominator,
+                transform,
+                new Datum.Detail(power, multipole),
+                value,
+                unit,
+                minus,
+                plus,
+                limit,
+                groups,
+                source,
+                used,
+                reason));
     }
 
     private static Datum.Contribution contribution(ObjectIn in, String onlySystem) {
@@ -61,7 +89,8 @@ final class DatumFormat {
         ExactNumber coefficient = in.number("coefficient", ExactNumber.ONE);
         String system = in.text("system", onlySystem);
         if (system.isEmpty()) {
-            throw in.fault("'system' is missing", "the project has several systems: name the one this level belongs to");
+            throw in.fault(
+                    "'system' is missing", "the project has several systems: name the one this level belongs to");
         }
         String curve = in.text("curve", ModelFormat.CURVE);
         ChannelKey channel = Spins.channel(in);
@@ -78,7 +107,11 @@ final class DatumFormat {
                 .integer("radiusPower", datum.detail().radiusPower(), Datum.Detail.STANDARD.radiusPower())
                 .integer("multipole", datum.detail().multipole(), Datum.Detail.STANDARD.multipole())
                 .number("value", datum.value())
-                .put("unit", datum.transform() == Transform.RATIO && datum.unit().isEmpty() ? null : new JsonValue.JsonText(datum.unit()))
+                .put(
+                        "unit",
+                        datum.transform() == Transform.RATIO && datum.unit().isEmpty()
+                                ? null
+                                : new JsonValue.JsonText(datum.unit()))
                 .number("sigma", symmetric ? datum.sigmaPlus() : null)
                 .number("sigmaMinus", symmetric ? null : datum.sigmaMinus())
                 .number("sigmaPlus", symmetric ? null : datum.sigmaPlus())

@@ -14,10 +14,10 @@ import org.openide.util.Lookup;
 import org.openide.util.lookup.AbstractLookup;
 import org.openide.util.lookup.InstanceContent;
 import org.openide.util.lookup.ServiceProvider;
+import org.wellwright.project.FigureSelection;
 import org.wellwright.project.OpenProjects;
 import org.wellwright.project.Project;
 import org.wellwright.project.ProjectSession;
-import org.wellwright.project.Selection;
 import org.wellwright.solver.Problem;
 
 /** The open projects, kept in project files. */
@@ -29,7 +29,7 @@ public final class FileProjects implements OpenProjects {
     private final InstanceContent content = new InstanceContent();
     private final Lookup lookup = new AbstractLookup(content);
     private ProjectSession selected;
-    private Selection selection = Selection.NONE;
+    private FigureSelection selection = FigureSelection.NONE;
 
     @Override
     public List<ProjectSession> sessions() {
@@ -55,13 +55,13 @@ public final class FileProjects implements OpenProjects {
                 return;
             }
             selected = session;
-            selection = Selection.NONE;
+            selection = FigureSelection.NONE;
         }
         publish();
     }
 
     @Override
-    public void select(Selection newSelection) {
+    public void select(FigureSelection newSelection) {
         synchronized (lock) {
             if (selected == null) {
                 return;
@@ -74,16 +74,15 @@ public final class FileProjects implements OpenProjects {
     @Override
     public ProjectSession open(Path file) {
         Path place = place(file);
-        synchronized (lock) {
-            for (ProjectSession session : sessions) {
-                if (session.file().filter(place::equals).isPresent()) {
-                    select(session);
-                    return session;
-                }
+        for (ProjectSession session : sessions()) {
+            if (session.file().filter(place::equals).isPresent()) {
+                select(session);
+                return session;
             }
         }
         byte[] bytes = SafeFile.read(place);
-        ProjectSession session = new ProjectSession(ProjectFile.parse(bytes, file.toString()).project(), place);
+        ProjectSession session =
+                new ProjectSession(ProjectFile.parse(bytes, file.toString()).project(), place);
         return add(session, bytes);
     }
 
@@ -112,7 +111,9 @@ public final class FileProjects implements OpenProjects {
         }
         if (Files.exists(file) && known != null && !Arrays.equals(SafeFile.read(file), known)) {
             throw new ProjectFileException(new Problem(
-                    "the file was changed by someone else since it was opened", file.toString(), "save it under another name, or open it again"));
+                    "the file was changed by someone else since it was opened",
+                    file.toString(),
+                    "save it under another name, or open it again"));
         }
         saveAs(session, file);
     }
@@ -140,7 +141,7 @@ public final class FileProjects implements OpenProjects {
             onDisk.remove(session);
             if (selected == session) {
                 selected = sessions.isEmpty() ? null : sessions.get(Math.min(position, sessions.size() - 1));
-                selection = Selection.NONE;
+                selection = FigureSelection.NONE;
             }
         }
         publish();

@@ -55,13 +55,16 @@ final class JsonParsing {
      *
      * @param bytes UTF-8, with or without a byte order mark
      * @param file name for messages
-     * @throws ProjectFileException if it is empty, not UTF-8, not JSON, or nested deeper than {@link #NESTING}; names the line
+     * @throws ProjectFileException if it is empty, not UTF-8, not JSON, or nested deeper than {@link #NESTING}; names
+     *     the line
      */
     static JsonDocument parse(byte[] bytes, String file) {
         String text = decode(bytes, file);
         if (text.isBlank()) {
-            throw new ProjectFileException(
-                    new Problem("the file is empty", file, "restore it from " + SafeFile.backupName(file) + " or start a new project"));
+            throw new ProjectFileException(new Problem(
+                    "the file is empty",
+                    file,
+                    "restore it from " + SafeFile.backupName(file) + " or start a new project"));
         }
         // A parser of a text in memory holds nothing that must be closed.
         JsonParser parser = FACTORY.createParser(ObjectReadContext.empty(), text);
@@ -77,10 +80,15 @@ final class JsonParsing {
             }
             return new JsonDocument(root, Map.copyOf(parsing.lines));
         } catch (StreamConstraintsException e) {
-            throw new ProjectFileException(new Problem(constraint(e), file + " line " + parsing.line, "write it plainer"), e);
+            throw new ProjectFileException(
+                    new Problem(constraint(e), file + " line " + parsing.line, "write it plainer"), e);
         } catch (JacksonException e) {
             throw new ProjectFileException(
-                    new Problem("this is not JSON: " + plain(e), place(file, e, text), "mend the line or restore " + SafeFile.backupName(file)), e);
+                    new Problem(
+                            "this is not JSON: " + plain(e),
+                            place(file, e, text),
+                            "mend the line or restore " + SafeFile.backupName(file)),
+                    e);
         }
     }
 
@@ -93,7 +101,9 @@ final class JsonParsing {
     }
 
     private static String decode(byte[] bytes, String file) {
-        int start = bytes.length >= 3 && bytes[0] == (byte) 0xEF && bytes[1] == (byte) 0xBB && bytes[2] == (byte) 0xBF ? 3 : 0;
+        int start = bytes.length >= 3 && bytes[0] == (byte) 0xEF && bytes[1] == (byte) 0xBB && bytes[2] == (byte) 0xBF
+                ? 3
+                : 0;
         ByteBuffer in = ByteBuffer.wrap(bytes, start, bytes.length - start);
         try {
             return StandardCharsets.UTF_8

@@ -73,7 +73,10 @@ public sealed interface JsonValue {
             Objects.requireNonNull(text, "text");
         }
 
-        /** The shortest spelling of a finite double that reads back to the same bits; whole numbers below 10⁷ without a decimal point. */
+        /**
+         * The shortest spelling of a finite double that reads back to the same bits; whole numbers below 10⁷ without a
+         * decimal point.
+         */
         public static JsonNumber of(double value) {
             if (!Double.isFinite(value)) {
                 throw new IllegalArgumentException("JSON has no spelling for " + value);

@@ -9,8 +9,9 @@ import org.wellwright.project.file.JsonValue.JsonText;
 import tools.jackson.core.io.JsonStringEncoder;
 
 /**
- * Writes JSON values in one fixed layout: what fits a line of {@value #WIDTH} columns stands on one line, everything else has one member or item a
- * line, indented by two spaces; the text ends with a line feed. Equal values give equal bytes.
+ * Writes JSON values in one fixed layout: what fits a line of {@value #WIDTH} columns stands on one line, everything
+ * else has one member or item a line, indented by two spaces; the text ends with a line feed. Equal values give equal
+ * bytes.
  */
 final class JsonWriting {
     private static final int WIDTH = 120;
@@ -104,6 +105,10 @@ final class JsonWriting {
 
     private static String quoted(String text) {
         char[] escaped = JsonStringEncoder.getInstance().quoteAsCharArray(text);
-        return new StringBuilder(escaped.length + 2).append('"').append(escaped).append('"').toString();
+        return new StringBuilder(escaped.length + 2)
+                .append('"')
+                .append(escaped)
+                .append('"')
+                .toString();
     }
 }

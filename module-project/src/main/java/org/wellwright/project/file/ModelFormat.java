@@ -115,8 +115,12 @@ final class ModelFormat {
     }
 
     private static void labels(ObjectOut out, LabelRule rule) {
-        out.items("principalOffsets", rule.principalOffsets(), null, (item, offset) -> item.integer("l", offset.orbital(), -1)
-                        .put("add", JsonValue.JsonNumber.of(offset.offset())))
+        out.items(
+                        "principalOffsets",
+                        rule.principalOffsets(),
+                        null,
+                        (item, offset) -> item.integer("l", offset.orbital(), -1)
+                                .put("add", JsonValue.JsonNumber.of(offset.offset())))
                 .integer("vibrationalOffset", rule.vibrationalOffset(), 0);
     }
 

@@ -20,8 +20,8 @@ import org.wellwright.project.file.JsonValue.JsonText;
 import org.wellwright.solver.units.ExactNumber;
 
 /**
- * One object of a project file while it is read. Asking for a member of the wrong type notes a fault with pointer and line. A member that is null counts
- * as absent.
+ * One object of a project file while it is read. Asking for a member of the wrong type notes a fault with pointer and
+ * line. A member that is null counts as absent.
  */
 final class ObjectIn {
     private final Reading reading;
@@ -64,7 +64,10 @@ final class ObjectIn {
         if (value instanceof JsonObject object) {
             return new ObjectIn(reading, object, "", "", "");
         }
-        throw reading.faults.note("", "a project file holds an object, this holds " + value.kind(), "start it with {\"format\": \"wellwright-project\"");
+        throw reading.faults.note(
+                "",
+                "a project file holds an object, this holds " + value.kind(),
+                "start it with {\"format\": \"wellwright-project\"");
     }
 
     /** Says which keys are known; the others are kept as they are. */
@@ -228,7 +231,9 @@ final class ObjectIn {
         for (JsonValue item : list(key)) {
             if (!(item instanceof JsonText text)) {
                 throw reading.faults.note(
-                        pointer + "/" + JsonDocument.step(key) + "/" + position, "a text is expected here, not " + item.kind(), "");
+                        pointer + "/" + JsonDocument.step(key) + "/" + position,
+                        "a text is expected here, not " + item.kind(),
+                        "");
             }
             texts.add(text.value());
             position++;
@@ -273,7 +278,9 @@ final class ObjectIn {
                 if (!(item instanceof JsonObject member)) {
                     throw reading.faults.note(place, "an object is expected here, not " + item.kind(), "");
                 }
-                String given = member.members().get(identity) instanceof JsonText text ? text.value() : unnamed.apply(position);
+                String given = member.members().get(identity) instanceof JsonText text
+                        ? text.value()
+                        : unnamed.apply(position);
                 items.add(read.apply(new ObjectIn(reading, member, place, path + "/" + key + "/" + given, given)));
             } catch (Faults.Noted noted) {
                 // The fault is in the list already; the next item may have another.

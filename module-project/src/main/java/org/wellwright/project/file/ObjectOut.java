@@ -15,7 +15,10 @@ import org.wellwright.project.file.JsonValue.JsonObject;
 import org.wellwright.project.file.JsonValue.JsonText;
 import org.wellwright.solver.units.ExactNumber;
 
-/** One object of a project file while it is written: members in a fixed order, defaults left out, unknown members back in their places. */
+/**
+ * One object of a project file while it is written: members in a fixed order, defaults left out, unknown members back
+ * in their places.
+ */
 final class ObjectOut {
     private final FileTrace trace;
     private final String path;
@@ -78,7 +81,9 @@ final class ObjectOut {
     /** A double in the spelling that it had in the file, if it still has that value. */
     JsonNumber real(String step, double value) {
         String spelling = trace.spellings().get(path + step);
-        return spelling != null && Double.parseDouble(spelling) == value ? new JsonNumber(spelling) : JsonNumber.of(value);
+        return spelling != null && Double.parseDouble(spelling) == value
+                ? new JsonNumber(spelling)
+                : JsonNumber.of(value);
     }
 
     /** Texts; an empty list is left out. */

@@ -9,7 +9,8 @@ import org.wellwright.solver.model.Setting;
 import org.wellwright.solver.units.ExactNumber;
 
 /**
- * Parameters of the pool in project files: one number ("value"), or "byL", "byLJ", "bySystem" with "others", or "massScaled" with "value", or "tied".
+ * Parameters of the pool in project files: one number ("value"), or "byL", "byLJ", "bySystem" with "others", or
+ * "massScaled" with "value", or "tied".
  */
 final class ParameterFormat {
     private static final String[] SETTING = {"value", "free", "min", "max", "prior"};
@@ -35,7 +36,8 @@ final class ParameterFormat {
         }
         if (given.size() > 1 || given.size() == 1 && (in.has("value") || in.has("massScaled"))) {
             throw in.fault(
-                    "the parameter is given in two ways", "keep one of 'value', 'byL', 'byLJ', 'bySystem', 'massScaled' with 'value', 'tied'");
+                    "the parameter is given in two ways",
+                    "keep one of 'value', 'byL', 'byLJ', 'bySystem', 'massScaled' with 'value', 'tied'");
         }
         String shape = given.isEmpty() ? "" : given.get(0);
         return switch (shape) {
@@ -124,24 +126,42 @@ final class ParameterFormat {
     }
 
     static void write(ObjectOut out, Parameter parameter) {
-        out.text("name", parameter.name()).text("unit", parameter.unit(), "").text("convention", parameter.convention(), "");
+        out.text("name", parameter.name())
+                .text("unit", parameter.unit(), "")
+                .text("convention", parameter.convention(), "");
         ParameterShape shape = parameter.shape();
         if (shape instanceof ParameterShape.Scalar scalar) {
             setting(out, scalar.setting());
         } else if (shape instanceof ParameterShape.ByOrbital by) {
-            out.items("byL", by.entries(), null, (item, entry) -> setting(item.integer("l", entry.orbital(), -1), entry.setting()));
+            out.items(
+                    "byL",
+                    by.entries(),
+                    null,
+                    (item, entry) -> setting(item.integer("l", entry.orbital(), -1), entry.setting()));
             others(out, by.others());
         } else if (shape instanceof ParameterShape.ByTotal by) {
-            out.items("byLJ", by.entries(), null, (item, entry) -> setting(
-                    item.integer("l", entry.orbital(), -1).put("j", Spins.json(entry.twiceTotal())), entry.setting()));
+            out.items(
+                    "byLJ",
+                    by.entries(),
+                    null,
+                    (item, entry) -> setting(
+                            item.integer("l", entry.orbital(), -1).put("j", Spins.json(entry.twiceTotal())),
+                            entry.setting()));
             others(out, by.others());
         } else if (shape instanceof ParameterShape.BySystem by) {
-            out.items("bySystem", by.entries(), null, (item, entry) -> setting(item.text("system", entry.system()), entry.setting()));
+            out.items(
+                    "bySystem",
+                    by.entries(),
+                    null,
+                    (item, entry) -> setting(item.text("system", entry.system()), entry.setting()));
             others(out, by.others());
         } else if (shape instanceof ParameterShape.MassScaled scaled) {
             setting(out, scaled.setting());
-            out.object("massScaled", scaled, (item, s) -> item.text("reference", s.reference())
-                    .put("exponent", item.real("/exponent", s.exponent())));
+            out.object(
+                    "massScaled",
+                    scaled,
+                    (item, s) -> item.text("reference", s.reference())
+                            .put("exponent", item.real("/exponent", s.exponent())));
         } else if (shape instanceof ParameterShape.Tied tied) {
             out.text("tied", tied.formula());
         }
@@ -159,7 +179,10 @@ final class ParameterFormat {
                 .number("min", setting.lower())
                 .number("max", setting.upper());
         if (setting.prior() != null) {
-            out.object("prior", setting.prior(), (item, prior) -> item.number("value", prior.value()).number("sigma", prior.sigma()));
+            out.object(
+                    "prior",
+                    setting.prior(),
+                    (item, prior) -> item.number("value", prior.value()).number("sigma", prior.sigma()));
         }
     }
 }

@@ -26,7 +26,8 @@ public final class ProjectFile {
     }
 
     /**
-     * Reads a project. Checks everything that the file says by itself; what refers to something else is checked where it is used.
+     * Reads a project. Checks everything that the file says by itself; what refers to something else is checked where
+     * it is used.
      *
      * @throws ProjectFileException with every fault found, each with line and JSON pointer
      */

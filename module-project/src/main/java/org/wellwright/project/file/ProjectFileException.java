@@ -4,7 +4,10 @@ import java.util.List;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.WellwrightException;
 
-/** A file that cannot be used: unreadable, not JSON, against the format, or naming what is not there. Each fault has its place. Exit status 2. */
+/**
+ * A file that cannot be used: unreadable, not JSON, against the format, or naming what is not there. Each fault has its
+ * place. Exit status 2.
+ */
 public final class ProjectFileException extends WellwrightException {
     private static final long serialVersionUID = 1L;
 

@@ -22,7 +22,9 @@ final class ProjectFormat {
     static final String FORMAT = "wellwright-project";
     static final int VERSION = 1;
 
-    /** What version 1 means where a file does not pin an edition; never changed, or old files would change their levels. */
+    /**
+     * What version 1 means where a file does not pin an edition; never changed, or old files would change their levels.
+     */
     private static final String CONSTANTS = "CODATA 2022";
 
     private static final String MASSES = "CODATA 2022, AME 2020";
@@ -31,19 +33,37 @@ final class ProjectFormat {
 
     static Project read(ObjectIn in, ObjectIn.Reading reading) {
         if (!FORMAT.equals(in.text("format", ""))) {
-            throw in.fault("format", "this is not a Wellwright project: 'format' is not \"" + FORMAT + "\"", "add \"format\": \"" + FORMAT + "\"");
+            throw in.fault(
+                    "format",
+                    "this is not a Wellwright project: 'format' is not \"" + FORMAT + "\"",
+                    "add \"format\": \"" + FORMAT + "\"");
         }
         int version = in.integer("version");
         if (version > VERSION) {
             throw in.fault(
-                    "version", "the file has format version " + version + ", this program reads up to " + VERSION, "open it with a newer Wellwright");
+                    "version",
+                    "the file has format version " + version + ", this program reads up to " + VERSION,
+                    "open it with a newer Wellwright");
         }
         if (version < 1) {
             throw in.fault("version", "the format version is " + version, "the first is 1");
         }
         in.knowing(
-                "format", "version", "title", "constantsEdition", "massTable", "units", "labels", "weighting", "notes", "systems", "parameters",
-                "models", "groups", "data", "views");
+                "format",
+                "version",
+                "title",
+                "constantsEdition",
+                "massTable",
+                "units",
+                "labels",
+                "weighting",
+                "notes",
+                "systems",
+                "parameters",
+                "models",
+                "groups",
+                "data",
+                "views");
         List<PairSystem> systems = in.items("systems", "id", Integer::toString, SystemFormat::read);
         String only = systems.size() == 1 ? systems.get(0).id() : "";
         List<Parameter> parameters = in.items("parameters", "name", Integer::toString, ParameterFormat::read);
@@ -73,7 +93,10 @@ final class ProjectFormat {
             Map<String, JsonValue> members = state instanceof JsonObject object ? object.members() : Map.of("", state);
             members.forEach((key, value) -> {
                 if (!(value instanceof JsonText text)) {
-                    throw in.fault("views", "the view '" + id + "' is not an object of texts", "remove it; the windows then start afresh");
+                    throw in.fault(
+                            "views",
+                            "the view '" + id + "' is not an object of texts",
+                            "remove it; the windows then start afresh");
                 }
                 texts.put(key, text.value());
             });
@@ -101,8 +124,11 @@ final class ProjectFormat {
                 .items("parameters", document.parameters(), Parameter::name, ParameterFormat::write)
                 .items("models", document.models(), Model::name, ModelFormat::write)
                 .items("groups", document.groups(), DataGroup::id, DatumFormat::writeGroup)
-                .items("data", document.data(), Datum::id, (item, datum) ->
-                        DatumFormat.write(item, datum, DatumFormat.unnamed(position[0]++), only));
+                .items(
+                        "data",
+                        document.data(),
+                        Datum::id,
+                        (item, datum) -> DatumFormat.write(item, datum, DatumFormat.unnamed(position[0]++), only));
         Map<String, JsonValue> views = new LinkedHashMap<>();
         project.views().forEach((id, state) -> {
             Map<String, JsonValue> texts = new LinkedHashMap<>();

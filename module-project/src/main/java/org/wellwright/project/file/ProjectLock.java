@@ -14,8 +14,8 @@ import java.time.temporal.ChronoUnit;
 import org.wellwright.solver.Problem;
 
 /**
- * The right to write a project: a lock of the operating system on NAME.wellwright.lock, which ends with its owner whatever becomes of it. Readers need
- * none.
+ * The right to write a project: a lock of the operating system on NAME.wellwright.lock, which ends with its owner
+ * whatever becomes of it. Readers need none.
  */
 public final class ProjectLock implements AutoCloseable {
     private final Path file;
@@ -33,20 +33,24 @@ public final class ProjectLock implements AutoCloseable {
      */
     public static ProjectLock take(Path project) {
         Path file = project.resolveSibling(project.getFileName() + ".lock");
-        String owner = "process " + ProcessHandle.current().pid() + " since " + Instant.now().truncatedTo(ChronoUnit.MILLIS) + " #" + System.nanoTime();
+        String owner = "process " + ProcessHandle.current().pid() + " since "
+                + Instant.now().truncatedTo(ChronoUnit.MILLIS) + " #" + System.nanoTime();
         try {
             while (true) {
-                FileChannel channel =
-                        FileChannel.open(file, StandardOpenOption.CREATE, StandardOpenOption.READ, StandardOpenOption.WRITE);
+                FileChannel channel = FileChannel.open(
+                        file, StandardOpenOption.CREATE, StandardOpenOption.READ, StandardOpenOption.WRITE);
                 FileLock lock = attempt(channel);
                 if (lock == null) {
                     channel.close();
-                    throw new ProjectFileException(
-                            new Problem("the project is being written by " + owner(file), project.toString(), "close it there, then try again"));
+                    throw new ProjectFileException(new Problem(
+                            "the project is being written by " + owner(file),
+                            project.toString(),
+                            "close it there, then try again"));
                 }
                 channel.truncate(0);
                 channel.write(ByteBuffer.wrap(owner.getBytes(StandardCharsets.UTF_8)));
-                // A former owner may have removed the file between opening and locking it; then the lock is on a file that nobody finds.
+                // A former owner may have removed the file between opening and locking it; then the lock is on a file
+                // that nobody finds.
                 if (Files.exists(file) && Files.readString(file).equals(owner)) {
                     return new ProjectLock(file, channel);
                 }
@@ -54,7 +58,11 @@ public final class ProjectLock implements AutoCloseable {
             }
         } catch (IOException e) {
             throw new ProjectFileException(
-                    new Problem("the project cannot be locked: " + SafeFile.reason(e), project.toString(), "check the folder's permissions"), e);
+                    new Problem(
+                            "the project cannot be locked: " + SafeFile.reason(e),
+                            project.toString(),
+                            "check the folder's permissions"),
+                    e);
         }
     }
 

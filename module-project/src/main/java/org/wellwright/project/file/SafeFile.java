@@ -16,7 +16,8 @@ import org.wellwright.solver.Problem;
 /**
  * Reads and replaces files so that a crash at any moment leaves the old content or the new, never half of either.
  *
- * <p>Replacing writes a new file in the same folder, forces it to disk, keeps the old one as NAME.bak and renames the new one over NAME.
+ * <p>Replacing writes a new file in the same folder, forces it to disk, keeps the old one as NAME.bak and renames the
+ * new one over NAME.
  */
 public final class SafeFile {
     /** Larger files are refused. */
@@ -32,22 +33,28 @@ public final class SafeFile {
     /**
      * All bytes of a file.
      *
-     * @throws ProjectFileException if there is none, it is a folder, it cannot be read, or it is larger than {@link #LARGEST}
+     * @throws ProjectFileException if there is none, it is a folder, it cannot be read, or it is larger than
+     *     {@link #LARGEST}
      */
     public static byte[] read(Path file) {
         try {
             if (Files.isDirectory(file)) {
-                throw new ProjectFileException(new Problem("this is a folder", file.toString(), "name the file inside it"));
+                throw new ProjectFileException(
+                        new Problem("this is a folder", file.toString(), "name the file inside it"));
             }
             if (Files.size(file) > LARGEST) {
                 throw new ProjectFileException(new Problem(
-                        "the file is larger than " + (LARGEST >> 20) + " MiB", file.toString(), "is it the file you meant?"));
+                        "the file is larger than " + (LARGEST >> 20) + " MiB",
+                        file.toString(),
+                        "is it the file you meant?"));
             }
             return Files.readAllBytes(file);
         } catch (NoSuchFileException e) {
-            throw new ProjectFileException(new Problem("there is no such file", file.toString(), "check the name and the folder"), e);
+            throw new ProjectFileException(
+                    new Problem("there is no such file", file.toString(), "check the name and the folder"), e);
         } catch (IOException e) {
-            throw new ProjectFileException(new Problem("the file cannot be read: " + reason(e), file.toString(), "check its permissions"), e);
+            throw new ProjectFileException(
+                    new Problem("the file cannot be read: " + reason(e), file.toString(), "check its permissions"), e);
         }
     }
 
@@ -82,7 +89,11 @@ public final class SafeFile {
             forceFolder(target.getParent());
         } catch (IOException e) {
             throw new ProjectFileException(
-                    new Problem("the file cannot be written: " + reason(e), file.toString(), "check the folder's permissions and free space"), e);
+                    new Problem(
+                            "the file cannot be written: " + reason(e),
+                            file.toString(),
+                            "check the folder's permissions and free space"),
+                    e);
         } finally {
             discard(fresh);
         }
@@ -103,7 +114,8 @@ public final class SafeFile {
     }
 
     private static void write(Path file, byte[] content) throws IOException {
-        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
+        try (FileChannel channel =
+                FileChannel.open(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
             ByteBuffer bytes = ByteBuffer.wrap(content);
             while (bytes.hasRemaining()) {
                 channel.write(bytes);
@@ -138,7 +150,10 @@ public final class SafeFile {
         }
     }
 
-    /** Temporary files are private; a new project is as readable as the folder lets any new file be (read by all, written by the owner). */
+    /**
+     * Temporary files are private; a new project is as readable as the folder lets any new file be (read by all,
+     * written by the owner).
+     */
     private static void openPermissions(Path file) throws IOException {
         if (Files.getFileStore(file).supportsFileAttributeView("posix")) {
             Files.setPosixFilePermissions(file, java.nio.file.attribute.PosixFilePermissions.fromString("rw-r--r--"));

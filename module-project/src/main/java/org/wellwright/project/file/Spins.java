@@ -7,7 +7,10 @@ import org.wellwright.project.file.JsonValue.JsonNumber;
 import org.wellwright.project.file.JsonValue.JsonText;
 import org.wellwright.solver.model.ChannelKey;
 
-/** Angular momenta in files: whole numbers as numbers, halves as texts ("3/2"); channels as l, or l and j, or l, S and J, or J and parity. */
+/**
+ * Angular momenta in files: whole numbers as numbers, halves as texts ("3/2"); channels as l, or l and j, or l, S and
+ * J, or J and parity.
+ */
 final class Spins {
     private static final String REMEDY = "write a whole number or a half such as \"3/2\"";
 

@@ -18,7 +18,8 @@ final class SystemFormat {
         String id = in.text("id");
         Body first = body(in.required("first"));
         Body second = body(in.required("second"));
-        boolean parameter = first.mass() instanceof BodyMass.FromParameter || second.mass() instanceof BodyMass.FromParameter;
+        boolean parameter =
+                first.mass() instanceof BodyMass.FromParameter || second.mass() instanceof BodyMass.FromParameter;
         MassConvention usual = parameter ? MassConvention.MODEL_PARAMETER : MassConvention.ATOMIC;
         MassConvention convention = in.choice("massConvention", MassConvention.class, usual);
         ExchangeSymmetry exchange = in.choice("exchange", ExchangeSymmetry.class, ExchangeSymmetry.DISTINGUISHABLE);
@@ -31,7 +32,9 @@ final class SystemFormat {
     private static Body body(ObjectIn in) {
         in.knowing("label", "particle", "mass", "charge", "spin");
         if (in.has("particle") == in.has("mass")) {
-            throw in.fault("a body needs a particle of the catalogue or a mass, and only one of them", "see 'wellwright-batch particles'");
+            throw in.fault(
+                    "a body needs a particle of the catalogue or a mass, and only one of them",
+                    "see 'wellwright-batch particles'");
         }
         BodyMass mass = in.has("particle") ? in.make(() -> new BodyMass.Catalogued(in.text("particle"))) : mass(in);
         Body usual = usual(mass);
@@ -65,13 +68,16 @@ final class SystemFormat {
     }
 
     static void write(ObjectOut out, PairSystem system) {
-        boolean parameter =
-                system.first().mass() instanceof BodyMass.FromParameter || system.second().mass() instanceof BodyMass.FromParameter;
+        boolean parameter = system.first().mass() instanceof BodyMass.FromParameter
+                || system.second().mass() instanceof BodyMass.FromParameter;
         out.text("id", system.id())
                 .text("title", system.title(), "")
                 .object("first", system.first(), SystemFormat::body)
                 .object("second", system.second(), SystemFormat::body)
-                .choice("massConvention", system.massConvention(), parameter ? MassConvention.MODEL_PARAMETER : MassConvention.ATOMIC)
+                .choice(
+                        "massConvention",
+                        system.massConvention(),
+                        parameter ? MassConvention.MODEL_PARAMETER : MassConvention.ATOMIC)
                 .choice("exchange", system.exchange(), ExchangeSymmetry.DISTINGUISHABLE)
                 .number("permittivity", system.permittivity(), ExactNumber.ONE)
                 .number("abundance", system.abundance());
@@ -85,11 +91,15 @@ final class SystemFormat {
         } else if (body.mass() instanceof BodyMass.FromParameter parameter) {
             out.text("mass", parameter.parameter());
         } else {
-            out.object("mass", (BodyMass.Typed) body.mass(), (typed, mass) -> typed.number("value", mass.value())
-                    .number("sigma", mass.sigma())
-                    .text("unit", mass.unit()));
+            out.object(
+                    "mass",
+                    (BodyMass.Typed) body.mass(),
+                    (typed, mass) -> typed.number("value", mass.value())
+                            .number("sigma", mass.sigma())
+                            .text("unit", mass.unit()));
         }
         JsonValue spin = body.twiceSpin() < 0 ? new JsonText("none") : Spins.json(body.twiceSpin());
-        out.number("charge", body.charge(), usual.charge()).put("spin", body.twiceSpin() == usual.twiceSpin() ? null : spin);
+        out.number("charge", body.charge(), usual.charge())
+                .put("spin", body.twiceSpin() == usual.twiceSpin() ? null : spin);
     }
 }

@@ -41,18 +41,32 @@ final class TermFormat {
     }
 
     private static Term read(ObjectIn in) {
-        in.knowing("name", "formula", "family", "table", "arguments", "enabled", "scale", "from", "to", "channels", "angular");
+        in.knowing(
+                "name",
+                "formula",
+                "family",
+                "table",
+                "arguments",
+                "enabled",
+                "scale",
+                "from",
+                "to",
+                "channels",
+                "angular");
         TermFrame frame = frame(in);
         int kinds = (in.has("formula") ? 1 : 0) + (in.has("family") ? 1 : 0) + (in.has("table") ? 1 : 0);
         if (kinds != 1) {
-            throw in.fault("a term needs one of 'formula', 'family', 'table'", kinds == 0 ? "add one" : "split it into several terms");
+            throw in.fault(
+                    "a term needs one of 'formula', 'family', 'table'",
+                    kinds == 0 ? "add one" : "split it into several terms");
         }
         if (in.has("table")) {
             return table(in.required("table"), frame);
         }
         Map<String, Argument> arguments = new LinkedHashMap<>();
         in.members("arguments")
-                .forEach((name, value) -> arguments.put(name, Arguments.read(in, "arguments", "/arguments/" + name, value)));
+                .forEach((name, value) ->
+                        arguments.put(name, Arguments.read(in, "arguments", "/arguments/" + name, value)));
         return in.has("formula")
                 ? in.make(() -> new FormulaTerm(frame, in.text("formula"), arguments))
                 : in.make(() -> new FamilyTerm(frame, in.text("family"), arguments));
@@ -99,12 +113,18 @@ final class TermFormat {
         List<TableKnot> knots = new ArrayList<>();
         for (JsonValue point : in.list("points")) {
             int position = knots.size();
-            if (!(point instanceof JsonArray pair && pair.items().size() == 2 && pair.items().get(0) instanceof JsonNumber radius)) {
-                throw in.fault("points", "point " + (position + 1) + " of the table is not [radius, value]", "write [number, number]");
+            if (!(point instanceof JsonArray pair
+                    && pair.items().size() == 2
+                    && pair.items().get(0) instanceof JsonNumber radius)) {
+                throw in.fault(
+                        "points",
+                        "point " + (position + 1) + " of the table is not [radius, value]",
+                        "write [number, number]");
             }
             ExactNumber exact = in.make(() -> new ExactNumber(radius.text()));
             in.spelled("/points/" + position + "/r", exact);
-            Argument value = Arguments.read(in, "points", "/points/" + position + "/v", pair.items().get(1));
+            Argument value = Arguments.read(
+                    in, "points", "/points/" + position + "/v", pair.items().get(1));
             knots.add(in.make(() -> new TableKnot(exact.value(), value)));
         }
         TableInterpolation interpolation = interpolation(in.object("interpolation"));
@@ -193,9 +213,12 @@ final class TermFormat {
         out.text("radiusUnit", table.radiusUnit(), "")
                 .text("valueUnit", table.valueUnit(), "")
                 .put("points", new JsonArray(points))
-                .object("interpolation", table.interpolation(), (item, i) -> item.choice("quantity", i.quantity(), usual.quantity())
-                        .choice("abscissa", i.abscissa(), usual.abscissa())
-                        .choice("spline", i.spline(), usual.spline()))
+                .object(
+                        "interpolation",
+                        table.interpolation(),
+                        (item, i) -> item.choice("quantity", i.quantity(), usual.quantity())
+                                .choice("abscissa", i.abscissa(), usual.abscissa())
+                                .choice("spline", i.spline(), usual.spline()))
                 .object("inner", table.inner(), TermFormat::inner)
                 .object("outer", table.outer(), TermFormat::outer);
     }

@@ -12,8 +12,8 @@ public final class Digits {
     private Digits() {}
 
     /**
-     * A value rounded to the decimal place of the second significant digit of its uncertainty; all digits that a double holds where the uncertainty is 0
-     * or unknown.
+     * A value rounded to the decimal place of the second significant digit of its uncertainty; all digits that a double
+     * holds where the uncertainty is 0 or unknown.
      *
      * @param uncertainty standard uncertainty or half-width, in the value's unit
      */
@@ -62,7 +62,9 @@ public final class Digits {
     /** A number with a fixed count of decimals. */
     public static String decimals(double value, int decimals) {
         return Double.isFinite(value)
-                ? new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN).toPlainString()
+                ? new BigDecimal(value)
+                        .setScale(decimals, RoundingMode.HALF_EVEN)
+                        .toPlainString()
                 : special(value);
     }
 
@@ -71,7 +73,9 @@ public final class Digits {
         if (!Double.isFinite(value)) {
             return special(value);
         }
-        return value == Math.rint(value) && Math.abs(value) < 1e7 ? Long.toString((long) value) : Double.toString(value);
+        return value == Math.rint(value) && Math.abs(value) < 1e7
+                ? Long.toString((long) value)
+                : Double.toString(value);
     }
 
     private static String special(double value) {
@@ -92,7 +96,9 @@ public final class Digits {
 
     private static String text(BigDecimal rounded, int place) {
         int exponent = exponentOf(rounded.doubleValue(), place);
-        return exponent == 0 ? rounded.toPlainString() : rounded.scaleByPowerOfTen(-exponent).toPlainString() + "e" + exponent;
+        return exponent == 0
+                ? rounded.toPlainString()
+                : rounded.scaleByPowerOfTen(-exponent).toPlainString() + "e" + exponent;
     }
 
     /** The power of ten to write apart: 0 for numbers that read well without. */

@@ -16,7 +16,14 @@ import org.wellwright.project.file.JsonValue;
  * @param command the command that does it again
  * @param result what came out
  */
-public record Run(Instant time, String kind, String digest, String program, String solver, List<String> command, JsonValue result) {
+public record Run(
+        Instant time,
+        String kind,
+        String digest,
+        String program,
+        String solver,
+        List<String> command,
+        JsonValue result) {
     /** Copies the list and checks that nothing is missing. */
     public Run {
         Objects.requireNonNull(time, "time");

@@ -28,8 +28,8 @@ import org.wellwright.project.file.SafeFile;
 import org.wellwright.solver.Problem;
 
 /**
- * NAME.runs.jsonl beside a project: one object a line, {@code {"run": …, "sha256": …}}, where the checksum is that of the text of {@code run}. Lines are only
- * ever added, so a torn or damaged line costs itself alone.
+ * NAME.runs.jsonl beside a project: one object a line, {@code {"run": …, "sha256": …}}, where the checksum is that of
+ * the text of {@code run}. Lines are only ever added, so a torn or damaged line costs itself alone.
  */
 public final class RunHistory {
     private final Path file;
@@ -41,7 +41,9 @@ public final class RunHistory {
     /** The history beside a project file. */
     public static RunHistory of(Path project) {
         String name = project.getFileName().toString();
-        String stem = name.endsWith(ProjectFile.ENDING) ? name.substring(0, name.length() - ProjectFile.ENDING.length()) : name;
+        String stem = name.endsWith(ProjectFile.ENDING)
+                ? name.substring(0, name.length() - ProjectFile.ENDING.length())
+                : name;
         return new RunHistory(project.resolveSibling(stem + ".runs.jsonl"));
     }
 
@@ -98,7 +100,8 @@ public final class RunHistory {
     public void add(Run run) {
         String text = Json.compact(json(run));
         String line = "{\"run\": " + text + ", \"sha256\": \"" + sha256(text) + "\"}\n";
-        try (FileChannel channel = FileChannel.open(file, StandardOpenOption.CREATE, StandardOpenOption.READ, StandardOpenOption.WRITE);
+        try (FileChannel channel = FileChannel.open(
+                        file, StandardOpenOption.CREATE, StandardOpenOption.READ, StandardOpenOption.WRITE);
                 FileLock lock = channel.lock()) {
             long end = channel.size();
             ByteBuffer last = ByteBuffer.allocate(1);
@@ -111,7 +114,11 @@ public final class RunHistory {
             channel.force(true);
         } catch (IOException e) {
             throw new ProjectFileException(
-                    new Problem("the run history cannot be written: " + SafeFile.reason(e), file.toString(), "check the folder's permissions"), e);
+                    new Problem(
+                            "the run history cannot be written: " + SafeFile.reason(e),
+                            file.toString(),
+                            "check the folder's permissions"),
+                    e);
         }
     }
 
@@ -122,7 +129,10 @@ public final class RunHistory {
         members.put("digest", new JsonText(run.digest()));
         members.put("program", new JsonText(run.program()));
         members.put("solver", new JsonText(run.solver()));
-        members.put("command", new JsonArray(run.command().stream().<JsonValue>map(JsonText::new).toList()));
+        members.put(
+                "command",
+                new JsonArray(
+                        run.command().stream().<JsonValue>map(JsonText::new).toList()));
         members.put("result", run.result());
         return new JsonObject(members);
     }
@@ -160,7 +170,8 @@ public final class RunHistory {
 
     private static String sha256(String text) {
         try {
-            return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8)));
+            return HexFormat.of()
+                    .formatHex(MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8)));
         } catch (NoSuchAlgorithmException e) {
             throw new IllegalStateException("every Java platform has SHA-256", e);
         }

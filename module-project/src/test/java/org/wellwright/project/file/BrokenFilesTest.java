@@ -12,13 +12,17 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
-/** Every broken file gives a {@link ProjectFileException} whose sentence is one line with the place; nothing else escapes. */
+/**
+ * Every broken file gives a {@link ProjectFileException} whose sentence is one line with the place; nothing else
+ * escapes.
+ */
 class BrokenFilesTest {
     @TempDir
     Path folder;
 
     private static String fault(byte[] bytes) {
-        ProjectFileException e = catchThrowableOfType(ProjectFileException.class, () -> ProjectFile.parse(bytes, "p.wellwright"));
+        ProjectFileException e =
+                catchThrowableOfType(ProjectFileException.class, () -> ProjectFile.parse(bytes, "p.wellwright"));
         assertThat(e).isNotNull();
         String sentence = e.problem().sentence();
         assertThat(sentence).startsWith("p.wellwright").doesNotContain("\n").doesNotContain("tools.jackson");
@@ -32,8 +36,8 @@ class BrokenFilesTest {
 
     @Test
     void missing() {
-        ProjectFileException e =
-                catchThrowableOfType(ProjectFileException.class, () -> ProjectFile.read(folder.resolve("none.wellwright")));
+        ProjectFileException e = catchThrowableOfType(
+                ProjectFileException.class, () -> ProjectFile.read(folder.resolve("none.wellwright")));
         assertThat(e.problem().sentence()).contains("there is no such file");
         e = catchThrowableOfType(ProjectFileException.class, () -> ProjectFile.read(folder));
         assertThat(e.problem().sentence()).contains("folder");
@@ -84,7 +88,9 @@ class BrokenFilesTest {
 
     @Test
     void futureVersionAndForeignFiles() {
-        assertThat(fault("{\"format\": \"wellwright-project\", \"version\": 2}")).contains("version 2").contains("/version");
+        assertThat(fault("{\"format\": \"wellwright-project\", \"version\": 2}"))
+                .contains("version 2")
+                .contains("/version");
         assertThat(fault("{\"format\": \"other\"}")).contains("not a Wellwright project");
         assertThat(fault("[1]")).contains("an array");
         assertThat(fault("{} {}")).contains("more after the end");
@@ -99,7 +105,7 @@ class BrokenFilesTest {
                 "/parameters/0/value | \"value\": 1.440, | \"value\": \"big\", | must be a number, not a text",
                 "/parameters/0/value | \"value\": 1.440, | \"value\": 1e999, | too large",
                 "/parameters/0 | \"value\": 1.440, | \"valu\": 1.440, | has no value",
-                "/parameters/0 | \"max\": 2} | \"max\": 0.1} | lower < upper",
+                "/parameters/0 | \"max\": 2 | \"max\": 0.1 | lower < upper",
                 "/parameters/0 | \"name\": \"a\", | \"name\": \"2a\", | a letter followed",
                 "/parameters/1/prior | \"sigma\": 0.001} | \"sigma\": 0} | sigma > 0",
                 "/parameters/6 | \"tied\": \"2*a\" | \"tied\": \"2*a\", \"value\": 2 | in two ways",
@@ -121,7 +127,8 @@ class BrokenFilesTest {
                 "/views | \"from\": \"-5\" | \"from\": -5 | not an object of texts",
                 "/units | \"units\": \"eV-nm\" | \"units\": [] | must be a text, not an array",
             })
-    void wrongContentNamesPointerAndLine(String pointer, String old, String replacement, String words) throws IOException {
+    void wrongContentNamesPointerAndLine(String pointer, String old, String replacement, String words)
+            throws IOException {
         String text = ProjectFileTest.sample("everything-1.wellwright");
         assertThat(text).contains(old);
         String sentence = fault(text.replace(old, replacement));

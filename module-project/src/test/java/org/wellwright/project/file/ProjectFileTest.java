@@ -52,11 +52,23 @@ class ProjectFileTest {
         Project project = parse(sample("everything-1.wellwright")).project();
         var document = project.document();
         var parameters = new java.util.ArrayList<>(document.parameters());
-        parameters.add(0, org.wellwright.solver.model.Parameter.scalar(
-                "first", "", org.wellwright.solver.model.Setting.fixed(org.wellwright.solver.units.ExactNumber.ONE)));
+        parameters.add(
+                0,
+                org.wellwright.solver.model.Parameter.scalar(
+                        "first",
+                        "",
+                        org.wellwright.solver.model.Setting.fixed(org.wellwright.solver.units.ExactNumber.ONE)));
         Project changed = project.withDocument(new org.wellwright.solver.model.ModelDocument(
-                document.constantsEdition(), document.massTable(), document.units(), document.labels(), document.weighting(),
-                document.systems(), parameters, document.models(), document.data(), document.groups()));
+                document.constantsEdition(),
+                document.massTable(),
+                document.units(),
+                document.labels(),
+                document.weighting(),
+                document.systems(),
+                parameters,
+                document.models(),
+                document.data(),
+                document.groups()));
         Project again = parse(ProjectFile.text(changed)).project();
         assertThat(again).isEqualTo(changed);
         assertThat(ProjectFile.text(changed)).contains("\"name\": \"b\"").contains("\"colour\": \"blue\"");
@@ -65,23 +77,23 @@ class ProjectFileTest {
     @Test
     void numbersKeepTheirSpelling() throws IOException {
         Project project = parse(sample("everything-1.wellwright")).project();
-        var shape = (ParameterShape.Scalar) project.document().parameters().get(0).shape();
+        var shape =
+                (ParameterShape.Scalar) project.document().parameters().get(0).shape();
         assertThat(shape.setting().value().text()).isEqualTo("1.440");
     }
 
     @Test
     void aSmallHandWrittenFileIsCompletedByDefaults() {
-        Project project = parse(
-                        """
+        Project project = parse("""
                         {"format": "wellwright-project", "version": 1, "units": "atomic",
                          "systems": [{"id": "x", "first": {"particle": "e-"}, "second": {"particle": "p"}}],
                          "parameters": [{"name": "a", "unit": "hartree a0", "value": 1, "free": true}],
                          "models": [{"name": "m", "curves": [{"terms": [{"formula": "-a/r"}]}]}],
                          "data": [{"levels": [{"l": 0, "index": 0}], "value": -0.5, "unit": "hartree", "sigma": 0.01}]}
-                        """)
-                .project();
+                        """).project();
         assertThat(project.document().data().get(0).id()).isEqualTo("d1");
-        assertThat(project.document().data().get(0).levels().get(0).level().system()).isEqualTo("x");
+        assertThat(project.document().data().get(0).levels().get(0).level().system())
+                .isEqualTo("x");
         assertThat(project.document().constantsEdition()).isEqualTo("CODATA 2022");
         assertThat(parse(ProjectFile.text(project)).project()).isEqualTo(project);
     }
@@ -95,7 +107,8 @@ class ProjectFileTest {
         assertThat(ProjectFile.read(folder.resolve("a.wellwright.bak")).title()).isEqualTo(project.title());
         assertThat(ProjectFile.read(file).title()).isEqualTo("second");
         try (var files = Files.list(folder)) {
-            assertThat(files.map(f -> f.getFileName().toString())).containsExactlyInAnyOrder("a.wellwright", "a.wellwright.bak");
+            assertThat(files.map(f -> f.getFileName().toString()))
+                    .containsExactlyInAnyOrder("a.wellwright", "a.wellwright.bak");
         }
     }
 }
