@@ -58,4 +58,39 @@ public record Curve(
     public Curve withTerms(List<Term> newTerms) {
         return new Curve(name, newTerms, energyOrigin, innerWall, outerWall, spinScheme, labels, occupied);
     }
+
+    /** The same with another name. */
+    public Curve withName(String newName) {
+        return new Curve(newName, terms, energyOrigin, innerWall, outerWall, spinScheme, labels, occupied);
+    }
+
+    /** The same with another energy origin. */
+    public Curve withEnergyOrigin(Argument newEnergyOrigin) {
+        return new Curve(name, terms, newEnergyOrigin, innerWall, outerWall, spinScheme, labels, occupied);
+    }
+
+    /** The same with another inner wall. */
+    public Curve withInnerWall(Argument newInnerWall) {
+        return new Curve(name, terms, energyOrigin, newInnerWall, outerWall, spinScheme, labels, occupied);
+    }
+
+    /** The same with another outer wall. */
+    public Curve withOuterWall(Argument newOuterWall) {
+        return new Curve(name, terms, energyOrigin, innerWall, newOuterWall, spinScheme, labels, occupied);
+    }
+
+    /** The same with another spin scheme. */
+    public Curve withSpinScheme(SpinScheme newSpinScheme) {
+        return new Curve(name, terms, energyOrigin, innerWall, outerWall, newSpinScheme, labels, occupied);
+    }
+
+    /** The same with another label rule. */
+    public Curve withLabels(LabelRule newLabels) {
+        return new Curve(name, terms, energyOrigin, innerWall, outerWall, spinScheme, newLabels, occupied);
+    }
+
+    /** The same with other occupied levels. */
+    public Curve withOccupied(List<OccupiedLevel> newOccupied) {
+        return new Curve(name, terms, energyOrigin, innerWall, outerWall, spinScheme, labels, newOccupied);
+    }
 }

@@ -135,4 +135,159 @@ public record Datum(
                 true,
                 "");
     }
+
+    /** The same with another id. */
+    public Datum withId(String newId) {
+        return new Datum(
+                newId,
+                levels,
+                denominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                source,
+                used,
+                reason);
+    }
+
+    /** The same with other groups. */
+    public Datum withGroups(List<String> newGroups) {
+        return new Datum(
+                id,
+                levels,
+                denominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                newGroups,
+                source,
+                used,
+                reason);
+    }
+
+    /** The same with another source. */
+    public Datum withSource(String newSource) {
+        return new Datum(
+                id,
+                levels,
+                denominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                newSource,
+                used,
+                reason);
+    }
+
+    /** The same with another remark. */
+    public Datum withReason(String newReason) {
+        return new Datum(
+                id,
+                levels,
+                denominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                source,
+                used,
+                newReason);
+    }
+
+    /** The same, counted or not. */
+    public Datum withUsed(boolean nowUsed) {
+        return new Datum(
+                id,
+                levels,
+                denominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                source,
+                nowUsed,
+                reason);
+    }
+
+    /** The same with other levels; {@code newDenominator} is empty unless it is a ratio. */
+    public Datum withLevels(List<Contribution> newLevels, List<Contribution> newDenominator) {
+        return new Datum(
+                id,
+                newLevels,
+                newDenominator,
+                transform,
+                detail,
+                value,
+                unit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                source,
+                used,
+                reason);
+    }
+
+    /** The same with another measured value. */
+    public Datum withValue(
+            ExactNumber newValue, ExactNumber newSigmaMinus, ExactNumber newSigmaPlus, Limit newLimit, String newUnit) {
+        return new Datum(
+                id,
+                levels,
+                denominator,
+                transform,
+                detail,
+                newValue,
+                newUnit,
+                newSigmaMinus,
+                newSigmaPlus,
+                newLimit,
+                groups,
+                source,
+                used,
+                reason);
+    }
+
+    /** The same as another quantity with its unit; the levels are kept. */
+    public Datum withTransform(Transform newTransform, Detail newDetail, String newUnit) {
+        List<Contribution> under =
+                newTransform == Transform.RATIO ? (denominator.isEmpty() ? levels : denominator) : List.of();
+        return new Datum(
+                id,
+                levels,
+                under,
+                newTransform,
+                newDetail,
+                value,
+                newUnit,
+                sigmaMinus,
+                sigmaPlus,
+                limit,
+                groups,
+                source,
+                used,
+                reason);
+    }
 }

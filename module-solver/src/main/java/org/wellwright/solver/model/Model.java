@@ -66,4 +66,39 @@ public record Model(
         }
         return null;
     }
+
+    /** The same with another name. */
+    public Model withName(String newName) {
+        return new Model(newName, note, systems, curves, couplings, geometry, error);
+    }
+
+    /** The same with another note. */
+    public Model withNote(String newNote) {
+        return new Model(name, newNote, systems, curves, couplings, geometry, error);
+    }
+
+    /** The same with other systems. */
+    public Model withSystems(List<String> newSystems) {
+        return new Model(name, note, newSystems, curves, couplings, geometry, error);
+    }
+
+    /** The same with other curves. */
+    public Model withCurves(List<Curve> newCurves) {
+        return new Model(name, note, systems, newCurves, couplings, geometry, error);
+    }
+
+    /** The same with other couplings. */
+    public Model withCouplings(List<CurveCoupling> newCouplings) {
+        return new Model(name, note, systems, curves, newCouplings, geometry, error);
+    }
+
+    /** The same with another geometry. */
+    public Model withGeometry(Geometry newGeometry) {
+        return new Model(name, note, systems, curves, couplings, newGeometry, error);
+    }
+
+    /** The same with another error. */
+    public Model withError(ModelError newError) {
+        return new Model(name, note, systems, curves, couplings, geometry, newError);
+    }
 }

@@ -43,4 +43,52 @@ public record ModelDocument(
         data = List.copyOf(data);
         groups = List.copyOf(groups);
     }
+
+    /** The same with another unit system. */
+    public ModelDocument withUnits(String newUnits) {
+        return new ModelDocument(
+                constantsEdition, massTable, newUnits, labels, weighting, systems, parameters, models, data, groups);
+    }
+
+    /** The same with another convention of labels. */
+    public ModelDocument withLabels(LabelConvention newLabels) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, newLabels, weighting, systems, parameters, models, data, groups);
+    }
+
+    /** The same with another meaning of the uncertainties. */
+    public ModelDocument withWeighting(Weighting newWeighting) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, newWeighting, systems, parameters, models, data, groups);
+    }
+
+    /** The same with other systems. */
+    public ModelDocument withSystems(List<PairSystem> newSystems) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, weighting, newSystems, parameters, models, data, groups);
+    }
+
+    /** The same with other parameters. */
+    public ModelDocument withParameters(List<Parameter> newParameters) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, weighting, systems, newParameters, models, data, groups);
+    }
+
+    /** The same with other models. */
+    public ModelDocument withModels(List<Model> newModels) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, weighting, systems, parameters, newModels, data, groups);
+    }
+
+    /** The same with other data. */
+    public ModelDocument withData(List<Datum> newData) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, weighting, systems, parameters, models, newData, groups);
+    }
+
+    /** The same with other groups. */
+    public ModelDocument withGroups(List<DataGroup> newGroups) {
+        return new ModelDocument(
+                constantsEdition, massTable, units, labels, weighting, systems, parameters, models, data, newGroups);
+    }
 }

@@ -33,4 +33,19 @@ public record Parameter(String name, String unit, String convention, ParameterSh
     public Parameter withShape(ParameterShape newShape) {
         return new Parameter(name, unit, convention, newShape);
     }
+
+    /** The same with another name. */
+    public Parameter withName(String newName) {
+        return new Parameter(newName, unit, convention, shape);
+    }
+
+    /** The same with another unit, its numbers as they are. */
+    public Parameter withUnit(String newUnit) {
+        return new Parameter(name, newUnit, convention, shape);
+    }
+
+    /** The same with another convention. */
+    public Parameter withConvention(String newConvention) {
+        return new Parameter(name, unit, newConvention, shape);
+    }
 }

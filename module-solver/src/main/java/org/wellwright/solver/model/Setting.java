@@ -43,4 +43,14 @@ public record Setting(ExactNumber value, boolean free, ExactNumber lower, ExactN
     public Setting withFree(boolean nowFree) {
         return new Setting(value, nowFree, lower, upper, prior);
     }
+
+    /** The same with other bounds; null for none. */
+    public Setting withBounds(ExactNumber newLower, ExactNumber newUpper) {
+        return new Setting(value, free, newLower, newUpper, prior);
+    }
+
+    /** The same with another prior; null for none. */
+    public Setting withPrior(Prior newPrior) {
+        return new Setting(value, free, lower, upper, newPrior);
+    }
 }

@@ -21,4 +21,24 @@ public record Body(String label, BodyMass mass, ExactNumber charge, int twiceSpi
             throw new IllegalArgumentException("twice the spin must be >= 0, or -1 for none, got " + twiceSpin);
         }
     }
+
+    /** The same with another label. */
+    public Body withLabel(String newLabel) {
+        return new Body(newLabel, mass, charge, twiceSpin);
+    }
+
+    /** The same with another mass. */
+    public Body withMass(BodyMass newMass) {
+        return new Body(label, newMass, charge, twiceSpin);
+    }
+
+    /** The same with another charge. */
+    public Body withCharge(ExactNumber newCharge) {
+        return new Body(label, mass, newCharge, twiceSpin);
+    }
+
+    /** The same with another spin. */
+    public Body withTwiceSpin(int newTwiceSpin) {
+        return new Body(label, mass, charge, newTwiceSpin);
+    }
 }

@@ -91,4 +91,44 @@ public record PairSystem(
             throw new IllegalArgumentException("the mass '%s' is a parameter of the pool".formatted(name));
         });
     }
+
+    /** The same with another id. */
+    public PairSystem withId(String newId) {
+        return new PairSystem(newId, title, first, second, massConvention, exchange, permittivity, abundance);
+    }
+
+    /** The same with another title. */
+    public PairSystem withTitle(String newTitle) {
+        return new PairSystem(id, newTitle, first, second, massConvention, exchange, permittivity, abundance);
+    }
+
+    /** The same with another first body. */
+    public PairSystem withFirst(Body newFirst) {
+        return new PairSystem(id, title, newFirst, second, massConvention, exchange, permittivity, abundance);
+    }
+
+    /** The same with another second body. */
+    public PairSystem withSecond(Body newSecond) {
+        return new PairSystem(id, title, first, newSecond, massConvention, exchange, permittivity, abundance);
+    }
+
+    /** The same with another mass convention. */
+    public PairSystem withMassConvention(MassConvention newMassConvention) {
+        return new PairSystem(id, title, first, second, newMassConvention, exchange, permittivity, abundance);
+    }
+
+    /** The same with another exchange symmetry. */
+    public PairSystem withExchange(ExchangeSymmetry newExchange) {
+        return new PairSystem(id, title, first, second, massConvention, newExchange, permittivity, abundance);
+    }
+
+    /** The same with another permittivity. */
+    public PairSystem withPermittivity(ExactNumber newPermittivity) {
+        return new PairSystem(id, title, first, second, massConvention, exchange, newPermittivity, abundance);
+    }
+
+    /** The same with another abundance, null for none. */
+    public PairSystem withAbundance(ExactNumber newAbundance) {
+        return new PairSystem(id, title, first, second, massConvention, exchange, permittivity, newAbundance);
+    }
 }
