@@ -1,0 +1,251 @@
+package org.wellwright.solver.potential.formula;
+
+/**
+ * Evaluates a program at many radii, one operation at a time over blocks of radii, with the bits of {@link BoundFormula#value}. The registers of
+ * results that are no longer needed are used again.
+ */
+final class BlockPass {
+    private static final int BLOCK = 128;
+
+    private final Program program;
+    private final int[] register;
+    private final int registers;
+
+    BlockPass(Program program) {
+        this.program = program;
+        Graph graph = program.graph();
+        int[] lastUse = new int[program.size()];
+        for (int k = 0; k < program.varyingCount(); k++) {
+            int i = program.varying(k);
+            Operation operation = graph.operation(i);
+            if (operation.arity() >= 1) {
+                lastUse[graph.left(i)] = i;
+            }
+            if (operation.arity() == 2) {
+                lastUse[graph.right(i)] = i;
+            }
+        }
+        lastUse[program.root()] = program.size();
+        this.register = new int[program.size()];
+        int[] free = new int[program.size()];
+        int freeCount = 0;
+        int count = 0;
+        for (int k = 0; k < program.varyingCount(); k++) {
+            int i = program.varying(k);
+            Operation operation = graph.operation(i);
+            int left = operation.arity() >= 1 ? graph.left(i) : -1;
+            int right = operation.arity() == 2 ? graph.right(i) : -1;
+            if (left >= 0 && program.varies(left) && lastUse[left] == i) {
+                free[freeCount++] = register[left];
+            }
+            if (right >= 0 && right != left && program.varies(right) && lastUse[right] == i) {
+                free[freeCount++] = register[right];
+            }
+            register[i] = freeCount > 0 ? free[--freeCount] : count++;
+        }
+        this.registers = count;
+    }
+
+    /**
+     * V at {@code count} radii.
+     *
+     * @return whether every value is surely good; if not, values that are not finite or came through a division by infinity must be computed again
+     */
+    boolean run(double[] radii, double[] into, int count) {
+        int block = Math.min(BLOCK, count);
+        double[][] frame = new double[registers][block];
+        boolean good = true;
+        for (int start = 0; start < count; start += block) {
+            int n = Math.min(block, count - start);
+            good &= block(frame, radii, start, n);
+            double[] result = frame[register[program.root()]];
+            System.arraycopy(result, 0, into, start, n);
+            double check = 0;
+            for (int i = 0; i < n; i++) {
+                check += result[i] * 0; // NaN as soon as one value is not finite
+            }
+            good &= check == 0;
+        }
+        return good;
+    }
+
+    private boolean block(double[][] frame, double[] radii, int start, int n) {
+        Graph graph = program.graph();
+        boolean good = true;
+        for (int k = 0; k < program.varyingCount(); k++) {
+            int i = program.varying(k);
+            Operation operation = graph.operation(i);
+            double[] out = frame[register[i]];
+            if (operation == Operation.RADIUS) {
+                System.arraycopy(radii, start, out, 0, n);
+                continue;
+            }
+            int left = graph.left(i);
+            if (operation.arity() == 1) {
+                unary(operation, frame[register[left]], out, n);
+                continue;
+            }
+            int right = graph.right(i);
+            if (!program.varies(right)) {
+                withConstant(operation, frame[register[left]], program.constant(right), out, n);
+            } else if (!program.varies(left)) {
+                constantWith(operation, program.constant(left), frame[register[right]], out, n);
+            } else {
+                binary(operation, frame[register[left]], frame[register[right]], out, n);
+            }
+            if (operation == Operation.DIVIDE) {
+                good &= noZero(out, n);
+            }
+        }
+        return good;
+    }
+
+    private static boolean noZero(double[] quotients, int n) {
+        boolean good = true;
+        for (int i = 0; i < n; i++) {
+            good &= quotients[i] != 0;
+        }
+        return good;
+    }
+
+    private static void unary(Operation operation, double[] a, double[] out, int n) {
+        switch (operation) {
+            case NEGATE -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = -a[i];
+                }
+            }
+            case EXP -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Math.exp(a[i]);
+                }
+            }
+            case SQRT -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Math.sqrt(a[i]);
+                }
+            }
+            case LN -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Math.log(a[i]);
+                }
+            }
+            default -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Real.apply(operation, a[i], 0);
+                }
+            }
+        }
+    }
+
+    private static void binary(Operation operation, double[] a, double[] b, double[] out, int n) {
+        switch (operation) {
+            case ADD -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] + b[i];
+                }
+            }
+            case SUBTRACT -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] - b[i];
+                }
+            }
+            case MULTIPLY -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] * b[i];
+                }
+            }
+            case DIVIDE -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] / b[i];
+                }
+            }
+            default -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Real.apply(operation, a[i], b[i]);
+                }
+            }
+        }
+    }
+
+    private static void withConstant(Operation operation, double[] a, double c, double[] out, int n) {
+        switch (operation) {
+            case ADD -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] + c;
+                }
+            }
+            case SUBTRACT -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] - c;
+                }
+            }
+            case MULTIPLY -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] * c;
+                }
+            }
+            case DIVIDE -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = a[i] / c;
+                }
+            }
+            case POWER -> {
+                if (Real.isSmallInteger(c)) {
+                    integerPower(a, (int) c, out, n);
+                } else {
+                    for (int i = 0; i < n; i++) {
+                        out[i] = Math.pow(a[i], c);
+                    }
+                }
+            }
+            default -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Real.apply(operation, a[i], c);
+                }
+            }
+        }
+    }
+
+    private static void integerPower(double[] a, int power, double[] out, int n) {
+        if (power == 2) {
+            for (int i = 0; i < n; i++) {
+                out[i] = a[i] * a[i];
+            }
+            return;
+        }
+        for (int i = 0; i < n; i++) {
+            out[i] = Real.integerPower(a[i], power);
+        }
+    }
+
+    private static void constantWith(Operation operation, double c, double[] b, double[] out, int n) {
+        switch (operation) {
+            case ADD -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = c + b[i];
+                }
+            }
+            case SUBTRACT -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = c - b[i];
+                }
+            }
+            case MULTIPLY -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = c * b[i];
+                }
+            }
+            case DIVIDE -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = c / b[i];
+                }
+            }
+            default -> {
+                for (int i = 0; i < n; i++) {
+                    out[i] = Real.apply(operation, c, b[i]);
+                }
+            }
+        }
+    }
+}
