@@ -25,7 +25,8 @@ public interface Formula {
     /**
      * The evaluator for values by name; names that the formula does not use are ignored.
      *
-     * @throws org.wellwright.solver.InvalidModelException if a name has no value (gives its column and the names that have one) or it is not finite
+     * @throws org.wellwright.solver.InvalidModelException if a name has no value (gives its column and the names that
+     *     have one) or it is not finite
      */
     TermEvaluator bind(Map<String, Double> values, ChannelFacts channel);
 }

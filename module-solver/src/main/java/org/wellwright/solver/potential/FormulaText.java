@@ -11,10 +11,11 @@ import org.openide.util.Lookup;
 /**
  * Formulas as text: parsing, faults with columns, pieces for colouring, completion.
  *
- * <p>A formula is an expression in r (the separation), l (the channel's orbital quantum number), pi, numbers such as {@code 1e-3} and parameters, which
- * are all other names; {@code b[0]} is an indexed one. Operators by falling precedence: {@code ^} (from the right; {@code -r^2} is −(r²)), {@code * /},
- * {@code + -}. {@code log} and {@code ln} are both natural. {@code sum(i, 0, 7, b[i]*r^i)} adds terms. Lines {@code name = expression} may come before the
- * last one, separated by line breaks or semicolons. A formula has at most 10,000 characters and 200 nested parentheses.
+ * <p>A formula is an expression in r (the separation), l (the channel's orbital quantum number), pi, numbers such as
+ * {@code 1e-3} and parameters, which are all other names; {@code b[0]} is an indexed one. Operators by falling
+ * precedence: {@code ^} (from the right; {@code -r^2} is −(r²)), {@code * /}, {@code + -}. {@code log} and {@code ln}
+ * are both natural. {@code sum(i, 0, 7, b[i]*r^i)} adds terms. Lines {@code name = expression} may come before the last
+ * one, separated by line breaks or semicolons. A formula has at most 10,000 characters and 200 nested parentheses.
  */
 public final class FormulaText {
     private FormulaText() {}
@@ -30,8 +31,8 @@ public final class FormulaText {
     /**
      * The formula that a text says.
      *
-     * @throws org.wellwright.solver.InvalidModelException at the first fault; its {@code where} is "column N", or "line L, column N" in a text of several
-     *     lines
+     * @throws org.wellwright.solver.InvalidModelException at the first fault; its {@code where} is "column N", or "line
+     *     L, column N" in a text of several lines
      */
     public static Formula parse(String text) {
         return language().parse(text);
@@ -75,7 +76,8 @@ public final class FormulaText {
             }
         }
         List<FormulaWord> sorted = new ArrayList<>(found.values());
-        sorted.sort(Comparator.comparingInt((FormulaWord word) -> word.text().length()).thenComparing(FormulaWord::text));
+        sorted.sort(Comparator.comparingInt((FormulaWord word) -> word.text().length())
+                .thenComparing(FormulaWord::text));
         return List.copyOf(sorted);
     }
 }

@@ -5,8 +5,8 @@ import org.apache.commons.numbers.gamma.Erf;
 import org.apache.commons.numbers.gamma.Erfc;
 
 /**
- * Elementary functions of intervals. Where an operand reaches beyond the domain of a function, the values on the rest of the operand are enclosed; where
- * none of it lies in the domain, every number is returned.
+ * Elementary functions of intervals. Where an operand reaches beyond the domain of a function, the values on the rest
+ * of the operand are enclosed; where none of it lies in the domain, every number is returned.
  */
 public final class IntervalFunctions {
     private static final int LIBRARY_STEPS = 2;
@@ -103,7 +103,8 @@ public final class IntervalFunctions {
         Interval domain = within(x, -1, 1);
         return domain == null
                 ? Interval.ENTIRE
-                : rising(t -> -Math.acos(t), domain, LIBRARY_STEPS, Double.NEGATIVE_INFINITY, 0).negate();
+                : rising(t -> -Math.acos(t), domain, LIBRARY_STEPS, Double.NEGATIVE_INFINITY, 0)
+                        .negate();
     }
 
     /** atan x. */
@@ -188,7 +189,9 @@ public final class IntervalFunctions {
             return power(x, (int) y.lower());
         }
         Interval base = within(x, 0, Double.POSITIVE_INFINITY);
-        if (base == null || x.lower() < 0 && !y.isPoint() || y.isPoint() && y.lower() == Math.rint(y.lower()) && x.lower() < 0) {
+        if (base == null
+                || x.lower() < 0 && !y.isPoint()
+                || y.isPoint() && y.lower() == Math.rint(y.lower()) && x.lower() < 0) {
             return Interval.ENTIRE;
         }
         double low = Double.POSITIVE_INFINITY;

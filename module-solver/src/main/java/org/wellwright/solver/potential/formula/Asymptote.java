@@ -6,8 +6,9 @@ import org.wellwright.solver.potential.formula.PowerLogSeries.Order;
 import org.wellwright.solver.potential.formula.PowerLogSeries.Term;
 
 /**
- * Leading behaviour S(t)·e^φ(t) of a function at t → ∞: S a {@link PowerLogSeries}, φ a sum of positive powers of t. Whatever is exponentially smaller
- * is left out and S marked inexact. Immutable; {@code null} in place of one means that nothing is known.
+ * Leading behaviour S(t)·e^φ(t) of a function at t → ∞: S a {@link PowerLogSeries}, φ a sum of positive powers of t.
+ * Whatever is exponentially smaller is left out and S marked inexact. Immutable; {@code null} in place of one means
+ * that nothing is known.
  *
  * @param phase the terms of φ in falling order, powers above 0
  * @param series S
@@ -109,7 +110,8 @@ record Asymptote(List<Term> phase, PowerLogSeries series) {
     /** δ in S = lead · (1 + δ). */
     private PowerLogSeries relativeRest() {
         Term lead = series.lead();
-        PowerLogSeries inverse = PowerLogSeries.term(1 / lead.coefficient(), -lead.order().power(), -lead.order().logs());
+        PowerLogSeries inverse = PowerLogSeries.term(
+                1 / lead.coefficient(), -lead.order().power(), -lead.order().logs());
         return series.below(lead.order()).times(inverse);
     }
 
@@ -153,7 +155,9 @@ record Asymptote(List<Term> phase, PowerLogSeries series) {
 
     /** ln x; null if x is not surely positive. */
     Asymptote ln() {
-        if (!series.hasLead() || series.lead().coefficient() <= 0 || series.lead().order().logs() != 0) {
+        if (!series.hasLead()
+                || series.lead().coefficient() <= 0
+                || series.lead().order().logs() != 0) {
             return null;
         }
         Term lead = series.lead();
@@ -161,7 +165,8 @@ record Asymptote(List<Term> phase, PowerLogSeries series) {
         result = result.plus(PowerLogSeries.constant(Math.log(lead.coefficient())));
         result = result.plus(PowerLogSeries.term(lead.order().power(), 0, 1));
         for (Term term : phase) {
-            result = result.plus(PowerLogSeries.term(term.coefficient(), term.order().power(), 0));
+            result = result.plus(
+                    PowerLogSeries.term(term.coefficient(), term.order().power(), 0));
         }
         return of(result);
     }
@@ -184,7 +189,9 @@ record Asymptote(List<Term> phase, PowerLogSeries series) {
     }
 
     private static List<Term> scaled(List<Term> terms, double factor) {
-        return terms.stream().map(term -> new Term(term.order(), term.coefficient() * factor)).toList();
+        return terms.stream()
+                .map(term -> new Term(term.order(), term.coefficient() * factor))
+                .toList();
     }
 
     private static List<Term> difference(List<Term> a, List<Term> b) {

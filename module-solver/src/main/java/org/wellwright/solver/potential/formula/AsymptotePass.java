@@ -19,7 +19,8 @@ final class AsymptotePass {
         double inverseSquare = 0;
         Term lead = null;
         for (Term term : series.terms()) {
-            boolean square = Math.abs(term.order().power() - 2) <= 1e-12 && term.order().logs() == 0;
+            boolean square =
+                    Math.abs(term.order().power() - 2) <= 1e-12 && term.order().logs() == 0;
             if (square) {
                 inverseSquare = term.coefficient();
             } else if (term.order().power() > 1e-12 && lead == null) {
@@ -30,7 +31,11 @@ final class AsymptotePass {
         if (lead == null) {
             return new OriginBehaviour(inverseSquare, 0, 0, !hidden);
         }
-        return new OriginBehaviour(inverseSquare, -lead.order().power(), lead.coefficient(), !hidden && lead.order().logs() == 0);
+        return new OriginBehaviour(
+                inverseSquare,
+                -lead.order().power(),
+                lead.coefficient(),
+                !hidden && lead.order().logs() == 0);
     }
 
     /** V at r → ∞, with t = r. */
@@ -54,14 +59,16 @@ final class AsymptotePass {
             }
         }
         if (lead != null && lead.order().compareTo(Order.CONSTANT) > 0) {
-            double power = Math.abs(lead.order().power()) <= 1e-12 ? 0 : lead.order().power();
+            double power =
+                    Math.abs(lead.order().power()) <= 1e-12 ? 0 : lead.order().power();
             return new TailBehaviour(0, power, lead.coefficient(), true);
         }
         if (series.remainder().compareTo(Order.CONSTANT) >= 0) {
             return TailBehaviour.UNKNOWN;
         }
         if (lead == null) {
-            return new TailBehaviour(limit, Double.NEGATIVE_INFINITY, 0, series.remainder().isNone());
+            return new TailBehaviour(
+                    limit, Double.NEGATIVE_INFINITY, 0, series.remainder().isNone());
         }
         boolean plain = lead.order().logs() == 0 && lead.order().power() < -1e-12;
         return new TailBehaviour(limit, lead.order().power(), lead.coefficient(), plain);
@@ -93,9 +100,10 @@ final class AsymptotePass {
             case MULTIPLY -> a.times(b);
             case DIVIDE -> times(a, b.power(-1));
             case NEGATE -> a.negate();
-            case POWER -> program.varies(graph.right(node))
-                    ? exp(times(b, a.ln()))
-                    : a.power(program.constant(graph.right(node)));
+            case POWER ->
+                program.varies(graph.right(node))
+                        ? exp(times(b, a.ln()))
+                        : a.power(program.constant(graph.right(node)));
             case EXP -> a.exp();
             case EXPM1 -> minusOne(a);
             case LN -> a.ln();
@@ -103,19 +111,27 @@ final class AsymptotePass {
             case SQRT -> a.power(0.5);
             case SIN -> sine(a, 0);
             case COS -> sine(a, 1);
-            case TAN -> Double.isNaN(a.limit()) ? null : times(sine(a, 0), sine(a, 1).power(-1));
+            case TAN ->
+                Double.isNaN(a.limit()) ? null : times(sine(a, 0), sine(a, 1).power(-1));
             case ASIN -> Math.abs(a.limit()) < 1 ? a.compose(Taylor.asin(a.limit())) : null;
-            case ACOS -> Math.abs(a.limit()) < 1
-                    ? Asymptote.constant(Math.PI / 2).plus(a.compose(Taylor.asin(a.limit())).negate())
-                    : null;
+            case ACOS ->
+                Math.abs(a.limit()) < 1
+                        ? Asymptote.constant(Math.PI / 2)
+                                .plus(a.compose(Taylor.asin(a.limit())).negate())
+                        : null;
             case ATAN -> atan(a);
             case SINH -> hyperbolic(a, -1);
             case COSH -> hyperbolic(a, 1);
-            case TANH -> Double.isNaN(a.limit()) ? saturated(a, -1, 1) : times(hyperbolic(a, -1), hyperbolic(a, 1).power(-1));
+            case TANH ->
+                Double.isNaN(a.limit())
+                        ? saturated(a, -1, 1)
+                        : times(hyperbolic(a, -1), hyperbolic(a, 1).power(-1));
             case ERF -> Double.isNaN(a.limit()) ? saturated(a, -1, 1) : a.compose(Taylor.erf(a.limit()));
-            case ERFC -> Double.isNaN(a.limit())
-                    ? saturated(a, 2, 0)
-                    : Asymptote.constant(1).plus(a.compose(Taylor.erf(a.limit())).negate());
+            case ERFC ->
+                Double.isNaN(a.limit())
+                        ? saturated(a, 2, 0)
+                        : Asymptote.constant(1)
+                                .plus(a.compose(Taylor.erf(a.limit())).negate());
             case ABS -> a.sign() == null ? null : a.sign() < 0 ? a.negate() : a;
             case STEP -> a.sign() == null ? null : Asymptote.constant(a.sign() < 0 ? 0 : 1);
             case MIN -> larger(a, b) == null ? null : larger(a, b) > 0 ? b : a;
@@ -159,16 +175,19 @@ final class AsymptotePass {
         if (sign == null || inverse == null || Double.isNaN(inverse.limit())) {
             return Asymptote.BOUNDED;
         }
-        return Asymptote.constant(sign * Math.PI / 2).plus(inverse.compose(Taylor.atan(0)).negate());
+        return Asymptote.constant(sign * Math.PI / 2)
+                .plus(inverse.compose(Taylor.atan(0)).negate());
     }
 
     /** A function that reaches its limits exponentially fast, of an argument that grows without limit. */
     private static Asymptote saturated(Asymptote a, double below, double above) {
-        boolean grows = a.trend() > 0 || a.series().hasLead() && a.series().lead().order().power() > 1e-12;
+        boolean grows = a.trend() > 0
+                || a.series().hasLead() && a.series().lead().order().power() > 1e-12;
         if (!grows || a.sign() == null) {
             return Asymptote.BOUNDED;
         }
-        return Asymptote.of(PowerLogSeries.constant(a.sign() < 0 ? below : above).inexact());
+        return Asymptote.of(
+                PowerLogSeries.constant(a.sign() < 0 ? below : above).inexact());
     }
 
     private static Integer larger(Asymptote a, Asymptote b) {

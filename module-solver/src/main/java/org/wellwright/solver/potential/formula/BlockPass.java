@@ -1,8 +1,8 @@
 package org.wellwright.solver.potential.formula;
 
 /**
- * Evaluates a program at many radii, one operation at a time over blocks of radii, with the bits of {@link BoundFormula#value}. The registers of
- * results that are no longer needed are used again.
+ * Evaluates a program at many radii, one operation at a time over blocks of radii, with the bits of
+ * {@link BoundFormula#value}. The registers of results that are no longer needed are used again.
  */
 final class BlockPass {
     private static final int BLOCK = 128;
@@ -49,7 +49,8 @@ final class BlockPass {
     /**
      * V at {@code count} radii.
      *
-     * @return whether every value is surely good; if not, values that are not finite or came through a division by infinity must be computed again
+     * @return whether every value is surely good; if not, values that are not finite or came through a division by
+     *     infinity must be computed again
      */
     boolean run(double[] radii, double[] into, int count) {
         int block = Math.min(BLOCK, count);

@@ -36,8 +36,13 @@ final class BoundFormula implements TermEvaluator {
             Operation operation = graph.operation(i);
             text.append(i == 0 ? "" : ";");
             switch (operation) {
-                case LITERAL -> text.append(Double.toHexString(graph.literal(i))).append(graph.inexact(i) ? "~" : "");
-                case PARAMETER -> text.append('p').append(graph.left(i)).append('=').append(Double.toHexString(program.parameter(graph.left(i))));
+                case LITERAL ->
+                    text.append(Double.toHexString(graph.literal(i))).append(graph.inexact(i) ? "~" : "");
+                case PARAMETER ->
+                    text.append('p')
+                            .append(graph.left(i))
+                            .append('=')
+                            .append(Double.toHexString(program.parameter(graph.left(i))));
                 case ORBITAL -> text.append("l=").append(program.orbital());
                 default -> {
                     text.append(operation);

@@ -9,8 +9,9 @@ import org.wellwright.solver.potential.BreakPoint;
 import org.wellwright.solver.potential.Interval;
 
 /**
- * Finds the radii where an absolute value, a step, a minimum or a maximum in a formula switches: exactly where the switching argument is linear in r,
- * otherwise by bisection of [1e-9, 1e9] with enclosures of argument and slope, so that no simple root is lost within the effort allowed.
+ * Finds the radii where an absolute value, a step, a minimum or a maximum in a formula switches: exactly where the
+ * switching argument is linear in r, otherwise by bisection of [1e-9, 1e9] with enclosures of argument and slope, so
+ * that no simple root is lost within the effort allowed.
  */
 final class BreakPointSearch {
     private static final double NEAREST = 1e-9;
@@ -69,7 +70,8 @@ final class BreakPointSearch {
         double right = forced(together, radius, true);
         double left = forced(together, radius, false);
         double jump = right - left;
-        double near = new TangentPass(program, radius * (1 + 1e-6), ScaledPass.RADIUS, program.root()).tangent(program.root());
+        double near = new TangentPass(program, radius * (1 + 1e-6), ScaledPass.RADIUS, program.root())
+                .tangent(program.root());
         double size = Math.abs(right) + Math.abs(left) + Math.abs(radius * near);
         boolean jumps = Math.abs(jump) > 1e-13 * size;
         List<Double> gradient = together.get(0).gradient();
@@ -153,9 +155,10 @@ final class BreakPointSearch {
             case ADD -> new double[] {a[0] + b[0], a[1] + b[1]};
             case SUBTRACT -> new double[] {a[0] - b[0], a[1] - b[1]};
             case NEGATE -> new double[] {-a[0], -a[1]};
-            case MULTIPLY -> b[0] == 0
-                    ? new double[] {a[0] * b[1], a[1] * b[1]}
-                    : a[0] == 0 ? new double[] {a[1] * b[0], a[1] * b[1]} : null;
+            case MULTIPLY ->
+                b[0] == 0
+                        ? new double[] {a[0] * b[1], a[1] * b[1]}
+                        : a[0] == 0 ? new double[] {a[1] * b[0], a[1] * b[1]} : null;
             case DIVIDE -> b[0] == 0 ? new double[] {a[0] / b[1], a[1] / b[1]} : null;
             default -> null;
         };

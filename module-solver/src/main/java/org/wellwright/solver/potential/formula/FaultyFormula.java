@@ -4,7 +4,10 @@ import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.potential.FormulaFault;
 
-/** Carries the first fault out of the parser; callers see it as a {@link FormulaFault} or an {@link InvalidModelException}. */
+/**
+ * Carries the first fault out of the parser; callers see it as a {@link FormulaFault} or an
+ * {@link InvalidModelException}.
+ */
 final class FaultyFormula extends RuntimeException {
     private static final long serialVersionUID = 1L;
 

@@ -8,7 +8,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
-/** Recursive descent over the words of a formula; see {@link org.wellwright.solver.potential.FormulaText} for the language. */
+/**
+ * Recursive descent over the words of a formula; see {@link org.wellwright.solver.potential.FormulaText} for the
+ * language.
+ */
 final class FormulaParser {
     static final int MAX_LENGTH = 10_000;
     static final int MAX_DEPTH = 200;
@@ -53,7 +56,10 @@ final class FormulaParser {
                 at++;
             }
             if (peek().kind() == Lexeme.Kind.END) {
-                throw fault(peek(), words.size() == 1 ? "the formula is empty" : "the last line must be an expression", "write V as a function of r");
+                throw fault(
+                        peek(),
+                        words.size() == 1 ? "the formula is empty" : "the last line must be an expression",
+                        "write V as a function of r");
             }
             if (peek().kind() == Lexeme.Kind.NAME && words.get(at + 1).is("=")) {
                 line();
@@ -73,10 +79,16 @@ final class FormulaParser {
     private void line() {
         Lexeme name = next();
         if (RESERVED.contains(name.text()) || Operation.function(name.text()).isPresent()) {
-            throw fault(name, "'" + name.text() + "' has a meaning of its own and cannot name a line", "choose another name");
+            throw fault(
+                    name,
+                    "'" + name.text() + "' has a meaning of its own and cannot name a line",
+                    "choose another name");
         }
         if (lines.containsKey(name.text()) || isUsed(name.text())) {
-            throw fault(name, "'" + name.text() + "' is used before this line names it", "choose another name, or move the line up");
+            throw fault(
+                    name,
+                    "'" + name.text() + "' is used before this line names it",
+                    "choose another name, or move the line up");
         }
         next();
         int value = expression();
@@ -140,13 +152,19 @@ final class FormulaParser {
 
     private void enter(Lexeme word) {
         if (++depth > MAX_DEPTH) {
-            throw fault(word, "the formula is nested deeper than " + MAX_DEPTH, "name intermediate lines, or split it into several terms");
+            throw fault(
+                    word,
+                    "the formula is nested deeper than " + MAX_DEPTH,
+                    "name intermediate lines, or split it into several terms");
         }
     }
 
     private int operand() {
         if (graph.isFull() || ++steps > MAX_STEPS) {
-            throw fault(peek(), "the formula has more than %d operations".formatted(GraphBuilder.MAX_NODES), "shorten its sums");
+            throw fault(
+                    peek(),
+                    "the formula has more than %d operations".formatted(GraphBuilder.MAX_NODES),
+                    "shorten its sums");
         }
         Lexeme word = next();
         if (word.kind() == Lexeme.Kind.NUMBER) {
@@ -197,8 +215,11 @@ final class FormulaParser {
         if (peek().is("(")) {
             throw RESERVED.contains(name) || lines.containsKey(name) || indices.containsKey(name)
                     ? fault(peek(), "an operator is missing between '" + name + "' and '('", "write * for a product")
-                    : fault(word, "the function '" + name + "' is not known",
-                            "use one of " + String.join(", ", Operation.functionNames()) + ", sum, or write * for a product");
+                    : fault(
+                            word,
+                            "the function '" + name + "' is not known",
+                            "use one of " + String.join(", ", Operation.functionNames())
+                                    + ", sum, or write * for a product");
         }
         if (indices.containsKey(name)) {
             return graph.constant(indices.get(name));
@@ -220,7 +241,11 @@ final class FormulaParser {
         int start = peek().start();
         int index = expression();
         if (!graph.isInteger(index) || graph.number(index) < 0 || graph.number(index) > MAX_INDEX) {
-            throw fault(start, peek().start(), "the index of '" + word.text() + "' must be a whole number from 0 to " + MAX_INDEX, "");
+            throw fault(
+                    start,
+                    peek().start(),
+                    "the index of '" + word.text() + "' must be a whole number from 0 to " + MAX_INDEX,
+                    "");
         }
         close("]", bracket);
         depth--;
@@ -229,7 +254,10 @@ final class FormulaParser {
 
     private int call(Lexeme word, Operation function) {
         if (!peek().is("(")) {
-            throw fault(word, "'" + word.text() + "' is a function and needs its argument in parentheses", "write " + word.text() + "(...)");
+            throw fault(
+                    word,
+                    "'" + word.text() + "' is a function and needs its argument in parentheses",
+                    "write " + word.text() + "(...)");
         }
         Lexeme open = next();
         enter(open);
@@ -245,7 +273,11 @@ final class FormulaParser {
         depth--;
         boolean many = function == Operation.MIN || function == Operation.MAX;
         if (many ? arguments.size() < 2 : arguments.size() != 1) {
-            throw fault(word, "%s takes %s, got %d".formatted(word.text(), many ? "two or more arguments" : "one argument", arguments.size()), "");
+            throw fault(
+                    word,
+                    "%s takes %s, got %d"
+                            .formatted(word.text(), many ? "two or more arguments" : "one argument", arguments.size()),
+                    "");
         }
         if (!many) {
             return graph.unary(function, arguments.get(0));
@@ -265,9 +297,15 @@ final class FormulaParser {
         Lexeme open = next();
         enter(open);
         Lexeme index = next();
-        if (index.kind() != Lexeme.Kind.NAME || RESERVED.contains(index.text()) || lines.containsKey(index.text())
-                || indices.containsKey(index.text()) || Operation.function(index.text()).isPresent()) {
-            throw fault(index, "the first argument of sum must be a name that has no meaning yet", "write sum(i, 0, 7, ...)");
+        if (index.kind() != Lexeme.Kind.NAME
+                || RESERVED.contains(index.text())
+                || lines.containsKey(index.text())
+                || indices.containsKey(index.text())
+                || Operation.function(index.text()).isPresent()) {
+            throw fault(
+                    index,
+                    "the first argument of sum must be a name that has no meaning yet",
+                    "write sum(i, 0, 7, ...)");
         }
         comma();
         int from = limit();
@@ -310,7 +348,10 @@ final class FormulaParser {
             return;
         }
         if (word.kind() == Lexeme.Kind.END || word.kind() == Lexeme.Kind.SEPARATOR || word.is(")") || word.is("]")) {
-            throw fault(word, "the '%s' of %s is not closed".formatted(open.text(), FaultyFormula.place(text, open.start())), "add '" + sign + "'");
+            throw fault(
+                    word,
+                    "the '%s' of %s is not closed".formatted(open.text(), FaultyFormula.place(text, open.start())),
+                    "add '" + sign + "'");
         }
         throw unexpected(word);
     }
@@ -344,7 +385,10 @@ final class FormulaParser {
                     yield fault(word, "an operator is missing before '('", "write * for a product");
                 }
                 if (word.is("=")) {
-                    yield fault(word, "'=' may only follow the name of a line", "write name = expression on a line of its own");
+                    yield fault(
+                            word,
+                            "'=' may only follow the name of a line",
+                            "write name = expression on a line of its own");
                 }
                 yield fault(word, shown(word) + " does not belong here", "remove it, or close what is open");
             }
@@ -355,7 +399,8 @@ final class FormulaParser {
         if (word.kind() == Lexeme.Kind.SEPARATOR) {
             return word.text().equals(";") ? "';'" : "the end of the line";
         }
-        if (word.kind() == Lexeme.Kind.FAULTY && (word.text().isBlank() || Character.isISOControl(word.text().codePointAt(0)))) {
+        if (word.kind() == Lexeme.Kind.FAULTY
+                && (word.text().isBlank() || Character.isISOControl(word.text().codePointAt(0)))) {
             return "U+%04X".formatted(word.text().codePointAt(0));
         }
         return "'" + (word.text().length() > 40 ? word.text().substring(0, 40) + "…" : word.text()) + "'";

@@ -5,8 +5,8 @@ import java.util.List;
 /**
  * A formula as a directed graph without cycles: the operands of every node come before it. Immutable.
  *
- * <p>Node i applies {@code operation(i)} to the nodes {@code left(i)} and {@code right(i)}; a LITERAL has {@code literal(i)}, a PARAMETER the
- * index {@code left(i)} into {@link #names}. The last node is the value.
+ * <p>Node i applies {@code operation(i)} to the nodes {@code left(i)} and {@code right(i)}; a LITERAL has
+ * {@code literal(i)}, a PARAMETER the index {@code left(i)} into {@link #names}. The last node is the value.
  */
 final class Graph {
     private final Operation[] operations;

@@ -6,8 +6,8 @@ import java.util.List;
 import java.util.Map;
 
 /**
- * Builds a {@link Graph}: shares equal subexpressions and writes those that would cancel in their stable form, such as 1 − e^x as −expm1(x),
- * ln(1 + x) as log1p(x), 1 − cos x as 2 sin²(x/2), √(1 + x) − 1 as x/(√(1 + x) + 1).
+ * Builds a {@link Graph}: shares equal subexpressions and writes those that would cancel in their stable form, such as
+ * 1 − e^x as −expm1(x), ln(1 + x) as log1p(x), 1 − cos x as 2 sin²(x/2), √(1 + x) − 1 as x/(√(1 + x) + 1).
  */
 final class GraphBuilder {
     /** Upper limit of the number of operations. */
@@ -100,7 +100,9 @@ final class GraphBuilder {
                     return unary(Operation.LOG1P, rest);
                 }
                 if (operation(x) == Operation.SUBTRACT && isLiteral(left(x), 1)) {
-                    return unary(Operation.LOG1P, unary(Operation.NEGATE, nodes.get(x).right()));
+                    return unary(
+                            Operation.LOG1P,
+                            unary(Operation.NEGATE, nodes.get(x).right()));
                 }
             }
             default -> {

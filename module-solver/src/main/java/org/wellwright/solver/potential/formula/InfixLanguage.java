@@ -46,7 +46,9 @@ public final class InfixLanguage implements FormulaLanguage {
         for (int i = 0; i + 1 < words.size(); i++) {
             boolean isName = words.get(i).kind() == Lexeme.Kind.NAME;
             boolean named = words.get(i + 1).is("=");
-            boolean index = i >= 2 && words.get(i - 1).is("(") && words.get(i - 2).text().equals("sum");
+            boolean index = i >= 2
+                    && words.get(i - 1).is("(")
+                    && words.get(i - 2).text().equals("sum");
             if (isName && (named || index)) {
                 locals.add(words.get(i).text());
             }

@@ -5,11 +5,12 @@ import org.wellwright.solver.potential.IntervalFunctions;
 import org.wellwright.solver.potential.TailBehaviour;
 
 /**
- * Encloses V over a range of radii: the natural extension of the formula, cut down where the enclosed slope allows it to the values at both ends
- * (monotone V) or to the mean-value form V(m) + V′([a, b])·([a, b] − m) (Moore 1966).
+ * Encloses V over a range of radii: the natural extension of the formula, cut down where the enclosed slope allows it
+ * to the values at both ends (monotone V) or to the mean-value form V(m) + V′([a, b])·([a, b] − m) (Moore 1966).
  */
 final class IntervalPass {
-    private static final Interval TWO_OVER_ROOT_PI = new Interval(Math.nextDown(1.1283791670955126), Math.nextUp(1.1283791670955126));
+    private static final Interval TWO_OVER_ROOT_PI =
+            new Interval(Math.nextDown(1.1283791670955126), Math.nextUp(1.1283791670955126));
 
     private final Graph graph;
     private final Interval[] value;
@@ -60,7 +61,11 @@ final class IntervalPass {
             return natural.meet(at(formula, from));
         }
         if (slope.lower() >= 0 || slope.upper() <= 0) {
-            return natural.meet(at(formula, from).hull(to == Double.POSITIVE_INFINITY ? atInfinity(formula.tail(), formula.value(from)) : at(formula, to)));
+            return natural.meet(at(formula, from)
+                    .hull(
+                            to == Double.POSITIVE_INFINITY
+                                    ? atInfinity(formula.tail(), formula.value(from))
+                                    : at(formula, to)));
         }
         if (slope.isBounded() && to < Double.POSITIVE_INFINITY) {
             double middle = from + (to - from) / 2;
@@ -149,8 +154,11 @@ final class IntervalPass {
         if (a.lower() < 0 && !integer) {
             return Interval.ENTIRE;
         }
-        Interval first = b.times(IntervalFunctions.power(a, b.minus(Interval.of(1)))).times(da);
-        return db.lower() == 0 && db.upper() == 0 ? first : first.plus(v.times(IntervalFunctions.ln(a)).times(db));
+        Interval first =
+                b.times(IntervalFunctions.power(a, b.minus(Interval.of(1)))).times(da);
+        return db.lower() == 0 && db.upper() == 0
+                ? first
+                : first.plus(v.times(IntervalFunctions.ln(a)).times(db));
     }
 
     private static Interval partial(Operation operation, Interval a, Interval v) {
@@ -170,8 +178,12 @@ final class IntervalPass {
             case SINH -> IntervalFunctions.cosh(a);
             case COSH -> IntervalFunctions.sinh(a);
             case TANH -> one.over(IntervalFunctions.power(IntervalFunctions.cosh(a), 2));
-            case ERF -> IntervalFunctions.exp(IntervalFunctions.power(a, 2).negate()).times(TWO_OVER_ROOT_PI);
-            case ERFC -> IntervalFunctions.exp(IntervalFunctions.power(a, 2).negate()).times(TWO_OVER_ROOT_PI).negate();
+            case ERF ->
+                IntervalFunctions.exp(IntervalFunctions.power(a, 2).negate()).times(TWO_OVER_ROOT_PI);
+            case ERFC ->
+                IntervalFunctions.exp(IntervalFunctions.power(a, 2).negate())
+                        .times(TWO_OVER_ROOT_PI)
+                        .negate();
             case ABS -> a.lower() >= 0 ? one : a.upper() <= 0 ? Interval.of(-1) : new Interval(-1, 1);
             default -> Interval.ENTIRE;
         };

@@ -71,10 +71,15 @@ enum Operation {
     }
 
     static Optional<Operation> function(String name) {
-        return Arrays.stream(values()).filter(operation -> operation.names.contains(name)).findFirst();
+        return Arrays.stream(values())
+                .filter(operation -> operation.names.contains(name))
+                .findFirst();
     }
 
     static List<String> functionNames() {
-        return Arrays.stream(values()).flatMap(operation -> operation.names.stream()).sorted().toList();
+        return Arrays.stream(values())
+                .flatMap(operation -> operation.names.stream())
+                .sorted()
+                .toList();
     }
 }

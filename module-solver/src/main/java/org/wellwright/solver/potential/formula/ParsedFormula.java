@@ -37,12 +37,15 @@ final class ParsedFormula implements Formula {
     @Override
     public TermEvaluator bind(double[] values, ChannelFacts channel) {
         if (values.length != names().size()) {
-            throw new IllegalArgumentException("the formula takes %d values, got %d".formatted(names().size(), values.length));
+            throw new IllegalArgumentException(
+                    "the formula takes %d values, got %d".formatted(names().size(), values.length));
         }
         for (int i = 0; i < values.length; i++) {
             if (!Double.isFinite(values[i])) {
                 throw new InvalidModelException(
-                        "the parameter '%s' must be finite, got %s".formatted(names().get(i), values[i]), place(i), "change its value");
+                        "the parameter '%s' must be finite, got %s".formatted(names().get(i), values[i]),
+                        place(i),
+                        "change its value");
             }
         }
         return new BoundFormula(graph, values, usesOrbital ? channel.orbital() : 0);
@@ -54,7 +57,11 @@ final class ParsedFormula implements Formula {
         for (int i = 0; i < ordered.length; i++) {
             Double value = values.get(names().get(i));
             if (value == null) {
-                String known = values.isEmpty() ? "none has one" : "those with a value are " + String.join(", ", values.keySet().stream().sorted().toList());
+                String known = values.isEmpty()
+                        ? "none has one"
+                        : "those with a value are "
+                                + String.join(
+                                        ", ", values.keySet().stream().sorted().toList());
                 throw new InvalidModelException(
                         "the parameter '%s' has no value".formatted(names().get(i)), place(i), "give it one; " + known);
             }

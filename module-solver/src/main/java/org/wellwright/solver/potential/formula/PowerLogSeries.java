@@ -4,7 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The leading terms Σ c t^q (ln t)^k of a function at t → ∞ in falling order, and the order of what was left out. Immutable.
+ * The leading terms Σ c t^q (ln t)^k of a function at t → ∞ in falling order, and the order of what was left out.
+ * Immutable.
  */
 final class PowerLogSeries {
     /** How many terms are kept. */
@@ -39,7 +40,8 @@ final class PowerLogSeries {
         @Override
         public int compareTo(Order other) {
             double apart = Math.abs(power - other.power);
-            boolean same = power == other.power || apart < Double.POSITIVE_INFINITY && apart <= 1e-12 * (1 + Math.abs(power));
+            boolean same =
+                    power == other.power || apart < Double.POSITIVE_INFINITY && apart <= 1e-12 * (1 + Math.abs(power));
             return same ? Integer.compare(logs, other.logs) : Double.compare(power, other.power);
         }
     }
@@ -54,7 +56,9 @@ final class PowerLogSeries {
     }
 
     static PowerLogSeries term(double coefficient, double power, int logs) {
-        return coefficient == 0 ? ZERO : new PowerLogSeries(List.of(new Term(new Order(power, logs), coefficient)), NONE, true);
+        return coefficient == 0
+                ? ZERO
+                : new PowerLogSeries(List.of(new Term(new Order(power, logs), coefficient)), NONE, true);
     }
 
     static PowerLogSeries constant(double value) {
@@ -101,7 +105,8 @@ final class PowerLogSeries {
 
     /** Without the terms that {@code drop} names, whose order is at most {@code least}. */
     PowerLogSeries below(Order least) {
-        return new PowerLogSeries(terms.stream().filter(term -> term.order().compareTo(least) < 0).toList(), remainder, exact);
+        return new PowerLogSeries(
+                terms.stream().filter(term -> term.order().compareTo(least) < 0).toList(), remainder, exact);
     }
 
     PowerLogSeries withRemainder(Order order) {
@@ -118,7 +123,9 @@ final class PowerLogSeries {
         if (factor == 0) {
             return ZERO;
         }
-        List<Term> scaled = terms.stream().map(term -> new Term(term.order(), term.coefficient() * factor)).toList();
+        List<Term> scaled = terms.stream()
+                .map(term -> new Term(term.order(), term.coefficient() * factor))
+                .toList();
         return new PowerLogSeries(scaled, remainder, exact);
     }
 

@@ -3,7 +3,8 @@ package org.wellwright.solver.potential.formula;
 import java.util.Arrays;
 
 /**
- * A {@link Graph} with its parameters bound to numbers: what does not depend on r is computed once, with a bound on its rounding. Immutable.
+ * A {@link Graph} with its parameters bound to numbers: what does not depend on r is computed once, with a bound on its
+ * rounding. Immutable.
  */
 final class Program {
     private final Graph graph;
@@ -32,8 +33,18 @@ final class Program {
             if (varies[i]) {
                 found[count++] = i;
             } else {
-                constants[i] = arity == 0 ? leaf(i) : Real.apply(graph.operation(i), constant(graph.left(i)), constant(graph.right(i)));
-                errors[i] = arity == 0 ? leafError(i) : RoundingPass.error(graph.operation(i), constants[i], constant(graph.left(i)), errorOf(graph.left(i)), constant(graph.right(i)), errorOf(graph.right(i)));
+                constants[i] = arity == 0
+                        ? leaf(i)
+                        : Real.apply(graph.operation(i), constant(graph.left(i)), constant(graph.right(i)));
+                errors[i] = arity == 0
+                        ? leafError(i)
+                        : RoundingPass.error(
+                                graph.operation(i),
+                                constants[i],
+                                constant(graph.left(i)),
+                                errorOf(graph.left(i)),
+                                constant(graph.right(i)),
+                                errorOf(graph.right(i)));
             }
         }
         this.varying = Arrays.copyOf(found, count);

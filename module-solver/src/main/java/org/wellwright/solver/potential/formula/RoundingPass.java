@@ -3,8 +3,8 @@ package org.wellwright.solver.potential.formula;
 import org.wellwright.solver.potential.Rounding;
 
 /**
- * Running error analysis (Wilkinson 1963; Higham 2002, section 3.3): bounds |computed − exact| node by node, exact meaning the formula as typed with
- * its decimal numbers and the given doubles of its parameters.
+ * Running error analysis (Wilkinson 1963; Higham 2002, section 3.3): bounds |computed − exact| node by node, exact
+ * meaning the formula as typed with its decimal numbers and the given doubles of its parameters.
  */
 final class RoundingPass {
     private static final double U = Rounding.UNIT;
@@ -63,7 +63,8 @@ final class RoundingPass {
             case SINH, COSH -> 5 * U * size + (Math.exp(Math.abs(a)) + 1) * Math.expm1(ea) + Double.MIN_VALUE;
             case TANH -> 5 * U * size + ea / square(Math.cosh(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
             case ERF -> 6 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
-            case ERFC -> 16 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
+            case ERFC ->
+                16 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
             case STEP -> Math.abs(a) > ea || a == 0 && ea == 0 ? 0 : 1;
             default -> 0;
         };
@@ -93,7 +94,9 @@ final class RoundingPass {
             }
             int n = (int) Math.abs(b);
             double roundings = (b < 0 ? n : Math.max(0, n - 1)) * U * 1.01;
-            double relative = ea == 0 ? 0 : ea < Math.abs(a) ? Math.expm1(n * -Math.log1p(-ea / Math.abs(a))) : Double.POSITIVE_INFINITY;
+            double relative = ea == 0
+                    ? 0
+                    : ea < Math.abs(a) ? Math.expm1(n * -Math.log1p(-ea / Math.abs(a))) : Double.POSITIVE_INFINITY;
             if (relative == Double.POSITIVE_INFINITY && b > 0) {
                 return Math.pow(Math.abs(a) + ea, n) * (1 + 8 * U) + size;
             }
@@ -112,11 +115,14 @@ final class RoundingPass {
     }
 
     private static double logarithm(double a, double ea, double size) {
-        return ea == 0 ? library(0, size) : ea < a ? library(-Math.log1p(-ea / a) * (1 + 4 * U), size) : Double.POSITIVE_INFINITY;
+        return ea == 0
+                ? library(0, size)
+                : ea < a ? library(-Math.log1p(-ea / a) * (1 + 4 * U), size) : Double.POSITIVE_INFINITY;
     }
 
     private static double tangent(double v, double ea, double size) {
-        // |tan x − tan y| ≤ |x − y| (1 + t²) with t the largest |tangent| between; within 0.1/(1 + |v|) it grows by less than a quarter.
+        // |tan x − tan y| ≤ |x − y| (1 + t²) with t the largest |tangent| between; within 0.1/(1 + |v|) it grows by
+        // less than a quarter.
         return ea * (1 + size) <= 0.1 ? library(ea * (1 + square(1.25 * v + 0.25)), size) : Double.POSITIVE_INFINITY;
     }
 
@@ -125,7 +131,9 @@ final class RoundingPass {
             return library(0, size);
         }
         double far = Math.abs(a) + ea;
-        return far < 1 ? library(ea / Math.sqrt((1 - far) * (1 + far)) * (1 + 8 * U), size) : 2 * Math.sqrt(2 * ea) + library(0, size);
+        return far < 1
+                ? library(ea / Math.sqrt((1 - far) * (1 + far)) * (1 + 8 * U), size)
+                : 2 * Math.sqrt(2 * ea) + library(0, size);
     }
 
     private static double square(double x) {

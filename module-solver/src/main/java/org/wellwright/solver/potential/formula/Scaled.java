@@ -1,8 +1,8 @@
 package org.wellwright.solver.potential.formula;
 
 /**
- * A number m·2^e with an exponent of 64 bits, for intermediate results beyond the range of a double, as in e^z/(1 + e^z)² far out. Its operations
- * have the relative errors of those of a double.
+ * A number m·2^e with an exponent of 64 bits, for intermediate results beyond the range of a double, as in e^z/(1 +
+ * e^z)² far out. Its operations have the relative errors of those of a double.
  *
  * @param mantissa m, 1 ≤ |m| < 2, or 0, or NaN
  * @param exponent e; 0 if m is 0 or NaN

@@ -3,8 +3,8 @@ package org.wellwright.solver.potential.formula;
 import org.wellwright.solver.potential.Rounding;
 
 /**
- * Value, derivative and rounding bound in {@link Scaled} numbers, for radii where a double overflows or underflows on the way. Slower than the other
- * passes and used only there.
+ * Value, derivative and rounding bound in {@link Scaled} numbers, for radii where a double overflows or underflows on
+ * the way. Slower than the other passes and used only there.
  */
 final class ScaledPass {
     /** Parameter index that asks for the derivative with respect to r. */
@@ -41,7 +41,10 @@ final class ScaledPass {
         return new ScaledPass(program, r, parameter).tangent[program.root()].toDouble();
     }
 
-    /** To first order in the roundings, doubled; the errors of the parts are below 1e-6 of themselves wherever this pass is needed. */
+    /**
+     * To first order in the roundings, doubled; the errors of the parts are below 1e-6 of themselves wherever this pass
+     * is needed.
+     */
     static double bound(Program program, double r) {
         ScaledPass pass = new ScaledPass(program, r, RADIUS);
         double bound = 2 * pass.error[program.root()].toDouble() + Double.MIN_VALUE;
@@ -83,7 +86,8 @@ final class ScaledPass {
         return switch (operation) {
             case NEGATE, ABS, STEP, MIN, MAX -> 0;
             case ADD, SUBTRACT, MULTIPLY, DIVIDE, SQRT -> 1;
-            case POWER -> Real.isSmallInteger(b.toDouble()) ? Math.abs(b.toDouble()) + 1 : 8 + 1500 * Math.abs(b.toDouble());
+            case POWER ->
+                Real.isSmallInteger(b.toDouble()) ? Math.abs(b.toDouble()) + 1 : 8 + 1500 * Math.abs(b.toDouble());
             case ERFC -> 16;
             default -> 8;
         };
@@ -102,7 +106,10 @@ final class ScaledPass {
             case LN -> a.ln();
             case LOG1P -> a.toDouble() > 1 ? Scaled.ONE.plus(a).ln() : Scaled.of(Math.log1p(a.toDouble()));
             case SQRT -> a.sqrt();
-            case SINH -> Math.abs(a.toDouble()) < 1 ? Scaled.of(Math.sinh(a.toDouble())) : a.exp().minus(a.negate().exp()).times(0.5);
+            case SINH ->
+                Math.abs(a.toDouble()) < 1
+                        ? Scaled.of(Math.sinh(a.toDouble()))
+                        : a.exp().minus(a.negate().exp()).times(0.5);
             case COSH -> a.exp().plus(a.negate().exp()).times(0.5);
             case ABS -> a.abs();
             case MIN -> a.compare(b) <= 0 ? a : b;
@@ -130,7 +137,8 @@ final class ScaledPass {
                 Scaled half = e.over(Scaled.ONE.plus(e.times(e)));
                 yield half.times(half).times(4);
             }
-            case ERF, ERFC -> a.times(a).negate().exp().times((operation == Operation.ERF ? 2 : -2) / Math.sqrt(Math.PI));
+            case ERF, ERFC ->
+                a.times(a).negate().exp().times((operation == Operation.ERF ? 2 : -2) / Math.sqrt(Math.PI));
             case ABS -> a.signum() < 0 ? Scaled.ONE.negate() : Scaled.ONE;
             case STEP -> Scaled.ZERO;
             case MIN -> a.compare(b) <= 0 ? Scaled.ONE : Scaled.ZERO;
