@@ -34,4 +34,10 @@ public record ModelComparison(
         groupErrors = List.copyOf(groupErrors);
         problems = List.copyOf(problems);
     }
+
+    /** The same with another rank. */
+    ModelComparison withRank(int newRank) {
+        return new ModelComparison(
+                model, newRank, quality, commonCriterion, rows, worstDatum, groupErrors, problems);
+    }
 }

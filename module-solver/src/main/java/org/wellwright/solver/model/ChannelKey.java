@@ -47,4 +47,23 @@ public record ChannelKey(int orbital, int twiceTotal, int twiceSpin, int parity)
     public ChannelFacts facts() {
         return new ChannelFacts(orbital, twiceTotal, twiceSpin);
     }
+
+    /** The channel in words: "l = 1, j = 3/2" or "J = 1, parity -". */
+    public String describe() {
+        if (coupled()) {
+            return "J = %s, parity %s".formatted(half(twiceTotal), parity > 0 ? "+" : "-");
+        }
+        String text = "l = " + orbital;
+        if (twiceSpin > 1 || twiceSpin == 0) {
+            text += ", S = " + half(twiceSpin) + ", J = " + half(twiceTotal);
+        } else if (twiceTotal >= 0) {
+            text += ", j = " + half(twiceTotal);
+        }
+        return text;
+    }
+
+    /** A half-integer in writing: 3 is "3/2", 4 is "2". */
+    public static String half(int twice) {
+        return twice % 2 == 0 ? Integer.toString(twice / 2) : twice + "/2";
+    }
 }

@@ -46,6 +46,11 @@ public record ModelError(List<Part> parts) {
                 throw new IllegalArgumentException("a relative model error has no unit, got '%s'".formatted(unit));
             }
         }
+
+        /** The same with another σ_mod. */
+        public Part withValue(double newValue) {
+            return new Part(group, measure, ExactNumber.of(newValue), unit, fitted);
+        }
     }
 
     /** Copies the list and checks that no group comes twice. */

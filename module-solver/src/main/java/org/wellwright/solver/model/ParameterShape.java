@@ -148,4 +148,45 @@ public sealed interface ParameterShape {
             throw new IllegalArgumentException("a parameter needs at least one value");
         }
     }
+
+    /**
+     * The same with other values: one per number, the number for all others last; a value outside its bounds becomes the bound.
+     *
+     * @param values new values; an entry that is NaN leaves its number as typed
+     */
+    default ParameterShape withValues(double[] values) {
+        if (this instanceof Scalar scalar) {
+            return new Scalar(scalar.setting().moved(values[0]));
+        }
+        if (this instanceof MassScaled scaled) {
+            return new MassScaled(scaled.setting().moved(values[0]), scaled.reference(), scaled.exponent());
+        }
+        int[] next = {0};
+        if (this instanceof ByOrbital byOrbital) {
+            List<ByOrbital.Entry> moved = byOrbital.entries().stream()
+                    .map(entry -> new ByOrbital.Entry(
+                            entry.orbital(), entry.setting().moved(values[next[0]++])))
+                    .toList();
+            return new ByOrbital(moved, moved(byOrbital.others(), values));
+        }
+        if (this instanceof ByTotal byTotal) {
+            List<ByTotal.Entry> moved = byTotal.entries().stream()
+                    .map(entry -> new ByTotal.Entry(
+                            entry.orbital(), entry.twiceTotal(), entry.setting().moved(values[next[0]++])))
+                    .toList();
+            return new ByTotal(moved, moved(byTotal.others(), values));
+        }
+        if (this instanceof BySystem bySystem) {
+            List<BySystem.Entry> moved = bySystem.entries().stream()
+                    .map(entry -> new BySystem.Entry(
+                            entry.system(), entry.setting().moved(values[next[0]++])))
+                    .toList();
+            return new BySystem(moved, moved(bySystem.others(), values));
+        }
+        return this;
+    }
+
+    private static Setting moved(Setting others, double[] values) {
+        return others == null ? null : others.moved(values[values.length - 1]);
+    }
 }

@@ -53,4 +53,18 @@ public record Setting(ExactNumber value, boolean free, ExactNumber lower, ExactN
     public Setting withPrior(Prior newPrior) {
         return new Setting(value, free, lower, upper, newPrior);
     }
+
+    /** The same moved to another value, within the bounds; NaN leaves it as typed. */
+    Setting moved(double newValue) {
+        if (Double.isNaN(newValue) || newValue == value.value()) {
+            return this;
+        }
+        if (lower != null && newValue <= lower.value()) {
+            return withValue(lower);
+        }
+        if (upper != null && newValue >= upper.value()) {
+            return withValue(upper);
+        }
+        return withValue(ExactNumber.of(newValue));
+    }
 }
