@@ -111,7 +111,8 @@ final class BoundedLeastSquares {
         best = start.clone();
         bestEvaluation = function.evaluate(best);
         if (!bestEvaluation.possible()) {
-            throw new SolverException(bestEvaluation.problem());
+            Problem problem = bestEvaluation.problem();
+            throw new SolverException(problem.what(), problem.where(), problem.remedy());
         }
         int[] held = new int[n];
         boolean converged = n == 0;
