@@ -13,13 +13,13 @@ import org.wellwright.solver.InvalidModelException;
  * A product of powers of units: "eV nm", "1/angstrom", "cm^-1 angstrom^2", "GeV^2". Factors are separated by a space,
  * "*" or "·"; "/" divides by the next factor only. Immutable.
  *
- * <p>"cm^-1" is read as an energy or as an inverse length, whichever fits its place. Electronvolts count as masses
+ * <p>A unit that is itself a power may stand in parentheses: "(cm^-1)^2". "cm^-1" is read as an energy or as an inverse length, whichever fits its place. Electronvolts count as masses
  * where a mass is asked for, and powers of electronvolts alone also as lengths (ħ = c = 1).
  */
 public final class UnitExpression {
     private static final Map<String, Unit> UNITS = units();
-    private static final Pattern FACTOR = Pattern.compile(
-            "\\s*([*·/]?)\\s*([^\\s*·/^⁻⁰¹²³⁴-⁹()]+)\\s*(?:\\^\\s*\\(?\\s*([+-]?\\d{1,2})\\s*\\)?|([⁻⁰¹²³⁴-⁹]+))?");
+    private static final Pattern FACTOR = Pattern.compile("\\s*([*·/]?)\\s*(?:\\(([^()]+)\\)|([^\\s*·/^⁻⁰¹²³⁴-⁹()]+))"
+            + "\\s*(?:\\^\\s*([+-]?\\d{1,2})|([⁻⁰¹²³⁴-⁹]+))?");
     private static final int MOST_FACTORS = 12;
 
     /** Factors as typed: unit and exponent. */
@@ -56,12 +56,12 @@ public final class UnitExpression {
             if (factors.isEmpty() && position == 0 && !matcher.group(1).isEmpty()) {
                 throw malformed(trimmed, 0);
             }
-            String symbol = matcher.group(2);
+            String symbol = matcher.group(2) != null ? matcher.group(2).strip() : matcher.group(3);
             int end = matcher.end();
             // Units whose own symbol holds a solidus: MeV/c^2, kJ/mol.
             for (String compound : List.of("/c^2", "/c2", "/c²", "/mol")) {
-                if (matcher.group(3) == null
-                        && matcher.group(4) == null
+                if (matcher.group(4) == null
+                        && matcher.group(5) == null
                         && trimmed.startsWith(compound, end)
                         && UNITS.containsKey(symbol + compound.replace("²", "^2"))) {
                     symbol += compound.replace("²", "^2");
@@ -105,7 +105,7 @@ public final class UnitExpression {
 
     /** Its dimension with "cm^-1" read as an energy where it stands alone. */
     public Dimension dimension() {
-        return dimension(factors);
+        return dimension(merged(factors, factors.size() == 1));
     }
 
     /**
@@ -212,21 +212,21 @@ public final class UnitExpression {
 
     private static Dimension dimension(List<Factor> factors) {
         Dimension product = Dimension.NONE;
-        for (Factor factor : merged(factors, factors.size() == 1)) {
+        for (Factor factor : factors) {
             product = product.times(factor.unit().dimension().power(factor.exponent()));
         }
         return product;
     }
 
     private static int exponent(Matcher matcher) {
-        if (matcher.group(3) != null) {
-            return Integer.parseInt(matcher.group(3));
+        if (matcher.group(4) != null) {
+            return Integer.parseInt(matcher.group(4));
         }
-        if (matcher.group(4) == null) {
+        if (matcher.group(5) == null) {
             return 1;
         }
         StringBuilder digits = new StringBuilder();
-        for (char c : matcher.group(4).toCharArray()) {
+        for (char c : matcher.group(5).toCharArray()) {
             int digit = "⁰¹²³⁴⁵⁶⁷⁸⁹".indexOf(c);
             digits.append(c == '⁻' ? "-" : String.valueOf(digit));
         }
