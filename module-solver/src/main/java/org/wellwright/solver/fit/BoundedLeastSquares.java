@@ -18,9 +18,9 @@ import org.wellwright.solver.Problem;
 import org.wellwright.solver.SolverException;
 
 /**
- * Least squares within bounds: the method of Levenberg (1944) and Marquardt (1963) in the form of Moré (1978), around it an
- * active set. A variable that ends at a bound which the gradient presses it against is held there; it is let go when the
- * gradient turns (the conditions of Karush, Kuhn and Tucker).
+ * Least squares within bounds: the method of Levenberg (1944) and Marquardt (1963) in the form of Moré (1978), around
+ * it an active set. A variable that ends at a bound which the gradient presses it against is held there; it is let go
+ * when the gradient turns (the conditions of Karush, Kuhn and Tucker).
  *
  * <p>A trial point where the residuals do not exist counts as worse than any other, so the step is shortened.
  */
@@ -99,7 +99,8 @@ final class BoundedLeastSquares {
      * Finds a minimum.
      *
      * @param start first point, within the bounds; the residuals must exist there
-     * @throws SolverException if the residuals do not exist at the start, or the search is stopped by points where they do not
+     * @throws SolverException if the residuals do not exist at the start, or the search is stopped by points where they
+     *     do not
      */
     static Minimum minimize(
             ResidualFunction function, double[] start, double[] lower, double[] upper, int maximumIterations) {
@@ -223,7 +224,10 @@ final class BoundedLeastSquares {
                 }
             }
             RealVector target = new ArrayRealVector(bestEvaluation.residuals()).mapMultiply(-1);
-            double[] move = new SingularValueDecomposition(scaled).getSolver().solve(target).toArray();
+            double[] move = new SingularValueDecomposition(scaled)
+                    .getSolver()
+                    .solve(target)
+                    .toArray();
             double[] x = best.clone();
             for (int j = 0; j < free.length; j++) {
                 double changed = x[free[j]] + (scales[j] > 0 ? move[j] / scales[j] : 0);

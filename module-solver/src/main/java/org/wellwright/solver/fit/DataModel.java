@@ -29,8 +29,7 @@ final class DataModel {
         this.pool = assembly.pool();
         this.units = pool.units();
         this.planckLight = units.planckLight();
-        this.nanometre =
-                UnitExpression.parse(LengthUnit.NANOMETRE.symbol()).factorTo(units, Dimension.LENGTH);
+        this.nanometre = UnitExpression.parse(LengthUnit.NANOMETRE.symbol()).factorTo(units, Dimension.LENGTH);
     }
 
     /** All levels that data need. */
@@ -45,15 +44,16 @@ final class DataModel {
 
     /** How many of the datum's unit one unit of the system is. */
     double fromSystem(Datum datum) {
-        Dimension dimension =
-                switch (datum.transform()) {
-                    case ABSOLUTE_MASS -> Dimension.MASS;
-                    case VACUUM_WAVELENGTH, AIR_WAVELENGTH, RADIUS -> Dimension.LENGTH;
-                    case RATIO -> Dimension.NONE;
-                    case RATE -> null;
-                    default -> Dimension.ENERGY;
-                };
-        return dimension == null ? Double.NaN : 1 / UnitExpression.parse(datum.unit()).factorTo(units, dimension);
+        Dimension dimension = switch (datum.transform()) {
+            case ABSOLUTE_MASS -> Dimension.MASS;
+            case VACUUM_WAVELENGTH, AIR_WAVELENGTH, RADIUS -> Dimension.LENGTH;
+            case RATIO -> Dimension.NONE;
+            case RATE -> null;
+            default -> Dimension.ENERGY;
+        };
+        return dimension == null
+                ? Double.NaN
+                : 1 / UnitExpression.parse(datum.unit()).factorTo(units, dimension);
     }
 
     /** The uncertainty of the datum, in its unit, that one unit of energy would give; NaN if it has none. */
@@ -80,12 +80,12 @@ final class DataModel {
             case PHOTON_EMISSION, PHOTON_ABSORPTION -> photon(datum, energy, table, values, unit);
             case ABSOLUTE_MASS -> absoluteMass(datum, energy, values, unit / units.restEnergy());
             case RATIO -> ratio(datum, energy, table, values.length);
-            case RADIUS, WIDTH, RATE -> Quantity.missing(new Problem(
-                    "the datum '%s' is a %s, which cannot be compared yet"
-                            .formatted(
-                                    datum.id(), datum.transform().name().toLowerCase(Locale.ROOT)),
-                    "",
-                    "do not use it"));
+            case RADIUS, WIDTH, RATE ->
+                Quantity.missing(new Problem(
+                        "the datum '%s' is a %s, which cannot be compared yet"
+                                .formatted(datum.id(), datum.transform().name().toLowerCase(Locale.ROOT)),
+                        "",
+                        "do not use it"));
         };
     }
 
@@ -127,7 +127,10 @@ final class DataModel {
         return energy.mapped(vacuum / index * unit, slope * airSlope * unit);
     }
 
-    /** Recoil of the free pair: emission E(1 − E/2Mc²) with M of the upper, absorption E(1 + E/2Mc²) with M of the lower level. */
+    /**
+     * Recoil of the free pair: emission E(1 − E/2Mc²) with M of the upper, absorption E(1 + E/2Mc²) with M of the lower
+     * level.
+     */
     private Quantity photon(Datum datum, Quantity energy, LevelTable table, double[] values, double unit) {
         if (!(energy.value() > 0)) {
             return notPositive(datum, energy.value());
@@ -170,8 +173,8 @@ final class DataModel {
             return below;
         }
         if (below.value() == 0) {
-            return Quantity.missing(
-                    new Problem("the denominator of the datum '%s' is 0".formatted(datum.id()), "", "change its levels"));
+            return Quantity.missing(new Problem(
+                    "the denominator of the datum '%s' is 0".formatted(datum.id()), "", "change its levels"));
         }
         double ratio = energy.value() / below.value();
         return energy.combined(ratio, 1 / below.value(), below, -ratio / below.value());

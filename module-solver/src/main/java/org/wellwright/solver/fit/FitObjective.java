@@ -9,10 +9,12 @@ import org.wellwright.solver.model.PoolNumber;
 import org.wellwright.solver.model.Prior;
 
 /**
- * Weighted residuals of used data, priors and group errors as functions of the free numbers, followed by the group errors.
+ * Weighted residuals of used data, priors and group errors as functions of the free numbers, followed by the group
+ * errors.
  *
- * <p>Rows: the used data with a σ in their order, then the priors of free numbers, then the groups of known σ. The residual of
- * a datum is (measured − Q − shift)/σ, of a limit its violation alone, of a prior (value − p)/σ, of a group −b/σ.
+ * <p>Rows: the used data with a σ in their order, then the priors of free numbers, then the groups of known σ. The
+ * residual of a datum is (measured − Q − shift)/σ, of a limit its violation alone, of a prior (value − p)/σ, of a group
+ * −b/σ.
  */
 final class FitObjective implements ResidualFunction {
     private final Setup setup;
@@ -124,8 +126,7 @@ final class FitObjective implements ResidualFunction {
         Datum datum = setup.data().get(i);
         int first = setup.free().size();
         GroupErrors groups = setup.groups();
-        double difference =
-                datum.value().value() - quantity.value() - groups.shift(i, quantity.value(), x, first);
+        double difference = datum.value().value() - quantity.value() - groups.shift(i, quantity.value(), x, first);
         boolean above = difference < 0;
         boolean holds = datum.limit() == Datum.Limit.UPPER && !above || datum.limit() == Datum.Limit.LOWER && above;
         if (holds) {

@@ -14,7 +14,9 @@ import org.wellwright.solver.model.PoolNumber;
 import org.wellwright.solver.model.Weighting;
 import org.wellwright.solver.radial.SolveMonitor;
 
-/** Turns the end of a search into a {@link FitResult}: parameters with σ, rows, predictions with propagated σ, remarks. */
+/**
+ * Turns the end of a search into a {@link FitResult}: parameters with σ, rows, predictions with propagated σ, remarks.
+ */
 final class FitReport {
     private final FitRequest request;
     private final Assembly assembly;
@@ -96,7 +98,8 @@ final class FitReport {
         List<Integer> columns = search.columns();
         for (int a = 0; a < columns.size(); a++) {
             for (int b = 0; b < columns.size(); b++) {
-                if (columns.get(a) < setup.free().size() && columns.get(b) < setup.free().size()) {
+                if (columns.get(a) < setup.free().size()
+                        && columns.get(b) < setup.free().size()) {
                     sum += derivative.applyAsDouble(setup.free().get(columns.get(a)))
                             * covariance[a][b]
                             * derivative.applyAsDouble(setup.free().get(columns.get(b)));

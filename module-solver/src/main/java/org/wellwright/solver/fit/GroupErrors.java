@@ -52,7 +52,8 @@ final class GroupErrors {
     private static double factor(DataGroup group, Datum datum, UnitSystem units) {
         UnitExpression own = UnitExpression.parse(group.unit());
         Dimension dimension = own.dimension();
-        return own.factorTo(units, dimension) / UnitExpression.parse(datum.unit()).factorTo(units, dimension);
+        return own.factorTo(units, dimension)
+                / UnitExpression.parse(datum.unit()).factorTo(units, dimension);
     }
 
     int count() {
@@ -65,7 +66,9 @@ final class GroupErrors {
 
     /** Standard uncertainty known beforehand; NaN for an unknown offset. */
     double priorSigma(int index) {
-        return groups.get(index).sigma() == null ? Double.NaN : groups.get(index).sigma().value();
+        return groups.get(index).sigma() == null
+                ? Double.NaN
+                : groups.get(index).sigma().value();
     }
 
     /** What the errors b, taken from {@code x[first…]}, add to a model value Q of a datum. */

@@ -66,8 +66,7 @@ final class LevelTable {
         LevelTable table = new LevelTable(values.length);
         Map<ChannelPlace, Integer> counts = new LinkedHashMap<>();
         for (LevelKey key : keys) {
-            counts.merge(
-                    new ChannelPlace(key.system(), key.curve(), key.channel()), key.index() + 1, Math::max);
+            counts.merge(new ChannelPlace(key.system(), key.curve(), key.channel()), key.index() + 1, Math::max);
         }
         List<Wanted> wanted = new ArrayList<>();
         for (Map.Entry<ChannelPlace, Integer> entry : counts.entrySet()) {
@@ -127,7 +126,9 @@ final class LevelTable {
             List<Wanted> wanted, List<SpectrumSource.Wanted> questions, SpectrumSource source, SolveMonitor monitor) {
         for (int i = 0; i < wanted.size(); i++) {
             try {
-                record(wanted.get(i), source.solve(List.of(questions.get(i)), monitor).get(0));
+                record(
+                        wanted.get(i),
+                        source.solve(List.of(questions.get(i)), monitor).get(0));
             } catch (WellwrightException fault) {
                 fail(wanted.get(i).place(), wanted.get(i).count(), fault.problem());
             }

@@ -7,8 +7,8 @@ import org.apache.commons.math3.linear.RealMatrix;
 import org.apache.commons.math3.linear.SingularValueDecomposition;
 
 /**
- * Covariance (JᵀJ)⁻¹ from the singular values of J with its columns scaled to length 1, and the directions in which J does
- * not change. Immutable.
+ * Covariance (JᵀJ)⁻¹ from the singular values of J with its columns scaled to length 1, and the directions in which J
+ * does not change. Immutable.
  */
 final class Linearization {
     /** Singular values below this fraction of the largest mean that the data fix only a combination. */
@@ -68,7 +68,8 @@ final class Linearization {
         double[] leverage = new double[m];
         for (int i = 0; i < m; i++) {
             for (int k = 0; k < n; k++) {
-                leverage[i] += singular[k] > FLAT * singular[0] ? square(svd.getU().getEntry(i, k)) : 0;
+                leverage[i] +=
+                        singular[k] > FLAT * singular[0] ? square(svd.getU().getEntry(i, k)) : 0;
             }
         }
         return new Linearization(covariance, List.copyOf(flat), leverage);

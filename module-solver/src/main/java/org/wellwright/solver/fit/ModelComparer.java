@@ -20,11 +20,11 @@ import org.wellwright.solver.model.Weighting;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /**
- * Puts all models of a document beside its data at the values of the document, with group errors at their best, and ranks
- * them.
+ * Puts all models of a document beside its data at the values of the document, with group errors at their best, and
+ * ranks them.
  *
- * <p>The rank follows χ² + 2k where σ is known (Akaike 1974), and N ln(χ²/N) + 2k + 2k(k + 1)/(N − k − 1) where its scale is not
- * (Hurvich and Tsai 1989), over the data that all models predict.
+ * <p>The rank follows χ² + 2k where σ is known (Akaike 1974), and N ln(χ²/N) + 2k + 2k(k + 1)/(N − k − 1) where its
+ * scale is not (Hurvich and Tsai 1989), over the data that all models predict.
  */
 public final class ModelComparer {
     private final ModelDocument document;
@@ -42,7 +42,8 @@ public final class ModelComparer {
     /**
      * Compares.
      *
-     * @throws org.wellwright.solver.InvalidModelException if the document is faulty; a fault of one model alone is kept with it
+     * @throws org.wellwright.solver.InvalidModelException if the document is faulty; a fault of one model alone is kept
+     *     with it
      * @throws CancellationException if the monitor says so
      */
     public static Comparison compare(ModelDocument document, SpectrumSource source, SolveMonitor monitor) {
@@ -108,8 +109,7 @@ public final class ModelComparer {
                 rows.add(i);
             }
         }
-        boolean[] used =
-                LevelTable.dependencies(assembly, DataModel.keys(DataModel.used(document.data())), values);
+        boolean[] used = LevelTable.dependencies(assembly, DataModel.keys(DataModel.used(document.data())), values);
         int free = 0;
         int priors = 0;
         double squares = 0;
@@ -120,7 +120,8 @@ public final class ModelComparer {
                 Prior prior = number.setting().prior();
                 if (prior != null) {
                     priors++;
-                    double residual = (prior.value().value() - values[i]) / prior.sigma().value();
+                    double residual =
+                            (prior.value().value() - values[i]) / prior.sigma().value();
                     squares += residual * residual;
                 }
             }
@@ -142,7 +143,8 @@ public final class ModelComparer {
         List<Integer> common = new ArrayList<>();
         for (int i = 0; i < document.data().size(); i++) {
             int datum = i;
-            if (!judged.isEmpty() && judged.stream().allMatch(one -> one.setup().rows().contains(datum))) {
+            if (!judged.isEmpty()
+                    && judged.stream().allMatch(one -> one.setup().rows().contains(datum))) {
                 common.add(i);
             }
         }

@@ -37,7 +37,6 @@ public record ModelComparison(
 
     /** The same with another rank. */
     ModelComparison withRank(int newRank) {
-        return new ModelComparison(
-                model, newRank, quality, commonCriterion, rows, worstDatum, groupErrors, problems);
+        return new ModelComparison(model, newRank, quality, commonCriterion, rows, worstDatum, groupErrors, problems);
     }
 }

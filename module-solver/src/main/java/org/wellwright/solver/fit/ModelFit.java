@@ -10,18 +10,18 @@ import org.wellwright.solver.Problem;
 import org.wellwright.solver.model.Assembly;
 import org.wellwright.solver.model.Datum;
 import org.wellwright.solver.model.LevelKey;
-import org.wellwright.solver.model.Model;
 import org.wellwright.solver.model.ModelCheck;
 import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.model.PoolNumber;
-import org.wellwright.solver.model.Weighting;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /**
- * Fits one model: prepares the residuals, searches the minimum, estimates the scale of σ or σ_mod where asked, and reports.
+ * Fits one model: prepares the residuals, searches the minimum, estimates the scale of σ or σ_mod where asked, and
+ * reports.
  *
- * <p>Where σ is known up to a scale (or missing), the scale is s² = Σ r²/(N − Σ h) over the data, with h the leverage of each datum:
- * χ²/ν where there are no priors, and with priors weighing as stated. A fitted σ_mod maximises −½ Σ [r²/σ² + ln σ²].
+ * <p>Where σ is known up to a scale (or missing), the scale is s² = Σ r²/(N − Σ h) over the data, with h the leverage
+ * of each datum: χ²/ν where there are no priors, and with priors weighing as stated. A fitted σ_mod maximises −½ Σ
+ * [r²/σ² + ln σ²].
  */
 public final class ModelFit {
     private static final int MOST_REWEIGHTINGS = 100;
@@ -48,8 +48,8 @@ public final class ModelFit {
     /**
      * Fits.
      *
-     * @throws InvalidModelException if the document is faulty, a used datum names a missing level, or the data do not determine
-     *     the free numbers; says what to add
+     * @throws InvalidModelException if the document is faulty, a used datum names a missing level, or the data do not
+     *     determine the free numbers; says what to add
      * @throws org.wellwright.solver.SolverException if the search cannot go on
      * @throws CancellationException if the monitor says so
      */
@@ -137,7 +137,9 @@ public final class ModelFit {
     }
 
     private void refuseTooFew(FitObjective.Setup setup) {
-        int known = setup.rows().size() + setup.priors().size() + setup.knownGroups().size();
+        int known = setup.rows().size()
+                + setup.priors().size()
+                + setup.knownGroups().size();
         int wanted = setup.variables();
         if (wanted > known) {
             throw new InvalidModelException(
@@ -202,7 +204,8 @@ public final class ModelFit {
 
     /** The levels of all data and of the predictions asked for. */
     static Set<LevelKey> allKeys(FitRequest request) {
-        Set<LevelKey> keys = new LinkedHashSet<>(DataModel.keys(request.document().data()));
+        Set<LevelKey> keys =
+                new LinkedHashSet<>(DataModel.keys(request.document().data()));
         keys.addAll(request.predict());
         return keys;
     }

@@ -2,7 +2,10 @@ package org.wellwright.solver.fit;
 
 import org.wellwright.solver.Problem;
 
-/** What a model says of one datum, in the datum's unit, with its gradient over the pool's numbers; or why it says nothing. */
+/**
+ * What a model says of one datum, in the datum's unit, with its gradient over the pool's numbers; or why it says
+ * nothing.
+ */
 final class Quantity {
     private final double value;
     private final double[] gradient;

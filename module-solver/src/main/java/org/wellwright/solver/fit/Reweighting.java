@@ -172,7 +172,10 @@ final class Reweighting {
         return weights;
     }
 
-    /** What the covariance is multiplied by where the scale is 0 or could not be found and so is not in the weights; otherwise 1. */
+    /**
+     * What the covariance is multiplied by where the scale is 0 or could not be found and so is not in the weights;
+     * otherwise 1.
+     */
     double covarianceFactor() {
         return weights.scale() > 0 ? 1 : weights.scale() * weights.scale() / (searchedScale * searchedScale);
     }

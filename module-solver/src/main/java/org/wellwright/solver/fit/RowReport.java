@@ -35,12 +35,12 @@ final class RowReport {
                         quantity.problem()));
                 continue;
             }
-            double shift = setup.groups().shift(i, quantity.value(), x, setup.free().size());
+            double shift =
+                    setup.groups().shift(i, quantity.value(), x, setup.free().size());
             double difference = measured - quantity.value() - shift;
             boolean above = difference < 0;
             double sigma = weights.sigma(i, above);
-            boolean holds =
-                    datum.limit() == Datum.Limit.UPPER && !above || datum.limit() == Datum.Limit.LOWER && above;
+            boolean holds = datum.limit() == Datum.Limit.UPPER && !above || datum.limit() == Datum.Limit.LOWER && above;
             rows.add(new ResidualRow(
                     datum.id(),
                     measured,

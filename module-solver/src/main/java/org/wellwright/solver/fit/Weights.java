@@ -18,8 +18,7 @@ final class Weights {
     private final double[] modelSigma;
     private final double scale;
 
-    private Weights(
-            double[] minus, double[] plus, int[] part, double[] partFactor, double[] modelSigma, double scale) {
+    private Weights(double[] minus, double[] plus, int[] part, double[] partFactor, double[] modelSigma, double scale) {
         this.minus = minus;
         this.plus = plus;
         this.part = part;
@@ -47,8 +46,12 @@ final class Weights {
                 minus[i] = model.energyWeight(datum);
                 plus[i] = minus[i];
             } else {
-                minus[i] = datum.sigmaMinus() == null ? Double.NaN : datum.sigmaMinus().value();
-                plus[i] = datum.sigmaPlus() == null ? Double.NaN : datum.sigmaPlus().value();
+                minus[i] = datum.sigmaMinus() == null
+                        ? Double.NaN
+                        : datum.sigmaMinus().value();
+                plus[i] = datum.sigmaPlus() == null
+                        ? Double.NaN
+                        : datum.sigmaPlus().value();
             }
             part[i] = part(datum, error);
             factor[i] = part[i] < 0 ? 0 : factor(datum, error.parts().get(part[i]), model, units);

@@ -7,8 +7,8 @@ import org.wellwright.solver.radial.RadialProblem;
 /**
  * A radial problem with the way back from its own derivatives to those of the pool. Immutable.
  *
- * <p>dE/d(number) = Σ_j ∂E/∂p_j · dp_j/d(number) over everything in the problem (parameters of terms, range ends, walls, κ),
- * plus the energy origin's own derivative.
+ * <p>dE/d(number) = Σ_j ∂E/∂p_j · dp_j/d(number) over everything in the problem (parameters of terms, range ends,
+ * walls, κ), plus the energy origin's own derivative.
  */
 public final class AssembledProblem {
     private final String system;
@@ -58,7 +58,10 @@ public final class AssembledProblem {
         return new LevelKey(system, curve, channel, index);
     }
 
-    /** Adds {@code weight} times the derivatives of a level's energy, origin included, to a gradient over the pool's numbers. */
+    /**
+     * Adds {@code weight} times the derivatives of a level's energy, origin included, to a gradient over the pool's
+     * numbers.
+     */
     public void addGradient(EnergyGradient level, double weight, double[] gradient) {
         energyOrigin.addTo(gradient, weight);
         kinetic.addTo(gradient, weight * level.kinetic());

@@ -22,8 +22,8 @@ import org.wellwright.solver.units.Names;
 /**
  * Turns a model of a document into radial problems: the only place where units are converted.
  *
- * <p>Terms that are the same in every channel go into the common potential, so that a solver evaluates them once; the others
- * (numbers by l, channel filters, spin operators) follow as channel terms. Thread-safe for reading.
+ * <p>Terms that are the same in every channel go into the common potential, so that a solver evaluates them once; the
+ * others (numbers by l, channel filters, spin operators) follow as channel terms. Thread-safe for reading.
  */
 public final class Assembly {
     private final Model model;
@@ -55,7 +55,8 @@ public final class Assembly {
         throw new InvalidModelException(
                 "the model '%s' is not known".formatted(Names.shortened(modelName)),
                 "",
-                Names.remedy(modelName, document.models().stream().map(Model::name).toList()));
+                Names.remedy(
+                        modelName, document.models().stream().map(Model::name).toList()));
     }
 
     /** The model. */
@@ -77,8 +78,8 @@ public final class Assembly {
      * The problem of a channel.
      *
      * @param values one per number of the pool, in the parameters' units
-     * @throws InvalidModelException if the model has no such curve, does not serve the system, or a term cannot be used; says
-     *     where
+     * @throws InvalidModelException if the model has no such curve, does not serve the system, or a term cannot be
+     *     used; says where
      */
     public synchronized AssembledProblem problem(String system, String curve, ChannelKey channel, double[] values) {
         Curve shape = requireCurve(system, curve);
@@ -117,8 +118,7 @@ public final class Assembly {
         return curve;
     }
 
-    private AssembledProblem assemble(
-            String system, Curve curve, ChannelKey channel, double[] values, String where) {
+    private AssembledProblem assemble(String system, Curve curve, ChannelKey channel, double[] values, String where) {
         List<ChannelKey> channels = channels(curve, channel);
         Place place = new Place(system, channel);
         Walls walls = new Walls(
@@ -157,7 +157,8 @@ public final class Assembly {
                     }
                 }
             } catch (WellwrightException fault) {
-                throw TermBinder.located(fault, "%s, term '%s'".formatted(where, term.frame().name()));
+                throw TermBinder.located(
+                        fault, "%s, term '%s'".formatted(where, term.frame().name()));
             }
         }
         PoolValue kinetic = pool.kinetic(system, values);
@@ -267,7 +268,9 @@ public final class Assembly {
         return tensor(row, column);
     }
 
-    /** A tensor term couples the channel asked for with one of another l: alone, it would not be the system's channel. */
+    /**
+     * A tensor term couples the channel asked for with one of another l: alone, it would not be the system's channel.
+     */
     private static void refuseHiddenCoupling(Term term, ChannelKey channel) {
         if (term.frame().angular() != AngularFactor.TENSOR || channel.coupled() || channel.twiceSpin() < 2) {
             return;
@@ -329,7 +332,8 @@ public final class Assembly {
             if (gradient.isEmpty()) {
                 return PoolValue.constant(radius);
             }
-            double[] partials = gradient.stream().mapToDouble(Double::doubleValue).toArray();
+            double[] partials =
+                    gradient.stream().mapToDouble(Double::doubleValue).toArray();
             return PoolValue.chained(radius, parameters.toArray(new PoolValue[0]), partials);
         }
     }

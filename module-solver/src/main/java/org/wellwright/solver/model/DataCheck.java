@@ -101,7 +101,8 @@ final class DataCheck {
         if (!document.models().isEmpty()) {
             add(
                     at,
-                    "no model has a curve '%s' for the system '%s'".formatted(Names.shortened(key.curve()), key.system()),
+                    "no model has a curve '%s' for the system '%s'"
+                            .formatted(Names.shortened(key.curve()), key.system()),
                     Names.remedy(key.curve(), names.stream().distinct().toList()));
         }
     }
@@ -175,8 +176,7 @@ final class DataCheck {
                 continue;
             }
             boolean shift = group.kind() == DataGroup.Kind.ADDITIVE || group.kind() == DataGroup.Kind.UNKNOWN_OFFSET;
-            if (shift
-                    && !UnitExpression.parse(group.unit()).fits(units, dimension(datum.transform()))) {
+            if (shift && !UnitExpression.parse(group.unit()).fits(units, dimension(datum.transform()))) {
                 add(
                         at,
                         "the error of the group '%s' in '%s' cannot be added to the datum '%s'"

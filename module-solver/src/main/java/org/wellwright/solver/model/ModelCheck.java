@@ -35,8 +35,8 @@ import org.wellwright.solver.units.UnitExpression;
 import org.wellwright.solver.units.UnitSystem;
 
 /**
- * Finds what is wrong between the records of a document: names that lead nowhere, units that do not fit, circular ties, data
- * that name what does not exist. Places are JSON pointers into the document ("/models/0/curves/0/terms/1").
+ * Finds what is wrong between the records of a document: names that lead nowhere, units that do not fit, circular ties,
+ * data that name what does not exist. Places are JSON pointers into the document ("/models/0/curves/0/terms/1").
  */
 public final class ModelCheck {
     private final ModelDocument document;
@@ -79,11 +79,20 @@ public final class ModelCheck {
                     "use '%s'".formatted(ParticleCatalogue.EDITION));
         }
         attempt("/units", () -> UnitSystem.named(document.units()));
-        unique("/systems", "pair system", document.systems().stream().map(PairSystem::id).toList());
-        unique("/parameters", "parameter", document.parameters().stream().map(Parameter::name).toList());
+        unique(
+                "/systems",
+                "pair system",
+                document.systems().stream().map(PairSystem::id).toList());
+        unique(
+                "/parameters",
+                "parameter",
+                document.parameters().stream().map(Parameter::name).toList());
         unique("/models", "model", document.models().stream().map(Model::name).toList());
         unique("/data", "datum", document.data().stream().map(Datum::id).toList());
-        unique("/groups", "data group", document.groups().stream().map(DataGroup::id).toList());
+        unique(
+                "/groups",
+                "data group",
+                document.groups().stream().map(DataGroup::id).toList());
         each(document.parameters(), "/parameters", (at, parameter) -> parameter(at, parameter));
         if (!problems.isEmpty()) {
             // Everything below needs the pool, which needs the names and units above.
@@ -152,9 +161,7 @@ public final class ModelCheck {
         if (body.mass() instanceof BodyMass.Catalogued catalogued) {
             attempt(at + "/mass", () -> ParticleCatalogue.STANDARD.find(catalogued.particle()));
         } else if (body.mass() instanceof BodyMass.Typed typed) {
-            attempt(
-                    at + "/mass",
-                    () -> UnitExpression.parse(typed.unit()).factorTo(pool.units(), Dimension.MASS));
+            attempt(at + "/mass", () -> UnitExpression.parse(typed.unit()).factorTo(pool.units(), Dimension.MASS));
         } else if (body.mass() instanceof BodyMass.FromParameter named) {
             argument(at + "/mass", Argument.named(named.parameter()), Dimension.MASS, pool);
             if (pool.knows(named.parameter()) && pool.dependsOnChannel(named.parameter())) {
@@ -176,7 +183,9 @@ public final class ModelCheck {
                     add(
                             at + "/couplings",
                             "the coupling names the curve '%s', which the model does not have".formatted(curve),
-                            Names.remedy(curve, model.curves().stream().map(Curve::name).toList()));
+                            Names.remedy(
+                                    curve,
+                                    model.curves().stream().map(Curve::name).toList()));
                 }
             }
         }

@@ -6,8 +6,8 @@ import java.util.Objects;
  * A named number (or family of numbers) of the project's pool. Masses, energy origins and thresholds are parameters
  * like any other.
  *
- * @param name its name in terms and formulas: a letter, then letters, digits and underscores, then an index in
- *     brackets where formulas need one ("b[0]"); unique in the pool
+ * @param name its name in terms and formulas: a letter, then letters, digits and underscores, then an index in brackets
+ *     where formulas need one ("b[0]"); unique in the pool
  * @param unit unit expression of all its numbers ("eV nm", "1/angstrom"); empty for a pure number
  * @param convention what exactly the number is where there is a choice ("a, not 4 alpha_s/3"); empty if there is none
  * @param shape its numbers

@@ -23,9 +23,9 @@ import org.wellwright.solver.units.UnitSystem;
 /**
  * The parameters of a document as functions of their adjustable numbers, with exact derivatives. Immutable.
  *
- * <p>Besides the pool's own names, five are known in every place: {@code coulomb}, the strength −Z₁Z₂e²/4πε₀ε of the force
- * between the two bodies (positive if they attract), {@code reduced_mass}, {@code charge1}, {@code charge2} and {@code
- * permittivity}. A parameter of the same name hides them.
+ * <p>Besides the pool's own names, five are known in every place: {@code coulomb}, the strength −Z₁Z₂e²/4πε₀ε of the
+ * force between the two bodies (positive if they attract), {@code reduced_mass}, {@code charge1}, {@code charge2} and
+ * {@code permittivity}. A parameter of the same name hides them.
  */
 public final class ParameterPool {
     /** Names that every place knows. */
@@ -99,7 +99,10 @@ public final class ParameterPool {
         for (int i = 0; i < parameters.size(); i++) {
             double[] own = Arrays.copyOfRange(values, firstNumber[i], firstNumber[i + 1]);
             Parameter parameter = parameters.get(i);
-            moved.add(own.length == 0 ? parameter : parameter.withShape(parameter.shape().withValues(own)));
+            moved.add(
+                    own.length == 0
+                            ? parameter
+                            : parameter.withShape(parameter.shape().withValues(own)));
         }
         return List.copyOf(moved);
     }
@@ -161,9 +164,7 @@ public final class ParameterPool {
     /** The value of a name in the unit system's unit of the name's own dimension, as formulas use it. */
     public PoolValue formulaValue(String name, Place place, double[] values) {
         UnitExpression unit = unit(name);
-        return unit == null
-                ? systemValue(name, place, values)
-                : value(name, place, values, unit.dimension());
+        return unit == null ? systemValue(name, place, values) : value(name, place, values, unit.dimension());
     }
 
     /** The mass of a body of a system in the unit system's unit of mass. */
@@ -237,8 +238,8 @@ public final class ParameterPool {
             return PoolValue.of(values[first], first);
         }
         if (shape instanceof ParameterShape.MassScaled scaled) {
-            PoolValue ratio =
-                    reducedMass(place.system(), values).times(reducedMass(scaled.reference(), values).power(-1));
+            PoolValue ratio = reducedMass(place.system(), values)
+                    .times(reducedMass(scaled.reference(), values).power(-1));
             return PoolValue.of(values[first], first).times(ratio.power(scaled.exponent()));
         }
         if (shape instanceof ParameterShape.Tied) {
@@ -277,7 +278,9 @@ public final class ParameterPool {
         double value = evaluator.value(1);
         if (!Double.isFinite(value)) {
             throw new InvalidModelException(
-                    "the tie '%s' gives %s".formatted(Names.shortened(formula.text()), value), "", "change its numbers");
+                    "the tie '%s' gives %s".formatted(Names.shortened(formula.text()), value),
+                    "",
+                    "change its numbers");
         }
         return PoolValue.chained(value, arguments, partials);
     }
@@ -285,10 +288,11 @@ public final class ParameterPool {
     private PoolValue systemValue(String name, Place place, double[] values) {
         PairSystem system = system(place.system());
         return switch (name) {
-            case "coulomb" -> PoolValue.constant(-system.first().charge().value()
-                    * system.second().charge().value()
-                    / system.permittivity().value()
-                    * units.coulombStrength());
+            case "coulomb" ->
+                PoolValue.constant(-system.first().charge().value()
+                        * system.second().charge().value()
+                        / system.permittivity().value()
+                        * units.coulombStrength());
             case "reduced_mass" -> reducedMass(place.system(), values);
             case "charge1" -> PoolValue.constant(system.first().charge().value());
             case "charge2" -> PoolValue.constant(system.second().charge().value());
@@ -302,7 +306,9 @@ public final class ParameterPool {
         names.sort(null);
         names.addAll(SYSTEM_NAMES);
         return new InvalidModelException(
-                "the parameter '%s' is not in the pool".formatted(Names.shortened(name)), "", Names.remedy(name, names));
+                "the parameter '%s' is not in the pool".formatted(Names.shortened(name)),
+                "",
+                Names.remedy(name, names));
     }
 
     private static int entry(ParameterShape shape, Place place) {
@@ -373,6 +379,10 @@ public final class ParameterPool {
 
     private void add(int index, String name, Setting setting) {
         numbers.add(new PoolNumber(
-                name, index, numbers.size() - firstNumber[index], setting, parameters.get(index).unit()));
+                name,
+                index,
+                numbers.size() - firstNumber[index],
+                setting,
+                parameters.get(index).unit()));
     }
 }

@@ -150,7 +150,8 @@ public sealed interface ParameterShape {
     }
 
     /**
-     * The same with other values: one per number, the number for all others last; a value outside its bounds becomes the bound.
+     * The same with other values: one per number, the number for all others last; a value outside its bounds becomes
+     * the bound.
      *
      * @param values new values; an entry that is NaN leaves its number as typed
      */
@@ -164,8 +165,8 @@ public sealed interface ParameterShape {
         int[] next = {0};
         if (this instanceof ByOrbital byOrbital) {
             List<ByOrbital.Entry> moved = byOrbital.entries().stream()
-                    .map(entry -> new ByOrbital.Entry(
-                            entry.orbital(), entry.setting().moved(values[next[0]++])))
+                    .map(entry ->
+                            new ByOrbital.Entry(entry.orbital(), entry.setting().moved(values[next[0]++])))
                     .toList();
             return new ByOrbital(moved, moved(byOrbital.others(), values));
         }
@@ -178,8 +179,8 @@ public sealed interface ParameterShape {
         }
         if (this instanceof BySystem bySystem) {
             List<BySystem.Entry> moved = bySystem.entries().stream()
-                    .map(entry -> new BySystem.Entry(
-                            entry.system(), entry.setting().moved(values[next[0]++])))
+                    .map(entry ->
+                            new BySystem.Entry(entry.system(), entry.setting().moved(values[next[0]++])))
                     .toList();
             return new BySystem(moved, moved(bySystem.others(), values));
         }

@@ -23,7 +23,9 @@ import org.wellwright.solver.potential.TermFrame;
 import org.wellwright.solver.units.Dimension;
 import org.wellwright.solver.units.UnitExpression;
 
-/** Puts the numbers of the pool, converted to the unit system, into terms. Keeps parsed formulas; otherwise immutable. */
+/**
+ * Puts the numbers of the pool, converted to the unit system, into terms. Keeps parsed formulas; otherwise immutable.
+ */
 final class TermBinder {
     private final ParameterPool pool;
     private final Map<String, Formula> formulas = new HashMap<>();

@@ -3,9 +3,9 @@ package org.wellwright.solver.observable;
 /**
  * Wavelengths in standard air: dry, 15 °C, 101 325 Pa, 330 ppm of carbon dioxide.
  *
- * <p>n − 1 = 10⁻⁸ [8060.51 + 2480990/(132.274 − σ²) + 17455.7/(39.32957 − σ²)] with the vacuum wavenumber σ in µm⁻¹, for 185 nm
- * to 1690 nm. Source: Peck and Reeder (1972), J. Opt. Soc. Am. 62, 958, eq. 3 (coefficients from memory). Below 200 nm lines
- * are quoted in vacuum (common practice, no source), so that is the lower limit here.
+ * <p>n − 1 = 10⁻⁸ [8060.51 + 2480990/(132.274 − σ²) + 17455.7/(39.32957 − σ²)] with the vacuum wavenumber σ in µm⁻¹,
+ * for 185 nm to 1690 nm. Source: Peck and Reeder (1972), J. Opt. Soc. Am. 62, 958, eq. 3 (coefficients from memory).
+ * Below 200 nm lines are quoted in vacuum (common practice, no source), so that is the lower limit here.
  */
 public final class StandardAir {
     /** Shortest vacuum wavelength, nm. */

@@ -13,8 +13,9 @@ import org.wellwright.solver.InvalidModelException;
  * A product of powers of units: "eV nm", "1/angstrom", "cm^-1 angstrom^2", "GeV^2". Factors are separated by a space,
  * "*" or "·"; "/" divides by the next factor only. Immutable.
  *
- * <p>A unit that is itself a power may stand in parentheses: "(cm^-1)^2". "cm^-1" is read as an energy or as an inverse length, whichever fits its place. Electronvolts count as masses
- * where a mass is asked for, and powers of electronvolts alone also as lengths (ħ = c = 1).
+ * <p>A unit that is itself a power may stand in parentheses: "(cm^-1)^2". "cm^-1" is read as an energy or as an inverse
+ * length, whichever fits its place. Electronvolts count as masses where a mass is asked for, and powers of
+ * electronvolts alone also as lengths (ħ = c = 1).
  */
 public final class UnitExpression {
     private static final Map<String, Unit> UNITS = units();

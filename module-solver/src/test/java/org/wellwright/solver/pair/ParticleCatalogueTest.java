@@ -20,16 +20,15 @@ class ParticleCatalogueTest {
     @ParameterizedTest(name = "{0}")
     @CsvFileSource(resources = "masses.csv", numLinesToSkip = 2)
     void massesAgreeWithThePublishedOnes(String id, String quantity, String value, String unit, int digits) {
-        double computed =
-                switch (id) {
-                    case "c22_mdme" -> mass("d", UnitSystem.ATOMIC);
-                    case "c22_mmume" -> mass("mu-", UnitSystem.ATOMIC);
-                    case "c22_mmumev" -> mass("mu-", UnitSystem.MEV_FM);
-                    case "c22_mpme" -> mass("p", UnitSystem.ATOMIC);
-                    case "c22_mpmev" -> mass("p", UnitSystem.MEV_FM);
-                    case "dr_mu_CO" -> typed("12", "15.99491461957").reducedMass(UnitSystem.SPECTROSCOPIC);
-                    default -> throw new IllegalArgumentException("no computation for " + id);
-                };
+        double computed = switch (id) {
+            case "c22_mdme" -> mass("d", UnitSystem.ATOMIC);
+            case "c22_mmume" -> mass("mu-", UnitSystem.ATOMIC);
+            case "c22_mmumev" -> mass("mu-", UnitSystem.MEV_FM);
+            case "c22_mpme" -> mass("p", UnitSystem.ATOMIC);
+            case "c22_mpmev" -> mass("p", UnitSystem.MEV_FM);
+            case "dr_mu_CO" -> typed("12", "15.99491461957").reducedMass(UnitSystem.SPECTROSCOPIC);
+            default -> throw new IllegalArgumentException("no computation for " + id);
+        };
         PublishedDigits.assertAgree(id, computed, value, digits);
     }
 
@@ -37,26 +36,25 @@ class ParticleCatalogueTest {
     @ParameterizedTest(name = "{0}")
     @CsvFileSource(resources = "coulomb.csv", numLinesToSkip = 2)
     void coulombLevelsAgreeWithTheRecomputedOnes(String id, String quantity, String value, String unit, int digits) {
-        double computed =
-                switch (id) {
-                    case "coul_H_1s" -> bohr("e-,p", 1);
-                    case "coul_H_3" -> bohr("e-,p", 3);
-                    case "coul_D_1s" -> bohr("e-,d", 1);
-                    case "coul_Ps_12" -> bohr("e-,e+", 2) - bohr("e-,e+", 1);
-                    case "coul_RH" ->
-                        -bohr("e-,p", 1)
-                                * UnitExpression.parse("eV").factorTo(UnitSystem.SPECTROSCOPIC, Dimension.ENERGY);
-                    case "coul_muH_1s" -> bohr("mu-,p", 1);
-                    case "coul_muH_2s" -> bohr("mu-,p", 2);
-                    case "coul_muH_a" -> bohrRadius("mu-,p");
-                    default -> throw new IllegalArgumentException("no computation for " + id);
-                };
+        double computed = switch (id) {
+            case "coul_H_1s" -> bohr("e-,p", 1);
+            case "coul_H_3" -> bohr("e-,p", 3);
+            case "coul_D_1s" -> bohr("e-,d", 1);
+            case "coul_Ps_12" -> bohr("e-,e+", 2) - bohr("e-,e+", 1);
+            case "coul_RH" ->
+                -bohr("e-,p", 1) * UnitExpression.parse("eV").factorTo(UnitSystem.SPECTROSCOPIC, Dimension.ENERGY);
+            case "coul_muH_1s" -> bohr("mu-,p", 1);
+            case "coul_muH_2s" -> bohr("mu-,p", 2);
+            case "coul_muH_a" -> bohrRadius("mu-,p");
+            default -> throw new IllegalArgumentException("no computation for " + id);
+        };
         PublishedDigits.assertAgree(id, computed, value, digits);
     }
 
     @Test
     void bareNucleiOfAtomsAgreeWithTheirOwnEntries() {
-        // Atom minus electrons misses their binding energy: 13.6 eV of 9.4e8 eV in hydrogen, 79 eV of 3.7e9 eV in helium.
+        // Atom minus electrons misses their binding energy: 13.6 eV of 9.4e8 eV in hydrogen, 79 eV of 3.7e9 eV in
+        // helium.
         nucleus("H-1", "p", 2e-8);
         nucleus("H-2", "d", 1e-8);
         nucleus("He-4", "alpha", 3e-8);
@@ -75,7 +73,8 @@ class ParticleCatalogueTest {
         assertThat(TABLE.find("Na-23").mass(MassConvention.ION, 1).value())
                 .isCloseTo(22.9892207020409559, within(1e-14));
         assertThat(TABLE.find("Na-23").mass(MassConvention.ATOMIC, 1).text()).isEqualTo("22.98976928195");
-        assertThat(TABLE.find("p").mass(MassConvention.ION, 1)).isEqualTo(TABLE.find("p").mass());
+        assertThat(TABLE.find("p").mass(MassConvention.ION, 1))
+                .isEqualTo(TABLE.find("p").mass());
     }
 
     @Test
@@ -99,8 +98,7 @@ class ParticleCatalogueTest {
 
     private static double mass(String id, UnitSystem units) {
         Particle particle = TABLE.find(id);
-        return particle.mass().value()
-                * UnitExpression.parse(particle.unit()).factorTo(units, Dimension.MASS);
+        return particle.mass().value() * UnitExpression.parse(particle.unit()).factorTo(units, Dimension.MASS);
     }
 
     private static PairSystem typed(String first, String second) {

@@ -11,19 +11,18 @@ class ConstantsTest {
     @ParameterizedTest(name = "{0}")
     @CsvFileSource(resources = "constants.csv", numLinesToSkip = 2)
     void agreesWithTheRecommendedValue(String id, String quantity, String value, String unit, int digits) {
-        double computed =
-                switch (id) {
-                    case "c22_Eh" -> UnitSystem.EV_NM.coulombStrength() / inNanometres(Constants.BOHR_RADIUS);
-                    case "c22_Rinf" -> Constants.RYDBERG.value().value();
-                    case "c22_RyHz" -> of("Ry", "Hz");
-                    case "c22_RyeV" -> of("Ry", "eV");
-                    case "c22_a0" -> Constants.BOHR_RADIUS.value().value();
-                    case "c22_alpha" -> Math.sqrt(of("hartree", "eV") / massInEv("m_e"));
-                    case "c22_hbarc" -> UnitSystem.MEV_FM.planckLight() / (2 * Math.PI);
-                    case "c22_memev" -> massInEv("m_e") / 1e6;
-                    case "fact_Rcheck" -> 1 / inMetres(1 / of("Ry", "cm^-1"));
-                    default -> throw new IllegalArgumentException("no computation for " + id);
-                };
+        double computed = switch (id) {
+            case "c22_Eh" -> UnitSystem.EV_NM.coulombStrength() / inNanometres(Constants.BOHR_RADIUS);
+            case "c22_Rinf" -> Constants.RYDBERG.value().value();
+            case "c22_RyHz" -> of("Ry", "Hz");
+            case "c22_RyeV" -> of("Ry", "eV");
+            case "c22_a0" -> Constants.BOHR_RADIUS.value().value();
+            case "c22_alpha" -> Math.sqrt(of("hartree", "eV") / massInEv("m_e"));
+            case "c22_hbarc" -> UnitSystem.MEV_FM.planckLight() / (2 * Math.PI);
+            case "c22_memev" -> massInEv("m_e") / 1e6;
+            case "fact_Rcheck" -> 1 / inMetres(1 / of("Ry", "cm^-1"));
+            default -> throw new IllegalArgumentException("no computation for " + id);
+        };
         PublishedDigits.assertAgree(id, computed, value, digits);
     }
 

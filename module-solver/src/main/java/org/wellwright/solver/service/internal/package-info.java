@@ -1,4 +1,2 @@
-/**
- * The implementations that the Lookup gives for the interfaces of {@code service}. Nobody else knows them.
- */
+/** The implementations that the Lookup gives for the interfaces of {@code service}. Nobody else knows them. */
 package org.wellwright.solver.service.internal;
