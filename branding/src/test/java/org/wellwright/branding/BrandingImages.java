@@ -1,9 +1,12 @@
 package org.wellwright.branding;
 
+import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
+import java.awt.geom.Arc2D;
+import java.awt.geom.Ellipse2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -41,6 +44,7 @@ final class BrandingImages {
 
     static Map<String, BufferedImage> icons() {
         Map<String, BufferedImage> icons = new LinkedHashMap<>();
+        icons.put("../resources/org/wellwright/branding/look.png", halfAndHalf(32));
         icons.put(FOLDER + "frame.gif", icon(16));
         icons.put(FOLDER + "frame_dark.gif", icon(16));
         icons.put(FOLDER + "frame32.gif", icon(32));
@@ -57,6 +61,22 @@ final class BrandingImages {
         BufferedImage image = new BufferedImage(size, size, BufferedImage.TYPE_INT_ARGB);
         Graphics2D g = image.createGraphics();
         Mark.paint(g, 0, 0, size);
+        g.dispose();
+        return image;
+    }
+
+    /** A disc, one half light and one half dark: the sign of the options page. */
+    private static BufferedImage halfAndHalf(int size) {
+        BufferedImage image = new BufferedImage(size, size, BufferedImage.TYPE_INT_ARGB);
+        Graphics2D g = image.createGraphics();
+        g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+        double edge = size / 8.0;
+        g.setColor(Mark.CURVE);
+        g.fill(new Ellipse2D.Double(edge, edge, size - 2 * edge, size - 2 * edge));
+        g.setColor(Mark.TILE);
+        g.fill(new Arc2D.Double(edge, edge, size - 2 * edge, size - 2 * edge, 90, 180, Arc2D.PIE));
+        g.setStroke(new BasicStroke(size / 16f));
+        g.draw(new Ellipse2D.Double(edge, edge, size - 2 * edge, size - 2 * edge));
         g.dispose();
         return image;
     }

@@ -7,7 +7,6 @@ package org.wellwright.branding;
  * color vision deficiency", severity 1.0, on linear sRGB; coefficients from memory, with the check that white stays
  * white.
  */
-@SuppressWarnings("ImmutableEnumChecker") // the array is never written
 enum ColourVision {
     FULL(1, 0, 0, 0, 1, 0, 0, 0, 1),
     NO_LONG(0.152286, 1.052583, -0.204868, 0.114503, 0.786281, 0.099216, -0.003882, -0.048116, 1.051998),
