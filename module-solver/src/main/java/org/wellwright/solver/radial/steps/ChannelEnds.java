@@ -4,7 +4,10 @@ import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.potential.OriginBehaviour;
 import org.wellwright.solver.potential.TailBehaviour;
 
-/** How V starts and ends in one channel: what the terms declare where the scan confirms it, what the scan shows otherwise. Immutable. */
+/**
+ * How V starts and ends in one channel: what the terms declare where the scan confirms it, what the scan shows
+ * otherwise. Immutable.
+ */
 final class ChannelEnds {
     private final ScalarPotential potential;
     private final PotentialScan scan;
@@ -45,8 +48,10 @@ final class ChannelEnds {
         }
         double r = scan.innermost();
         double seen = r * r * scan.sample(0) / kinetic;
-        double expected = (declared.inverseSquare() + declared.coefficient() * Math.pow(r, declared.power() + 2)) / kinetic;
-        return Double.isInfinite(expected) || Math.abs(seen - expected) <= 1e-5 * (1e-2 + Math.abs(seen) + Math.abs(expected));
+        double expected =
+                (declared.inverseSquare() + declared.coefficient() * Math.pow(r, declared.power() + 2)) / kinetic;
+        return Double.isInfinite(expected)
+                || Math.abs(seen - expected) <= 1e-5 * (1e-2 + Math.abs(seen) + Math.abs(expected));
     }
 
     /** The behaviour of the innermost samples: the exponent of r²V. */
@@ -76,7 +81,9 @@ final class ChannelEnds {
         TailBehaviour tail = potential.tail();
         if (tail.known() ? tail.falls() : observedGrowth() < 0) {
             throw new InvalidModelException(
-                    "nothing is bound: the potential falls without end towards large r", where, "add a term that rises, or an outer wall");
+                    "nothing is bound: the potential falls without end towards large r",
+                    where,
+                    "add a term that rises, or an outer wall");
         }
         if (tail.known() ? tail.rises() : observedGrowth() > 0) {
             return Double.POSITIVE_INFINITY;
@@ -111,7 +118,10 @@ final class ChannelEnds {
         return new double[] {scan.sample(-1), potential.value(0.5 * r), potential.value(0.25 * r)};
     }
 
-    /** Whether levels crowd without end below the threshold: a tail that attracts at least as c/r² with c above the critical strength. */
+    /**
+     * Whether levels crowd without end below the threshold: a tail that attracts at least as c/r² with c above the
+     * critical strength.
+     */
     boolean endlessTail() {
         TailBehaviour tail = potential.tail();
         if (tail.known()) {

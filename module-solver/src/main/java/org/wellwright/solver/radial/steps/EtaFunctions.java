@@ -3,9 +3,10 @@ package org.wellwright.solver.radial.steps;
 /**
  * The functions ξ(Z), η_m(Z) of constant-reference perturbation (Ixaru 1984).
  *
- * <p>ξ = cosh √Z, η_0 = sinh √Z/√Z, η_m = (η_{m−2} − (2m−1) η_{m−1})/Z with η_{−1} = ξ (cos and sin for Z &lt; 0); dη_m/dZ = ½ η_{m+1}. For |Z| below
- * {@value #SERIES_LIMIT} the two highest come from η_m = Σ_q (Z/2)^q/(q! (2m+2q+1)!!) and the rest from the recurrence downwards; beyond it the
- * recurrence runs upwards, and for Z &gt; 0 the factor e^{√Z} is left out of all of them.
+ * <p>ξ = cosh √Z, η_0 = sinh √Z/√Z, η_m = (η_{m−2} − (2m−1) η_{m−1})/Z with η_{−1} = ξ (cos and sin for Z &lt; 0);
+ * dη_m/dZ = ½ η_{m+1}. For |Z| below {@value #SERIES_LIMIT} the two highest come from η_m = Σ_q (Z/2)^q/(q!
+ * (2m+2q+1)!!) and the rest from the recurrence downwards; beyond it the recurrence runs upwards, and for Z &gt; 0 the
+ * factor e^{√Z} is left out of all of them.
  */
 final class EtaFunctions {
     /** Highest index m that {@link #fill} can make. */
@@ -31,7 +32,8 @@ final class EtaFunctions {
     }
 
     /**
-     * Fills {@code into[m + 1] = η_m(z)} for m = −1 … {@code top}, all without the common factor e^{√z} where z ≥ {@value #SERIES_LIMIT}.
+     * Fills {@code into[m + 1] = η_m(z)} for m = −1 … {@code top}, all without the common factor e^{√z} where z ≥
+     * {@value #SERIES_LIMIT}.
      *
      * @param top highest index, 1 … {@link #HIGHEST}
      */

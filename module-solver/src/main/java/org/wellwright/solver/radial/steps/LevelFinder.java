@@ -37,7 +37,8 @@ final class LevelFinder {
     }
 
     /**
-     * An energy with at least {@code wanted} levels below it, at most {@code ceiling}; the ceiling itself if there are fewer.
+     * An energy with at least {@code wanted} levels below it, at most {@code ceiling}; the ceiling itself if there are
+     * fewer.
      *
      * @param ceiling finite or +∞
      */
@@ -161,7 +162,16 @@ final class LevelFinder {
         double kinetic = Math.abs(energy) + shooting.meanPotential();
         double scale = Math.max(kinetic + shooting.meanPotential(), Double.MIN_NORMAL);
         double error = Math.abs(shift) + 2 * EPSILON * scale + shooting.weightedResidue() + Math.ulp(energy);
-        return new Level(index, energy, energy - error, energy + error, Level.BoundKind.ESTIMATE, error, scale, Double.NaN, threshold);
+        return new Level(
+                index,
+                energy,
+                energy - error,
+                energy + error,
+                Level.BoundKind.ESTIMATE,
+                error,
+                scale,
+                Double.NaN,
+                threshold);
     }
 
     private static Level widened(Level level, double error) {

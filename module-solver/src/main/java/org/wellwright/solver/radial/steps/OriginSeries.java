@@ -1,8 +1,8 @@
 package org.wellwright.solver.radial.steps;
 
 /**
- * The regular solution on (0, r0] as a power series u = r^s Σ a_k (r/r0)^k (Frobenius), for r²Q = s(s−1) + Σ_{j≥1} q_j (r/r0)^j with s ≥ ½:
- * a_k k(k + 2s − 1) = Σ_j q_j a_{k−j}. Immutable.
+ * The regular solution on (0, r0] as a power series u = r^s Σ a_k (r/r0)^k (Frobenius), for r²Q = s(s−1) + Σ_{j≥1} q_j
+ * (r/r0)^j with s ≥ ½: a_k k(k + 2s − 1) = Σ_j q_j a_{k−j}. Immutable.
  */
 final class OriginSeries {
     private static final double TOLERANCE = 2e-15;
@@ -23,7 +23,13 @@ final class OriginSeries {
      * @param inverseSquare coefficient of r⁻² in V/κ, without the centrifugal term
      * @param exponent s, the larger root of s(s−1) = λ + inverseSquare
      */
-    static OriginSeries upTo(double radius, ScalarPotential potential, PotentialScan scan, double kinetic, double inverseSquare, double exponent) {
+    static OriginSeries upTo(
+            double radius,
+            ScalarPotential potential,
+            PotentialScan scan,
+            double kinetic,
+            double inverseSquare,
+            double exponent) {
         double[] radii = new double[StepQuadrature.POINTS];
         double[] samples = new double[StepQuadrature.POINTS];
         double[] c = new double[StepQuadrature.POINTS];

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.concurrent.CancellationException;
 import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.potential.OriginBehaviour;
-import org.wellwright.solver.potential.TailBehaviour;
 import org.wellwright.solver.radial.Completeness;
 import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.radial.LevelOutcome;
@@ -17,10 +16,11 @@ import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
 /**
- * Levels of one uncoupled channel by piecewise constant-reference perturbation and shooting (Ixaru 1984; Ixaru, De Meyer and Vanden Berghe 1997; Ledoux,
- * Van Daele and Vanden Berghe 2004).
+ * Levels of one uncoupled channel by piecewise constant-reference perturbation and shooting (Ixaru 1984; Ixaru, De
+ * Meyer and Vanden Berghe 1997; Ledoux, Van Daele and Vanden Berghe 2004).
  *
- * <p>Energies come with an estimate of their error, confirmed by counts on either side; there are no states and no strict bounds.
+ * <p>Energies come with an estimate of their error, confirmed by counts on either side; there are no states and no
+ * strict bounds.
  */
 public final class PerturbedStepSolver implements RadialSolver {
     @Override
@@ -40,7 +40,8 @@ public final class PerturbedStepSolver implements RadialSolver {
         double above;
         int found;
         if (!all) {
-            above = finder.energyAbove(search.count(), setting.endlessBelow(ceiling) ? setting.reachable(ceiling) : ceiling);
+            above = finder.energyAbove(
+                    search.count(), setting.endlessBelow(ceiling) ? setting.reachable(ceiling) : ceiling);
             found = Math.min(search.count(), finder.count(above));
         } else {
             above = ceiling;
@@ -55,8 +56,8 @@ public final class PerturbedStepSolver implements RadialSolver {
             Level level = finder.find(index, above);
             levels.add(level);
         }
-        Spectrum.Effort effort =
-                new Spectrum.Effort(setting.mesh.stepCount(), setting.potential.evaluations(), setting.shooting.counts());
+        Spectrum.Effort effort = new Spectrum.Effort(
+                setting.mesh.stepCount(), setting.potential.evaluations(), setting.shooting.counts());
         return new Spectrum(
                 problem,
                 search,
@@ -90,13 +91,15 @@ public final class PerturbedStepSolver implements RadialSolver {
 
         Setting(RadialProblem problem, SolveMonitor monitor) {
             if (problem.channels().size() != 1) {
-                throw new IllegalArgumentException("this method solves one channel, got " + problem.channels().size());
+                throw new IllegalArgumentException("this method solves one channel, got "
+                        + problem.channels().size());
             }
             RadialChannel channel = problem.channels().get(0);
             double kinetic = problem.kinetic();
             where = "channel l = " + channel.orbital();
             potential = new ScalarPotential(problem);
-            scan = PotentialScan.of(potential, kinetic, channel.centrifugal(), problem.innerWall(), problem.outerWall(), where);
+            scan = PotentialScan.of(
+                    potential, kinetic, channel.centrifugal(), problem.innerWall(), problem.outerWall(), where);
             ChannelEnds ends = new ChannelEnds(potential, scan, kinetic, channel.centrifugal(), where);
             OriginBehaviour origin = problem.innerWall() > 0 ? OriginBehaviour.FINITE : ends.origin();
             boolean closed = !Double.isInfinite(problem.outerWall());
@@ -126,7 +129,10 @@ public final class PerturbedStepSolver implements RadialSolver {
         }
 
         InvalidModelException endless() {
-            return new InvalidModelException("the series of bound levels has no end", where, "ask for a number of levels, or for those below an energy");
+            return new InvalidModelException(
+                    "the series of bound levels has no end",
+                    where,
+                    "ask for a number of levels, or for those below an energy");
         }
 
         /** An energy below all levels. */

@@ -6,8 +6,8 @@ import org.wellwright.solver.InvalidModelException;
 /**
  * V sampled over every scale of r: where motion is allowed at an energy, and a lower bound for all levels.
  *
- * <p>Radii run geometrically from 2⁻⁷⁰ to 2⁹⁰, densely where r²|V − V(∞)|/κ is neither negligible nor overwhelming, evenly across that region as well, and
- * lie on both sides of every break point. Immutable.
+ * <p>Radii run geometrically from 2⁻⁷⁰ to 2⁹⁰, densely where r²|V − V(∞)|/κ is neither negligible nor overwhelming,
+ * evenly across that region as well, and lie on both sides of every break point. Immutable.
  */
 final class PotentialScan {
     private static final int LOWEST_OCTAVE = -70;
@@ -23,10 +23,12 @@ final class PotentialScan {
     private final double[] outerMinimum;
     /** min over j ≤ i of V + κλ/r². */
     private final double[] innerMinimum;
+
     private final double anchor;
     private final double hardyBound;
 
-    private PotentialScan(double[] radii, double[] values, double kinetic, double centrifugal, double anchor, double hardyBound) {
+    private PotentialScan(
+            double[] radii, double[] values, double kinetic, double centrifugal, double anchor, double hardyBound) {
         this.radii = radii;
         this.values = values;
         this.anchor = anchor;
@@ -52,7 +54,13 @@ final class PotentialScan {
      * @param where names the channel in a message
      * @throws InvalidModelException if V is not a number where it matters; names the radius
      */
-    static PotentialScan of(ScalarPotential potential, double kinetic, double centrifugal, double innerWall, double outerWall, String where) {
+    static PotentialScan of(
+            ScalarPotential potential,
+            double kinetic,
+            double centrifugal,
+            double innerWall,
+            double outerWall,
+            String where) {
         double[] radii = chooseRadii(potential, kinetic, innerWall, outerWall);
         double[] values = new double[radii.length];
         potential.values(radii, values, radii.length);
@@ -62,7 +70,10 @@ final class PotentialScan {
             if (values[i] == Double.NEGATIVE_INFINITY) {
                 throw notFinite(values[i], radii[i], where);
             }
-            if (Double.isFinite(values[i]) && (best < 0 || hardy(values, radii, i, kinetic, centrifugal) < hardy(values, radii, best, kinetic, centrifugal))) {
+            if (Double.isFinite(values[i])
+                    && (best < 0
+                            || hardy(values, radii, i, kinetic, centrifugal)
+                                    < hardy(values, radii, best, kinetic, centrifugal))) {
                 best = i;
             }
         }
@@ -122,7 +133,9 @@ final class PotentialScan {
         }
         double[] values = new double[coarse];
         potential.values(sparse, values, coarse);
-        double limit = potential.tail().known() && potential.tail().power() < 0 ? potential.tail().limit() : 0;
+        double limit = potential.tail().known() && potential.tail().power() < 0
+                ? potential.tail().limit()
+                : 0;
         double[] radii = new double[coarse * (1 + DENSE / SPARSE) + 3 * EVEN + 2 * potential.breaks().length];
         int n = 0;
         double lowest = Double.POSITIVE_INFINITY;
@@ -176,14 +189,22 @@ final class PotentialScan {
         }
     }
 
-    /** Beyond the last number V is a wall if infinite, its limit if it had already reached it, and a fault otherwise. */
-    private static void checkOuterEnd(ScalarPotential potential, double[] values, double[] radii, int last, double kinetic, String where) {
+    /**
+     * Beyond the last number V is a wall if infinite, its limit if it had already reached it, and a fault otherwise.
+     */
+    private static void checkOuterEnd(
+            ScalarPotential potential, double[] values, double[] radii, int last, double kinetic, String where) {
         if (last == radii.length - 1 || values[last + 1] == Double.POSITIVE_INFINITY) {
             return;
         }
-        double limit = potential.tail().known() && potential.tail().power() < 0 ? potential.tail().limit() : values[last];
+        double limit = potential.tail().known() && potential.tail().power() < 0
+                ? potential.tail().limit()
+                : values[last];
         double before = last > 1 ? values[last - 1] : values[last];
-        double strength = radii[last] * radii[last] * Math.max(Math.abs(values[last] - limit), Math.abs(before - limit)) / kinetic;
+        double strength = radii[last]
+                * radii[last]
+                * Math.max(Math.abs(values[last] - limit), Math.abs(before - limit))
+                / kinetic;
         if (!(strength < 1e-12)) {
             throw notFinite(values[last + 1], radii[last + 1], where);
         }

@@ -3,9 +3,10 @@ package org.wellwright.solver.radial.steps;
 /**
  * One step of constant-reference perturbation: u″ = (Q(r) − e) u on [left, left + width] with e = E/κ.
  *
- * <p>With x = (r − left)/width, Z = width²(Q̄ − e) and ΔV(x) = width²(Q − Q̄), the solution that starts with (1, 0) is ξ(Zx²) + Σ b_m(x) x^{2m+1} η_m(Zx²),
- * the one that starts with (0, 1) is Σ c_m(x) x^{2m+1} η_m(Zx²), c_0 = 1, b_0 = ½∫ΔV, and b_m[k] = ½ [ΔV b_{m−1} − b″_{m−1}]_k/(k + m) for both
- * (Ixaru 1984; Ixaru, De Meyer and Vanden Berghe 1997; Ledoux, Van Daele and Vanden Berghe 2004). What is kept does not depend on e. Immutable.
+ * <p>With x = (r − left)/width, Z = width²(Q̄ − e) and ΔV(x) = width²(Q − Q̄), the solution that starts with (1, 0) is
+ * ξ(Zx²) + Σ b_m(x) x^{2m+1} η_m(Zx²), the one that starts with (0, 1) is Σ c_m(x) x^{2m+1} η_m(Zx²), c_0 = 1, b_0 =
+ * ½∫ΔV, and b_m[k] = ½ [ΔV b_{m−1} − b″_{m−1}]_k/(k + m) for both (Ixaru 1984; Ixaru, De Meyer and Vanden Berghe 1997;
+ * Ledoux, Van Daele and Vanden Berghe 2004). What is kept does not depend on e. Immutable.
  */
 final class PropagationStep {
     final double left;
@@ -27,7 +28,15 @@ final class PropagationStep {
     private final double[] second;
     private final double[] secondSlope;
 
-    PropagationStep(double left, double width, double mean, double smallest, double atLeft, double atRight, double residue, StepSeries series) {
+    PropagationStep(
+            double left,
+            double width,
+            double mean,
+            double smallest,
+            double atLeft,
+            double atRight,
+            double residue,
+            StepSeries series) {
         this.left = left;
         this.width = width;
         this.mean = mean;
@@ -56,8 +65,8 @@ final class PropagationStep {
     }
 
     /**
-     * Fills the transfer matrix in x at Z: [u, u′, v, v′] and, from index 4, their derivatives by Z; all without the factor e^{√Z} where
-     * {@link EtaFunctions} leaves it out.
+     * Fills the transfer matrix in x at Z: [u, u′, v, v′] and, from index 4, their derivatives by Z; all without the
+     * factor e^{√Z} where {@link EtaFunctions} leaves it out.
      *
      * @param eta scratch for at least {@link EtaFunctions#HIGHEST} + 2 numbers
      */
@@ -101,8 +110,9 @@ final class PropagationStep {
     }
 
     /**
-     * Zeros in the step of a solution that has value u0 and slope du0 (in x) at one end and u1, du1 at the other, in either direction. Below one half-wave
-     * the sign tells; above it the phase is unwrapped against √−Z, its parity again by the signs.
+     * Zeros in the step of a solution that has value u0 and slope du0 (in x) at one end and u1, du1 at the other, in
+     * either direction. Below one half-wave the sign tells; above it the phase is unwrapped against √−Z, its parity
+     * again by the signs.
      */
     int zeros(double z, double e, double u0, double du0, double u1, double du1) {
         int parity = (u0 < 0) == (u1 < 0) ? 0 : 1;

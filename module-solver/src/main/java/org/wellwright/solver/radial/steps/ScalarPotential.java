@@ -10,7 +10,10 @@ import org.wellwright.solver.potential.TermEvaluator;
 import org.wellwright.solver.radial.ChannelTerm;
 import org.wellwright.solver.radial.RadialProblem;
 
-/** V(r) of an uncoupled problem as this method sees it: every term and the channel's threshold in one sum. Counts its evaluations; used by one thread. */
+/**
+ * V(r) of an uncoupled problem as this method sees it: every term and the channel's threshold in one sum. Counts its
+ * evaluations; used by one thread.
+ */
 final class ScalarPotential {
     private final List<TermEvaluator> terms = new ArrayList<>();
     private final double shift;

@@ -3,8 +3,9 @@ package org.wellwright.solver.radial.steps;
 /**
  * Shoots from both ends at one energy: the count of levels below it and Newton's step to the level nearby.
  *
- * <p>Count = zeros of the inner solution up to the matching edge + zeros of the outer one beyond it + 1 if the inner logarithmic derivative is the smaller
- * (Sturm). Newton's step is −W/(dW/dE) of the Wronskian W, exact since dη_m/dZ = ½η_{m+1}. Used by one thread.
+ * <p>Count = zeros of the inner solution up to the matching edge + zeros of the outer one beyond it + 1 if the inner
+ * logarithmic derivative is the smaller (Sturm). Newton's step is −W/(dW/dE) of the Wronskian W, exact since dη_m/dZ =
+ * ½η_{m+1}. Used by one thread.
  */
 final class Shooting {
     private final StepMesh mesh;
@@ -124,8 +125,8 @@ final class Shooting {
     }
 
     /**
-     * Goes over the state at a level once more for what its error estimate needs; see {@link #weightedResidue()} and {@link #meanPotential()}. ∫u² over a
-     * step is the difference of u′ ∂u/∂e − u ∂u′/∂e at its ends.
+     * Goes over the state at a level once more for what its error estimate needs; see {@link #weightedResidue()} and
+     * {@link #meanPotential()}. ∫u² over a step is the difference of u′ ∂u/∂e − u ∂u′/∂e at its ends.
      */
     void weigh(double energy) {
         weightedResidue = 0;

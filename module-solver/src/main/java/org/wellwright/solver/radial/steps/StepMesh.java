@@ -9,11 +9,13 @@ import org.wellwright.solver.potential.TailBehaviour;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /**
- * The steps between the two ends, made as far as an energy needs them: outwards and inwards from the radius where V + κ(λ + ¼)/r² is least.
+ * The steps between the two ends, made as far as an energy needs them: outwards and inwards from the radius where V +
+ * κ(λ + ¼)/r² is least.
  *
- * <p>A step is as wide as its polynomial and its perturbation series allow, whatever the energy; every break point is an edge. An end is a hard wall, the
- * origin (a Frobenius series, or a power of r at a radius where nothing else counts), a radius from which the WKB action into the forbidden region exceeds
- * {@value #ACTION}, or a radius beyond which V and the energy are negligible. One thread uses a mesh at a time.
+ * <p>A step is as wide as its polynomial and its perturbation series allow, whatever the energy; every break point is
+ * an edge. An end is a hard wall, the origin (a Frobenius series, or a power of r at a radius where nothing else
+ * counts), a radius from which the WKB action into the forbidden region exceeds {@value #ACTION}, or a radius beyond
+ * which V and the energy are negligible. One thread uses a mesh at a time.
  */
 final class StepMesh {
     private static final double ACTION = 22;
@@ -134,7 +136,10 @@ final class StepMesh {
         return low;
     }
 
-    /** Makes the steps for an energy and remembers what lies at the inner end. Returns the index of the first step of a sweep. */
+    /**
+     * Makes the steps for an energy and remembers what lies at the inner end. Returns the index of the first step of a
+     * sweep.
+     */
     int start(double energy) {
         double e = energy / kinetic;
         double allowed = scan.firstAllowed(energy);
@@ -152,7 +157,9 @@ final class StepMesh {
             }
             index--;
             PropagationStep step = step(index);
-            action = step.smallest < e || step.right() > allowed ? 0 : action + Math.sqrt(step.smallest - e) * step.width;
+            action = step.smallest < e || step.right() > allowed
+                    ? 0
+                    : action + Math.sqrt(step.smallest - e) * step.width;
             if (action >= ACTION) {
                 startKind = End.DECAY;
                 return index;
@@ -160,7 +167,10 @@ final class StepMesh {
         }
     }
 
-    /** Makes the steps for an energy and remembers what lies at the outer end. Returns the index after the last step of a sweep. */
+    /**
+     * Makes the steps for an energy and remembers what lies at the outer end. Returns the index after the last step of
+     * a sweep.
+     */
     int end(double energy) {
         double e = energy / kinetic;
         double allowed = scan.lastAllowed(energy);
@@ -205,7 +215,9 @@ final class StepMesh {
         }
     }
 
-    /** Fills u, u′, ∂u/∂e, ∂u′/∂e at the right end of the step before the one that {@link #end} returned just before. */
+    /**
+     * Fills u, u′, ∂u/∂e, ∂u′/∂e at the right end of the step before the one that {@link #end} returned just before.
+     */
     void finish(double energy, int index, double[] into) {
         double e = energy / kinetic;
         Arrays.fill(into, 0, 4, 0);
@@ -260,7 +272,9 @@ final class StepMesh {
 
     private boolean isFar(double energy) {
         double r = outerEdge();
-        if (Double.isInfinite(threshold) || r < scan.anchor() * 4 || !((threshold - energy) * r * r / kinetic < 1e-14)) {
+        if (Double.isInfinite(threshold)
+                || r < scan.anchor() * 4
+                || !((threshold - energy) * r * r / kinetic < 1e-14)) {
             return false;
         }
         double limit = farInverseSquare();
@@ -286,7 +300,9 @@ final class StepMesh {
         double limit = farInverseSquare();
         double nu = Math.sqrt(Math.max(0, 0.25 + centrifugal + limit));
         double w = r * r * (potential.value(r) - threshold) / kinetic - limit;
-        double order = potential.tail().known() && potential.tail().power() > -30 ? 2 + potential.tail().power() : -28;
+        double order = potential.tail().known() && potential.tail().power() > -30
+                ? 2 + potential.tail().power()
+                : -28;
         double correction = order < 0 ? w / (order - 2 * nu) : 0;
         into[0] = 1;
         into[1] = (0.5 - nu + correction) / r;
@@ -332,7 +348,10 @@ final class StepMesh {
             throw new CancellationException();
         }
         if (stepCount() > MOST_STEPS) {
-            throw new SolverException("the second method needs more than " + MOST_STEPS + " steps", where, "ask for fewer levels, further below the threshold");
+            throw new SolverException(
+                    "the second method needs more than " + MOST_STEPS + " steps",
+                    where,
+                    "ask for fewer levels, further below the threshold");
         }
         double width = to - from;
         boolean narrow = width < NARROWEST * to;
@@ -346,7 +365,8 @@ final class StepMesh {
             if (Double.isNaN(q) || Double.isInfinite(q)) {
                 if (narrow) {
                     throw new InvalidModelException(
-                            "the potential is %s at r = %s".formatted(Double.isNaN(q) ? "not a number" : "infinite", radii[i]),
+                            "the potential is %s at r = %s"
+                                    .formatted(Double.isNaN(q) ? "not a number" : "infinite", radii[i]),
                             where,
                             "write the formula so that it stays finite there, or limit its range");
                 }
@@ -365,12 +385,15 @@ final class StepMesh {
         StepQuadrature.project(samples, legendre);
         legendre[0] += bulk;
         double noise = NOISE * largest * square;
-        double tail = Math.max(Math.abs(legendre[StepQuadrature.DEGREE + 1]), Math.abs(legendre[StepQuadrature.DEGREE + 2])) * square;
+        double tail =
+                Math.max(Math.abs(legendre[StepQuadrature.DEGREE + 1]), Math.abs(legendre[StepQuadrature.DEGREE + 2]))
+                        * square;
         double amplitude = 0;
         for (int n = 1; n <= StepQuadrature.DEGREE; n++) {
             amplitude += Math.abs(legendre[n]) * square;
         }
-        // Coefficients that do not fall belong to a jump or a kink: there the mean itself is in doubt, over the local wavelength and not over the step.
+        // Coefficients that do not fall belong to a jump or a kink: there the mean itself is in doubt, over the local
+        // wavelength and not over the step.
         boolean rough = tail > 1e-5 * amplitude;
         double fit = rough ? FIT * Math.min(1, width * Math.sqrt(largest)) : FIT;
         double allowed = Math.max(fit, noise);
@@ -408,12 +431,16 @@ final class StepMesh {
         return new PropagationStep(from, width, legendre[0], smallest, left, right, residue, builder);
     }
 
-    /** Whether V just inside both ends and the scan's own samples lie on the step's polynomial, so that nothing hides between the Gauss points. */
+    /**
+     * Whether V just inside both ends and the scan's own samples lie on the step's polynomial, so that nothing hides
+     * between the Gauss points.
+     */
     private boolean fits(double from, double to, double square, double noise) {
         double tolerance = (1e-11 + 64 * noise) / square;
         double left = Math.nextUp(from);
         double right = Math.nextDown(to);
-        if (!lies(left, potential.value(left), from, to, square, tolerance) || !lies(right, potential.value(right), from, to, square, tolerance)) {
+        if (!lies(left, potential.value(left), from, to, square, tolerance)
+                || !lies(right, potential.value(right), from, to, square, tolerance)) {
             return false;
         }
         for (int i = scan.firstAbove(from); i < scan.size() && scan.radius(i) < to; i++) {

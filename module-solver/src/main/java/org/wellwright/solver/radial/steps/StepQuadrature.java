@@ -1,7 +1,8 @@
 package org.wellwright.solver.radial.steps;
 
 /**
- * Gauss–Legendre points on [0, 1] and the way from samples to a polynomial: shifted Legendre coefficients, then powers of x.
+ * Gauss–Legendre points on [0, 1] and the way from samples to a polynomial: shifted Legendre coefficients, then powers
+ * of x.
  *
  * <p>Points by Newton's iteration on the Legendre recurrence (Abramowitz and Stegun 1964, 25.4.29).
  */

@@ -2,7 +2,10 @@ package org.wellwright.solver.radial.steps;
 
 import java.util.Arrays;
 
-/** The numbers b_m(1), b′_m(1) of both solutions of a {@link PropagationStep}. Reused from step to step by one thread; what it hands out is fresh. */
+/**
+ * The numbers b_m(1), b′_m(1) of both solutions of a {@link PropagationStep}. Reused from step to step by one thread;
+ * what it hands out is fresh.
+ */
 final class StepSeries {
     private static final int MOST_TERMS = 16;
     private static final int MOST_POWERS = 96;
