@@ -4,7 +4,9 @@ import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
+import java.util.concurrent.ConcurrentHashMap;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.model.Assembly;
 import org.wellwright.solver.model.Datum;
@@ -18,12 +20,13 @@ import org.wellwright.solver.units.LengthUnit;
 import org.wellwright.solver.units.UnitExpression;
 import org.wellwright.solver.units.UnitSystem;
 
-/** Computes what a model says of a datum: Σ c_k E_k under the datum's transform, in the datum's unit. Immutable. */
+/** Computes what a model says of a datum: Σ c_k E_k under the datum's transform, in the datum's unit. Thread-safe. */
 final class DataModel {
     private final ParameterPool pool;
     private final UnitSystem units;
     private final double planckLight;
     private final double nanometre;
+    private final Map<Conversion, Double> factors = new ConcurrentHashMap<>();
 
     DataModel(Assembly assembly) {
         this.pool = assembly.pool();
@@ -42,7 +45,7 @@ final class DataModel {
         return keys;
     }
 
-    /** How many of the datum's unit one unit of the system is. */
+    /** How many of the datum's unit one unit of the system is; NaN for a rate. */
     double fromSystem(Datum datum) {
         Dimension dimension = switch (datum.transform()) {
             case ABSOLUTE_MASS -> Dimension.MASS;
@@ -51,10 +54,15 @@ final class DataModel {
             case RATE -> null;
             default -> Dimension.ENERGY;
         };
-        return dimension == null
-                ? Double.NaN
-                : 1 / UnitExpression.parse(datum.unit()).factorTo(units, dimension);
+        if (dimension == null) {
+            return Double.NaN;
+        }
+        return factors.computeIfAbsent(
+                new Conversion(datum.unit(), dimension),
+                key -> 1 / UnitExpression.parse(key.unit()).factorTo(units, key.dimension()));
     }
+
+    private record Conversion(String unit, Dimension dimension) {}
 
     /** The uncertainty of the datum, in its unit, that one unit of energy would give; NaN if it has none. */
     double energyWeight(Datum datum) {

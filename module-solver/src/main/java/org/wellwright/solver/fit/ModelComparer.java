@@ -3,6 +3,7 @@ package org.wellwright.solver.fit;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.List;
 import java.util.concurrent.CancellationException;
 import org.wellwright.solver.Problem;
@@ -139,14 +140,13 @@ public final class ModelComparer {
         return new Judged(model.name(), setup, weights, quantities, free, squares, priors);
     }
 
-    private List<Integer> common(List<Judged> judged) {
-        List<Integer> common = new ArrayList<>();
-        for (int i = 0; i < document.data().size(); i++) {
-            int datum = i;
-            if (!judged.isEmpty()
-                    && judged.stream().allMatch(one -> one.setup().rows().contains(datum))) {
-                common.add(i);
-            }
+    private static List<Integer> common(List<Judged> judged) {
+        if (judged.isEmpty()) {
+            return List.of();
+        }
+        List<Integer> common = new ArrayList<>(judged.get(0).setup().rows());
+        for (Judged one : judged) {
+            common.retainAll(new HashSet<>(one.setup().rows()));
         }
         return common;
     }

@@ -1,7 +1,9 @@
 package org.wellwright.solver.fit;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import org.wellwright.solver.model.Datum;
 
 /** Makes the rows that a user sees from what a model says of the data. */
@@ -17,6 +19,7 @@ final class RowReport {
     static List<ResidualRow> rows(
             FitObjective.Setup setup, Weights weights, List<Quantity> quantities, double[] x, double[] predictedSigma) {
         List<ResidualRow> rows = new ArrayList<>();
+        Set<Integer> counted = new HashSet<>(setup.rows());
         for (int i = 0; i < setup.data().size(); i++) {
             Datum datum = setup.data().get(i);
             Quantity quantity = quantities.get(i);
@@ -50,7 +53,7 @@ final class RowReport {
                     sigma,
                     holds ? 0 : difference / sigma,
                     datum.unit(),
-                    setup.rows().contains(i),
+                    counted.contains(i),
                     null));
         }
         return rows;
