@@ -21,8 +21,8 @@ public interface CondensedPencil {
         void solve(double shift, boolean[] allowed);
 
         /**
-         * Solves (A − σM) x = b at the shift of the last {@link #solve}, the unknown of its twist held at zero; the result
-         * stands in {@link #vertices} and {@link #amplitudes}.
+         * Solves (A − σM) x = b at the shift of the last {@link #solve}, the unknown of its twist held at zero; the
+         * result stands in {@link #vertices} and {@link #amplitudes}.
          *
          * @param vertexLoad b at the inner edges, {@code [v * C + c]}; destroyed
          * @param modeLoad b of the modes, laid out as {@link #amplitudes}

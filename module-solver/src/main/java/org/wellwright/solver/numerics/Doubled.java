@@ -1,8 +1,8 @@
 package org.wellwright.solver.numerics;
 
 /**
- * A number as the unevaluated sum of two doubles, some 31 digits: enough to make tables that are right to the last bit of
- * a double. Source: Dekker (1971); Knuth, volume 2, section 4.2.2.
+ * A number as the unevaluated sum of two doubles, some 31 digits: enough to make tables that are right to the last bit
+ * of a double. Source: Dekker (1971); Knuth, volume 2, section 4.2.2.
  *
  * @param high the number rounded to double
  * @param low what rounding left

@@ -5,8 +5,8 @@ package org.wellwright.solver.numerics;
  * needs at any shift σ.
  *
  * <p>With C coupled channels there are C vertex values at each end and N = C·n bubble modes. In the modes' basis A is
- * diag(λ_k), M the identity; a vertex function couples to mode k by α − σβ (Wittrick and Williams 1971; Craig and Bampton
- * 1968 for the modes). Vertex matrices are C×C.
+ * diag(λ_k), M the identity; a vertex function couples to mode k by α − σβ (Wittrick and Williams 1971; Craig and
+ * Bampton 1968 for the modes). Vertex matrices are C×C.
  */
 public final class Element {
     /** Channels C. */
@@ -44,8 +44,8 @@ public final class Element {
     /** Right with right. */
     public final double[] mRightRight;
     /**
-     * Couplings of the extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C + 1)]}: N modes, C left, C
-     * right vertices, itself; and the same of the mass.
+     * Couplings of the extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C + 1)]}: N modes, C left,
+     * C right vertices, itself; and the same of the mass.
      */
     public final double[] extraA;
     /** See {@link #extraA}. */

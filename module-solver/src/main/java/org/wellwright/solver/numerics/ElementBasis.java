@@ -6,9 +6,9 @@ import java.util.concurrent.ConcurrentHashMap;
 /**
  * The functions of one element on its reference interval, tabulated at the nodes of two Gauss rules.
  *
- * <p>An ordinary element [a, a + 2L] has two linear vertex functions and the integrated Legendre polynomials φ_k = (P_k −
- * P_{k−2})/√(2(2k−1)), k = 2 … p, whose stiffness ∫ φ_i′ φ_k′ dx is the identity (Babuška and Szabó 1991, section 3.1.4);
- * they are evaluated as −(1 − x)(1 + x) P′_{k−1} √((2k−1)/2)/(k(k−1)), which is accurate at the ends.
+ * <p>An ordinary element [a, a + 2L] has two linear vertex functions and the integrated Legendre polynomials φ_k = (P_k
+ * − P_{k−2})/√(2(2k−1)), k = 2 … p, whose stiffness ∫ φ_i′ φ_k′ dx is the identity (Babuška and Szabó 1991, section
+ * 3.1.4); they are evaluated as −(1 − x)(1 + x) P′_{k−1} √((2k−1)/2)/(k(k−1)), which is accurate at the ends.
  *
  * <p>The element at the origin [0, L] has u = (r/L)^s g(r/L): vertex function g = 1 and bubbles with g_k′ = √(2k+2s+1)
  * P_k^{(0,2s)}(2t − 1), g_k(1) = 0, that is g_k = −√(2k+2s+1) (1 − t) P_k^{(1,2s−1)}(2t − 1)/(k + 1) (Szegő 1939, eq.
@@ -30,8 +30,8 @@ public final class ElementBasis {
     /**
      * Values at the nodes of one rule.
      *
-     * <p>{@code bubble[k][g]} and {@code second[k][g]} for k &lt; bubbles + EXTRA; {@code left}, {@code right} the vertex
-     * functions.
+     * <p>{@code bubble[k][g]} and {@code second[k][g]} for k &lt; bubbles + EXTRA; {@code left}, {@code right} the
+     * vertex functions.
      */
     public static final class Table {
         /** Number of nodes. */
@@ -99,7 +99,8 @@ public final class ElementBasis {
     /** The same at the right end. */
     public final double[] slopeRight;
 
-    private ElementBasis(int bubbles, double exponent, Table assembly, Table check, double[] slopeLeft, double[] slopeRight) {
+    private ElementBasis(
+            int bubbles, double exponent, Table assembly, Table check, double[] slopeLeft, double[] slopeRight) {
         this.bubbles = bubbles;
         this.exponent = exponent;
         this.assembly = assembly;
@@ -293,7 +294,8 @@ public final class ElementBasis {
 
     private static Table originTable(int nodes, int functions, OriginKey key) {
         double s = key.exponent;
-        // Below b = 0.51 the weight t^{2b−2} is too near to the limit −1: a rule with t^{2b−1} then, exact for energies.
+        // Below b = 0.51 the weight t^{2b−2} is too near to the limit −1: a rule with t^{2b−1} then, exact for
+        // energies.
         double shift = key.base >= 0.51 ? 1 : 0.5;
         Table table = new Table(GaussRule.jacobi(nodes, 2 * (key.base - shift)), functions, 1);
         double[] g1 = new double[functions];

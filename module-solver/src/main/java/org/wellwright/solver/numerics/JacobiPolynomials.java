@@ -1,8 +1,6 @@
 package org.wellwright.solver.numerics;
 
-/**
- * Jacobi polynomials P_n^(α,β)(x) by their three-term recurrence. Source: Szegő (1939), eqs. 4.5.1 and 4.21.7.
- */
+/** Jacobi polynomials P_n^(α,β)(x) by their three-term recurrence. Source: Szegő (1939), eqs. 4.5.1 and 4.21.7. */
 public final class JacobiPolynomials {
     private JacobiPolynomials() {}
 

@@ -1,16 +1,14 @@
 package org.wellwright.solver.numerics;
 
-import java.util.Arrays;
-
 /**
- * A chain of elements of one channel, zero at both ends, as a condensed pencil in the element edges: counts of levels and
- * null vectors at any shift.
+ * A chain of elements of one channel, zero at both ends, as a condensed pencil in the element edges: counts of levels
+ * and null vectors at any shift.
  *
  * <p>At a shift σ each element contributes S_ij = a_ij − σ m_ij − Σ_k e_ik e_jk/(λ_k − σ), e = α − σβ; the number of
- * levels below σ is Σ #(λ_k &lt; σ) plus the negative pivots of the tridiagonal S (Wittrick and Williams 1971; Sylvester).
- * Near a pole λ_k the mode is kept as an unknown of its own and eliminated with its left neighbour by a 2×2 pivot, so
- * that nothing is lost where a level vanishes at an element edge. Vectors come from the twisted factorisation at the
- * unknown whose γ over mass is least (Dhillon and Parlett 2004).
+ * levels below σ is Σ #(λ_k &lt; σ) plus the negative pivots of the tridiagonal S (Wittrick and Williams 1971;
+ * Sylvester). Near a pole λ_k the mode is kept as an unknown of its own and eliminated with its left neighbour by a 2×2
+ * pivot, so that nothing is lost where a level vanishes at an element edge. Vectors come from the twisted factorisation
+ * at the unknown whose γ over mass is least (Dhillon and Parlett 2004).
  */
 public final class ScalarChain implements CondensedPencil {
     private final Element[] element;

@@ -48,7 +48,9 @@ public final class SymmetricEigen {
         java.util.Arrays.sort(diagonal, 0, n);
     }
 
-    /** Householder's reduction from the last row upwards; d diagonal, e[i] couples i and i + 1, a the product matrix. */
+    /**
+     * Householder's reduction from the last row upwards; d diagonal, e[i] couples i and i + 1, a the product matrix.
+     */
     private static void reduce(double[] a, int n, double[] d, double[] e) {
         for (int i = n - 1; i > 0; i--) {
             int row = i * n;
@@ -165,7 +167,8 @@ public final class SymmetricEigen {
                     break;
                 }
                 if (iteration > 60) {
-                    throw new IllegalArgumentException("QL iteration does not converge; a matrix element is not finite");
+                    throw new IllegalArgumentException(
+                            "QL iteration does not converge; a matrix element is not finite");
                 }
                 double g = (d[l + 1] - d[l]) / (2 * e[l]);
                 double r = Math.sqrt(g * g + 1);

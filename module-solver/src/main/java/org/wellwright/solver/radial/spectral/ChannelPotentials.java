@@ -91,7 +91,10 @@ final class ChannelPotentials {
         return least;
     }
 
-    /** Whether any channel has a core more singular than r⁻², or the origin lies behind a wall: no element at the origin then. */
+    /**
+     * Whether any channel has a core more singular than r⁻², or the origin lies behind a wall: no element at the origin
+     * then.
+     */
     boolean startsInWall() {
         for (boolean one : core) {
             if (one) {
@@ -139,8 +142,8 @@ final class ChannelPotentials {
     }
 
     /**
-     * V of all channels with their thresholds at {@code count} radii: {@code [c * C + d][i]}, without the centrifugal term;
-     * null where nothing couples; the same array above and below the diagonal.
+     * V of all channels with their thresholds at {@code count} radii: {@code [c * C + d][i]}, without the centrifugal
+     * term; null where nothing couples; the same array above and below the diagonal.
      */
     double[][] sample(double[] radii, int count) {
         double[] common = cache.common(problem.common(), radii, count);
@@ -185,7 +188,10 @@ final class ChannelPotentials {
         }
     }
 
-    /** The value that V must have at a radius where it cannot be computed, if it was constant or on its known tail before. */
+    /**
+     * The value that V must have at a radius where it cannot be computed, if it was constant or on its known tail
+     * before.
+     */
     private double beyondOverflow(TermEvaluator term, double r, double value) {
         if (Double.isNaN(value)) {
             double finite = r;
@@ -194,7 +200,8 @@ final class ChannelPotentials {
             }
             double here = term.value(finite);
             double before = term.value(finite / 1.5);
-            if (Math.abs(here - before) <= 1e-14 * Math.abs(here) || Math.abs(here) < 1e-100 && Math.abs(before) < 1e-50) {
+            if (Math.abs(here - before) <= 1e-14 * Math.abs(here)
+                    || Math.abs(here) < 1e-100 && Math.abs(before) < 1e-50) {
                 return here;
             }
             TailBehaviour tail = term.tail();
@@ -219,7 +226,10 @@ final class ChannelPotentials {
         return "l = " + problem.channels().get(c).orbital();
     }
 
-    /** Lower envelope of all channels with Langer's centrifugal term κ(λ + ¼)/r²: no level lies below its minimum (Hardy). */
+    /**
+     * Lower envelope of all channels with Langer's centrifugal term κ(λ + ¼)/r²: no level lies below its minimum
+     * (Hardy).
+     */
     void envelope(double[][] w, double[] radii, int count, double[] into) {
         for (int i = 0; i < count; i++) {
             double least = Double.POSITIVE_INFINITY;
@@ -315,8 +325,7 @@ final class ChannelPotentials {
         inverseSquare[c] = origin.inverseSquare();
         double strength = channel.centrifugal() + origin.inverseSquare() / kinetic();
         if (strength < -0.25 - 1e-13) {
-            throw fallsToCentre(
-                    channel, "the r^-2 part is %.6g times kappa, below -1/4".formatted(strength));
+            throw fallsToCentre(channel, "the r^-2 part is %.6g times kappa, below -1/4".formatted(strength));
         }
         exponent[c] = 0.5 + Math.sqrt(Math.max(0, strength + 0.25));
         if (Math.abs(exponent[c] - Math.rint(exponent[c])) < 1e-14 * exponent[c]) {

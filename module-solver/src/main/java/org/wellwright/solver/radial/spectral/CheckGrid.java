@@ -7,16 +7,19 @@ import org.wellwright.solver.potential.TermEvaluator;
 import org.wellwright.solver.radial.ChannelTerm;
 
 /**
- * V at the nodes of the second Gauss rule of every element, on which energies and residuals are evaluated, and at those of
- * the first, so that the difference of the two measures the quadrature.
+ * V at the nodes of the second Gauss rule of every element, on which energies and residuals are evaluated, and at those
+ * of the first, so that the difference of the two measures the quadrature.
  *
  * <p>A node's radius is rounded to double; where V is steep that costs r V′/V roundings. The rounding of the radius is
  * known exactly (Knuth's sum), so V is carried to the exact node with the slope of the element's own interpolant.
  */
 final class CheckGrid {
     private final int channels;
-    /** {@code potential[e][c * C + d][g]} with the centrifugal term, or at the origin without what the exponents hold. */
+    /**
+     * {@code potential[e][c * C + d][g]} with the centrifugal term, or at the origin without what the exponents hold.
+     */
     private final double[][][] check;
+
     private final double[][][] assembly;
     private final double[][] rounding;
 

@@ -4,7 +4,10 @@ import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
 import org.wellwright.solver.numerics.ElementBasis;
 
-/** Differentiation matrices of the interpolant through the nodes of a rule. Source: Berrut and Trefethen (2004), eq. 9.4. */
+/**
+ * Differentiation matrices of the interpolant through the nodes of a rule. Source: Berrut and Trefethen (2004), eq.
+ * 9.4.
+ */
 final class Differentiation {
     private static final Map<Integer, double[][]> MATRICES = new ConcurrentHashMap<>();
 

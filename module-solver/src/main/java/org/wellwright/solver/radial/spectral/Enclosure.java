@@ -5,8 +5,8 @@ import java.util.List;
 /**
  * Two-sided bounds of the true operator's levels from the residuals of C¹ trial functions.
  *
- * <p>With E_{n−1} ≤ a &lt; ρ &lt; b ≤ E_{n+1} and ε = ‖Hu − ρu‖ the level lies in [ρ − ε²/(b − ρ), ρ + ε²/(ρ − a)] (Temple
- * 1928; Kato 1949); the lowest level lies below ρ itself.
+ * <p>With E_{n−1} ≤ a &lt; ρ &lt; b ≤ E_{n+1} and ε = ‖Hu − ρu‖ the level lies in [ρ − ε²/(b − ρ), ρ + ε²/(ρ − a)]
+ * (Temple 1928; Kato 1949); the lowest level lies below ρ itself.
  */
 final class Enclosure {
     private final double[] lower;

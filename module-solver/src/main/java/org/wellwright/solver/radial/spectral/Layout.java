@@ -11,8 +11,8 @@ import org.wellwright.solver.radial.SolveMonitor;
  * cut where the classical action of an element is too long, then cut where the element itself shows that it does not
  * resolve.
  *
- * <p>Everything is tested at several energies, since deep levels decay fast just outside the well. A layout is a function
- * of the problem, the energies and the tolerance alone.
+ * <p>Everything is tested at several energies, since deep levels decay fast just outside the well. A layout is a
+ * function of the problem, the energies and the tolerance alone.
  */
 final class Layout {
     /** Action ∫√((V − E)/κ) dr after which the outer end is cut: the square of what is cut off is below e^−42. */

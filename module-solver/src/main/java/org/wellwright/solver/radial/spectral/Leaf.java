@@ -11,6 +11,7 @@ final class Leaf {
     final ElementBasis[] basis;
     /** V of all channels at the assembly nodes, {@code [c * C + d][g]}; see {@link ChannelPotentials#sample}. */
     final double[][] potential;
+
     final double[] radius;
     final double[] envelope;
     private final double kinetic;

@@ -5,8 +5,8 @@ import org.wellwright.solver.numerics.Element;
 import org.wellwright.solver.numerics.ElementBasis;
 
 /**
- * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that rounding
- * is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
+ * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that
+ * rounding is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
  *
  * <p>One object is used for many levels of one mesh; results are read before the next call.
  */
@@ -392,8 +392,7 @@ final class Quotient {
         // First all jumps of the function as it is, then the corrections.
         for (int v = 1; v <= last; v++) {
             for (int c = 0; c < channels; c++) {
-                jump[v * channels + c] =
-                        slopeLeft(trial, enriched, v, c) - slopeRight(trial, enriched, v - 1, c);
+                jump[v * channels + c] = slopeLeft(trial, enriched, v, c) - slopeRight(trial, enriched, v - 1, c);
             }
         }
         for (int c = 0; c < channels; c++) {

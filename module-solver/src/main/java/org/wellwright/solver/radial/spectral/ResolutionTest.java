@@ -7,8 +7,8 @@ import org.wellwright.solver.numerics.ElementBasis;
  * Whether an element resolves the solutions at an energy: the local energy error per norm, from the residual on the
  * bubbles beyond the trial space (Babuška and Szabó 1991, section 4.4, for hierarchic estimates).
  *
- * <p>With vertex values y the element's solution has η² = Σ_x t_x(y)²/(A_xx − E M_xx) and norm m(y); returned is a bound of
- * η²/m over all y, the trace of m⁻¹η².
+ * <p>With vertex values y the element's solution has η² = Σ_x t_x(y)²/(A_xx − E M_xx) and norm m(y); returned is a
+ * bound of η²/m over all y, the trace of m⁻¹η².
  */
 final class ResolutionTest {
     private final int channels;

@@ -66,7 +66,13 @@ final class Response {
     }
 
     private static void load(
-            Trial u, int e, double[][] f, double overlap, double[] vertexLoad, double[] modeLoad, CondensedPencil.Work work) {
+            Trial u,
+            int e,
+            double[][] f,
+            double overlap,
+            double[] vertexLoad,
+            double[] modeLoad,
+            CondensedPencil.Work work) {
         Element element = u.elements()[e];
         int channels = u.channels();
         int n = element.basis[0].bubbles;

@@ -5,9 +5,9 @@ import java.util.concurrent.atomic.AtomicLong;
 import org.wellwright.solver.potential.TermEvaluator;
 
 /**
- * Values of one potential on the nodes of elements, shared by all channels that contain it. The elements of all problems
- * come from one ladder, so neighbours in l meet the same elements; what is stored are the very values that the evaluator
- * gives, so a result does not depend on who filled the cache.
+ * Values of one potential on the nodes of elements, shared by all channels that contain it. The elements of all
+ * problems come from one ladder, so neighbours in l meet the same elements; what is stored are the very values that the
+ * evaluator gives, so a result does not depend on who filled the cache.
  */
 final class SampleCache {
     private record Key(double first, double last, int count) {}

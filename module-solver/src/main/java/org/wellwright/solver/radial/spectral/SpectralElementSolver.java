@@ -1,18 +1,8 @@
 package org.wellwright.solver.radial.spectral;
 
-import java.util.ArrayList;
-import java.util.List;
-import org.wellwright.solver.InvalidModelException;
-import org.wellwright.solver.numerics.CondensedPencil;
-import org.wellwright.solver.numerics.Element;
-import org.wellwright.solver.numerics.ScalarChain;
-import org.wellwright.solver.radial.Completeness;
-import org.wellwright.solver.radial.Level;
-import org.wellwright.solver.radial.LevelOutcome;
 import org.wellwright.solver.radial.LevelSearch;
 import org.wellwright.solver.radial.RadialProblem;
 import org.wellwright.solver.radial.RadialSolver;
-import org.wellwright.solver.radial.RadialState;
 import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
@@ -36,7 +26,9 @@ public final class SpectralElementSolver implements RadialSolver {
         this.shared = shared;
     }
 
-    /** A solver for a group of problems with one common potential: its values are computed once. Same bits as a new one. */
+    /**
+     * A solver for a group of problems with one common potential: its values are computed once. Same bits as a new one.
+     */
     public static SpectralElementSolver sharing(RadialProblem any) {
         return new SpectralElementSolver(SampleCache.shared(any.common()));
     }

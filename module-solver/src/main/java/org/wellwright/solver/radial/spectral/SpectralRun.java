@@ -179,8 +179,8 @@ final class SpectralRun {
     }
 
     /**
-     * What the difference of the two rules says of the better one: as it is when it is large, and quadratically less below
-     * 1e-12, since both converge geometrically there.
+     * What the difference of the two rules says of the better one: as it is when it is large, and quadratically less
+     * below 1e-12, since both converge geometrically there.
      */
     private static double trusted(double difference, double scale) {
         return difference * Math.min(1, difference / (1e-12 * scale));
@@ -206,8 +206,10 @@ final class SpectralRun {
         }
         boolean any = false;
         for (int e = 0; e < marked.length; e++) {
-            boolean bad = wide && quotient.residualShare[e] > 0.1 * square / 4
-                    && quotient.residualShare[e] > 0.5 * target * Math.max(gap, 1e-12 * solution.scale()) / marked.length;
+            boolean bad = wide
+                    && quotient.residualShare[e] > 0.1 * square / 4
+                    && quotient.residualShare[e]
+                            > 0.5 * target * Math.max(gap, 1e-12 * solution.scale()) / marked.length;
             bad |= coarse && quotient.quadratureShare[e] > 0.1 * quotient.quadrature;
             if (bad) {
                 marked[e] = true;

@@ -103,8 +103,7 @@ final class StateGradient {
             double factor = term.row() == term.column() ? 1 : 2;
             addMovingEdges(term.potential(), term.row(), term.column(), factor, ofRest[i]);
         }
-        return new EnergyGradient(
-                kinetic() / problem.kinetic(), ofCommon, ofRest, thresholds, wall(true), wall(false));
+        return new EnergyGradient(kinetic() / problem.kinetic(), ofCommon, ofRest, thresholds, wall(true), wall(false));
     }
 
     private static void addExpectations(TermEvaluator term, double[] p, double[] r, double factor, double[] into) {
@@ -134,7 +133,8 @@ final class StateGradient {
                 density = trial.value(row, point.radius()) * trial.value(column, point.radius());
             }
             for (int j = 0; j < into.length; j++) {
-                into[j] -= factor * point.jump() * density * point.radiusGradient().get(j);
+                into[j] -=
+                        factor * point.jump() * density * point.radiusGradient().get(j);
             }
         }
     }

@@ -1,8 +1,8 @@
 package org.wellwright.solver.radial.spectral;
 
 /**
- * A first look at the lower envelope of a problem over sixty decades of r, two radii an octave: where its minimum is, how
- * deep, and beyond which radius nothing is classically allowed. Values that overflow are taken as forbidden.
+ * A first look at the lower envelope of a problem over sixty decades of r, two radii an octave: where its minimum is,
+ * how deep, and beyond which radius nothing is classically allowed. Values that overflow are taken as forbidden.
  */
 final class Survey {
     private static final int HALF_OCTAVES = 200;

@@ -45,7 +45,13 @@ final class Trial {
         for (int e = 0; e < elements.length; e++) {
             for (int c = 0; c < channels; c++) {
                 elements[e].bubbleCoefficients(
-                        c, work.amplitudes(), work.first(e), work.step(), scratch, coefficient, (e * channels + c) * functions);
+                        c,
+                        work.amplitudes(),
+                        work.first(e),
+                        work.step(),
+                        scratch,
+                        coefficient,
+                        (e * channels + c) * functions);
             }
         }
         return new Trial(elements, edges, vertex, coefficient, shift);
@@ -180,7 +186,11 @@ final class Trial {
         }
         int e = find(r);
         return elements[e].basis[c].value(
-                (r - edges[e]) / (edges[e + 1] - edges[e]), vertex(e, c), vertex(e + 1, c), coefficient, (e * channels + c) * functions);
+                (r - edges[e]) / (edges[e + 1] - edges[e]),
+                vertex(e, c),
+                vertex(e + 1, c),
+                coefficient,
+                (e * channels + c) * functions);
     }
 
     /** du_c/dr; zero outside the mesh. */
@@ -190,7 +200,11 @@ final class Trial {
         }
         int e = find(r);
         return elements[e].basis[c].slope(
-                        (r - edges[e]) / (edges[e + 1] - edges[e]), vertex(e, c), vertex(e + 1, c), coefficient, (e * channels + c) * functions)
+                        (r - edges[e]) / (edges[e + 1] - edges[e]),
+                        vertex(e, c),
+                        vertex(e + 1, c),
+                        coefficient,
+                        (e * channels + c) * functions)
                 / elements[e].unit;
     }
 

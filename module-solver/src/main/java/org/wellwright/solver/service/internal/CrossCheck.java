@@ -14,8 +14,8 @@ import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
 /**
- * Confirms a spectrum by the second method: its count at the end of the search always, its energies if asked. A difference
- * beyond the bounds is our fault and said so.
+ * Confirms a spectrum by the second method: its count at the end of the search always, its energies if asked. A
+ * difference beyond the bounds is our fault and said so.
  */
 final class CrossCheck {
     private final Optional<RadialSolver> second;
@@ -55,9 +55,10 @@ final class CrossCheck {
     }
 
     private void compare(Spectrum spectrum, SolveMonitor monitor) {
-        LevelSearch search = new LevelSearch(
-                Math.max(1, spectrum.outcomes().size()), spectrum.searchedBelow(), LevelSearch.FULL);
-        List<Level> others = second.get().solve(spectrum.problem(), search, monitor).levels();
+        LevelSearch search =
+                new LevelSearch(Math.max(1, spectrum.outcomes().size()), spectrum.searchedBelow(), LevelSearch.FULL);
+        List<Level> others =
+                second.get().solve(spectrum.problem(), search, monitor).levels();
         for (Level level : spectrum.levels()) {
             for (Level other : others) {
                 if (other.index() == level.index() && !agree(level, other)) {

@@ -18,8 +18,8 @@ import org.wellwright.solver.service.SolveRequest;
 import org.wellwright.solver.service.SolverService;
 
 /**
- * The solver that ships: hp spectral elements, every count confirmed by the second method. Problems with the same common
- * potential share its values; each result has the bits that it would have alone.
+ * The solver that ships: hp spectral elements, every count confirmed by the second method. Problems with the same
+ * common potential share its values; each result has the bits that it would have alone.
  */
 @ServiceProvider(service = SolverService.class, position = 100)
 public final class DefaultSolverService implements SolverService {
