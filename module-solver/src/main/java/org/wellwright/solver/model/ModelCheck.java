@@ -340,7 +340,7 @@ public final class ModelCheck {
 
     private void attempt(String at, Supplier<?> action) {
         try {
-            action.get();
+            Object unused = action.get();
         } catch (InvalidModelException fault) {
             problems.add(under(at, fault.problem()));
         }
