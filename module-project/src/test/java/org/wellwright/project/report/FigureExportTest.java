@@ -168,7 +168,8 @@ class FigureExportTest {
                 List.of(),
                 List.of(),
                 List.of());
-        FigureInput input = new FigureInput("Invented project <1>", "abc123", document, List.of(), List.of(), null, List.of());
+        FigureInput input =
+                new FigureInput("Invented project <1>", "abc123", document, List.of(), List.of(), null, List.of());
         FigureSelection selection =
                 new FigureSelection("screened", List.of(new LevelKey("pair", "V", ChannelKey.ofOrbital(1), 2)), 0);
         return new FigureRequest(
