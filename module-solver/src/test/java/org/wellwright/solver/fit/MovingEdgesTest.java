@@ -1,0 +1,92 @@
+package org.wellwright.solver.fit;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.wellwright.solver.fit.Documents.document;
+import static org.wellwright.solver.fit.Documents.fixed;
+import static org.wellwright.solver.fit.Documents.hydrogens;
+import static org.wellwright.solver.fit.Documents.level;
+
+import java.util.List;
+import java.util.Map;
+import org.junit.jupiter.api.Test;
+import org.wellwright.solver.model.Curve;
+import org.wellwright.solver.model.Model;
+import org.wellwright.solver.model.ModelDocument;
+import org.wellwright.solver.model.Parameter;
+import org.wellwright.solver.pair.Body;
+import org.wellwright.solver.pair.BodyMass;
+import org.wellwright.solver.pair.PairSystem;
+import org.wellwright.solver.potential.Argument;
+import org.wellwright.solver.potential.FamilyTerm;
+import org.wellwright.solver.potential.FormulaTerm;
+import org.wellwright.solver.potential.Term;
+import org.wellwright.solver.potential.TermFrame;
+import org.wellwright.solver.units.ExactNumber;
+
+/** Derivatives by smooth parameters, masses, range ends, well radii and walls, through the registered solver. */
+class MovingEdgesTest {
+    private static final RegisteredSolver SOLVER = new RegisteredSolver();
+
+    private static Term formula(String name, String text) {
+        return new FormulaTerm(TermFrame.named(name), text, Map.of());
+    }
+
+    private static ModelDocument of(List<Parameter> pool, Curve curve) {
+        return document("atomic", hydrogens(), pool, List.of(Model.of("m", List.of(curve))), List.of(), List.of());
+    }
+
+    private static int compare(ModelDocument document) {
+        return PoolGradients.assertAgreeWithDifferences(
+                document, List.of(level("H", 0, 0), level("H", 0, 2), level("H", 1, 1)), SOLVER, 3e-3, 1e-5);
+    }
+
+    @Test
+    void smoothFormulaAndReducedMass() {
+        Body light = new Body("", new BodyMass.FromParameter("light"), ExactNumber.ONE, -1);
+        Body heavy = new Body("", new BodyMass.FromParameter("heavy"), ExactNumber.ONE, -1);
+        List<Parameter> pool = List.of(
+                fixed("depth", "hartree", "6"),
+                fixed("width", "bohr", "3"),
+                fixed("light", "m_e", "1.5"),
+                fixed("heavy", "m_e", "4"));
+        Curve curve = Curve.of("ground", List.of(formula("f", "-depth*exp(-(r/width)^2)")));
+        ModelDocument document = document(
+                "atomic",
+                List.of(PairSystem.of("H", light, heavy)),
+                pool,
+                List.of(Model.of("m", List.of(curve))),
+                List.of(),
+                List.of());
+        assertThat(compare(document)).isEqualTo(12);
+    }
+
+    @Test
+    void endsOfARange() {
+        List<Parameter> pool =
+                List.of(fixed("k", "hartree/bohr^2", "0.5"), fixed("a", "bohr", "0.7"), fixed("b", "bohr", "2.9"));
+        Term well = formula("well", "0.1*r - 6")
+                .withFrame(TermFrame.named("well").withRange(Argument.named("a"), Argument.named("b")));
+        Curve curve = Curve.of("ground", List.of(formula("harmonic", "k*r^2/2"), well));
+        assertThat(compare(of(pool, curve))).isEqualTo(9);
+    }
+
+    @Test
+    void radiusOfASquareWell() {
+        List<Parameter> pool = List.of(fixed("V", "hartree", "10"), fixed("R", "bohr", "2.5"));
+        Term well = new FamilyTerm(
+                TermFrame.named("well"),
+                "square-well",
+                Map.of("depth", Argument.named("V"), "radius", Argument.named("R")));
+        assertThat(compare(of(pool, Curve.of("ground", List.of(well))))).isEqualTo(6);
+    }
+
+    @Test
+    void hardWalls() {
+        List<Parameter> pool =
+                List.of(fixed("k", "hartree bohr", "1"), fixed("inner", "bohr", "0.4"), fixed("outer", "bohr", "6"));
+        Curve curve = Curve.of("ground", List.of(formula("c", "-k/r")))
+                .withInnerWall(Argument.named("inner"))
+                .withOuterWall(Argument.named("outer"));
+        assertThat(compare(of(pool, curve))).isEqualTo(9);
+    }
+}
