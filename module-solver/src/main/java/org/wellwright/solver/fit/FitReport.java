@@ -12,7 +12,6 @@ import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.model.ModelError;
 import org.wellwright.solver.model.PoolNumber;
 import org.wellwright.solver.model.Weighting;
-import org.wellwright.solver.radial.SolveMonitor;
 
 /**
  * Turns the end of a search into a {@link FitResult}: parameters with σ, rows, predictions with propagated σ, remarks.
@@ -23,8 +22,7 @@ final class FitReport {
     private final DataModel model;
     private final FitObjective.Setup setup;
     private final Reweighting search;
-    private final SpectrumSource source;
-    private final SolveMonitor monitor;
+    private final SolvedPoints solved;
     private final List<Problem> remarks;
     private final double[] x;
     private final double[] values;
@@ -36,16 +34,14 @@ final class FitReport {
             DataModel model,
             FitObjective.Setup setup,
             Reweighting search,
-            SpectrumSource source,
-            SolveMonitor monitor,
+            SolvedPoints solved,
             List<Problem> remarks) {
         this.request = request;
         this.assembly = assembly;
         this.model = model;
         this.setup = setup;
         this.search = search;
-        this.source = source;
-        this.monitor = monitor;
+        this.solved = solved;
         this.remarks = remarks;
         this.x = search.point();
         this.values = setup.poolValues(x);
@@ -58,7 +54,7 @@ final class FitReport {
     }
 
     FitResult result() {
-        LevelTable table = LevelTable.solve(assembly, ModelFit.allKeys(request), values, source, monitor);
+        LevelTable table = solved.at(values, ModelFit.allKeys(request));
         List<Quantity> quantities = setup.data().stream()
                 .map(datum -> model.quantity(datum, table, values))
                 .toList();

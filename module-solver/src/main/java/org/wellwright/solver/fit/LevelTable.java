@@ -2,12 +2,14 @@ package org.wellwright.solver.fit;
 
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.Collections;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.TreeSet;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.WellwrightException;
 import org.wellwright.solver.model.AssembledProblem;
@@ -50,7 +52,11 @@ final class LevelTable {
 
     private record ChannelPlace(String system, String curve, ChannelKey channel) {}
 
-    private record Wanted(ChannelPlace place, int count, AssembledProblem problem) {}
+    private record Wanted(ChannelPlace place, Set<Integer> indices, AssembledProblem problem) {
+        int count() {
+            return Collections.max(indices) + 1;
+        }
+    }
 
     private LevelTable(int numbers) {
         this.numbers = numbers;
@@ -64,12 +70,14 @@ final class LevelTable {
             SpectrumSource source,
             SolveMonitor monitor) {
         LevelTable table = new LevelTable(values.length);
-        Map<ChannelPlace, Integer> counts = new LinkedHashMap<>();
+        Map<ChannelPlace, Set<Integer>> indices = new LinkedHashMap<>();
         for (LevelKey key : keys) {
-            counts.merge(new ChannelPlace(key.system(), key.curve(), key.channel()), key.index() + 1, Math::max);
+            indices.computeIfAbsent(
+                            new ChannelPlace(key.system(), key.curve(), key.channel()), place -> new TreeSet<>())
+                    .add(key.index());
         }
         List<Wanted> wanted = new ArrayList<>();
-        for (Map.Entry<ChannelPlace, Integer> entry : counts.entrySet()) {
+        for (Map.Entry<ChannelPlace, Set<Integer>> entry : indices.entrySet()) {
             ChannelPlace place = entry.getKey();
             try {
                 AssembledProblem problem = assembly.problem(place.system(), place.curve(), place.channel(), values);
@@ -97,6 +105,11 @@ final class LevelTable {
             }
         }
         return used;
+    }
+
+    /** Whether it has an entry for every one of these keys. */
+    boolean covers(Collection<LevelKey> keys) {
+        return entries.keySet().containsAll(keys);
     }
 
     /** The entry of a key that was asked for. */
@@ -130,17 +143,17 @@ final class LevelTable {
                         wanted.get(i),
                         source.solve(List.of(questions.get(i)), monitor).get(0));
             } catch (WellwrightException fault) {
-                fail(wanted.get(i).place(), wanted.get(i).count(), fault.problem());
+                fail(wanted.get(i).place(), wanted.get(i).indices(), fault.problem());
             }
         }
     }
 
     private void record(Wanted wanted, Spectrum spectrum) {
-        for (int index = 0; index < wanted.count(); index++) {
+        for (int index : wanted.indices()) {
             entries.put(wanted.problem().key(index), missing(wanted, spectrum, index));
         }
         for (LevelOutcome outcome : spectrum.outcomes()) {
-            if (outcome.index() >= wanted.count()) {
+            if (!wanted.indices().contains(outcome.index())) {
                 continue;
             }
             LevelKey key = wanted.problem().key(outcome.index());
@@ -170,8 +183,8 @@ final class LevelTable {
         return new Entry(Double.NaN, null, Double.NaN, problem);
     }
 
-    private void fail(ChannelPlace place, int count, Problem problem) {
-        for (int index = 0; index < count; index++) {
+    private void fail(ChannelPlace place, Set<Integer> indices, Problem problem) {
+        for (int index : indices) {
             LevelKey key = new LevelKey(place.system(), place.curve(), place.channel(), index);
             entries.put(key, new Entry(Double.NaN, null, Double.NaN, problem));
         }

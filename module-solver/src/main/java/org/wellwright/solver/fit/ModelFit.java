@@ -28,21 +28,21 @@ public final class ModelFit {
 
     private final FitRequest request;
     private final ModelDocument document;
-    private final SpectrumSource source;
     private final SolveMonitor monitor;
     private final Assembly assembly;
     private final DataModel model;
     private final List<PoolNumber> numbers;
     private final List<Problem> remarks = new ArrayList<>();
+    private final SolvedPoints solved;
 
     private ModelFit(FitRequest request, SpectrumSource source, SolveMonitor monitor) {
         this.request = request;
         this.document = request.document();
-        this.source = source;
         this.monitor = monitor;
         this.assembly = Assembly.of(document, request.model());
         this.model = new DataModel(assembly);
         this.numbers = assembly.pool().numbers();
+        this.solved = new SolvedPoints(assembly, source, monitor);
     }
 
     /**
@@ -82,7 +82,7 @@ public final class ModelFit {
                     "",
                     "start closer to the solution or allow more steps"));
         }
-        return new FitReport(request, assembly, model, setup, search, source, monitor, remarks).result();
+        return new FitReport(request, assembly, model, setup, search, solved, remarks).result();
     }
 
     /** Chooses the rows and the free numbers. */
@@ -194,7 +194,7 @@ public final class ModelFit {
             throw new CancellationException("the fit was cancelled");
         }
         List<Datum> counted = setup.rows().stream().map(setup.data()::get).toList();
-        LevelTable table = LevelTable.solve(assembly, DataModel.keys(counted), values, source, monitor);
+        LevelTable table = solved.at(values, DataModel.keys(counted));
         List<Quantity> quantities = new ArrayList<>();
         for (Datum datum : counted) {
             quantities.add(model.quantity(datum, table, values));
