@@ -18,12 +18,14 @@ public record Interval(double lower, double upper) {
     /** The number 0. */
     public static final Interval ZERO = new Interval(0, 0);
 
-    /** Checks the order of the ends. */
+    /** Checks the order of the ends; a negative zero becomes 0. */
     public Interval {
         if (!(lower <= upper)) {
             throw new IllegalArgumentException(
                     "an interval needs lower <= upper, got [%s, %s]".formatted(lower, upper));
         }
+        lower += 0.0; // makes −0 a 0
+        upper += 0.0;
     }
 
     /** The interval that holds one number. */

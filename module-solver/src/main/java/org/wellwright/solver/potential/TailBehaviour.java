@@ -39,10 +39,15 @@ public record TailBehaviour(double limit, double power, double coefficient, bool
         return known && coefficient < 0 && power >= 0;
     }
 
+    /** Whether V tends to a finite limit. */
+    private boolean hasLimit() {
+        return coefficient == 0 || power < 0;
+    }
+
     /** The behaviour of the sum of two potentials. */
     public TailBehaviour plus(TailBehaviour other) {
         boolean both = known && other.known;
-        double sumOfLimits = limit + other.limit;
+        double sumOfLimits = hasLimit() && other.hasLimit() ? limit + other.limit : 0;
         if (power == other.power) {
             double sum = coefficient + other.coefficient;
             boolean cancelled = sum == 0 && coefficient != 0;

@@ -1,11 +1,14 @@
 package org.wellwright.solver.potential.formula;
 
+import java.util.Arrays;
+
 /**
  * Evaluates a program at many radii, one operation at a time over blocks of radii, with the bits of
  * {@link BoundFormula#value}. The registers of results that are no longer needed are used again.
  */
 final class BlockPass {
     private static final int BLOCK = 128;
+    private static final long EXPONENT = 0x7ffL << 52;
 
     private final Program program;
     private final int[] register;
@@ -53,19 +56,19 @@ final class BlockPass {
      *     infinity must be computed again
      */
     boolean run(double[] radii, double[] into, int count) {
+        if (!program.varies(program.root())) {
+            Arrays.fill(into, 0, count, program.constant(program.root()));
+            return true;
+        }
         int block = Math.min(BLOCK, count);
-        double[][] frame = new double[registers][block];
+        double[][] frame = new double[registers + 1][block];
         boolean good = true;
         for (int start = 0; start < count; start += block) {
             int n = Math.min(block, count - start);
             good &= block(frame, radii, start, n);
             double[] result = frame[register[program.root()]];
             System.arraycopy(result, 0, into, start, n);
-            double check = 0;
-            for (int i = 0; i < n; i++) {
-                check += result[i] * 0; // NaN as soon as one value is not finite
-            }
-            good &= check == 0;
+            good &= allFinite(result, n);
         }
         return good;
     }
@@ -87,26 +90,27 @@ final class BlockPass {
                 continue;
             }
             int right = graph.right(i);
+            if (operation == Operation.DIVIDE && program.varies(right) && graph.operation(right) != Operation.RADIUS) {
+                good &= allFinite(frame[register[right]], n);
+            }
             if (!program.varies(right)) {
-                withConstant(operation, frame[register[left]], program.constant(right), out, n);
+                withConstant(operation, frame[register[left]], program.constant(right), out, n, frame[registers]);
             } else if (!program.varies(left)) {
                 constantWith(operation, program.constant(left), frame[register[right]], out, n);
             } else {
                 binary(operation, frame[register[left]], frame[register[right]], out, n);
             }
-            if (operation == Operation.DIVIDE) {
-                good &= noZero(out, n);
-            }
         }
         return good;
     }
 
-    private static boolean noZero(double[] quotients, int n) {
-        boolean good = true;
+    private static boolean allFinite(double[] x, int n) {
+        long overflow = 0;
         for (int i = 0; i < n; i++) {
-            good &= quotients[i] != 0;
+            // The exponent of an infinity or a NaN is all ones; one more carries into the sign.
+            overflow |= (Double.doubleToRawLongBits(x[i]) & EXPONENT) + (1L << 52);
         }
-        return good;
+        return overflow >= 0;
     }
 
     private static void unary(Operation operation, double[] a, double[] out, int n) {
@@ -169,7 +173,8 @@ final class BlockPass {
         }
     }
 
-    private static void withConstant(Operation operation, double[] a, double c, double[] out, int n) {
+    private static void withConstant(
+            Operation operation, double[] a, double c, double[] out, int n, double[] scratch) {
         switch (operation) {
             case ADD -> {
                 for (int i = 0; i < n; i++) {
@@ -193,7 +198,7 @@ final class BlockPass {
             }
             case POWER -> {
                 if (Real.isSmallInteger(c)) {
-                    integerPower(a, (int) c, out, n);
+                    integerPower(a, (int) c, out, n, scratch);
                 } else {
                     for (int i = 0; i < n; i++) {
                         out[i] = Math.pow(a[i], c);
@@ -208,15 +213,28 @@ final class BlockPass {
         }
     }
 
-    private static void integerPower(double[] a, int power, double[] out, int n) {
-        if (power == 2) {
-            for (int i = 0; i < n; i++) {
-                out[i] = a[i] * a[i];
+    /** {@link Real#integerPower} one squaring at a time for the whole block. */
+    private static void integerPower(double[] a, int power, double[] out, int n, double[] square) {
+        System.arraycopy(a, 0, square, 0, n);
+        boolean started = false;
+        for (int left = Math.abs(power); left != 0; left >>= 1) {
+            if ((left & 1) != 0) {
+                if (started) {
+                    binary(Operation.MULTIPLY, out, square, out, n);
+                } else {
+                    System.arraycopy(square, 0, out, 0, n);
+                    started = true;
+                }
             }
-            return;
+            if (left != 1) {
+                binary(Operation.MULTIPLY, square, square, square, n);
+            }
         }
-        for (int i = 0; i < n; i++) {
-            out[i] = Real.integerPower(a[i], power);
+        if (!started) {
+            Arrays.fill(out, 0, n, 1);
+        }
+        if (power < 0) {
+            constantWith(Operation.DIVIDE, 1, out, out, n);
         }
     }
 

@@ -65,6 +65,9 @@ final class BoundFormula implements TermEvaluator {
 
     @Override
     public double value(double r) {
+        if (!program.varies(program.root())) {
+            return program.constant(program.root());
+        }
         Graph graph = program.graph();
         double[] v = program.frame();
         boolean good = true;
@@ -76,8 +79,9 @@ final class BoundFormula implements TermEvaluator {
                 continue;
             }
             double a = v[graph.left(i)];
-            v[i] = Real.apply(operation, a, operation.arity() == 2 ? v[graph.right(i)] : 0);
-            good &= operation != Operation.DIVIDE || v[i] != 0 || a == 0;
+            double b = operation.arity() == 2 ? v[graph.right(i)] : 0;
+            v[i] = Real.apply(operation, a, b);
+            good &= operation != Operation.DIVIDE || Math.abs(b) <= Double.MAX_VALUE;
         }
         double result = v[program.root()];
         if (good && Math.abs(result) <= Double.MAX_VALUE) {

@@ -9,7 +9,7 @@ import java.util.List;
  */
 final class PowerLogSeries {
     /** How many terms are kept. */
-    static final int LENGTH = 12;
+    static final int LENGTH = 8;
 
     /** Order of nothing at all. */
     static final Order NONE = new Order(Double.NEGATIVE_INFINITY, 0);

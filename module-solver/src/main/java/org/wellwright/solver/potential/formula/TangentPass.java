@@ -32,7 +32,7 @@ final class TangentPass {
             double b = value[right];
             if (program.varies(i)) {
                 value[i] = Real.apply(operation, a, b);
-                good &= operation != Operation.DIVIDE || value[i] != 0 || a == 0;
+                good &= operation != Operation.DIVIDE || Math.abs(b) <= Double.MAX_VALUE;
             }
             double sum = tangent[left] == 0 ? 0 : Real.leftPartial(operation, a, b, value[i]) * tangent[left];
             if (operation.arity() == 2 && tangent[right] != 0) {
