@@ -12,13 +12,19 @@ public final class EvaluatorLaws {
     private EvaluatorLaws() {}
 
     /**
-     * dV/dr and ∂V/∂p agree with extrapolated central differences to 1e-9 of the largest over seeded radii in [low, high], away from break points.
+     * dV/dr and ∂V/∂p agree with extrapolated central differences to 1e-9 of the largest over seeded radii in [low,
+     * high], away from break points.
      *
      * @param family evaluators by parameter values
      * @param values where to differentiate
      */
     public static void derivativesAgreeWithDifferences(
-            Function<double[], TermEvaluator> family, double[] values, double low, double high, int points, Random random) {
+            Function<double[], TermEvaluator> family,
+            double[] values,
+            double low,
+            double high,
+            int points,
+            Random random) {
         TermEvaluator v = family.apply(values);
         for (int j = -1; j < v.parameterCount(); j++) {
             double[] exact = new double[points];
@@ -31,9 +37,7 @@ public final class EvaluatorLaws {
                     continue;
                 }
                 exact[i] = j < 0 ? v.slope(r) : v.parameterDerivative(j, r);
-                difference[i] = j < 0
-                        ? derivative(v::value, r, room)
-                        : parameterDifference(family, values, j, r, room);
+                difference[i] = j < 0 ? derivative(v::value, r, room) : parameterDifference(family, values, j, r, room);
                 largest = Math.max(largest, Math.abs(exact[i]));
             }
             assertThat(largest).isFinite();
@@ -51,7 +55,9 @@ public final class EvaluatorLaws {
         // A moving break point must not reach r.
         double step = 0.05 * size;
         for (BreakPoint point : family.apply(values).breakPoints()) {
-            double speed = point.radiusGradient().isEmpty() ? 0 : Math.abs(point.radiusGradient().get(j));
+            double speed = point.radiusGradient().isEmpty()
+                    ? 0
+                    : Math.abs(point.radiusGradient().get(j));
             step = speed == 0 ? step : Math.min(step, 0.3 * Math.abs(point.radius() - r) / speed);
         }
         return derivative(
@@ -72,7 +78,9 @@ public final class EvaluatorLaws {
         return least;
     }
 
-    /** Central differences with halved steps, extrapolated (Ridders 1982); the entry with the smallest change is taken. */
+    /**
+     * Central differences with halved steps, extrapolated (Ridders 1982); the entry with the smallest change is taken.
+     */
     public static double derivative(DoubleUnaryOperator f, double x, double step) {
         int n = 8;
         double[][] table = new double[n][n];
@@ -86,8 +94,8 @@ public final class EvaluatorLaws {
             for (int k = 1; k <= i; k++) {
                 double factor = Math.pow(4, k);
                 table[i][k] = (factor * table[i][k - 1] - table[i - 1][k - 1]) / (factor - 1);
-                double change = Math.max(
-                        Math.abs(table[i][k] - table[i][k - 1]), Math.abs(table[i][k] - table[i - 1][k - 1]));
+                double change =
+                        Math.max(Math.abs(table[i][k] - table[i][k - 1]), Math.abs(table[i][k] - table[i - 1][k - 1]));
                 if (change <= error) {
                     error = change;
                     best = table[i][k];
@@ -106,7 +114,11 @@ public final class EvaluatorLaws {
             double b = i % 10 == 0 ? Double.POSITIVE_INFINITY : a * (1 + Math.pow(10, -6 + 7 * random.nextDouble()));
             Interval bounds = v.enclose(a, b);
             for (int k = 0; k < samples; k++) {
-                double r = k == 0 ? a : b == Double.POSITIVE_INFINITY ? a * Math.pow(10, 4 * random.nextDouble()) : a + (b - a) * random.nextDouble();
+                double r = k == 0
+                        ? a
+                        : b == Double.POSITIVE_INFINITY
+                                ? a * Math.pow(10, 4 * random.nextDouble())
+                                : a + (b - a) * random.nextDouble();
                 double value = v.value(r);
                 double allowed = v.roundingBound(r);
                 if (Double.isNaN(value) || allowed == Double.POSITIVE_INFINITY) {
@@ -122,7 +134,8 @@ public final class EvaluatorLaws {
     /** values(…) gives the bits of value(…). */
     public static void blocksHaveTheBitsOfSingleValues(TermEvaluator v, double low, double high, Random random) {
         for (int n : new int[] {1, 7, 128, 300}) {
-            double[] radii = random.doubles(n).map(x -> low * Math.pow(high / low, x)).toArray();
+            double[] radii =
+                    random.doubles(n).map(x -> low * Math.pow(high / low, x)).toArray();
             double[] into = new double[n];
             v.values(radii, into, n);
             for (int i = 0; i < n; i++) {
@@ -139,7 +152,9 @@ public final class EvaluatorLaws {
         if (origin.known() && (origin.inverseSquare() != 0 || origin.coefficient() != 0)) {
             double r = 1e-8;
             double lead = origin.inverseSquare() / (r * r) + origin.coefficient() * Math.pow(r, origin.power());
-            assertThat(v.value(r) / lead).as("%s near the origin, %s", v.canonical(), origin).isCloseTo(1, org.assertj.core.api.Assertions.within(1e-3));
+            assertThat(v.value(r) / lead)
+                    .as("%s near the origin, %s", v.canonical(), origin)
+                    .isCloseTo(1, org.assertj.core.api.Assertions.within(1e-3));
         }
         TailBehaviour tail = v.tail();
         List<BreakPoint> breaks = v.breakPoints();
@@ -148,7 +163,9 @@ public final class EvaluatorLaws {
             double left = v.value(far) - tail.limit();
             double lead = tail.coefficient() == 0 ? 0 : tail.coefficient() * Math.pow(far, tail.power());
             double allowed = 1e-3 * Math.abs(lead) + 1e-13 * Math.abs(tail.limit()) + v.roundingBound(far) + 1e-280;
-            assertThat(Math.abs(left - lead)).as("%s far out, %s: %s", v.canonical(), tail, left).isLessThanOrEqualTo(allowed);
+            assertThat(Math.abs(left - lead))
+                    .as("%s far out, %s: %s", v.canonical(), tail, left)
+                    .isLessThanOrEqualTo(allowed);
         } else if (tail.known()) {
             double near = v.value(far / 10);
             double gain = v.value(far) == near ? near : v.value(far) - near; // both may overflow

@@ -19,7 +19,9 @@ class IntervalFunctionsTest {
     private static final DfpField FIELD = new DfpField(40);
 
     private static Dfp expm1(Dfp x) {
-        return x.abs().lessThan(FIELD.newDfp(1e-15)) ? x.add(x.multiply(x).divide(2)) : DfpMath.exp(x).subtract(1);
+        return x.abs().lessThan(FIELD.newDfp(1e-15))
+                ? x.add(x.multiply(x).divide(2))
+                : DfpMath.exp(x).subtract(1);
     }
 
     private static Dfp half(Dfp x, int sign) {
@@ -44,29 +46,48 @@ class IntervalFunctionsTest {
                 row("asin", -0.99, 0.99, DfpMath::asin, IntervalFunctions::asin),
                 row("acos", -0.99, 0.99, DfpMath::acos, IntervalFunctions::acos),
                 row("atan", -20, 20, DfpMath::atan, IntervalFunctions::atan),
-                row("x^7", -3, 3, x -> x.multiply(x).multiply(x).multiply(x).multiply(x).multiply(x).multiply(x), x -> IntervalFunctions.power(x, 7)),
+                row(
+                        "x^7",
+                        -3,
+                        3,
+                        x -> x.multiply(x)
+                                .multiply(x)
+                                .multiply(x)
+                                .multiply(x)
+                                .multiply(x)
+                                .multiply(x),
+                        x -> IntervalFunctions.power(x, 7)),
                 row("x^-2", 0.1, 3, x -> FIELD.getOne().divide(x.multiply(x)), x -> IntervalFunctions.power(x, -2)),
-                row("x^0.75", 0.01, 9, x -> x.sqrt().multiply(x.sqrt().sqrt()), x -> IntervalFunctions.power(x, Interval.of(0.75))));
+                row(
+                        "x^0.75",
+                        0.01,
+                        9,
+                        x -> x.sqrt().multiply(x.sqrt().sqrt()),
+                        x -> IntervalFunctions.power(x, Interval.of(0.75))));
     }
 
-    private static Arguments row(String name, double low, double high, UnaryOperator<Dfp> exact, UnaryOperator<Interval> function) {
+    private static Arguments row(
+            String name, double low, double high, UnaryOperator<Dfp> exact, UnaryOperator<Interval> function) {
         return Arguments.of(name, low, high, exact, function);
     }
 
     @ParameterizedTest(name = "{0}")
     @MethodSource("functions")
-    void containsTheExactValueAndIsTight(String name, double low, double high, UnaryOperator<Dfp> exact, UnaryOperator<Interval> function) {
+    void containsTheExactValueAndIsTight(
+            String name, double low, double high, UnaryOperator<Dfp> exact, UnaryOperator<Interval> function) {
         Random random = new Random(7);
         for (int i = 0; i < 400; i++) {
             double x = low + (high - low) * random.nextDouble();
             Interval point = function.apply(Interval.of(x));
             Dfp value = exact.apply(FIELD.newDfp(x));
-            assertThat(FIELD.newDfp(point.lower()).greaterThan(value) || FIELD.newDfp(point.upper()).lessThan(value))
+            assertThat(FIELD.newDfp(point.lower()).greaterThan(value)
+                            || FIELD.newDfp(point.upper()).lessThan(value))
                     .as("%s(%s) = %s in %s", name, x, value, point)
                     .isFalse();
             assertThat(point.width()).isLessThanOrEqualTo(20 * Math.ulp(value.toDouble()) + 1e-300);
             Interval wide = function.apply(new Interval(x, Math.min(high, x + random.nextDouble())));
-            assertThat(wide.lower() <= point.upper() && wide.upper() >= point.lower()).isTrue();
+            assertThat(wide.lower() <= point.upper() && wide.upper() >= point.lower())
+                    .isTrue();
             double y = wideSample(x, high, random);
             Interval around = function.apply(new Interval(x, y));
             double inside = x + (y - x) * random.nextDouble();
@@ -93,7 +114,8 @@ class IntervalFunctionsTest {
     void domainsAreCutOrGivenUp() {
         assertThat(IntervalFunctions.ln(new Interval(-1, 1)).lower()).isEqualTo(Double.NEGATIVE_INFINITY);
         assertThat(IntervalFunctions.ln(new Interval(-2, -1))).isEqualTo(Interval.ENTIRE);
-        assertThat(IntervalFunctions.sqrt(new Interval(-4, 4))).satisfies(x -> assertThat(x.lower()).isZero());
+        assertThat(IntervalFunctions.sqrt(new Interval(-4, 4)))
+                .satisfies(x -> assertThat(x.lower()).isZero());
         assertThat(IntervalFunctions.tan(new Interval(1, 2))).isEqualTo(Interval.ENTIRE);
         assertThat(IntervalFunctions.sin(new Interval(0, 1e9))).isEqualTo(new Interval(-1, 1));
         assertThat(IntervalFunctions.power(new Interval(-1, 2), -1)).isEqualTo(Interval.ENTIRE);

@@ -51,7 +51,9 @@ class IntervalTest {
             assertThat(contains(x.times(y), p.multiply(q))).as("%s * %s", x, y).isTrue();
             assertThat(contains(x.times(b), p.multiply(q))).as("%s * %s", x, b).isTrue();
             if (b != 0) {
-                assertThat(contains(x.over(y), p.divide(q, PRECISE))).as("%s / %s", x, y).isTrue();
+                assertThat(contains(x.over(y), p.divide(q, PRECISE)))
+                        .as("%s / %s", x, y)
+                        .isTrue();
             }
         }
     }
@@ -85,7 +87,9 @@ class IntervalTest {
 
     @Test
     void rejectsEndsOutOfOrder() {
-        assertThatThrownBy(() -> new Interval(2, 1)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("[2.0, 1.0]");
+        assertThatThrownBy(() -> new Interval(2, 1))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("[2.0, 1.0]");
         assertThatThrownBy(() -> new Interval(Double.NaN, 1)).isInstanceOf(IllegalArgumentException.class);
     }
 }

@@ -66,7 +66,8 @@ class TermCombinationTest {
     }
 
     private static TermEvaluator sum(double[] p) {
-        return PotentialSum.of(List.of(formula("-a/r+b*step(r-c)", p[0], p[1], p[2]), formula("d*r", p[3]), formula("1/r^2")));
+        return PotentialSum.of(
+                List.of(formula("-a/r+b*step(r-c)", p[0], p[1], p[2]), formula("d*r", p[3]), formula("1/r^2")));
     }
 
     @Test
@@ -76,7 +77,9 @@ class TermCombinationTest {
         assertThat(v.parameterCount()).isEqualTo(4);
         assertThat(v.value(2)).isEqualTo(-1 + 0.5 + 6 + 0.25);
         assertThat(v.parameterDerivative(3, 2)).isEqualTo(2);
-        assertThat(v.breakPoints()).singleElement().satisfies(point -> assertThat(point.radiusGradient()).containsExactly(0.0, 0.0, 1.0, 0.0));
+        assertThat(v.breakPoints())
+                .singleElement()
+                .satisfies(point -> assertThat(point.radiusGradient()).containsExactly(0.0, 0.0, 1.0, 0.0));
         assertThat(v.origin()).isEqualTo(new OriginBehaviour(1, -1, -2, true));
         assertThat(v.tail()).isEqualTo(new TailBehaviour(0, 1, 3, true));
         EvaluatorLaws.derivativesAgreeWithDifferences(TermCombinationTest::sum, p, 0.2, 9, 200, new Random(4));
@@ -97,8 +100,11 @@ class TermCombinationTest {
 
     @Test
     void equalTextsMeanEqualBits() {
-        assertThat(sum(new double[] {2, 0.5, 1.5, 3}).canonical()).isEqualTo(sum(new double[] {2, 0.5, 1.5, 3}).canonical());
-        assertThat(sum(new double[] {2, 0.5, 1.5, 3}).canonical()).isNotEqualTo(sum(new double[] {2, 0.5, 1.5, 3.0000000000000004}).canonical());
+        assertThat(sum(new double[] {2, 0.5, 1.5, 3}).canonical())
+                .isEqualTo(sum(new double[] {2, 0.5, 1.5, 3}).canonical());
+        assertThat(sum(new double[] {2, 0.5, 1.5, 3}).canonical())
+                .isNotEqualTo(
+                        sum(new double[] {2, 0.5, 1.5, 3.0000000000000004}).canonical());
     }
 
     @Test
@@ -106,13 +112,21 @@ class TermCombinationTest {
         FormulaTerm term = new FormulaTerm(TermFrame.named("core"), "-a/r", Map.of("a", Argument.of(2)));
         assertThat(term.argument("a")).isEqualTo(Argument.of(2));
         assertThat(term.argument("b")).isEqualTo(Argument.named("b"));
-        FamilyTerm family = new FamilyTerm(TermFrame.named("core"), "coulomb", Map.of()).withArgument("strength", Argument.named("Z"));
+        FamilyTerm family = new FamilyTerm(TermFrame.named("core"), "coulomb", Map.of())
+                .withArgument("strength", Argument.named("Z"));
         assertThat(family.arguments()).containsEntry("strength", Argument.named("Z"));
-        assertThat(family.withFrame(family.frame().withEnabled(false)).frame().enabled()).isFalse();
-        assertThatThrownBy(() -> new RangedTerm(formula("r"), 1, 3, 2)).isInstanceOf(IllegalArgumentException.class).hasMessageContaining("3.0, 2.0");
-        assertThat(ChannelFilter.orbitals(1, 2).accepts(ChannelFacts.ofOrbital(1))).isTrue();
-        assertThat(ChannelFilter.orbitals(1, 2).accepts(ChannelFacts.ofOrbital(3))).isFalse();
-        assertThat(new ChannelFilter(0, 9, List.of(3), List.of()).accepts(new ChannelFacts(1, 3, 1))).isTrue();
-        assertThat(new ChannelFilter(0, 9, List.of(3), List.of()).accepts(ChannelFacts.ofOrbital(1))).isFalse();
+        assertThat(family.withFrame(family.frame().withEnabled(false)).frame().enabled())
+                .isFalse();
+        assertThatThrownBy(() -> new RangedTerm(formula("r"), 1, 3, 2))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessageContaining("3.0, 2.0");
+        assertThat(ChannelFilter.orbitals(1, 2).accepts(ChannelFacts.ofOrbital(1)))
+                .isTrue();
+        assertThat(ChannelFilter.orbitals(1, 2).accepts(ChannelFacts.ofOrbital(3)))
+                .isFalse();
+        assertThat(new ChannelFilter(0, 9, List.of(3), List.of()).accepts(new ChannelFacts(1, 3, 1)))
+                .isTrue();
+        assertThat(new ChannelFilter(0, 9, List.of(3), List.of()).accepts(ChannelFacts.ofOrbital(1)))
+                .isFalse();
     }
 }

@@ -173,8 +173,7 @@ final class BlockPass {
         }
     }
 
-    private static void withConstant(
-            Operation operation, double[] a, double c, double[] out, int n, double[] scratch) {
+    private static void withConstant(Operation operation, double[] a, double c, double[] out, int n, double[] scratch) {
         switch (operation) {
             case ADD -> {
                 for (int i = 0; i < n; i++) {

@@ -45,9 +45,20 @@ class FamilyLawsTest {
 
     @Test
     void theLookupFindsEveryFamily() {
-        List<String> ids = FamilyCatalogue.families().stream().map(PotentialFamily::id).toList();
+        List<String> ids =
+                FamilyCatalogue.families().stream().map(PotentialFamily::id).toList();
         assertThat(ids).isSorted().doesNotHaveDuplicates();
-        assertThat(ids).contains("coulomb", "yukawa", "morse", "lennard-jones", "harmonic", "linear", "power", "woods-saxon", "square-well");
+        assertThat(ids)
+                .contains(
+                        "coulomb",
+                        "yukawa",
+                        "morse",
+                        "lennard-jones",
+                        "harmonic",
+                        "linear",
+                        "power",
+                        "woods-saxon",
+                        "square-well");
         assertThatThrownBy(() -> FamilyCatalogue.require("coulom"))
                 .isInstanceOf(InvalidModelException.class)
                 .hasMessageContaining("'coulom' is not known; use one of ")
@@ -58,9 +69,12 @@ class FamilyLawsTest {
     @MethodSource("families")
     void isDescribed(PotentialFamily family) {
         assertThat(family.id()).matches("[a-z0-9-]+");
-        assertThat(List.of(family.displayName(), family.formula(), family.validity(), family.source())).noneMatch(String::isBlank);
+        assertThat(List.of(family.displayName(), family.formula(), family.validity(), family.source()))
+                .noneMatch(String::isBlank);
         assertThat(family.parameters()).isNotEmpty();
-        assertThat(family.parameters().stream().map(FamilyParameter::name)).doesNotHaveDuplicates().allMatch(name -> name.matches("[a-zA-Z][a-zA-Z0-9]*"));
+        assertThat(family.parameters().stream().map(FamilyParameter::name))
+                .doesNotHaveDuplicates()
+                .allMatch(name -> name.matches("[a-zA-Z][a-zA-Z0-9]*"));
         for (FamilyParameter parameter : family.parameters()) {
             assertThat(parameter.meaning()).isNotBlank();
             assertThat(family.formula()).as("symbol of %s", parameter.name()).contains(parameter.symbol());
@@ -74,7 +88,8 @@ class FamilyLawsTest {
         for (int i = 0; i < 10; i++) {
             double[] values = values(family, random);
             double length = length(family, values);
-            EvaluatorLaws.derivativesAgreeWithDifferences(p -> family.bind(p, CHANNEL), values, 0.2 * length, 4 * length, 100, random);
+            EvaluatorLaws.derivativesAgreeWithDifferences(
+                    p -> family.bind(p, CHANNEL), values, 0.2 * length, 4 * length, 100, random);
         }
     }
 
@@ -97,7 +112,9 @@ class FamilyLawsTest {
                 most = Math.max(most, value);
             }
             double slack = 0.02 * (most - least) + 1e-12 * Math.max(Math.abs(least), Math.abs(most));
-            assertThat(v.enclose(a, b).width()).as("%s on [%s, %s]", v.canonical(), a, b).isLessThanOrEqualTo(most - least + slack);
+            assertThat(v.enclose(a, b).width())
+                    .as("%s on [%s, %s]", v.canonical(), a, b)
+                    .isLessThanOrEqualTo(most - least + slack);
         }
     }
 

@@ -12,7 +12,10 @@ import org.wellwright.solver.potential.ChannelFacts;
 import org.wellwright.solver.potential.FamilyCatalogue;
 import org.wellwright.solver.potential.TermEvaluator;
 
-/** Rounding bounds of the families in closed form against the arbitrary-precision arithmetic of Apache Commons Math at 50 digits. */
+/**
+ * Rounding bounds of the families in closed form against the arbitrary-precision arithmetic of Apache Commons Math at
+ * 50 digits.
+ */
 class FamilyRoundingTest {
     private static final DfpField FIELD = new DfpField(50);
 
@@ -34,19 +37,49 @@ class FamilyRoundingTest {
 
     enum Case {
         COULOMB("coulomb", (p, r) -> p[0].negate().divide(r), 2),
-        YUKAWA("yukawa", (p, r) -> p[0].negate().multiply(DfpMath.exp(p[1].multiply(r).negate())).divide(r), 2, 0.3),
-        MORSE("morse", (p, r) -> {
-            Dfp y = DfpMath.exp(p[1].multiply(r.subtract(p[2])).negate());
-            return p[0].multiply(y).multiply(y.subtract(2));
-        }, 0.7, 1.3, 2.1),
-        LENNARD_JONES("lennard-jones", (p, r) -> {
-            Dfp s = integerPower(p[1].divide(r), 6);
-            return p[0].multiply(4).multiply(s).multiply(s.subtract(1));
-        }, 0.3, 1.7),
-        HARMONIC("harmonic", (p, r) -> integerPower(r.subtract(p[1]), 2).multiply(p[0]).divide(2), 0.7, 1.1),
+        YUKAWA(
+                "yukawa",
+                (p, r) -> p[0].negate()
+                        .multiply(DfpMath.exp(p[1].multiply(r).negate()))
+                        .divide(r),
+                2,
+                0.3),
+        MORSE(
+                "morse",
+                (p, r) -> {
+                    Dfp y = DfpMath.exp(p[1].multiply(r.subtract(p[2])).negate());
+                    return p[0].multiply(y).multiply(y.subtract(2));
+                },
+                0.7,
+                1.3,
+                2.1),
+        LENNARD_JONES(
+                "lennard-jones",
+                (p, r) -> {
+                    Dfp s = integerPower(p[1].divide(r), 6);
+                    return p[0].multiply(4).multiply(s).multiply(s.subtract(1));
+                },
+                0.3,
+                1.7),
+        HARMONIC(
+                "harmonic",
+                (p, r) -> integerPower(r.subtract(p[1]), 2).multiply(p[0]).divide(2),
+                0.7,
+                1.1),
         LINEAR("linear", (p, r) -> p[0].multiply(r).add(p[1]), 0.7, -1.1),
-        POWER("power", (p, r) -> p[0].multiply(DfpMath.exp(DfpMath.log(r.divide(p[1])).multiply(p[2]))), 0.7, 1.1, -0.37),
-        WOODS_SAXON("woods-saxon", (p, r) -> p[0].negate().divide(FIELD.getOne().add(DfpMath.exp(r.subtract(p[1]).divide(p[2])))), 50, 5, 0.6);
+        POWER(
+                "power",
+                (p, r) -> p[0].multiply(DfpMath.exp(DfpMath.log(r.divide(p[1])).multiply(p[2]))),
+                0.7,
+                1.1,
+                -0.37),
+        WOODS_SAXON(
+                "woods-saxon",
+                (p, r) -> p[0].negate()
+                        .divide(FIELD.getOne().add(DfpMath.exp(r.subtract(p[1]).divide(p[2])))),
+                50,
+                5,
+                0.6);
 
         private final String id;
         private final Exact exact;

@@ -13,7 +13,9 @@ import org.wellwright.solver.potential.FormulaText;
 
 class BreakPointTest {
     private static List<BreakPoint> of(String text) {
-        return FormulaText.parse(text).bind(Map.of("R", 3.0, "a", 2.0, "V", 5.0), ChannelFacts.ofOrbital(0)).breakPoints();
+        return FormulaText.parse(text)
+                .bind(Map.of("R", 3.0, "a", 2.0, "V", 5.0), ChannelFacts.ofOrbital(0))
+                .breakPoints();
     }
 
     @Test
@@ -35,15 +37,20 @@ class BreakPointTest {
 
     @Test
     void stepsThatMoveTogetherShareOneBreakPoint() {
-        assertThat(of("V*step(r-R)+2*V*step(R-r)")).containsExactly(new BreakPoint(3, Kind.JUMP, -5, List.of(0.0, 1.0)));
-        assertThat(of("V*step(r-R)+2*V*step(3-r)")).as("only one of the two moves").hasSize(2);
+        assertThat(of("V*step(r-R)+2*V*step(R-r)"))
+                .containsExactly(new BreakPoint(3, Kind.JUMP, -5, List.of(0.0, 1.0)));
+        assertThat(of("V*step(r-R)+2*V*step(3-r)"))
+                .as("only one of the two moves")
+                .hasSize(2);
     }
 
     @Test
     void crossingsOfCurvedArgumentsAreFound() {
         assertThat(of("abs(r^2-2)").get(0).radius()).isCloseTo(Math.sqrt(2), within(1e-15));
         assertThat(of("min(exp(-r),0.1)").get(0).radius()).isCloseTo(Math.log(10), within(1e-14));
-        assertThat(of("step(sin(r))").size()).as("endless crossings are bounded").isBetween(10, 200);
+        assertThat(of("step(sin(r))").size())
+                .as("endless crossings are bounded")
+                .isBetween(10, 200);
         List<BreakPoint> two = of("max(0,a-(r-3)^2)");
         assertThat(two).hasSize(2);
         assertThat(two.get(0).radius()).isCloseTo(3 - Math.sqrt(2), within(1e-14));

@@ -12,7 +12,8 @@ class FormulaLawsTest {
     private static final double[] VALUES = {0.7, 1.3};
 
     private static BoundFormula bound(Graph graph) {
-        return new BoundFormula(graph, java.util.Arrays.copyOf(VALUES, graph.names().size()), 1);
+        return new BoundFormula(
+                graph, java.util.Arrays.copyOf(VALUES, graph.names().size()), 1);
     }
 
     private static boolean isFinite(Dfp x) {
@@ -37,13 +38,18 @@ class FormulaLawsTest {
             if (!isFinite(exact)) {
                 continue;
             }
-            double error = exact.subtract(PreciseEvaluation.FIELD.newDfp(value)).abs().toDouble();
-            assertThat(error).as("%s at %s: %s against %s", v.canonical(), r, value, exact).isLessThanOrEqualTo(bound);
+            double error =
+                    exact.subtract(PreciseEvaluation.FIELD.newDfp(value)).abs().toDouble();
+            assertThat(error)
+                    .as("%s at %s: %s against %s", v.canonical(), r, value, exact)
+                    .isLessThanOrEqualTo(bound);
             checked++;
             tightness += bound <= 100 * error + 1e-14 * Math.abs(value) ? 1 : 0;
         }
         assertThat(checked).isGreaterThan(1_300);
-        assertThat(tightness / checked).as("share of bounds that are not absurdly wide").isGreaterThan(0.5);
+        assertThat(tightness / checked)
+                .as("share of bounds that are not absurdly wide")
+                .isGreaterThan(0.5);
     }
 
     @Test
@@ -141,8 +147,10 @@ class FormulaLawsTest {
         BoundFormula bump = bound(FormulaParser.parse("exp((r-7)/0.6)/(1+exp((r-7)/0.6))^2"));
         for (double r : new double[] {100, 220, 300, 430, 440, 5_000}) {
             double z = (r - 7) / 0.6;
-            assertThat(bump.value(r)).isCloseTo(Math.exp(-z), org.assertj.core.api.Assertions.within(1e-12 * Math.exp(-z)));
-            assertThat(bump.slope(r)).isCloseTo(-Math.exp(-z) / 0.6, org.assertj.core.api.Assertions.within(1e-12 * Math.exp(-z)));
+            assertThat(bump.value(r))
+                    .isCloseTo(Math.exp(-z), org.assertj.core.api.Assertions.within(1e-12 * Math.exp(-z)));
+            assertThat(bump.slope(r))
+                    .isCloseTo(-Math.exp(-z) / 0.6, org.assertj.core.api.Assertions.within(1e-12 * Math.exp(-z)));
             assertThat(bump.roundingBound(r)).isLessThanOrEqualTo(1e-11 * Math.exp(-z) + 1e-320);
         }
         BoundFormula one = bound(FormulaParser.parse("exp(r)*exp(-r)+sinh(r)/cosh(r)"));
@@ -154,11 +162,18 @@ class FormulaLawsTest {
     @Test
     void cancellingFormsAreComputedStably() {
         double r = 1e-9;
-        assertThat(bound(FormulaParser.parse("1-exp(-0.1*r)")).value(r)).isCloseTo(1e-10 - 5e-21, org.assertj.core.api.Assertions.within(1e-25));
-        assertThat(bound(FormulaParser.parse("ln(1+r)")).value(r)).isCloseTo(r - r * r / 2, org.assertj.core.api.Assertions.within(1e-24));
-        assertThat(bound(FormulaParser.parse("1-cos(r)")).value(r)).isCloseTo(r * r / 2, org.assertj.core.api.Assertions.within(1e-33));
-        assertThat(bound(FormulaParser.parse("sqrt(1+r^2)-1")).value(r)).isCloseTo(r * r / 2, org.assertj.core.api.Assertions.within(1e-33));
-        assertThat(bound(FormulaParser.parse("1-erf(r)")).value(5)).isCloseTo(1.5374597944280349e-12, org.assertj.core.api.Assertions.within(1e-26)); // closed form, computed at 40 digits
+        assertThat(bound(FormulaParser.parse("1-exp(-0.1*r)")).value(r))
+                .isCloseTo(1e-10 - 5e-21, org.assertj.core.api.Assertions.within(1e-25));
+        assertThat(bound(FormulaParser.parse("ln(1+r)")).value(r))
+                .isCloseTo(r - r * r / 2, org.assertj.core.api.Assertions.within(1e-24));
+        assertThat(bound(FormulaParser.parse("1-cos(r)")).value(r))
+                .isCloseTo(r * r / 2, org.assertj.core.api.Assertions.within(1e-33));
+        assertThat(bound(FormulaParser.parse("sqrt(1+r^2)-1")).value(r))
+                .isCloseTo(r * r / 2, org.assertj.core.api.Assertions.within(1e-33));
+        assertThat(bound(FormulaParser.parse("1-erf(r)")).value(5))
+                .isCloseTo(
+                        1.5374597944280349e-12,
+                        org.assertj.core.api.Assertions.within(1e-26)); // closed form, computed at 40 digits
     }
 
     @Test

@@ -4,7 +4,10 @@ import org.apache.commons.math3.dfp.Dfp;
 import org.apache.commons.math3.dfp.DfpField;
 import org.apache.commons.math3.dfp.DfpMath;
 
-/** A formula at 60 decimal digits in the arbitrary-precision arithmetic of Apache Commons Math; the doubles in the formula count as exact. */
+/**
+ * A formula at 60 decimal digits in the arbitrary-precision arithmetic of Apache Commons Math; the doubles in the
+ * formula count as exact.
+ */
 final class PreciseEvaluation {
     static final DfpField FIELD = new DfpField(60);
 
@@ -19,7 +22,11 @@ final class PreciseEvaluation {
                 case PARAMETER -> FIELD.newDfp(parameters[graph.left(i)]);
                 case ORBITAL -> FIELD.newDfp(orbital);
                 case RADIUS -> r;
-                default -> apply(graph.operation(i), v[graph.left(i)], graph.operation(i).arity() == 2 ? v[graph.right(i)] : null);
+                default ->
+                    apply(
+                            graph.operation(i),
+                            v[graph.left(i)],
+                            graph.operation(i).arity() == 2 ? v[graph.right(i)] : null);
             };
         }
         return v[v.length - 1];

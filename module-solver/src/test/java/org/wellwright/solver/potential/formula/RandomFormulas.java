@@ -5,11 +5,71 @@ import java.util.Random;
 /** Makes seeded random formulas: sensible potentials for the laws, and arbitrary text for the search for crashes. */
 final class RandomFormulas {
     private static final String[] FUNCTIONS = {
-        "exp", "ln", "sqrt", "sin", "cos", "tan", "sinh", "cosh", "tanh", "asin", "acos", "atan", "erf", "erfc", "abs", "step", "expm1", "log1p"
+        "exp", "ln", "sqrt", "sin", "cos", "tan", "sinh", "cosh", "tanh", "asin", "acos", "atan", "erf", "erfc", "abs",
+        "step", "expm1", "log1p"
     };
-    private static final String[] SMOOTH = {"exp(-@)", "ln(1+@)", "sqrt(1+@^2)", "sin(@)", "cos(@)", "tanh(@)", "atan(@)", "erf(@)", "1-exp(-@)", "1/(1+exp(@))", "sinh(@/4)", "erfc(@)", "cosh(@/4)"};
+    private static final String[] SMOOTH = {
+        "exp(-@)",
+        "ln(1+@)",
+        "sqrt(1+@^2)",
+        "sin(@)",
+        "cos(@)",
+        "tanh(@)",
+        "atan(@)",
+        "erf(@)",
+        "1-exp(-@)",
+        "1/(1+exp(@))",
+        "sinh(@/4)",
+        "erfc(@)",
+        "cosh(@/4)"
+    };
     private static final String[] PIECES = {
-        "r", "l", "pi", "a", "b", "b[0]", "1", "2.5", "1e-3", "0.1", "(", ")", "[", "]", ",", "+", "-", "*", "/", "^", "=", ";", "\n", "exp(", "ln(", "sum(i,0,3,", "min(", "max(", "step(", "x", "i", " ", "**", "1e", ".", "e", "$", "²", "é", "\u2212", "_", "\"", "log", "1e999", "\t", "\ud83d"
+        "r",
+        "l",
+        "pi",
+        "a",
+        "b",
+        "b[0]",
+        "1",
+        "2.5",
+        "1e-3",
+        "0.1",
+        "(",
+        ")",
+        "[",
+        "]",
+        ",",
+        "+",
+        "-",
+        "*",
+        "/",
+        "^",
+        "=",
+        ";",
+        "\n",
+        "exp(",
+        "ln(",
+        "sum(i,0,3,",
+        "min(",
+        "max(",
+        "step(",
+        "x",
+        "i",
+        " ",
+        "**",
+        "1e",
+        ".",
+        "e",
+        "$",
+        "²",
+        "é",
+        "\u2212",
+        "_",
+        "\"",
+        "log",
+        "1e999",
+        "\t",
+        "\ud83d"
     };
 
     private final Random random;
