@@ -14,6 +14,13 @@ public interface CondensedPencil {
         int count(double shift);
 
         /**
+         * Number of eigenvalues below σ if the outer end is not held at zero but closed by a quadratic form.
+         *
+         * @param boundary the form's value for u_c = 1 at the end, one per channel
+         */
+        int countOpen(double shift, double[] boundary);
+
+        /**
          * Factorises at σ and makes the vector of the twisted factorisation.
          *
          * @param allowed elements that may carry the twist, or null for all

@@ -54,6 +54,15 @@ public final class ScalarChain implements CondensedPencil {
         }
 
         @Override
+        public int countOpen(double at, double[] boundary) {
+            int below = ScalarChain.this.count(at, this);
+            int e = count - 1;
+            double d = forward[e - 1] + leftLeft[e];
+            double end = rightRight[e] - leftRight[e] * leftRight[e] / awayFromZero(d, e) + boundary[0];
+            return below + (end < 0 ? 1 : 0);
+        }
+
+        @Override
         public void solve(double at, boolean[] allowed) {
             ScalarChain.this.solve(at, this, allowed);
         }

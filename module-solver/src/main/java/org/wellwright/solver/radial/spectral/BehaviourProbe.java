@@ -83,6 +83,9 @@ final class BehaviourProbe {
             last = v;
             lastRadius = next;
         }
+        if (Double.isNaN(last)) {
+            return TailBehaviour.UNKNOWN;
+        }
         double change = last - previous;
         double changeBefore = previous - before;
         if (change == 0 || Math.abs(change) < 1e-14 * Math.abs(last)) {
@@ -95,6 +98,9 @@ final class BehaviourProbe {
         }
         if (power >= 0) {
             return new TailBehaviour(0, power, Math.signum(change), true);
+        }
+        if (power < -20) {
+            return TailBehaviour.constant(Math.abs(last) < 1e-60 ? 0 : last);
         }
         // V = limit + c r^p: the change over one octave is c r^p (1 − 2^−p).
         double coefficient = change / (Math.pow(lastRadius, power) * (1 - Math.pow(2, -power)));

@@ -27,7 +27,9 @@ final class ChannelPotentials {
     private final double[] exponent;
     private final double[] inverseSquare;
     private final boolean[] core;
+    private final double[] singular;
     private final double[] limit;
+    private final double[] tailSquare;
     private final boolean[] endless;
     private final boolean[] rising;
     private final double[] breaks;
@@ -40,7 +42,9 @@ final class ChannelPotentials {
         exponent = new double[channels];
         inverseSquare = new double[channels];
         core = new boolean[channels];
+        singular = new double[channels];
         limit = new double[channels];
+        tailSquare = new double[channels];
         endless = new boolean[channels];
         rising = new boolean[channels];
         breaks = collectBreaks();
@@ -81,6 +85,22 @@ final class ChannelPotentials {
     /** Coefficient of r⁻² in V of a channel near the origin; part of the exponent. */
     double inverseSquare(int c) {
         return inverseSquare[c];
+    }
+
+    /**
+     * Whether Hu of a trial function r^s times a polynomial is square integrable: V less singular than r^−(s+½). Where it
+     * is not, bounds from residuals do not exist for such functions.
+     */
+    boolean residualExists() {
+        for (int c = 0; c < channels; c++) {
+            if (exponent[c] < 0.51 && !core[c] && problem.innerWall() == 0 && singular[c] < 0) {
+                return false;
+            }
+            if (singular[c] <= -exponent[c] - 0.49 && !core[c]) {
+                return false;
+            }
+        }
+        return true;
     }
 
     double leastExponent() {
@@ -300,6 +320,38 @@ final class ChannelPotentials {
         return radii.stream().mapToDouble(Double::doubleValue).toArray();
     }
 
+    /** Largest |r²(V − limit)/κ| of the open channels at and beyond a radius, from three octaves. */
+    double strengthBeyond(double r) {
+        double worst = 0;
+        double threshold = threshold();
+        for (int c = 0; c < channels; c++) {
+            if (rising[c] || limit[c] > threshold) {
+                continue;
+            }
+            for (int k = 0; k < 3; k++) {
+                double x = Math.scalb(r, k);
+                double v = channelValue(c, x) - limit[c] - tailSquare[c] / (x * x);
+                double strength = Math.abs(v) * x * x / kinetic();
+                // What overflows far outside has long reached its limit.
+                worst = Math.max(worst, Double.isNaN(strength) ? 0 : strength);
+            }
+        }
+        return worst;
+    }
+
+    /** κ u′/u of the decaying solution at the threshold beyond a radius, for each channel. */
+    double[] exteriorStiffness(double r) {
+        double[] stiffness = new double[channels];
+        double threshold = threshold();
+        for (int c = 0; c < channels; c++) {
+            double excess = rising[c] ? channelValue(c, r) - threshold : limit[c] - threshold;
+            double square = centrifugal(c) + tailSquare[c] / kinetic() + 0.25;
+            double power = (Math.sqrt(Math.max(square, 0)) - 0.5) / r;
+            stiffness[c] = kinetic() * Math.max(power, excess > 0 ? Math.sqrt(excess / kinetic()) : power);
+        }
+        return stiffness;
+    }
+
     private void examineOrigin(int c) {
         RadialChannel channel = problem.channels().get(c);
         exponent[c] = 1;
@@ -323,6 +375,7 @@ final class ChannelPotentials {
             return;
         }
         inverseSquare[c] = origin.inverseSquare();
+        singular[c] = origin.power();
         double strength = channel.centrifugal() + origin.inverseSquare() / kinetic();
         if (strength < -0.25 - 1e-13) {
             throw fallsToCentre(channel, "the r^-2 part is %.6g times kappa, below -1/4".formatted(strength));
@@ -367,6 +420,7 @@ final class ChannelPotentials {
         if (attractive && tail.power() > -2) {
             endless[c] = true;
         } else if (tail.power() == -2) {
+            tailSquare[c] = tail.coefficient();
             endless[c] = channel.centrifugal() + tail.coefficient() / kinetic() < -0.25 - 1e-13;
         }
     }

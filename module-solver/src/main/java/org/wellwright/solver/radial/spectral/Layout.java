@@ -126,12 +126,17 @@ final class Layout {
         return worst <= 40;
     }
 
+    /** Whether an energy is classically allowed somewhere in an element, seen by its nodes or by the survey. */
+    private boolean allowed(Leaf one, double energy, int at) {
+        return one.phase(at) > 0 || survey.allowed(energy, one.from, one.to);
+    }
+
     private double actionBeyond(double energy) {
         double sum = 0;
         for (int i = leaves.size() - 1; i >= 0; i--) {
             Leaf one = leaves.get(i);
             int at = one.at(energy);
-            if (one.phase(at) > 0) {
+            if (allowed(one, energy, at)) {
                 return sum;
             }
             sum += one.forbidden(at);
@@ -143,7 +148,7 @@ final class Layout {
         double sum = 0;
         for (Leaf one : leaves) {
             int at = one.at(energy);
-            if (one.phase(at) > 0) {
+            if (allowed(one, energy, at)) {
                 return sum;
             }
             sum += one.forbidden(at);
@@ -159,17 +164,17 @@ final class Layout {
         for (int i = 0; i < n; i++) {
             Leaf one = leaves.get(i);
             int at = one.at(energy);
-            distance[i] = one.phase(at) > 0 ? 0 : sum;
-            sum = one.phase(at) > 0 ? 0 : sum + one.forbidden(at);
+            boolean allowed = allowed(one, energy, at);
+            distance[i] = allowed ? 0 : sum;
+            sum = allowed ? 0 : sum + one.forbidden(at);
         }
         sum = Double.POSITIVE_INFINITY;
         for (int i = n - 1; i >= 0; i--) {
             Leaf one = leaves.get(i);
             int at = one.at(energy);
-            if (one.phase(at) <= 0) {
-                distance[i] = Math.min(distance[i], sum);
-            }
-            sum = one.phase(at) > 0 ? 0 : sum + one.forbidden(at);
+            boolean allowed = allowed(one, energy, at);
+            distance[i] = allowed ? 0 : Math.min(distance[i], sum);
+            sum = allowed ? 0 : sum + one.forbidden(at);
         }
         return distance;
     }
@@ -339,11 +344,44 @@ final class Layout {
         for (int i = 0; i < leaves.size(); i++) {
             Leaf one = leaves.get(i);
             if (i < marked.length && marked[i] && one.to - one.from > 1e-12 * one.to) {
+                if (one.atOrigin()) {
+                    // What is singular there needs many octaves at once.
+                    next.add(leaf(0, one.to / 256));
+                    next.add(leaf(one.to / 256, one.to / 64));
+                    next.add(leaf(one.to / 64, one.to / 16));
+                    next.add(leaf(one.to / 16, one.to / 4));
+                    next.add(leaf(one.to / 4, one.to));
+                    continue;
+                }
                 addHalves(one, next);
             } else {
                 next.add(one);
             }
         }
         leaves = next;
+    }
+
+    private List<Leaf> beyond = new ArrayList<>();
+
+    /** The mesh continued outward until V differs from its limit by less than its hold on a node. */
+    Element[] continued(Element[] inside) {
+        beyond = new ArrayList<>();
+        double edge = edge();
+        while (edge < potentials.problem().outerWall() && edge < 0x1p120 && potentials.strengthBeyond(edge) > 1e-7
+                && beyond.size() < 40) {
+            Leaf next = leaf(edge, ladder.outward(edge));
+            beyond.add(next);
+            edge = next.to;
+        }
+        Element[] all = java.util.Arrays.copyOf(inside, inside.length + beyond.size());
+        for (int i = 0; i < beyond.size(); i++) {
+            all[inside.length + i] = beyond.get(i).element(potentials, scratch);
+        }
+        return all;
+    }
+
+    /** Outer end of the continued mesh. */
+    double lastEdge() {
+        return beyond.isEmpty() ? edge() : beyond.get(beyond.size() - 1).to;
     }
 }

@@ -75,87 +75,100 @@ final class LevelFinder {
         return found;
     }
 
+    /** Extrapolates the levels found so far as a polynomial in their index, or halves the bracket. */
     private double guess(int i, List<Trial> found) {
         double a = low[i];
         double b = high[i];
         double value = Double.NaN;
-        if (i >= 3) {
-            double e1 = found.get(i - 1).shift();
-            double e2 = found.get(i - 2).shift();
-            double e3 = found.get(i - 3).shift();
-            value = e1 + (e1 - e2) + ((e1 - e2) - (e2 - e3));
-            double d1 = e1 - e2;
-            double d2 = e2 - e3;
-            // Spacings of most spectra shrink or grow in a steady ratio.
-            value = d2 > 0 ? e1 + d1 * Math.min(d1 / d2, 2) : value;
+        if (i >= 6) {
+            value = 4 * (shift(found, 1) + shift(found, 3)) - 6 * shift(found, 2) - shift(found, 4);
+        } else if (i >= 3) {
+            value = 3 * (shift(found, 1) - shift(found, 2)) + shift(found, 3);
         }
         return value > a && value < b ? value : 0.5 * (a + b);
     }
 
+    private static double shift(List<Trial> found, int back) {
+        return found.get(found.size() - back).shift();
+    }
+
     private Trial refine(int i, List<Trial> found, double[] edges) {
         double shift = guess(i, found);
-        double before = i > 0 ? found.get(i - 1).shift() : Double.NaN;
-        for (int step = 0; step < 200; step++) {
+        double before = i > 0 ? found.get(i - 1).shift() : floor;
+        double lastMove = Double.POSITIVE_INFINITY;
+        for (int step = 0; step < 300; step++) {
             counts++;
             work.solve(shift, null);
             note(shift, work.below());
             double next = shift + work.correction();
             double move = Math.abs(work.correction());
-            double width = high[i] - low[i];
-            boolean isolated = next > low[i] && next < high[i];
-            double gap = gap(i, next, before);
-            if (isolated && move <= 1e-7 * gap) {
-                work.solve(next, null);
+            double noise = blur(shift);
+            boolean inside = next >= low[i] - noise && next <= high[i] + noise;
+            double gap = Math.min(next - before, top - next);
+            if (inside && move <= Math.max(1e-7 * gap, noise)) {
                 counts++;
+                work.solve(next, null);
                 double settled = next + work.correction();
-                if (confirmed(i, settled, gap)) {
-                    return Trial.of(pencil.elements(), edges, work, settled);
+                if (Math.abs(work.correction()) <= 100 * noise && confirmed(i, settled)) {
+                    Trial trial = Trial.of(pencil.elements(), edges, work, settled);
+                    if (i == 0 || settled - before > 1e5 * noise || independent(trial, found)) {
+                        return trial;
+                    }
+                    return cluster(i, settled, found, edges);
                 }
+                inside = false;
             }
-            double resolution = 4 * Math.ulp(Math.max(Math.abs(low[i]), Math.abs(high[i])));
-            if (width <= resolution) {
-                return cluster(i, found, edges);
+            double width = high[i] - low[i];
+            if (width <= noise) {
+                return cluster(i, 0.5 * (low[i] + high[i]), found, edges);
             }
-            shift = isolated && move < 0.3 * width ? next : 0.5 * (low[i] + high[i]);
-            if (shift == low[i] || shift == high[i]) {
-                shift = 0.5 * (low[i] + high[i]);
-            }
+            boolean shrinking = move < 0.5 * lastMove;
+            lastMove = inside && shrinking ? move : Double.POSITIVE_INFINITY;
+            shift = inside && shrinking
+                    ? Math.min(Math.max(next, low[i]), high[i])
+                    : 0.5 * (low[i] + high[i]);
         }
-        return cluster(i, found, edges);
+        return cluster(i, 0.5 * (low[i] + high[i]), found, edges);
     }
 
-    private double gap(int i, double energy, double before) {
-        double gap = Math.min(top - energy, energy - floor);
-        if (i > 0) {
-            gap = Math.min(gap, energy - before);
-        }
-        if (i + 1 < wanted && low[i + 1] > energy) {
-            gap = Math.min(gap, low[i + 1] - energy);
-        }
-        return Math.max(gap, 0);
+    /** How far counts may be off by rounding. */
+    private double blur(double energy) {
+        return 0x1p-50 * Math.max(Math.abs(energy), 0.1 * Math.abs(top - floor));
     }
 
-    /** The index of a refined level by two counts; a third and fourth further off where rounding blurs the first. */
-    private boolean confirmed(int i, double energy, double gap) {
-        double offset = Math.min(1e-3 * gap, 64 * Math.ulp(energy) + 1e-6 * gap);
-        if (!(offset > 0)) {
-            return false;
+    /** Whether level i lies where it was found: at most i levels below, at least i + 1 above. */
+    private boolean confirmed(int i, double energy) {
+        double offset = 16 * blur(energy);
+        if (low[i] < energy - offset) {
+            count(energy - offset);
         }
-        if (low[i] < energy - offset || low[i] > energy) {
-            if (count(energy - offset) != i) {
+        if (high[i] > energy + offset) {
+            count(energy + offset);
+        }
+        // Never below the last count that showed rounding.
+        return low[i] >= energy - offset && high[i] <= energy + offset;
+    }
+
+    private boolean independent(Trial trial, List<Trial> found) {
+        for (int j = found.size() - 1; j >= 0; j--) {
+            Trial other = found.get(j);
+            if (Math.abs(other.shift() - trial.shift()) > 1e6 * blur(trial.shift())) {
+                return true;
+            }
+            double cosine = trial.overlap(other) / Math.sqrt(trial.norm() * other.norm());
+            if (Math.abs(cosine) > 0.1) {
                 return false;
             }
         }
-        return count(energy + offset) == i + 1;
+        return true;
     }
 
     /** Levels nearer to each other than rounding: vectors from twists in different wells. */
-    private Trial cluster(int i, List<Trial> found, double[] edges) {
-        double energy = 0.5 * (low[i] + high[i]);
+    private Trial cluster(int i, double energy, List<Trial> found, double[] edges) {
         List<Trial> mates = new ArrayList<>();
         for (int j = i - 1; j >= 0; j--) {
             double distance = Math.abs(found.get(j).shift() - energy);
-            if (distance <= 1e-12 * Math.max(Math.abs(energy), Math.abs(top - floor))) {
+            if (distance <= 1e6 * blur(energy)) {
                 mates.add(found.get(j));
             } else {
                 break;

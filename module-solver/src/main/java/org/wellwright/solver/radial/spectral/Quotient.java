@@ -43,10 +43,8 @@ final class Quotient {
     double smoothEnergy;
     /** ‖Hu − ρu‖/‖u‖ of the smoothed trial function. */
     double residual;
-    /** Part of residual² on each element. */
-    final double[] residualShare;
-    /** Part of the quadrature difference on each element. */
-    final double[] quadratureShare;
+    private final double[] residualShare;
+    private final double[] quadratureShare;
 
     Quotient(Element[] elements, double[] edges, CheckGrid grid, boolean innerWall, boolean outerWall) {
         this.elements = elements;
@@ -272,9 +270,9 @@ final class Quotient {
         truncation = sum / n;
     }
 
-    /** Part of the truncation error on an element. */
-    double truncationShare(int e) {
-        return share[e];
+    /** What each element contributed to the errors of the last function. */
+    Solution.Shares shares() {
+        return new Solution.Shares(residualShare.clone(), quadratureShare.clone(), share.clone());
     }
 
     private double slopeRight(Trial trial, double[] coefficient, int e, int c) {

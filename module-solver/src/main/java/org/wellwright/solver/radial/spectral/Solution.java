@@ -8,8 +8,9 @@ package org.wellwright.solver.radial.spectral;
  * @param smoothEnergy Rayleigh quotient of the smoothed state
  * @param residual ‖Hu − ρu‖ of the smoothed state
  * @param estimate estimated error of {@code energy}
- * @param rounding bound of the rounding in a Rayleigh quotient
+ * @param rounding bound of rounding and quadrature in a Rayleigh quotient
  * @param scale ⟨T⟩ + ⟨|V|⟩
+ * @param shares what each element contributes to the errors
  */
 record Solution(
         Trial trial,
@@ -18,4 +19,31 @@ record Solution(
         double residual,
         double estimate,
         double rounding,
-        double scale) {}
+        double scale,
+        Shares shares) {
+
+    /** Contributions by element; arrays are not changed. */
+    static final class Shares {
+        private final double[] residual;
+        private final double[] quadrature;
+        private final double[] truncation;
+
+        Shares(double[] residual, double[] quadrature, double[] truncation) {
+            this.residual = residual;
+            this.quadrature = quadrature;
+            this.truncation = truncation;
+        }
+
+        double residual(int e) {
+            return residual[e];
+        }
+
+        double quadrature(int e) {
+            return quadrature[e];
+        }
+
+        double truncation(int e) {
+            return truncation[e];
+        }
+    }
+}

@@ -1,35 +1,34 @@
 package org.wellwright.solver.radial.spectral;
 
+import java.util.Arrays;
+
 /**
- * A first look at the lower envelope of a problem over sixty decades of r, two radii an octave: where its minimum is,
- * how deep, and beyond which radius nothing is classically allowed. Values that overflow are taken as forbidden.
+ * A first look at the lower envelope of a problem over sixty decades of r: two radii an octave, then closer and closer
+ * around each minimum until a well of any width that shows in the first samples is resolved, then, once it is known up to
+ * which energy, wherever the interval bounds of V leave room for a well that does not. Values that overflow are taken as forbidden.
  */
 final class Survey {
     private static final int HALF_OCTAVES = 200;
 
-    private final double[] radius;
-    private final double[] envelope;
+    private final ChannelPotentials potentials;
     private final double kinetic;
-    private final int lowest;
+    private double[] radius;
+    private double[] envelope;
+    private int lowest;
 
-    private Survey(double[] radius, double[] envelope, double kinetic) {
+    private Survey(ChannelPotentials potentials, double[] radius) {
+        this.potentials = potentials;
+        kinetic = potentials.kinetic();
         this.radius = radius;
-        this.envelope = envelope;
-        this.kinetic = kinetic;
-        int at = -1;
-        for (int i = 0; i < radius.length; i++) {
-            // Strength against the kinetic energy decides, so that a constant V has no preferred radius.
-            if (!Double.isNaN(envelope[i]) && (at < 0 || envelope[i] < envelope[at])) {
-                at = i;
-            }
-        }
-        lowest = Math.max(at, 0);
+        envelope = potentials.roughEnvelope(radius);
+        findLowest();
     }
 
     static Survey of(ChannelPotentials potentials) {
         double inner = potentials.problem().innerWall();
         double outer = potentials.problem().outerWall();
-        double[] radius = new double[2 * HALF_OCTAVES + 1 + 2 * potentials.breaks().length];
+        double[] breaks = potentials.breaks();
+        double[] radius = new double[2 * HALF_OCTAVES + 4 + 4 * breaks.length];
         int count = 0;
         for (int i = -HALF_OCTAVES; i <= HALF_OCTAVES; i++) {
             double r = Math.scalb(i % 2 == 0 ? 1 : 0x1.6a09e667f3bcdp0, Math.floorDiv(i, 2));
@@ -37,17 +36,88 @@ final class Survey {
                 radius[count++] = r;
             }
         }
-        for (double edge : potentials.breaks()) {
-            radius[count++] = edge * (1 - 1e-6);
-            radius[count++] = edge * (1 + 1e-6);
+        double previous = inner;
+        for (double edge : breaks) {
+            radius[count++] = edge * (1 - 1e-9);
+            radius[count++] = edge * (1 + 1e-9);
+            radius[count++] = 0.5 * (previous + edge);
+            previous = edge;
         }
-        if (count == 0) {
-            radius = new double[] {0.5 * (inner + outer)};
-            count = 1;
+        if (Double.isFinite(outer)) {
+            radius[count++] = 0.5 * (previous + outer);
         }
-        radius = java.util.Arrays.copyOf(radius, count);
-        java.util.Arrays.sort(radius);
-        return new Survey(radius, potentials.roughEnvelope(radius), potentials.kinetic());
+        radius = Arrays.copyOf(radius, count);
+        Arrays.sort(radius);
+        Survey survey = new Survey(potentials, radius);
+        survey.closeIn();
+        return survey;
+    }
+
+    private void findLowest() {
+        lowest = 0;
+        for (int i = 0; i < radius.length; i++) {
+            if (envelope[i] < envelope[lowest]) {
+                lowest = i;
+            }
+        }
+    }
+
+    /** Adds radii and keeps the order. */
+    private void insert(double[] more, int count) {
+        double[] added = Arrays.copyOf(more, count);
+        double[] values = potentials.roughEnvelope(added);
+        int n = radius.length;
+        double[] r = new double[n + count];
+        double[] v = new double[n + count];
+        int a = 0;
+        int b = 0;
+        for (int i = 0; i < r.length; i++) {
+            if (b >= count || a < n && radius[a] <= added[b]) {
+                r[i] = radius[a];
+                v[i] = envelope[a++];
+            } else {
+                r[i] = added[b];
+                v[i] = values[b++];
+            }
+        }
+        radius = r;
+        envelope = v;
+        findLowest();
+    }
+
+    /** Halves the intervals beside every local minimum until no phase hides in them. */
+    private void closeIn() {
+        double threshold = potentials.threshold();
+        double[] more = new double[64];
+        for (int round = 0; round < 60; round++) {
+            int count = 0;
+            for (int i = 1; i + 1 < radius.length && count + 2 <= more.length; i++) {
+                boolean minimum = envelope[i] <= envelope[i - 1] && envelope[i] <= envelope[i + 1];
+                if (!minimum || envelope[i] == envelope[i - 1] && envelope[i] == envelope[i + 1]) {
+                    continue;
+                }
+                double ceiling = Math.min(threshold, Math.max(envelope[i - 1], envelope[i + 1]));
+                double width = radius[i + 1] - radius[i - 1];
+                double phase = Math.sqrt(Math.max(0, ceiling - envelope[i]) / kinetic) * width;
+                if (phase > 1.5 && width > 1e-12 * radius[i]) {
+                    more[count++] = 0.5 * (radius[i - 1] + radius[i]);
+                    more[count++] = 0.5 * (radius[i] + radius[i + 1]);
+                }
+            }
+            if (count == 0) {
+                return;
+            }
+            insert(more, count);
+        }
+    }
+
+    /** Samples wells below an energy that interval bounds of V allow and no sample has met. */
+    void lookForHidden(double level) {
+        double[] found = new HiddenWells(potentials, level).search(radius, envelope);
+        if (found.length > 0) {
+            insert(found, found.length);
+            closeIn();
+        }
     }
 
     /** Least value of the envelope seen. */
@@ -58,6 +128,17 @@ final class Survey {
     /** Where it is. */
     double deepest() {
         return radius[lowest];
+    }
+
+    /** Whether E is above the envelope at a radius seen in (from, to). */
+    boolean allowed(double energy, double from, double to) {
+        int at = Arrays.binarySearch(radius, from);
+        for (int i = at < 0 ? -at - 1 : at + 1; i < radius.length && radius[i] < to; i++) {
+            if (envelope[i] < energy) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** The largest radius seen at which E is above the envelope; 0 if none. */
@@ -98,7 +179,7 @@ final class Survey {
         double low = floor();
         double high = top;
         if (Double.isInfinite(high)) {
-            double step = Math.max(Math.abs(low), kinetic / deepest() / deepest());
+            double step = kinetic / deepest() / deepest();
             high = low + step;
             for (int k = 0; k < 2000 && levels(high) < wanted; k++) {
                 step *= 2;
@@ -107,7 +188,6 @@ final class Survey {
         } else if (levels(high) <= wanted) {
             return top;
         }
-        // Relative to the top, since series crowd there.
         for (int k = 0; k < 60 && levels(high) > wanted * 1.02; k++) {
             double middle = Double.isInfinite(top) ? 0.5 * (low + high) : between(low, high, top);
             if (levels(middle) >= wanted) {
@@ -119,12 +199,10 @@ final class Survey {
         return high;
     }
 
+    /** Geometric in the distance to the top, since series crowd there. */
     private static double between(double low, double high, double top) {
         double a = top - low;
         double b = top - high;
-        if (b <= 0) {
-            return top - a * 1e-4 > low ? (low + top) / 2 + 0.4999 * (top - low) : low;
-        }
-        return top - Math.sqrt(a * b);
+        return b <= 0 ? top - 1e-4 * a : top - Math.sqrt(a * b);
     }
 }

@@ -234,15 +234,20 @@ final class Trial {
         return massOn(e) / norm();
     }
 
+    /** ∫ Σ_c u_c v_c dr with a function on the same mesh. */
+    double overlap(Trial other) {
+        double sum = 0;
+        for (int e = 0; e < elements.length; e++) {
+            sum += product(other, e);
+        }
+        return sum;
+    }
+
     /** This function without its components along others. */
     Trial orthogonalTo(List<Trial> others) {
         Trial result = this;
         for (Trial other : others) {
-            double overlap = 0;
-            for (int e = 0; e < elements.length; e++) {
-                overlap += result.product(other, e);
-            }
-            double factor = overlap / other.norm();
+            double factor = result.overlap(other) / other.norm();
             double[] v = result.vertex.clone();
             double[] c = result.coefficient.clone();
             for (int i = 0; i < v.length; i++) {
