@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.TreeSet;
 import org.wellwright.solver.InvalidModelException;
+import org.wellwright.solver.numerics.SymmetricEigen;
 import org.wellwright.solver.potential.BreakPoint;
 import org.wellwright.solver.potential.OriginBehaviour;
 import org.wellwright.solver.potential.TailBehaviour;
@@ -247,23 +248,35 @@ final class ChannelPotentials {
     }
 
     /**
-     * Lower envelope of all channels with Langer's centrifugal term κ(λ + ¼)/r²: no level lies below its minimum
-     * (Hardy).
+     * Lowest eigenvalue of the matrix of V with Langer's centrifugal terms κ(λ + ¼)/r²: no level lies below its minimum
+     * (Hardy's inequality).
      */
     void envelope(double[][] w, double[] radii, int count, double[] into) {
+        double[] matrix = new double[channels * channels];
+        double[] values = new double[channels];
+        double[] work = new double[channels + channels * channels];
         for (int i = 0; i < count; i++) {
-            double least = Double.POSITIVE_INFINITY;
             double scale = kinetic() / radii[i] / radii[i];
-            for (int c = 0; c < channels; c++) {
-                double row = w[c * channels + c][i] + scale * (centrifugal(c) + 0.25);
-                for (int d = 0; d < channels; d++) {
-                    if (d != c && w[c * channels + d] != null) {
-                        row -= Math.abs(w[c * channels + d][i]);
-                    }
-                }
-                least = Math.min(least, row);
+            if (channels == 1) {
+                into[i] = w[0][i] + scale * (centrifugal(0) + 0.25);
+                continue;
             }
-            into[i] = least;
+            boolean finite = true;
+            for (int c = 0; c < channels; c++) {
+                for (int d = 0; d < channels; d++) {
+                    double[] element = w[c * channels + d];
+                    double v = element == null ? 0 : element[i];
+                    v += c == d ? scale * (centrifugal(c) + 0.25) : 0;
+                    finite &= Math.abs(v) < HUGE;
+                    matrix[c * channels + d] = v;
+                }
+            }
+            if (finite) {
+                SymmetricEigen.decompose(matrix, channels, values, work);
+                into[i] = values[0];
+            } else {
+                into[i] = Double.POSITIVE_INFINITY;
+            }
         }
     }
 

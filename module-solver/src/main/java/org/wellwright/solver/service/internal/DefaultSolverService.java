@@ -2,7 +2,6 @@ package org.wellwright.solver.service.internal;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.ForkJoinPool;
@@ -10,7 +9,6 @@ import java.util.concurrent.Future;
 import org.openide.util.lookup.ServiceProvider;
 import org.wellwright.solver.SolverException;
 import org.wellwright.solver.WellwrightException;
-import org.wellwright.solver.radial.RadialSolver;
 import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 import org.wellwright.solver.radial.spectral.SpectralElementSolver;
@@ -23,18 +21,6 @@ import org.wellwright.solver.service.SolverService;
  */
 @ServiceProvider(service = SolverService.class, position = 100)
 public final class DefaultSolverService implements SolverService {
-    private final Optional<RadialSolver> second;
-
-    /** The service with both methods. */
-    public DefaultSolverService() {
-        this(SecondMethods.available());
-    }
-
-    /** The service with another second method, or none. */
-    DefaultSolverService(Optional<RadialSolver> second) {
-        this.second = second;
-    }
-
     @Override
     public String id() {
         return "spectral-elements";
@@ -57,7 +43,7 @@ public final class DefaultSolverService implements SolverService {
 
     private Spectrum solve(SpectralElementSolver primary, SolveRequest request, SolveMonitor monitor) {
         Spectrum spectrum = primary.solve(request.problem(), request.search(), monitor);
-        return new CrossCheck(second).check(spectrum, request.verify(), monitor);
+        return new CrossCheck(SecondMethods.of(request.problem())).check(spectrum, request.verify(), monitor);
     }
 
     @Override

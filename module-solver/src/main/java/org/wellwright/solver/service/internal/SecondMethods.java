@@ -1,13 +1,16 @@
 package org.wellwright.solver.service.internal;
 
 import java.util.Optional;
+import org.wellwright.solver.radial.RadialProblem;
 import org.wellwright.solver.radial.RadialSolver;
+import org.wellwright.solver.radial.steps.PerturbedStepSolver;
 
-/** The method that confirms the primary one. */
+/** The methods that confirm the primary one, independent of it down to their own scan of V. */
 final class SecondMethods {
     private SecondMethods() {}
 
-    static Optional<RadialSolver> available() {
-        return Optional.empty();
+    /** The method for a problem: constant-reference perturbation for one channel. */
+    static Optional<RadialSolver> of(RadialProblem problem) {
+        return problem.channels().size() == 1 ? Optional.of(new PerturbedStepSolver()) : Optional.empty();
     }
 }
