@@ -20,7 +20,8 @@ class ArchitectureTest {
     static final ArchRule physicsKnowsNoDesktopAndNoFiles = noClasses()
             .should()
             .dependOnClassesThat()
-            .resideInAnyPackage("java.awt..", "javax.swing..", "java.nio.file..", "org.openide.windows..", "org.netbeans..")
+            .resideInAnyPackage(
+                    "java.awt..", "javax.swing..", "java.nio.file..", "org.openide.windows..", "org.netbeans..")
             .orShould()
             .dependOnClassesThat()
             .haveFullyQualifiedName("java.io.File")
@@ -68,7 +69,8 @@ class ArchitectureTest {
             .resideInAnyPackage("org.wellwright.solver.radial..", "org.wellwright.solver.numerics..")
             .should()
             .dependOnClassesThat()
-            .resideInAnyPackage("org.wellwright.solver.model..", "org.wellwright.solver.pair..", "org.wellwright.solver.service..")
+            .resideInAnyPackage(
+                    "org.wellwright.solver.model..", "org.wellwright.solver.pair..", "org.wellwright.solver.service..")
             .because("units are converted in one place, before the problem reaches the solver");
 
     @ArchTest

@@ -3,12 +3,13 @@ package org.wellwright.solver.numerics;
 import java.util.Arrays;
 
 /**
- * A chain of elements of several coupled channels, zero at both ends, as a condensed pencil: {@link ScalarChain} with C×C
- * blocks.
+ * A chain of elements of several coupled channels, zero at both ends, as a condensed pencil: {@link ScalarChain} with
+ * C×C blocks.
  *
- * <p>The unknowns of block v are the C values at edge v and the modes of the element to its right that lie near the shift
- * (block 0 also has those of the first element), so that no pole is ever condensed. Unknowns are scaled to unit mass;
- * small blocks are inverted through their eigenvalues, which also give the inertia and, at the twist, the null vector.
+ * <p>The unknowns of block v are the C values at edge v and the modes of the element to its right that lie near the
+ * shift (block 0 also has those of the first element), so that no pole is ever condensed. Unknowns are scaled to unit
+ * mass; small blocks are inverted through their eigenvalues, which also give the inertia and, at the twist, the null
+ * vector.
  */
 public final class BlockChain implements CondensedPencil {
     private static final int MOST_EXPLICIT = 8;
@@ -57,9 +58,11 @@ public final class BlockChain implements CondensedPencil {
         private final int[] size = new int[blocks];
         /** Own block with what is eliminated on the left, inverted. */
         private final double[][] forwardInverse = new double[blocks][];
+
         private final double[][] forward = new double[blocks][];
         /** Own block with what is eliminated on the right, inverted. */
         private final double[][] backwardInverse = new double[blocks][];
+
         private final double[][] fromRight = new double[blocks][];
         private final double[] vertex = new double[blocks * channels];
         private final double[] amplitude = new double[count * modes];
@@ -266,7 +269,9 @@ public final class BlockChain implements CondensedPencil {
             }
         }
 
-        /** Own matrix of a block in scaled unknowns: edge values, modes to the right, for block 0 modes of element 0. */
+        /**
+         * Own matrix of a block in scaled unknowns: edge values, modes to the right, for block 0 modes of element 0.
+         */
         private double[] own(int v) {
             int s = size[v];
             double[] m = new double[s * s];
@@ -598,9 +603,7 @@ public final class BlockChain implements CondensedPencil {
                         sum -= right(v, k, c) * modeLoad[v * modes + k] / (element[v].lambda[k] - shift);
                     }
                     if (!isExplicit(v + 1, k)) {
-                        sum -= left(v + 1, k, c)
-                                * modeLoad[(v + 1) * modes + k]
-                                / (element[v + 1].lambda[k] - shift);
+                        sum -= left(v + 1, k, c) * modeLoad[(v + 1) * modes + k] / (element[v + 1].lambda[k] - shift);
                     }
                 }
                 b[c] = edgeScale[v * channels + c] * sum;

@@ -55,8 +55,22 @@ class FitServiceTest {
         List<Datum> data = new ArrayList<>();
         for (String system : List.of("light", "heavy")) {
             for (int j = 0; j < 4; j++) {
-                data.add(line("R" + j + system, level(system, j + 1, 1), level(system, j, 0), Transform.NONE, 1, "cm^-1", 0.01));
-                data.add(line("S" + j + system, level(system, j + 1, 2), level(system, j, 0), Transform.NONE, 1, "cm^-1", 0.02));
+                data.add(line(
+                        "R" + j + system,
+                        level(system, j + 1, 1),
+                        level(system, j, 0),
+                        Transform.NONE,
+                        1,
+                        "cm^-1",
+                        0.01));
+                data.add(line(
+                        "S" + j + system,
+                        level(system, j + 1, 2),
+                        level(system, j, 0),
+                        Transform.NONE,
+                        1,
+                        "cm^-1",
+                        0.02));
             }
         }
         return document("spectroscopic", systems, pool, List.of(Model.of("morse", List.of(curve))), data, List.of());
@@ -83,8 +97,8 @@ class FitServiceTest {
 
     @Test
     void recoversTheCurveOfTwoIsotopologuesFromNoiseFreeLines() {
-        ModelDocument truth =
-                molecule(List.of(fixed("D", "eV", "4.1"), fixed("a", "1/angstrom", "1.9"), fixed("re", "angstrom", "1.25")));
+        ModelDocument truth = molecule(
+                List.of(fixed("D", "eV", "4.1"), fixed("a", "1/angstrom", "1.9"), fixed("re", "angstrom", "1.25")));
         Comparison made = service.compare(truth, SolveMonitor.NONE);
         assertThat(made.models().get(0).problems()).isEmpty();
         ModelDocument start = truth.withData(Documents.withPredictedValues(truth, made))
@@ -129,10 +143,10 @@ class FitServiceTest {
                         free("limit", "eV", "5")));
         FitResult result = service.fit(FitRequest.of(start, "core"), SolveMonitor.NONE);
         for (Parameter parameter : exact) {
-            double expected = truth.parameters().get(exact.indexOf(parameter)).shape()
-                            instanceof ParameterShape.Scalar scalar
-                    ? scalar.setting().value().value()
-                    : Double.NaN;
+            double expected =
+                    truth.parameters().get(exact.indexOf(parameter)).shape() instanceof ParameterShape.Scalar scalar
+                            ? scalar.setting().value().value()
+                            : Double.NaN;
             assertThat(value(result, parameter.name()))
                     .as(parameter.name())
                     .isCloseTo(expected, within(1e-9 * Math.abs(expected)));

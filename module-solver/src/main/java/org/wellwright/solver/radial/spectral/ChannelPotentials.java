@@ -89,8 +89,8 @@ final class ChannelPotentials {
     }
 
     /**
-     * Whether Hu of a trial function r^s times a polynomial is square integrable: V less singular than r^−(s+½). Where it
-     * is not, bounds from residuals do not exist for such functions.
+     * Whether Hu of a trial function r^s times a polynomial is square integrable: V less singular than r^−(s+½). Where
+     * it is not, bounds from residuals do not exist for such functions.
      */
     boolean residualExists() {
         for (int c = 0; c < channels; c++) {

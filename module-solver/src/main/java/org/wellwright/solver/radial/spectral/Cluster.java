@@ -6,10 +6,10 @@ import org.wellwright.solver.numerics.SymmetricEigen;
  * Bounds of k neighbouring levels from k trial functions at once, for levels nearer to each other than their residuals
  * allow one by one.
  *
- * <p>With A0, A1, A2 the Gram matrices of u, Hu (against u and each other) and no level in (levels of the cluster, ν): the
- * solutions of (A1 − νA0) x = τ (A2 − 2νA1 + ν²A0) x bound the levels by ν + 1/τ, from below for ν above the cluster and
- * from above for ν below it (Lehmann 1949; Goerisch and He 1990). Energies are taken from a reference ρ so that nothing
- * cancels.
+ * <p>With A0, A1, A2 the Gram matrices of u, Hu (against u and each other) and no level in (levels of the cluster, ν):
+ * the solutions of (A1 − νA0) x = τ (A2 − 2νA1 + ν²A0) x bound the levels by ν + 1/τ, from below for ν above the
+ * cluster and from above for ν below it (Lehmann 1949; Goerisch and He 1990). Energies are taken from a reference ρ so
+ * that nothing cancels.
  */
 final class Cluster {
     private final int size;

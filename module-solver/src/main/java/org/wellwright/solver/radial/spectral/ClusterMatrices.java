@@ -73,7 +73,15 @@ final class ClusterMatrices {
     }
 
     private void add(
-            Element element, int e, int i, int j, double[][][] u, double[][][] hu, double[] gram, double[] first, double[] second) {
+            Element element,
+            int e,
+            int i,
+            int j,
+            double[][][] u,
+            double[][][] hu,
+            double[] gram,
+            double[] first,
+            double[] second) {
         int n = trials.size();
         double weak = kinetic(e, trials.get(i), trials.get(j));
         double mass = 0;

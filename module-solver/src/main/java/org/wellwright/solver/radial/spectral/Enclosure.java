@@ -6,9 +6,9 @@ import java.util.List;
 /**
  * Two-sided bounds of the true operator's levels from the residuals of C¹ trial functions.
  *
- * <p>With E_{n−1} ≤ a &lt; ρ &lt; b ≤ E_{n+1} and ε = ‖Hu − ρu‖ the level lies in [ρ − ε²/(b − ρ), ρ + ε²/(ρ − a)] (Temple
- * 1928; Kato 1949); the lowest level lies below ρ itself. Neighbours too near for that are bounded together, see
- * {@link Cluster}.
+ * <p>With E_{n−1} ≤ a &lt; ρ &lt; b ≤ E_{n+1} and ε = ‖Hu − ρu‖ the level lies in [ρ − ε²/(b − ρ), ρ + ε²/(ρ − a)]
+ * (Temple 1928; Kato 1949); the lowest level lies below ρ itself. Neighbours too near for that are bounded together,
+ * see {@link Cluster}.
  */
 final class Enclosure {
     private static final int LARGEST_CLUSTER = 6;
@@ -59,7 +59,8 @@ final class Enclosure {
         double distance = b.smoothEnergy() - a.smoothEnergy();
         double square = Math.max(a.residual() * a.residual(), b.residual() * b.residual());
         return distance < 4 * (a.residual() + b.residual() + a.rounding() + b.rounding())
-                || square > 0.2 * distance * Math.min(a.rounding(), b.rounding()) && distance < 1e-3 * (a.scale() + b.scale());
+                || square > 0.2 * distance * Math.min(a.rounding(), b.rounding())
+                        && distance < 1e-3 * (a.scale() + b.scale());
     }
 
     private double floorOf(int j) {

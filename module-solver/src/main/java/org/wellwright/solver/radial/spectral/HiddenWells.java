@@ -8,9 +8,9 @@ import org.wellwright.solver.potential.TermEvaluator;
 import org.wellwright.solver.radial.ChannelTerm;
 
 /**
- * Looks for wells that no sample has met, with the interval bounds of the terms: intervals whose bound lies below a level
- * are halved, the lowest first, until the bound rises above it or a sample falls below it. Where a term gives no bounds
- * nothing can be found (Moore 1966, chapter 6, for the search).
+ * Looks for wells that no sample has met, with the interval bounds of the terms: intervals whose bound lies below a
+ * level are halved, the lowest first, until the bound rises above it or a sample falls below it. Where a term gives no
+ * bounds nothing can be found (Moore 1966, chapter 6, for the search).
  */
 final class HiddenWells {
     private static final int BUDGET = 600;
@@ -48,7 +48,8 @@ final class HiddenWells {
         int count = 0;
         for (int used = 0; used < BUDGET && !open.isEmpty() && count < found.length; used++) {
             Piece piece = open.poll();
-            double middle = piece.to > 4 * piece.from ? Math.sqrt(piece.from * piece.to) : 0.5 * (piece.from + piece.to);
+            double middle =
+                    piece.to > 4 * piece.from ? Math.sqrt(piece.from * piece.to) : 0.5 * (piece.from + piece.to);
             if (!(middle > piece.from && middle < piece.to)) {
                 continue;
             }
@@ -84,7 +85,8 @@ final class HiddenWells {
         double[] rows = new double[channels];
         for (int c = 0; c < channels; c++) {
             double strength = potentials.kinetic() * (potentials.centrifugal(c) + 0.25);
-            rows[c] = common.lower() + potentials.problem().channels().get(c).threshold()
+            rows[c] = common.lower()
+                    + potentials.problem().channels().get(c).threshold()
                     + strength / (strength > 0 ? to * to : from * from);
         }
         for (ChannelTerm term : potentials.problem().rest()) {

@@ -367,7 +367,9 @@ final class Layout {
     Element[] continued(Element[] inside) {
         beyond = new ArrayList<>();
         double edge = edge();
-        while (edge < potentials.problem().outerWall() && edge < 0x1p120 && potentials.strengthBeyond(edge) > 1e-7
+        while (edge < potentials.problem().outerWall()
+                && edge < 0x1p120
+                && potentials.strengthBeyond(edge) > 1e-7
                 && beyond.size() < 40) {
             Leaf next = leaf(edge, ladder.outward(edge));
             beyond.add(next);

@@ -124,9 +124,7 @@ final class LevelFinder {
             }
             boolean shrinking = move < 0.5 * lastMove;
             lastMove = inside && shrinking ? move : Double.POSITIVE_INFINITY;
-            shift = inside && shrinking
-                    ? Math.min(Math.max(next, low[i]), high[i])
-                    : 0.5 * (low[i] + high[i]);
+            shift = inside && shrinking ? Math.min(Math.max(next, low[i]), high[i]) : 0.5 * (low[i] + high[i]);
         }
         return cluster(i, 0.5 * (low[i] + high[i]), found, edges);
     }

@@ -9,8 +9,8 @@ import org.wellwright.solver.radial.LevelSearch;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /**
- * Finds the energy up to which a search must look and a mesh that carries all levels below it: semiclassical counts give
- * the first guess, counts of the condensed pencil decide.
+ * Finds the energy up to which a search must look and a mesh that carries all levels below it: semiclassical counts
+ * give the first guess, counts of the condensed pencil decide.
  */
 final class MeshChoice {
     private final ChannelPotentials potentials;
@@ -163,9 +163,8 @@ final class MeshChoice {
         double low = bottom;
         double high = energy;
         for (int i = 0; i < 50 && layout.levels(high) > 1.02 * aim; i++) {
-            double middle = Double.isInfinite(limit)
-                    ? 0.5 * (low + high)
-                    : limit - Math.sqrt((limit - low) * (limit - high));
+            double middle =
+                    Double.isInfinite(limit) ? 0.5 * (low + high) : limit - Math.sqrt((limit - low) * (limit - high));
             if (!(middle > low && middle < high)) {
                 break;
             }
@@ -179,8 +178,8 @@ final class MeshChoice {
     }
 
     /**
-     * A mesh for every level below the threshold, however near; returns their number. A level nearer to the threshold than
-     * 1e-26 of the depth is not looked for.
+     * A mesh for every level below the threshold, however near; returns their number. A level nearer to the threshold
+     * than 1e-26 of the depth is not looked for.
      */
     private int meshToThreshold() {
         double depth = threshold - survey.floor();

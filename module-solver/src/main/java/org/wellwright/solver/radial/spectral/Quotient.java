@@ -43,6 +43,7 @@ final class Quotient {
     double smoothEnergy;
     /** ‖Hu − ρu‖/‖u‖ of the smoothed trial function. */
     double residual;
+
     private final double[] residualShare;
     private final double[] quadratureShare;
 

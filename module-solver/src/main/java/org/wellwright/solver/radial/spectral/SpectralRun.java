@@ -102,25 +102,20 @@ final class SpectralRun {
         Trial smooth = trial.with(quotient.smoothCoefficients());
         smooth = smooth.times(1 / Math.sqrt(smooth.norm()));
         return new Solution(
-                smooth,
-                energy,
-                quotient.smoothEnergy,
-                quotient.residual,
-                estimate,
-                rounding,
-                scale,
-                quotient.shares());
+                smooth, energy, quotient.smoothEnergy, quotient.residual, estimate, rounding, scale, quotient.shares());
     }
 
     /**
-     * What the difference of the two rules says of the better one: as it is when it is large, and quadratically less below
-     * 1e-12, since both converge geometrically there.
+     * What the difference of the two rules says of the better one: as it is when it is large, and quadratically less
+     * below 1e-12, since both converge geometrically there.
      */
     private static double trusted(double difference, double scale) {
         return difference * Math.min(1, difference / (1e-12 * scale));
     }
 
-    /** The elements to be cut so that all bounds become as narrow as asked; null if they are, or if cutting cannot help. */
+    /**
+     * The elements to be cut so that all bounds become as narrow as asked; null if they are, or if cutting cannot help.
+     */
     private boolean[] mark(List<Solution> solutions, Enclosure enclosure) {
         boolean[] marked = new boolean[mesh.edges().length - 1];
         boolean any = false;

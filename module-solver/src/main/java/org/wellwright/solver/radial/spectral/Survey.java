@@ -4,8 +4,9 @@ import java.util.Arrays;
 
 /**
  * A first look at the lower envelope of a problem over sixty decades of r: two radii an octave, then closer and closer
- * around each minimum until a well of any width that shows in the first samples is resolved, then, once it is known up to
- * which energy, wherever the interval bounds of V leave room for a well that does not. Values that overflow are taken as forbidden.
+ * around each minimum until a well of any width that shows in the first samples is resolved, then, once it is known up
+ * to which energy, wherever the interval bounds of V leave room for a well that does not. Values that overflow are
+ * taken as forbidden.
  */
 final class Survey {
     private static final int HALF_OCTAVES = 200;
