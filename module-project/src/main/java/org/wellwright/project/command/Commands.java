@@ -8,7 +8,7 @@ final class Commands {
 
     /** Names in the order of the overview. */
     static List<String> names() {
-        return List.of("bound", "families", "particles");
+        return List.of("bound");
     }
 
     /** The command of a name, or null. Only this one is made. */

@@ -62,6 +62,10 @@ record Input(String command, Map<String, List<String>> options, List<String> pos
         double number;
         try {
             number = Double.parseDouble(text.strip());
+            // Java alone takes 1d, 1f and 0x1p0 for numbers.
+            if (text.indexOf('x') >= 0 || text.strip().endsWith("d") || text.strip().endsWith("f")) {
+                throw new NumberFormatException(text);
+            }
         } catch (NumberFormatException e) {
             throw new UsageException(place + " is '" + Names.shortened(text) + "', not a number", "write a number such as 0.5 or -1e-3");
         }

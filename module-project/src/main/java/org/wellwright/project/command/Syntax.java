@@ -135,6 +135,11 @@ final class Syntax {
         return "wellwright-batch " + command + (positionals.isEmpty() ? "" : " " + String.join(" ", positionals)) + (entries.isEmpty() ? "" : " [options]");
     }
 
+    /** What the command does, in a sentence. */
+    String summary() {
+        return summary;
+    }
+
     /** The help text. */
     String help() {
         StringBuilder text = new StringBuilder(summary).append("\n\n  ").append(usage()).append("\n\n");

@@ -4,6 +4,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
 import org.wellwright.project.Project;
+import org.wellwright.solver.Problem;
+import org.wellwright.solver.model.ModelCheck;
 
 /** Reads and saves project files. */
 public final class ProjectFile {
@@ -17,11 +19,26 @@ public final class ProjectFile {
      *
      * @param project the project
      * @param unknown pointers of the members that are kept but not used
+     * @param problems what is wrong between the parts of the document, each with line and pointer: names that lead nowhere, units that do not fit,
+     *     circular ties
      */
-    public record Content(Project project, List<String> unknown) {
-        /** Copies the list. */
+    public record Content(Project project, List<String> unknown, List<Problem> problems) {
+        /** Copies the lists. */
         public Content {
             unknown = List.copyOf(unknown);
+            problems = List.copyOf(problems);
+        }
+
+        /**
+         * The project, if its parts fit each other.
+         *
+         * @throws ProjectFileException with every fault found
+         */
+        public Project sound() {
+            if (!problems.isEmpty()) {
+                throw new ProjectFileException(problems.subList(0, Math.min(Faults.MOST, problems.size())));
+            }
+            return project;
         }
     }
 
@@ -36,9 +53,9 @@ public final class ProjectFile {
     }
 
     /**
-     * Reads a project and says what it did not understand.
+     * Reads a project and says what is wrong with it.
      *
-     * @throws ProjectFileException as {@link #read}
+     * @throws ProjectFileException if the file itself cannot be used
      */
     public static Content open(Path file) {
         return parse(SafeFile.read(file), file.toString());
@@ -62,7 +79,19 @@ public final class ProjectFile {
             // check() below throws what was noted.
         }
         faults.check();
-        return new Content(project, reading.unknownPointers());
+        return new Content(project, reading.unknownPointers(), located(ModelCheck.problems(project.document()), faults));
+    }
+
+    /** The checker says where by pointer, perhaps with a column after a comma. */
+    private static List<Problem> located(List<Problem> problems, Faults faults) {
+        return problems.stream()
+                .map(problem -> {
+                    String where = problem.where();
+                    int comma = where.indexOf(", ");
+                    String pointer = comma < 0 ? where : where.substring(0, comma);
+                    return new Problem(problem.what(), faults.where(pointer) + where.substring(pointer.length()), problem.remedy());
+                })
+                .toList();
     }
 
     /**

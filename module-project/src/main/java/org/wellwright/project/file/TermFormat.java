@@ -109,22 +109,22 @@ final class TermFormat {
     }
 
     private static TableTerm table(ObjectIn in, TermFrame frame) {
-        in.knowing("radiusUnit", "valueUnit", "points", "interpolation", "inner", "outer");
+        in.knowing("radiusUnit", "valueUnit", "knots", "interpolation", "inner", "outer");
         List<TableKnot> knots = new ArrayList<>();
-        for (JsonValue point : in.list("points")) {
+        for (JsonValue point : in.list("knots")) {
             int position = knots.size();
             if (!(point instanceof JsonArray pair
                     && pair.items().size() == 2
                     && pair.items().get(0) instanceof JsonNumber radius)) {
                 throw in.fault(
-                        "points",
-                        "point " + (position + 1) + " of the table is not [radius, value]",
+                        "knots",
+                        "knot " + (position + 1) + " of the table is not [radius, value]",
                         "write [number, number]");
             }
             ExactNumber exact = in.make(() -> new ExactNumber(radius.text()));
-            in.spelled("/points/" + position + "/r", exact);
+            in.spelled("/knots/" + position + "/r", exact);
             Argument value = Arguments.read(
-                    in, "points", "/points/" + position + "/v", pair.items().get(1));
+                    in, "knots", "/knots/" + position + "/v", pair.items().get(1));
             knots.add(in.make(() -> new TableKnot(exact.value(), value)));
         }
         TableInterpolation interpolation = interpolation(in.object("interpolation"));
@@ -206,13 +206,13 @@ final class TermFormat {
         for (TableKnot knot : table.knots()) {
             int position = points.size();
             points.add(new JsonArray(List.of(
-                    out.real("/points/" + position + "/r", knot.radius()),
-                    Arguments.json(out, "/points/" + position + "/v", knot.value()))));
+                    out.real("/knots/" + position + "/r", knot.radius()),
+                    Arguments.json(out, "/knots/" + position + "/v", knot.value()))));
         }
         TableInterpolation usual = TableInterpolation.STANDARD;
         out.text("radiusUnit", table.radiusUnit(), "")
                 .text("valueUnit", table.valueUnit(), "")
-                .put("points", new JsonArray(points))
+                .put("knots", new JsonArray(points))
                 .object(
                         "interpolation",
                         table.interpolation(),

@@ -115,7 +115,7 @@ class BrokenFilesTest {
                 "/models/0/curves/0/terms/0/formula | \"formula\": \"-a/r*exp(-r/c)\" | \"formula\": 3 | must be a text",
                 "/models/0/curves/0/terms/0 | \"formula\": \"-a/r*exp(-r/c)\" | \"formulae\": \"a\" | a term needs one of",
                 "/models/0/curves/0/terms/2/table | [1.50, \"by_system\"] | [0.5, 1] | must ascend",
-                "/models/0/curves/0/terms/2/table/points | [1.50, \"by_system\"] | [1.5] | not [radius",
+                "/models/0/curves/0/terms/2/table/knots | [1.50, \"by_system\"] | [1.5] | not [radius",
                 "/models/0/curves/0/terms/1/channels/l | \"l\": \"1..3\" | \"l\": \"one\" | write 2",
                 "/groups/0 | \"sigma\": 0.02, | \"sigma\": 0, | sigma > 0",
                 "/data/0 | \"sigma\": 0.0020, | \"sigma\": 0, | must be positive",
