@@ -56,7 +56,7 @@ final class BoundCommand implements Command {
     public int run(Input input, Console console) {
         Input.Format format = input.format();
         Kinetic kinetic = Kinetic.of(input);
-        List<Integer> orbitals = orbitals(input.value("l"));
+        List<Integer> orbitals = input.has("l") ? Orbitals.parse(input.value("l")) : List.of(0);
         LevelSearch search = search(input);
         Formula formula = FormulaText.parse(input.required("formula", "\"-a/r\""));
         double[] values = values(formula, input.values("set"));
@@ -92,31 +92,6 @@ final class BoundCommand implements Command {
             throw new UsageException("--tolerance is " + input.value("tolerance"), "write a number from 0 to 1, such as 1e-12");
         }
         return new LevelSearch(input.count("count", 1, LevelSearch.ALL), Double.POSITIVE_INFINITY, tolerance);
-    }
-
-    private static List<Integer> orbitals(String text) {
-        if (text == null) {
-            return List.of(0);
-        }
-        List<Integer> orbitals = new ArrayList<>();
-        for (String part : text.split(",", -1)) {
-            int dots = part.indexOf("..");
-            int from = Input.whole("--l", dots < 0 ? part : part.substring(0, dots), 0, 10_000);
-            int to = dots < 0 ? from : Input.whole("--l", part.substring(dots + 2), 0, 10_000);
-            if (to < from) {
-                throw new UsageException("--l is " + Names.shortened(text) + ", which runs backwards", "write " + to + ".." + from);
-            }
-            for (int orbital = from; orbital <= to; orbital++) {
-                if (orbitals.contains(orbital)) {
-                    throw new UsageException("--l names l = " + orbital + " twice", "name it once");
-                }
-                orbitals.add(orbital);
-                if (orbitals.size() > 1000) {
-                    throw new UsageException("--l names more than 1000 values", "ask for fewer at a time");
-                }
-            }
-        }
-        return orbitals;
     }
 
     private static double[] range(String text) {

@@ -8,13 +8,17 @@ final class Commands {
 
     /** Names in the order of the overview. */
     static List<String> names() {
-        return List.of("bound");
+        return List.of("bound", "solve", "compare", "fit", "validate");
     }
 
     /** The command of a name, or null. Only this one is made. */
     static Command named(String name) {
         return switch (name) {
             case "bound" -> new BoundCommand();
+            case "solve" -> new SolveCommand();
+            case "compare" -> new CompareCommand();
+            case "fit" -> new FitCommand();
+            case "validate" -> new ValidateCommand();
             default -> null;
         };
     }

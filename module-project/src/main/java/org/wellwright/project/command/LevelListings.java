@@ -60,7 +60,7 @@ final class LevelListings {
         if (spins) {
             header.add("J");
         }
-        header.addAll(List.of("n_r", "energy" + unit, "lower bound", "upper bound", "kind", "complete"));
+        header.addAll(List.of("n_r", "energy" + unit, "± at most", "kind", "complete"));
         TextTable table = new TextTable(header.toArray(new String[0]));
         for (LevelRow row : listing.levels()) {
             Level level = row.level();
@@ -74,10 +74,9 @@ final class LevelListings {
                 cells.add(channel.twiceTotal() < 0 ? "" : half(channel.twiceTotal()));
             }
             cells.add(Integer.toString(level.index()));
-            double width = level.upper() - level.lower();
-            cells.add(Digits.of(level.energy(), width));
-            cells.add(Digits.plain(level.lower()));
-            cells.add(Digits.plain(level.upper()));
+            double bound = Math.max(level.upper() - level.energy(), level.energy() - level.lower());
+            cells.add(Digits.of(level.energy(), bound));
+            cells.add(Digits.significant(bound, 2));
             cells.add(LevelsJson.word(level.boundKind()));
             cells.add(LevelsJson.word(completeness(listing, row.place())));
             table.row(cells);

@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.nio.file.StandardOpenOption;
 import java.time.Instant;
 import java.time.temporal.ChronoUnit;
+import org.wellwright.project.Project;
 import org.wellwright.solver.Problem;
 
 /**
@@ -18,10 +19,12 @@ import org.wellwright.solver.Problem;
  * whatever becomes of it. Readers need none.
  */
 public final class ProjectLock implements AutoCloseable {
+    private final Path project;
     private final Path file;
     private final FileChannel channel;
 
-    private ProjectLock(Path file, FileChannel channel) {
+    private ProjectLock(Path project, Path file, FileChannel channel) {
+        this.project = project;
         this.file = file;
         this.channel = channel;
     }
@@ -52,7 +55,7 @@ public final class ProjectLock implements AutoCloseable {
                 // A former owner may have removed the file between opening and locking it; then the lock is on a file
                 // that nobody finds.
                 if (Files.exists(file) && Files.readString(file).equals(owner)) {
-                    return new ProjectLock(file, channel);
+                    return new ProjectLock(project, file, channel);
                 }
                 channel.close();
             }
@@ -64,6 +67,15 @@ public final class ProjectLock implements AutoCloseable {
                             "check the folder's permissions"),
                     e);
         }
+    }
+
+    /**
+     * Saves the project that is locked.
+     *
+     * @throws ProjectFileException if it cannot be written; the file is then as before
+     */
+    public void save(Project content) {
+        ProjectFile.save(project, content);
     }
 
     private static FileLock attempt(FileChannel channel) throws IOException {

@@ -1,9 +1,11 @@
 package org.wellwright.project.command.json;
 
 import java.io.StringWriter;
+import java.util.function.BiConsumer;
 import java.util.function.Consumer;
 import tools.jackson.core.JsonGenerator;
 import tools.jackson.core.ObjectWriteContext;
+import tools.jackson.core.PrettyPrinter;
 import tools.jackson.core.json.JsonFactory;
 
 /** The streaming generator with what every listing needs: numbers that are not finite become null, items stand on lines of their own. */
@@ -17,10 +19,20 @@ final class JsonText {
     /** Writes one object. */
     static String object(Consumer<JsonText> members) {
         StringWriter text = new StringWriter(4096);
-        try (JsonGenerator generator = new JsonFactory().createGenerator(ObjectWriteContext.empty(), text)) {
+        ObjectWriteContext context = new ObjectWriteContext.Base() {
+            @Override
+            public PrettyPrinter getPrettyPrinter() {
+                return new LinePrinter();
+            }
+
+            @Override
+            public boolean hasPrettyPrinter() {
+                return true;
+            }
+        };
+        try (JsonGenerator generator = new JsonFactory().createGenerator(context, text)) {
             generator.writeStartObject();
             members.accept(new JsonText(generator));
-            generator.writeRaw('\n');
             generator.writeEndObject();
         }
         return text.append('\n').toString();
@@ -54,9 +66,8 @@ final class JsonText {
         return this;
     }
 
-    /** An object on a line of its own. */
+    /** An object. */
     JsonText nested(String name, Consumer<JsonText> members) {
-        out.writeRaw(' ');
         out.writeName(name);
         out.writeStartObject();
         members.accept(this);
@@ -64,8 +75,8 @@ final class JsonText {
         return this;
     }
 
-    /** A list of objects, each on a line of its own. */
-    <T> JsonText items(String name, Iterable<T> values, java.util.function.BiConsumer<JsonText, T> write) {
+    /** A list of objects. */
+    <T> JsonText items(String name, Iterable<T> values, BiConsumer<JsonText, T> write) {
         out.writeName(name);
         out.writeStartArray();
         for (T value : values) {
@@ -77,19 +88,24 @@ final class JsonText {
         return this;
     }
 
-    /** A list of numbers. */
-    JsonText numbers(String name, double... values) {
+    /** A square matrix as a list of rows. */
+    JsonText rows(String name, int size, Entry entry) {
         out.writeName(name);
         out.writeStartArray();
-        for (double value : values) {
-            if (Double.isFinite(value)) {
-                out.writeNumber(value);
-            } else {
-                out.writeNull();
+        for (int row = 0; row < size; row++) {
+            out.writeStartArray();
+            for (int column = 0; column < size; column++) {
+                out.writeNumber(entry.at(row, column));
             }
+            out.writeEndArray();
         }
         out.writeEndArray();
         return this;
+    }
+
+    /** An element of a matrix. */
+    interface Entry {
+        double at(int row, int column);
     }
 
     /** A list of texts. */
