@@ -14,10 +14,12 @@ import org.wellwright.solver.units.UnitExpression;
 import org.wellwright.solver.units.UnitSystem;
 
 /**
- * Levels and lines that the data fix, as energies in the project's unit: what a level diagram and a spectrum show of the measurements.
+ * Levels and lines that the data fix, as energies in the project's unit: what a level diagram and a spectrum show of
+ * the measurements.
  *
- * <p>A datum gives an energy by correcting the energy of a model: E(measured) = E(model) + δE, where δE follows from measured and calculated value. For an
- * energy that is the measured value itself; a line fixes a difference only, so its lower level comes from the model, which is named.
+ * <p>A datum gives an energy by correcting the energy of a model: E(measured) = E(model) + δE, where δE follows from
+ * measured and calculated value. For an energy that is the measured value itself; a line fixes a difference only, so
+ * its lower level comes from the model, which is named.
  */
 final class MeasuredLevels {
     private final ModelDocument document;
@@ -42,7 +44,8 @@ final class MeasuredLevels {
             if (Double.isFinite(energy + correction)) {
                 double[] sigmas = sigmas(datum, row, solved);
                 String reference = datum.levels().size() == 1 ? "" : comparison.model();
-                measured.add(new MeasuredLevel(upper.level(), energy + correction, sigmas[0], sigmas[1], datum.id(), reference));
+                measured.add(new MeasuredLevel(
+                        upper.level(), energy + correction, sigmas[0], sigmas[1], datum.id(), reference));
             }
         }
         return measured;
@@ -62,9 +65,13 @@ final class MeasuredLevels {
                 double line = energy(solved, upper) - energy(solved, lower);
                 ResidualRow row = row(comparison(comparisons, solved.model()), datum);
                 if (Double.isFinite(line) && row != null) {
-                    if (lines.stream().noneMatch(known -> known.model().isEmpty() && known.upper().equals(upper) && known.lower().equals(lower))) {
+                    if (lines.stream()
+                            .noneMatch(known -> known.model().isEmpty()
+                                    && known.upper().equals(upper)
+                                    && known.lower().equals(lower))) {
                         double sigma = sigmas(datum, row, solved)[1];
-                        lines.add(new SpectralLine("", upper, lower, line + correction(datum, row, solved), sigma, Double.NaN));
+                        lines.add(new SpectralLine(
+                                "", upper, lower, line + correction(datum, row, solved), sigma, Double.NaN));
                     }
                     lines.add(new SpectralLine(solved.model(), upper, lower, line, Double.NaN, Double.NaN));
                 }
@@ -97,7 +104,13 @@ final class MeasuredLevels {
     /** The only level, or the upper one of a line; null for other combinations and for what is no energy. */
     private static Datum.Contribution upper(Datum datum) {
         boolean energy = switch (datum.transform()) {
-            case NONE, VACUUM_WAVELENGTH, AIR_WAVELENGTH, FREQUENCY, PHOTON_EMISSION, PHOTON_ABSORPTION, ABSOLUTE_MASS -> true;
+            case NONE,
+                    VACUUM_WAVELENGTH,
+                    AIR_WAVELENGTH,
+                    FREQUENCY,
+                    PHOTON_EMISSION,
+                    PHOTON_ABSORPTION,
+                    ABSOLUTE_MASS -> true;
             case RATIO, RADIUS, WIDTH, RATE -> false;
         };
         List<Datum.Contribution> levels = datum.levels();
@@ -147,7 +160,8 @@ final class MeasuredLevels {
         double minus = datum.sigmaMinus().value();
         double plus = datum.sigmaPlus().value();
         if (wavelength(datum)) {
-            double slope = Math.abs((energy(solved, upper(datum).level()) - lowerEnergy(datum, solved)) / row.measured());
+            double slope =
+                    Math.abs((energy(solved, upper(datum).level()) - lowerEnergy(datum, solved)) / row.measured());
             return new double[] {plus * slope, minus * slope};
         }
         double factor = factor(datum);

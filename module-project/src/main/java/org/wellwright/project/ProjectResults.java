@@ -20,7 +20,8 @@ public final class ProjectResults {
      * @throws org.wellwright.solver.InvalidModelException if the document is faulty
      * @throws java.util.concurrent.CancellationException if the monitor says so
      */
-    public static FigureInput of(Project project, SolveScope scope, SolverService solver, FitService fits, SolveMonitor monitor) {
+    public static FigureInput of(
+            Project project, SolveScope scope, SolverService solver, FitService fits, SolveMonitor monitor) {
         ModelDocument document = project.document();
         ProjectSolver channels = new ProjectSolver(document, solver);
         List<SolvedModel> models = new ArrayList<>();

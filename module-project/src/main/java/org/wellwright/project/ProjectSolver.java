@@ -115,7 +115,9 @@ public final class ProjectSolver {
             case ONE_SPIN ->
                 orbital == 0
                         ? List.of(ChannelKey.ofTotal(0, 1))
-                        : List.of(ChannelKey.ofTotal(orbital, 2 * orbital - 1), ChannelKey.ofTotal(orbital, 2 * orbital + 1));
+                        : List.of(
+                                ChannelKey.ofTotal(orbital, 2 * orbital - 1),
+                                ChannelKey.ofTotal(orbital, 2 * orbital + 1));
             case TWO_SPINS -> {
                 List<ChannelKey> channels = new ArrayList<>(List.of(ChannelKey.ofSpins(orbital, 0, 2 * orbital)));
                 for (int total = Math.abs(orbital - 1); total <= orbital + 1; total++) {
@@ -150,7 +152,8 @@ public final class ProjectSolver {
         }
         List<SolveRequest> requests = new ArrayList<>();
         for (int i = 0; i < wanted.size(); i++) {
-            requests.add(SolveRequest.of(assembled.get(i).problem(), LevelSearch.first(wanted.get(i).count())));
+            requests.add(SolveRequest.of(
+                    assembled.get(i).problem(), LevelSearch.first(wanted.get(i).count())));
         }
         List<SolvedChannel> channels = new ArrayList<>();
         List<Spectrum> spectra = spectra(requests, wanted, problems, monitor);
@@ -165,11 +168,13 @@ public final class ProjectSolver {
                         spectra.get(i)));
             }
         }
-        return new SolvedModel(model.name(), channels, problems.stream().distinct().toList());
+        return new SolvedModel(
+                model.name(), channels, problems.stream().distinct().toList());
     }
 
     /** All at once on all cores; if one of them has no answer, one by one, so that the others are kept. */
-    private List<Spectrum> spectra(List<SolveRequest> requests, List<Wanted> wanted, List<Problem> problems, SolveMonitor monitor) {
+    private List<Spectrum> spectra(
+            List<SolveRequest> requests, List<Wanted> wanted, List<Problem> problems, SolveMonitor monitor) {
         try {
             return solver.solveAll(requests, monitor);
         } catch (WellwrightException one) {
@@ -187,8 +192,10 @@ public final class ProjectSolver {
     }
 
     private static Problem placed(Problem problem, Wanted channel) {
-        String place = channel.system() + ", curve '" + channel.curve() + "', " + channel.channel().describe();
-        return new Problem(problem.what(), problem.where().isEmpty() ? place : place + ", " + problem.where(), problem.remedy());
+        String place = channel.system() + ", curve '" + channel.curve() + "', "
+                + channel.channel().describe();
+        return new Problem(
+                problem.what(), problem.where().isEmpty() ? place : place + ", " + problem.where(), problem.remedy());
     }
 
     private static List<LevelKey> levels(Datum datum) {

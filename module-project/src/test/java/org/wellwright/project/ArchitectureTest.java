@@ -17,7 +17,9 @@ class ArchitectureTest {
     static final ArchRule jacksonStaysWhereJsonIsReadAndWritten = noClasses()
             .that()
             .resideOutsideOfPackages(
-                    "org.wellwright.project.file..", "org.wellwright.project.run..", "org.wellwright.project.command.json..")
+                    "org.wellwright.project.file..",
+                    "org.wellwright.project.run..",
+                    "org.wellwright.project.command.json..")
             .should()
             .dependOnClassesThat()
             .resideInAnyPackage("tools.jackson..", "com.fasterxml.jackson..");

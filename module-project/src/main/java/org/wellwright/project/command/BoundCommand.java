@@ -47,7 +47,10 @@ final class BoundCommand implements Command {
                 .option("l", "RANGE", "angular momenta: 2, 0..3 or 0,2,4 (without it 0)")
                 .option("count", "N", "the first N levels of each l; needed where there are infinitely many")
                 .option("range", "R1,R2", "the formula holds from R1 to R2, V = 0 elsewhere")
-                .option("tolerance", "T", "accuracy asked for, relative to max(|E|, ⟨T⟩ + ⟨|V|⟩)\n(without it the limit of the arithmetic)")
+                .option(
+                        "tolerance",
+                        "T",
+                        "accuracy asked for, relative to max(|E|, ⟨T⟩ + ⟨|V|⟩)\n(without it the limit of the arithmetic)")
                 .flag("verify", "compute every level by a second method and compare")
                 .result("table|csv|json");
     }
@@ -68,7 +71,8 @@ final class BoundCommand implements Command {
                 TermEvaluator whole = formula.bind(values, ChannelFacts.ofOrbital(orbital));
                 shared = range == null ? whole : new RangedTerm(whole, 1, range[0], range[1]);
             }
-            requests.add(new SolveRequest(RadialProblem.single(kinetic.constant(), orbital, shared), search, input.has("verify")));
+            requests.add(new SolveRequest(
+                    RadialProblem.single(kinetic.constant(), orbital, shared), search, input.has("verify")));
         }
         List<Spectrum> spectra = solver.get().solveAll(requests, SolveMonitor.NONE);
         List<ChannelRow> channels = new ArrayList<>();
@@ -89,7 +93,8 @@ final class BoundCommand implements Command {
     private static LevelSearch search(Input input) {
         double tolerance = input.number("tolerance", LevelSearch.FULL);
         if (!(tolerance >= 0 && tolerance < 1)) {
-            throw new UsageException("--tolerance is " + input.value("tolerance"), "write a number from 0 to 1, such as 1e-12");
+            throw new UsageException(
+                    "--tolerance is " + input.value("tolerance"), "write a number from 0 to 1, such as 1e-12");
         }
         return new LevelSearch(input.count("count", 1, LevelSearch.ALL), Double.POSITIVE_INFINITY, tolerance);
     }
@@ -100,7 +105,9 @@ final class BoundCommand implements Command {
         }
         String[] parts = text.split(",", -1);
         if (parts.length != 2) {
-            throw new UsageException("--range is '" + Names.shortened(text) + "'", "write two radii with a comma between them, such as 0,5");
+            throw new UsageException(
+                    "--range is '" + Names.shortened(text) + "'",
+                    "write two radii with a comma between them, such as 0,5");
         }
         double from = Input.number("--range", parts[0]);
         double to = parts[1].strip().equals("inf") ? Double.POSITIVE_INFINITY : Input.number("--range", parts[1]);
@@ -119,7 +126,8 @@ final class BoundCommand implements Command {
                 throw new UsageException("--set is '" + Names.shortened(setting) + "'", "write --set NAME=VALUE");
             }
             String name = setting.substring(0, equals).strip();
-            if (given.put(name, Input.number("--set " + Names.shortened(name), setting.substring(equals + 1))) != null) {
+            if (given.put(name, Input.number("--set " + Names.shortened(name), setting.substring(equals + 1)))
+                    != null) {
                 throw new UsageException("--set " + name + " is given twice", "give it once");
             }
         }
@@ -135,7 +143,8 @@ final class BoundCommand implements Command {
         missing.removeAll(given.keySet());
         if (!missing.isEmpty()) {
             throw new UsageException(
-                    "the formula's " + String.join(", ", missing) + (missing.size() == 1 ? " has no value" : " have no values"),
+                    "the formula's " + String.join(", ", missing)
+                            + (missing.size() == 1 ? " has no value" : " have no values"),
                     "add --set " + missing.get(0) + "=VALUE");
         }
         double[] values = new double[names.size()];

@@ -25,8 +25,7 @@ final class Commands {
 
     /** The list of commands. */
     static String overview() {
-        StringBuilder text = new StringBuilder(
-                """
+        StringBuilder text = new StringBuilder("""
                 Levels of two particles bound by a central force: solve, compare, fit, report.
 
                   wellwright-batch COMMAND [options]
@@ -34,8 +33,13 @@ final class Commands {
                 """);
         for (String name : names()) {
             Command command = named(name);
-            text.append("  ").append(name).append(" ".repeat(12 - name.length())).append(command.syntax().summary()).append('\n');
+            text.append("  ")
+                    .append(name)
+                    .append(" ".repeat(12 - name.length()))
+                    .append(command.syntax().summary())
+                    .append('\n');
         }
-        return text.append("\nwellwright-batch COMMAND --help shows what a command accepts.\n").toString();
+        return text.append("\nwellwright-batch COMMAND --help shows what a command accepts.\n")
+                .toString();
     }
 }

@@ -18,7 +18,8 @@ import org.wellwright.solver.radial.SolveMonitor;
 final class CompareCommand implements Command {
     @Override
     public Syntax syntax() {
-        return new Syntax("compare", "All models beside the data at the values in the file, best first.", "PROJECT").result("table|csv|json");
+        return new Syntax("compare", "All models beside the data at the values in the file, best first.", "PROJECT")
+                .result("table|csv|json");
     }
 
     @Override
@@ -28,7 +29,8 @@ final class CompareCommand implements Command {
         Project project = ProjectArgument.read(file);
         ProjectArgument.model(input, project, file);
         if (project.document().data().isEmpty()) {
-            throw new ProjectFileException(new Problem("the project has no data to compare with", file.toString(), "add some under \"data\""));
+            throw new ProjectFileException(
+                    new Problem("the project has no data to compare with", file.toString(), "add some under \"data\""));
         }
         Comparison comparison = Services.fit().compare(project.document(), SolveMonitor.NONE);
         for (ModelComparison model : comparison.models()) {
@@ -65,12 +67,26 @@ final class CompareCommand implements Command {
             }
         }
         return CsvText.of(
-                List.of("rank", "model", "datum", "levels", "measured", "sigma", "calculated", "groupShift", "residual", "unit", "used"), rows);
+                List.of(
+                        "rank",
+                        "model",
+                        "datum",
+                        "levels",
+                        "measured",
+                        "sigma",
+                        "calculated",
+                        "groupShift",
+                        "residual",
+                        "unit",
+                        "used"),
+                rows);
     }
 
     private static String table(Comparison comparison, Project project) {
         StringBuilder text = new StringBuilder();
-        text.append("uncertainties: ").append(Words.weighting(comparison.mode())).append("\n\n");
+        text.append("uncertainties: ")
+                .append(Words.weighting(comparison.mode()))
+                .append("\n\n");
         TextTable ranking = new TextTable("rank", "model", "χ²", "ν", "χ²/ν", "χ² + 2k", "worst datum");
         for (ModelComparison model : comparison.models()) {
             ranking.row(List.of(
@@ -89,7 +105,10 @@ final class CompareCommand implements Command {
         for (int i = 0; i < project.document().data().size(); i++) {
             ResidualRow first = comparison.models().get(0).rows().get(i);
             List<String> cells = new ArrayList<>(List.of(
-                    first.datum(), Words.levels(project.document(), first.datum()), Digits.of(first.measured(), first.sigma()), first.unit()));
+                    first.datum(),
+                    Words.levels(project.document(), first.datum()),
+                    Digits.of(first.measured(), first.sigma()),
+                    first.unit()));
             for (ModelComparison model : comparison.models()) {
                 cells.add(Digits.decimals(model.rows().get(i).residual(), 2));
             }

@@ -22,7 +22,10 @@ final class CsvText {
     private static void line(StringBuilder text, List<String> cells) {
         for (int i = 0; i < cells.size(); i++) {
             String cell = cells.get(i);
-            boolean quoted = cell.indexOf(',') >= 0 || cell.indexOf('"') >= 0 || cell.indexOf('\n') >= 0 || cell.indexOf('\r') >= 0;
+            boolean quoted = cell.indexOf(',') >= 0
+                    || cell.indexOf('"') >= 0
+                    || cell.indexOf('\n') >= 0
+                    || cell.indexOf('\r') >= 0;
             text.append(i == 0 ? "" : ",").append(quoted ? '"' + cell.replace("\"", "\"\"") + '"' : cell);
         }
         text.append("\r\n");

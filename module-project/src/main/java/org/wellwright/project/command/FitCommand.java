@@ -98,7 +98,12 @@ final class FitCommand implements Command {
                     parameter.free() ? "yes" : "no"));
         }
         for (GroupError error : fit.groupErrors()) {
-            rows.add(List.of("group " + error.group(), CsvText.number(error.value()), CsvText.number(error.sigma()), error.unit(), "yes"));
+            rows.add(List.of(
+                    "group " + error.group(),
+                    CsvText.number(error.value()),
+                    CsvText.number(error.sigma()),
+                    error.unit(),
+                    "yes"));
         }
         return CsvText.of(List.of("name", "value", "sigma", "unit", "free"), rows);
     }
@@ -109,16 +114,26 @@ final class FitCommand implements Command {
         for (FittedParameter parameter : fit.parameters()) {
             parameters.row(List.of(
                     parameter.name(),
-                    parameter.free() ? Digits.plusMinus(parameter.value(), parameter.sigma()) : Digits.plain(parameter.value()),
+                    parameter.free()
+                            ? Digits.plusMinus(parameter.value(), parameter.sigma())
+                            : Digits.plain(parameter.value()),
                     parameter.unit(),
                     Words.state(parameter)));
         }
         for (GroupError error : fit.groupErrors()) {
-            parameters.row(List.of("shift of " + error.group(), Digits.plusMinus(error.value(), error.sigma()), error.unit(), "group"));
+            parameters.row(List.of(
+                    "shift of " + error.group(),
+                    Digits.plusMinus(error.value(), error.sigma()),
+                    error.unit(),
+                    "group"));
         }
         for (ModelErrorEstimate error : fit.modelErrors()) {
             String of = error.group().isEmpty() ? "" : " of " + error.group();
-            parameters.row(List.of("σ_mod" + of, Digits.significant(error.value(), 2), error.unit(), error.fitted() ? "fitted" : "fixed"));
+            parameters.row(List.of(
+                    "σ_mod" + of,
+                    Digits.significant(error.value(), 2),
+                    error.unit(),
+                    error.fitted() ? "fitted" : "fixed"));
         }
         text.append(parameters).append('\n').append(Words.quality(fit)).append("\n\n");
         TextTable residuals = new TextTable("datum", "levels", "measured", "calculated", "residual (σ)", "unit", "");

@@ -63,11 +63,14 @@ record Input(String command, Map<String, List<String>> options, List<String> pos
         try {
             number = Double.parseDouble(text.strip());
             // Java alone takes 1d, 1f and 0x1p0 for numbers.
-            if (text.indexOf('x') >= 0 || text.strip().endsWith("d") || text.strip().endsWith("f")) {
+            if (text.indexOf('x') >= 0
+                    || text.strip().endsWith("d")
+                    || text.strip().endsWith("f")) {
                 throw new NumberFormatException(text);
             }
         } catch (NumberFormatException e) {
-            throw new UsageException(place + " is '" + Names.shortened(text) + "', not a number", "write a number such as 0.5 or -1e-3");
+            throw new UsageException(
+                    place + " is '" + Names.shortened(text) + "', not a number", "write a number such as 0.5 or -1e-3");
         }
         if (!Double.isFinite(number)) {
             throw new UsageException(place + " is " + Names.shortened(text) + ", not a finite number", "");
@@ -90,7 +93,8 @@ record Input(String command, Map<String, List<String>> options, List<String> pos
         try {
             number = Integer.parseInt(text.strip());
         } catch (NumberFormatException e) {
-            throw new UsageException(place + " is '" + Names.shortened(text) + "'", "write a whole number from " + least);
+            throw new UsageException(
+                    place + " is '" + Names.shortened(text) + "'", "write a whole number from " + least);
         }
         if (number < least || number > most) {
             throw new UsageException(place + " is " + number, "write a whole number from " + least + " to " + most);
@@ -107,7 +111,8 @@ record Input(String command, Map<String, List<String>> options, List<String> pos
             case "table" -> Format.TABLE;
             case "csv" -> Format.CSV;
             case "json" -> Format.JSON;
-            default -> throw new UsageException("--format is '" + Names.shortened(value) + "'", "use table, csv or json");
+            default ->
+                throw new UsageException("--format is '" + Names.shortened(value) + "'", "use table, csv or json");
         };
     }
 }

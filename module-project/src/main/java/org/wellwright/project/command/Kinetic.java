@@ -24,21 +24,31 @@ record Kinetic(double constant, String energyUnit, String lengthUnit) {
             double constant = positive(input, "kinetic");
             return units == null
                     ? new Kinetic(constant, "1", "1")
-                    : new Kinetic(constant, units.energy().symbol(), units.length().symbol());
+                    : new Kinetic(
+                            constant, units.energy().symbol(), units.length().symbol());
         }
         if (units == null) {
-            throw new UsageException("a mass needs units", "add --units, one of " + String.join(", ", UnitSystem.ALL.stream().map(UnitSystem::id).toList()));
+            throw new UsageException(
+                    "a mass needs units",
+                    "add --units, one of "
+                            + String.join(
+                                    ", ",
+                                    UnitSystem.ALL.stream().map(UnitSystem::id).toList()));
         }
         double mass = input.has("pair")
                 ? ParticleCatalogue.STANDARD.pair(input.value("pair")).reducedMass(units)
                 : positive(input, "reduced-mass");
-        return new Kinetic(units.kineticFactor() / mass, units.energy().symbol(), units.length().symbol());
+        return new Kinetic(
+                units.kineticFactor() / mass,
+                units.energy().symbol(),
+                units.length().symbol());
     }
 
     private static double positive(Input input, String option) {
         double value = input.number(option, Double.NaN);
         if (!(value > 0)) {
-            throw new UsageException("--" + option + " is " + input.value(option) + ", not positive", "write a positive number");
+            throw new UsageException(
+                    "--" + option + " is " + input.value(option) + ", not positive", "write a positive number");
         }
         return value;
     }

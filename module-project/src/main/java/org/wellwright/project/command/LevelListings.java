@@ -27,13 +27,15 @@ final class LevelListings {
     private static String csv(LevelListing listing) {
         boolean project = project(listing);
         List<String> header = new ArrayList<>(project ? List.of("model", "curve", "system", "label") : List.of());
-        header.addAll(List.of("l", "J", "index", "energy", "lower", "upper", "boundKind", "width", "complete", "energyUnit"));
+        header.addAll(
+                List.of("l", "J", "index", "energy", "lower", "upper", "boundKind", "width", "complete", "energyUnit"));
         List<List<String>> rows = new ArrayList<>();
         for (LevelRow row : listing.levels()) {
             Level level = row.level();
             List<String> cells = new ArrayList<>();
             if (project) {
-                cells.addAll(List.of(row.place().model(), row.place().curve(), row.place().system(), row.label()));
+                cells.addAll(List.of(
+                        row.place().model(), row.place().curve(), row.place().system(), row.label()));
             }
             ChannelKey channel = row.place().channel();
             cells.add(channel.coupled() ? "" : Integer.toString(channel.orbital()));
@@ -53,7 +55,8 @@ final class LevelListings {
 
     private static String table(LevelListing listing) {
         boolean project = project(listing);
-        boolean spins = listing.channels().stream().anyMatch(row -> row.place().channel().twiceTotal() >= 0);
+        boolean spins = listing.channels().stream()
+                .anyMatch(row -> row.place().channel().twiceTotal() >= 0);
         String unit = listing.energyUnit().equals("1") ? "" : " (" + listing.energyUnit() + ")";
         List<String> header = new ArrayList<>(project ? List.of("model", "curve", "system", "label") : List.of());
         header.add("l");
@@ -66,7 +69,8 @@ final class LevelListings {
             Level level = row.level();
             List<String> cells = new ArrayList<>();
             if (project) {
-                cells.addAll(List.of(row.place().model(), row.place().curve(), row.place().system(), row.label()));
+                cells.addAll(List.of(
+                        row.place().model(), row.place().curve(), row.place().system(), row.label()));
             }
             ChannelKey channel = row.place().channel();
             cells.add(channel.coupled() ? "" : Integer.toString(channel.orbital()));
@@ -85,7 +89,8 @@ final class LevelListings {
     }
 
     private static boolean project(LevelListing listing) {
-        return !listing.channels().isEmpty() && listing.channels().get(0).place().model() != null;
+        return !listing.channels().isEmpty()
+                && listing.channels().get(0).place().model() != null;
     }
 
     private static Completeness completeness(LevelListing listing, Place place) {

@@ -4,10 +4,10 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.concurrent.CancellationException;
 import org.wellwright.project.file.ProjectFileException;
+import org.wellwright.project.report.Version;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.SolverException;
 import org.wellwright.solver.WellwrightException;
-import org.wellwright.project.report.Version;
 import org.wellwright.solver.units.Names;
 
 /** Starts the headless command: {@code wellwright-batch COMMAND …}. */
@@ -17,7 +17,9 @@ public final class Main {
 
     private Main() {}
 
-    /** Runs one command and ends the process with its status: 0 done, 1 the science failed, 2 bad usage or bad input. */
+    /**
+     * Runs one command and ends the process with its status: 0 done, 1 the science failed, 2 bad usage or bad input.
+     */
     public static void main(String[] arguments) {
         System.exit(run(arguments, Console.standard()));
     }
@@ -42,7 +44,9 @@ public final class Main {
             status = failed(e, FAILED, debug, console);
         } catch (RuntimeException | StackOverflowError | OutOfMemoryError e) {
             console.fault(new Problem(
-                    "a fault of the program itself: " + e.getClass().getSimpleName(), "", debug ? "please report it" : "run again with --debug and report it"));
+                    "a fault of the program itself: " + e.getClass().getSimpleName(),
+                    "",
+                    debug ? "please report it" : "run again with --debug and report it"));
             status = failed(e, FAILED, debug, console);
         }
         if (!console.arrived()) {
@@ -72,7 +76,9 @@ public final class Main {
         Command command = Commands.named(name);
         if (command == null) {
             List<String> names = Commands.names();
-            String remedy = Names.near(name, names).isEmpty() ? "use one of " + String.join(", ", names) : Names.remedy(name, names);
+            String remedy = Names.near(name, names).isEmpty()
+                    ? "use one of " + String.join(", ", names)
+                    : Names.remedy(name, names);
             throw new UsageException("there is no command '" + Names.shortened(name) + "'", remedy);
         }
         Syntax syntax = command.syntax();

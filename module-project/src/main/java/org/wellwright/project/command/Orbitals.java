@@ -18,7 +18,8 @@ final class Orbitals {
             int from = Input.whole("--l", dots < 0 ? part : part.substring(0, dots), 0, 10_000);
             int to = dots < 0 ? from : Input.whole("--l", part.substring(dots + 2), 0, 10_000);
             if (to < from) {
-                throw new UsageException("--l is " + Names.shortened(text) + ", which runs backwards", "write " + to + ".." + from);
+                throw new UsageException(
+                        "--l is " + Names.shortened(text) + ", which runs backwards", "write " + to + ".." + from);
             }
             for (int orbital = from; orbital <= to; orbital++) {
                 if (orbitals.contains(orbital)) {

@@ -37,7 +37,8 @@ final class ProjectArgument {
     static Model model(Input input, Project project, Path file) {
         List<Model> models = project.document().models();
         if (models.isEmpty()) {
-            throw new ProjectFileException(new Problem("the project has no model", file.toString(), "add one under \"models\""));
+            throw new ProjectFileException(
+                    new Problem("the project has no model", file.toString(), "add one under \"models\""));
         }
         String name = input.value("model");
         if (name == null) {
@@ -49,6 +50,7 @@ final class ProjectArgument {
             }
         }
         throw new UsageException(
-                "the project has no model '" + Names.shortened(name) + "'", Names.remedy(name, models.stream().map(Model::name).toList()));
+                "the project has no model '" + Names.shortened(name) + "'",
+                Names.remedy(name, models.stream().map(Model::name).toList()));
     }
 }

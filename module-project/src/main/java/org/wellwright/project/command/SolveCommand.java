@@ -32,11 +32,13 @@ final class SolveCommand implements Command {
     @Override
     public int run(Input input, Console console) {
         Input.Format format = input.format();
-        SolveScope scope = new SolveScope(input.has("l") ? Orbitals.parse(input.value("l")) : List.of(), input.count("count", 1, 0));
+        SolveScope scope = new SolveScope(
+                input.has("l") ? Orbitals.parse(input.value("l")) : List.of(), input.count("count", 1, 0));
         Path file = ProjectArgument.path(input);
         Project project = ProjectArgument.read(file);
         Model model = ProjectArgument.model(input, project, file);
-        SolvedModel solved = new ProjectSolver(project.document(), Services.solver()).solve(model, scope, SolveMonitor.NONE);
+        SolvedModel solved =
+                new ProjectSolver(project.document(), Services.solver()).solve(model, scope, SolveMonitor.NONE);
         if (solved.channels().isEmpty() && !solved.problems().isEmpty()) {
             throw new InvalidModelException(solved.problems().get(0));
         }
@@ -48,10 +50,17 @@ final class SolveCommand implements Command {
         for (SolvedChannel channel : solved.channels()) {
             Place place = new Place(model.name(), channel.curve(), channel.system(), channel.channel());
             whole &= Spectra.list(
-                    place, index -> names.shortName(channel.key(index)), channel.origin(), channel.spectrum(), channels, levels, console);
+                    place,
+                    index -> names.shortName(channel.key(index)),
+                    channel.origin(),
+                    channel.spectrum(),
+                    channels,
+                    levels,
+                    console);
         }
         UnitSystem units = UnitSystem.named(project.document().units());
-        LevelListing listing = new LevelListing(units.energy().symbol(), units.length().symbol(), channels, levels);
+        LevelListing listing =
+                new LevelListing(units.energy().symbol(), units.length().symbol(), channels, levels);
         console.result(input, LevelListings.print(listing, format));
         return whole ? 0 : 1;
     }

@@ -31,11 +31,18 @@ final class Spectra {
      * @return whether nothing is missing
      */
     static boolean list(
-            Place place, Labels labels, double origin, Spectrum spectrum, List<ChannelRow> channels, List<LevelRow> levels, Console console) {
+            Place place,
+            Labels labels,
+            double origin,
+            Spectrum spectrum,
+            List<ChannelRow> channels,
+            List<LevelRow> levels,
+            Console console) {
         boolean whole = spectrum.completeness() != Completeness.NO;
         for (LevelOutcome outcome : spectrum.outcomes()) {
             if (outcome instanceof Level level) {
-                levels.add(new LevelRow(place, labels == null ? null : labels.label(level.index()), shifted(level, origin)));
+                levels.add(new LevelRow(
+                        place, labels == null ? null : labels.label(level.index()), shifted(level, origin)));
             } else if (outcome instanceof MissingLevel missing) {
                 whole = false;
                 console.fault(missing.problem());
@@ -45,13 +52,19 @@ final class Spectra {
             console.say(describe(place) + ": " + spectrum.message());
         }
         channels.add(new ChannelRow(
-                place, threshold(spectrum) + origin, spectrum.searchedBelow() + origin, spectrum.completeness(), spectrum.message()));
+                place,
+                threshold(spectrum) + origin,
+                spectrum.searchedBelow() + origin,
+                spectrum.completeness(),
+                spectrum.message()));
         return whole;
     }
 
     private static String describe(Place place) {
         String channel = "l = " + place.channel().orbital();
-        return place.model() == null ? channel : "model '" + place.model() + "', curve '" + place.curve() + "', " + place.system() + ", " + channel;
+        return place.model() == null
+                ? channel
+                : "model '" + place.model() + "', curve '" + place.curve() + "', " + place.system() + ", " + channel;
     }
 
     private static Level shifted(Level level, double origin) {
@@ -93,7 +106,9 @@ final class Spectra {
             if (!tail.known()) {
                 return Double.NaN;
             }
-            double limit = tail.rises() ? Double.POSITIVE_INFINITY : tail.falls() ? Double.NEGATIVE_INFINITY : tail.limit() + channel.threshold();
+            double limit = tail.rises()
+                    ? Double.POSITIVE_INFINITY
+                    : tail.falls() ? Double.NEGATIVE_INFINITY : tail.limit() + channel.threshold();
             lowest = Math.min(lowest, limit);
         }
         return lowest;

@@ -12,7 +12,10 @@ import org.apache.commons.cli.ParseException;
 import org.apache.commons.cli.UnrecognizedOptionException;
 import org.wellwright.solver.units.Names;
 
-/** What a subcommand accepts: positional arguments and long options; {@code -o} and {@code -h} are short for two of them. */
+/**
+ * What a subcommand accepts: positional arguments and long options; {@code -o} and {@code -h} are short for two of
+ * them.
+ */
 final class Syntax {
     private final String command;
     private final String summary;
@@ -24,7 +27,8 @@ final class Syntax {
     /**
      * A syntax with the options that every command has.
      *
-     * @param positionals labels of the positional arguments, all required; one in brackets may be left out, "FILE…" takes several
+     * @param positionals labels of the positional arguments, all required; one in brackets may be left out, "FILE…"
+     *     takes several
      */
     Syntax(String command, String summary, String... positionals) {
         this.command = command;
@@ -50,7 +54,8 @@ final class Syntax {
     }
 
     /**
-     * Reads the arguments after the command's name. A value may follow its option after a space or '=', whatever it starts with.
+     * Reads the arguments after the command's name. A value may follow its option after a space or '=', whatever it
+     * starts with.
      *
      * @throws UsageException if they do not fit
      */
@@ -58,8 +63,10 @@ final class Syntax {
         flag("debug", "show where in the program a fault arose").flag("help", "show this text (also -h)");
         Options options = new Options();
         for (Entry entry : entries.values()) {
-            options.addOption(
-                    Option.builder().longOpt(entry.name()).hasArg(!entry.label().isEmpty()).get());
+            options.addOption(Option.builder()
+                    .longOpt(entry.name())
+                    .hasArg(!entry.label().isEmpty())
+                    .get());
         }
         CommandLine line;
         try {
@@ -71,7 +78,9 @@ final class Syntax {
         } catch (UnrecognizedOptionException e) {
             String name = e.getOption();
             throw new UsageException(
-                    command + " has no option " + Names.shortened(name), Names.remedy(name, entries.keySet().stream().map(n -> "--" + n).toList()));
+                    command + " has no option " + Names.shortened(name),
+                    Names.remedy(
+                            name, entries.keySet().stream().map(n -> "--" + n).toList()));
         } catch (ParseException e) {
             throw new UsageException(command + ": " + e.getMessage(), "see wellwright-batch " + command + " --help");
         }
@@ -103,7 +112,9 @@ final class Syntax {
         }
         if (given > most) {
             throw new UsageException(
-                    command + " has no use for '" + Names.shortened(input.positionals().get(most)) + "'", "write: " + usage());
+                    command + " has no use for '"
+                            + Names.shortened(input.positionals().get(most)) + "'",
+                    "write: " + usage());
         }
     }
 
@@ -116,7 +127,9 @@ final class Syntax {
                 joined.addAll(List.of(arguments).subList(i, arguments.length));
                 break;
             }
-            String name = argument.equals("-o") ? "output" : argument.equals("-h") ? "help" : argument.startsWith("--") ? argument.substring(2) : "";
+            String name = argument.equals("-o")
+                    ? "output"
+                    : argument.equals("-h") ? "help" : argument.startsWith("--") ? argument.substring(2) : "";
             Entry entry = entries.get(name);
             if (entry == null) {
                 joined.add(argument);
@@ -132,7 +145,8 @@ final class Syntax {
     }
 
     private String usage() {
-        return "wellwright-batch " + command + (positionals.isEmpty() ? "" : " " + String.join(" ", positionals)) + (entries.isEmpty() ? "" : " [options]");
+        return "wellwright-batch " + command + (positionals.isEmpty() ? "" : " " + String.join(" ", positionals))
+                + (entries.isEmpty() ? "" : " [options]");
     }
 
     /** What the command does, in a sentence. */
@@ -142,7 +156,8 @@ final class Syntax {
 
     /** The help text. */
     String help() {
-        StringBuilder text = new StringBuilder(summary).append("\n\n  ").append(usage()).append("\n\n");
+        StringBuilder text =
+                new StringBuilder(summary).append("\n\n  ").append(usage()).append("\n\n");
         int width = 0;
         for (Entry entry : entries.values()) {
             width = Math.max(width, entry.name().length() + entry.label().length());
@@ -150,7 +165,8 @@ final class Syntax {
         for (Entry entry : entries.values()) {
             String head = "--" + entry.name() + (entry.label().isEmpty() ? "" : " " + entry.label());
             text.append("  ").append(head).append(" ".repeat(width + 5 - head.length()));
-            text.append(entry.help().replace("\n", "\n" + " ".repeat(width + 7))).append('\n');
+            text.append(entry.help().replace("\n", "\n" + " ".repeat(width + 7)))
+                    .append('\n');
         }
         return text.toString();
     }

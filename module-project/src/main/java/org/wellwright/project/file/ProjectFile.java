@@ -19,8 +19,8 @@ public final class ProjectFile {
      *
      * @param project the project
      * @param unknown pointers of the members that are kept but not used
-     * @param problems what is wrong between the parts of the document, each with line and pointer: names that lead nowhere, units that do not fit,
-     *     circular ties
+     * @param problems what is wrong between the parts of the document, each with line and pointer: names that lead
+     *     nowhere, units that do not fit, circular ties
      */
     public record Content(Project project, List<String> unknown, List<Problem> problems) {
         /** Copies the lists. */
@@ -79,7 +79,8 @@ public final class ProjectFile {
             // check() below throws what was noted.
         }
         faults.check();
-        return new Content(project, reading.unknownPointers(), located(ModelCheck.problems(project.document()), faults));
+        return new Content(
+                project, reading.unknownPointers(), located(ModelCheck.problems(project.document()), faults));
     }
 
     /** The checker says where by pointer, perhaps with a column after a comma. */
@@ -89,7 +90,10 @@ public final class ProjectFile {
                     String where = problem.where();
                     int comma = where.indexOf(", ");
                     String pointer = comma < 0 ? where : where.substring(0, comma);
-                    return new Problem(problem.what(), faults.where(pointer) + where.substring(pointer.length()), problem.remedy());
+                    return new Problem(
+                            problem.what(),
+                            faults.where(pointer) + where.substring(pointer.length()),
+                            problem.remedy());
                 })
                 .toList();
     }

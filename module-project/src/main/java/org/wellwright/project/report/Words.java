@@ -20,7 +20,9 @@ public final class Words {
             if (candidate.id().equals(datum)) {
                 LevelNames names = LevelNames.of(document);
                 String over = LevelSums.text(candidate.levels(), names);
-                return candidate.denominator().isEmpty() ? over : "(" + over + ") / (" + LevelSums.text(candidate.denominator(), names) + ")";
+                return candidate.denominator().isEmpty()
+                        ? over
+                        : "(" + over + ") / (" + LevelSums.text(candidate.denominator(), names) + ")";
             }
         }
         return "";
@@ -74,8 +76,13 @@ public final class Words {
         }
         text.append("; uncertainties ").append(weighting(fit.mode()));
         if (fit.sigmaScale() != 1) {
-            text.append(" (factor ").append(Digits.significant(fit.sigmaScale(), 3)).append(')');
+            text.append(" (factor ")
+                    .append(Digits.significant(fit.sigmaScale(), 3))
+                    .append(')');
         }
-        return text.append("; ").append(fit.iterations()).append(fit.iterations() == 1 ? " step" : " steps").toString();
+        return text.append("; ")
+                .append(fit.iterations())
+                .append(fit.iterations() == 1 ? " step" : " steps")
+                .toString();
     }
 }

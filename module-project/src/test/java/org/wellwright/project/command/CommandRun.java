@@ -17,7 +17,9 @@ record CommandRun(int status, String out, String err) {
         ByteArrayOutputStream err = new ByteArrayOutputStream();
         int status = Main.run(
                 arguments,
-                new Console(new PrintStream(out, false, StandardCharsets.UTF_8), new PrintStream(err, true, StandardCharsets.UTF_8)));
+                new Console(
+                        new PrintStream(out, false, StandardCharsets.UTF_8),
+                        new PrintStream(err, true, StandardCharsets.UTF_8)));
         return new CommandRun(status, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));
     }
 }

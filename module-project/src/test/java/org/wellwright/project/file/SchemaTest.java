@@ -14,7 +14,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.wellwright.solver.units.UnitSystem;
 
-/** The published schema and the reader say the same, judged by a general-purpose validator (JSON Schema draft 2020-12). */
+/**
+ * The published schema and the reader say the same, judged by a general-purpose validator (JSON Schema draft 2020-12).
+ */
 class SchemaTest {
     private static final Schema SCHEMA = SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
             .getSchema(SchemaTest.class.getResourceAsStream("wellwright-project-1.schema.json"));
@@ -25,16 +27,32 @@ class SchemaTest {
 
     @Test
     void acceptsTheFileThatUsesEveryKey() throws IOException {
-        assertThat(SCHEMA.validate(ProjectFileTest.sample("everything-1.wellwright"), InputFormat.JSON)).isEmpty();
+        assertThat(SCHEMA.validate(ProjectFileTest.sample("everything-1.wellwright"), InputFormat.JSON))
+                .isEmpty();
     }
 
     @Test
     void namesEveryKeyThatTheWriterWrites() throws IOException {
         String text = ProjectFileTest.sample("everything-1.wellwright");
         String schema = new String(
-                SchemaTest.class.getResourceAsStream("wellwright-project-1.schema.json").readAllBytes(), StandardCharsets.UTF_8);
+                SchemaTest.class
+                        .getResourceAsStream("wellwright-project-1.schema.json")
+                        .readAllBytes(),
+                StandardCharsets.UTF_8);
         var known = java.util.Set.of(
-                "x-lab", "cell", "warm", "runs", "colour", "plate", "laboratory", "as", "axis", "org.wellwright.viewer.levels", "c", "d", "strength",
+                "x-lab",
+                "cell",
+                "warm",
+                "runs",
+                "colour",
+                "plate",
+                "laboratory",
+                "as",
+                "axis",
+                "org.wellwright.viewer.levels",
+                "c",
+                "d",
+                "strength",
                 "range");
         var keys = java.util.regex.Pattern.compile("\"([^\"]+)\": ").matcher(text);
         int seen = 0;

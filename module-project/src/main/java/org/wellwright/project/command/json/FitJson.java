@@ -23,25 +23,33 @@ public final class FitJson {
                     .text("weighting", word(fit.mode()))
                     .number("sigmaScale", fit.sigmaScale());
             quality(out, fit.quality());
-            out.items("parameters", fit.parameters(), (item, parameter) -> item.text("name", parameter.name())
-                    .number("value", parameter.value())
-                    .number("sigma", parameter.sigma())
-                    .text("unit", parameter.unit())
-                    .flag("free", parameter.free())
-                    .text("bound", word(parameter.bound())));
+            out.items(
+                    "parameters",
+                    fit.parameters(),
+                    (item, parameter) -> item.text("name", parameter.name())
+                            .number("value", parameter.value())
+                            .number("sigma", parameter.sigma())
+                            .text("unit", parameter.unit())
+                            .flag("free", parameter.free())
+                            .text("bound", word(parameter.bound())));
             out.items("groups", fit.groupErrors(), FitJson::group);
-            out.items("modelErrors", fit.modelErrors(), (item, error) -> item.text("group", error.group())
-                    .text("measure", word(error.measure()))
-                    .number("value", error.value())
-                    .text("unit", error.unit())
-                    .flag("fitted", error.fitted()));
+            out.items(
+                    "modelErrors",
+                    fit.modelErrors(),
+                    (item, error) -> item.text("group", error.group())
+                            .text("measure", word(error.measure()))
+                            .number("value", error.value())
+                            .text("unit", error.unit())
+                            .flag("fitted", error.fitted()));
             Covariance covariance = fit.covariance();
             out.nested("correlations", item -> {
                 item.texts("names", covariance.names());
                 item.rows("matrix", covariance.size(), covariance::correlation);
             });
             out.items("rows", fit.rows(), (item, row) -> row(item, row, fit.document()));
-            out.texts("remarks", fit.remarks().stream().map(remark -> remark.sentence()).toList());
+            out.texts(
+                    "remarks",
+                    fit.remarks().stream().map(remark -> remark.sentence()).toList());
         });
     }
 
@@ -55,7 +63,11 @@ public final class FitJson {
                 item.number("commonCriterion", model.commonCriterion()).text("worstDatum", model.worstDatum());
                 item.items("groups", model.groupErrors(), FitJson::group);
                 item.items("rows", model.rows(), (rows, row) -> row(rows, row, document));
-                item.texts("problems", model.problems().stream().map(problem -> problem.sentence()).toList());
+                item.texts(
+                        "problems",
+                        model.problems().stream()
+                                .map(problem -> problem.sentence())
+                                .toList());
             });
         });
     }

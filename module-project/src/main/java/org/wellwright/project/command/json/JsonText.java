@@ -8,7 +8,10 @@ import tools.jackson.core.ObjectWriteContext;
 import tools.jackson.core.PrettyPrinter;
 import tools.jackson.core.json.JsonFactory;
 
-/** The streaming generator with what every listing needs: numbers that are not finite become null, items stand on lines of their own. */
+/**
+ * The streaming generator with what every listing needs: numbers that are not finite become null, items stand on lines
+ * of their own.
+ */
 final class JsonText {
     private final JsonGenerator out;
 

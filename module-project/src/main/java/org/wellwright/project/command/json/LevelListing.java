@@ -39,7 +39,8 @@ public record LevelListing(String energyUnit, String lengthUnit, List<ChannelRow
      * @param completeness how sure that is
      * @param message why it is not complete, or what else there is to know; empty as a rule
      */
-    public record ChannelRow(Place place, double threshold, double searchedBelow, Completeness completeness, String message) {}
+    public record ChannelRow(
+            Place place, double threshold, double searchedBelow, Completeness completeness, String message) {}
 
     /**
      * One level.

@@ -12,7 +12,8 @@ public final class LevelsJson {
     /** Units, channels, levels; an energy that is infinite or unknown is null. */
     public static String write(LevelListing listing) {
         return JsonText.object(out -> {
-            out.nested("units", units -> units.text("energy", listing.energyUnit()).text("length", listing.lengthUnit()));
+            out.nested(
+                    "units", units -> units.text("energy", listing.energyUnit()).text("length", listing.lengthUnit()));
             out.items("channels", listing.channels(), (item, row) -> {
                 place(item, row.place());
                 item.number("threshold", row.threshold())
