@@ -55,6 +55,7 @@ final class FitReport {
 
     FitResult result() {
         LevelTable table = solved.at(values, ModelFit.allKeys(request));
+        remarks.addAll(table.doubts());
         List<Quantity> quantities = setup.data().stream()
                 .map(datum -> model.quantity(datum, table, values))
                 .toList();

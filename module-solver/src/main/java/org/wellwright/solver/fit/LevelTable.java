@@ -16,6 +16,7 @@ import org.wellwright.solver.model.AssembledProblem;
 import org.wellwright.solver.model.Assembly;
 import org.wellwright.solver.model.ChannelKey;
 import org.wellwright.solver.model.LevelKey;
+import org.wellwright.solver.radial.Completeness;
 import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.radial.LevelOutcome;
 import org.wellwright.solver.radial.LevelSearch;
@@ -27,6 +28,7 @@ import org.wellwright.solver.radial.Spectrum;
 final class LevelTable {
     private final Map<LevelKey, Entry> entries = new HashMap<>();
     private final int numbers;
+    private final List<Problem> doubts = new ArrayList<>();
 
     /** One level: energy with origin, gradient, half-width of the bounds; or why there is none. */
     record Entry(double energy, Gradient gradient, double halfWidth, Problem problem) {
@@ -107,6 +109,11 @@ final class LevelTable {
         return used;
     }
 
+    /** Channels in which a level may have been missed, so that an index may be wrong. */
+    List<Problem> doubts() {
+        return List.copyOf(doubts);
+    }
+
     /** Whether it has an entry for every one of these keys. */
     boolean covers(Collection<LevelKey> keys) {
         return entries.keySet().containsAll(keys);
@@ -151,6 +158,14 @@ final class LevelTable {
     private void record(Wanted wanted, Spectrum spectrum) {
         for (int index : wanted.indices()) {
             entries.put(wanted.problem().key(index), missing(wanted, spectrum, index));
+        }
+        if (spectrum.completeness() == Completeness.NO) {
+            ChannelPlace place = wanted.place();
+            doubts.add(new Problem(
+                    "the levels of the curve '%s' with %s for '%s' may not be complete: %s"
+                            .formatted(place.curve(), place.channel().describe(), place.system(), spectrum.message()),
+                    "",
+                    "check the indices of the data there"));
         }
         for (LevelOutcome outcome : spectrum.outcomes()) {
             if (!wanted.indices().contains(outcome.index())) {

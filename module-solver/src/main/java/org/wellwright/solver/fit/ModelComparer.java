@@ -60,7 +60,8 @@ public final class ModelComparer {
             List<Quantity> quantities,
             int free,
             double priorSquares,
-            int priors) {}
+            int priors,
+            List<Problem> doubts) {}
 
     private Comparison run() {
         List<Judged> judged = new ArrayList<>();
@@ -137,7 +138,7 @@ public final class ModelComparer {
                 List.of(),
                 List.of(),
                 base);
-        return new Judged(model.name(), setup, weights, quantities, free, squares, priors);
+        return new Judged(model.name(), setup, weights, quantities, free, squares, priors, table.doubts());
     }
 
     private static List<Integer> common(List<Judged> judged) {
@@ -168,7 +169,7 @@ public final class ModelComparer {
                     Math.sqrt(own.linearization().covariance(k, k)),
                     one.setup().groups().group(k).unit()));
         }
-        List<Problem> problems = new ArrayList<>();
+        List<Problem> problems = new ArrayList<>(one.doubts());
         for (ResidualRow row : rows) {
             if (row.problem() != null) {
                 problems.add(new Problem(

@@ -41,7 +41,7 @@ final class Quantity {
         return gradient[number];
     }
 
-    /** slope times the gradient, offset and slope applied to the value: slope·value + offset is the caller's. */
+    /** A function of this one quantity: its value, and its derivative by this. */
     Quantity mapped(double newValue, double slope) {
         double[] product = new double[gradient.length];
         for (int i = 0; i < product.length; i++) {
@@ -50,7 +50,7 @@ final class Quantity {
         return of(newValue, product);
     }
 
-    /** newValue with gradient a·this + b·other. */
+    /** A function of this and another quantity: its value, and its derivatives by both. */
     Quantity combined(double newValue, double a, Quantity other, double b) {
         double[] sum = new double[gradient.length];
         for (int i = 0; i < sum.length; i++) {
