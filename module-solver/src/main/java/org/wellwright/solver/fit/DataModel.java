@@ -1,20 +1,19 @@
 package org.wellwright.solver.fit;
 
 import java.util.ArrayList;
-import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.model.Assembly;
 import org.wellwright.solver.model.Datum;
-import org.wellwright.solver.model.LevelKey;
 import org.wellwright.solver.model.ParameterPool;
 import org.wellwright.solver.model.PoolValue;
 import org.wellwright.solver.model.Transform;
+import org.wellwright.solver.observable.RadialMoment;
 import org.wellwright.solver.observable.StandardAir;
+import org.wellwright.solver.radial.EnergyGradient;
 import org.wellwright.solver.units.Dimension;
 import org.wellwright.solver.units.LengthUnit;
 import org.wellwright.solver.units.UnitExpression;
@@ -33,16 +32,6 @@ final class DataModel {
         this.units = pool.units();
         this.planckLight = units.planckLight();
         this.nanometre = UnitExpression.parse(LengthUnit.NANOMETRE.symbol()).factorTo(units, Dimension.LENGTH);
-    }
-
-    /** All levels that data need. */
-    static Set<LevelKey> keys(List<Datum> data) {
-        Set<LevelKey> keys = new LinkedHashSet<>();
-        for (Datum datum : data) {
-            datum.levels().forEach(contribution -> keys.add(contribution.level()));
-            datum.denominator().forEach(contribution -> keys.add(contribution.level()));
-        }
-        return keys;
     }
 
     /** How many of the datum's unit one unit of the system is; NaN for a rate. */
@@ -88,7 +77,8 @@ final class DataModel {
             case PHOTON_EMISSION, PHOTON_ABSORPTION -> photon(datum, energy, table, values, unit);
             case ABSOLUTE_MASS -> absoluteMass(datum, energy, values, unit / units.restEnergy());
             case RATIO -> ratio(datum, energy, table, values.length);
-            case RADIUS, WIDTH, RATE ->
+            case RADIUS -> radius(datum, table, values.length, unit);
+            case WIDTH, RATE ->
                 Quantity.missing(new Problem(
                         "the datum '%s' is a %s, which cannot be compared yet"
                                 .formatted(datum.id(), datum.transform().name().toLowerCase(Locale.ROOT)),
@@ -186,6 +176,24 @@ final class DataModel {
         }
         double ratio = energy.value() / below.value();
         return energy.combined(ratio, 1 / below.value(), below, -ratio / below.value());
+    }
+
+    /** ⟨r^k⟩^(1/k) with its derivative (1/k) ⟨r^k⟩^(1/k − 1) d⟨r^k⟩. */
+    private static Quantity radius(Datum datum, LevelTable table, int numbers, double unit) {
+        LevelTable.Entry level = table.entry(datum.levels().get(0).level());
+        int power = datum.detail().radiusPower();
+        if (level.state().problem().channels().size() > 1) {
+            return Quantity.missing(new Problem(
+                    "the radius '%s' belongs to coupled channels, which cannot be compared yet".formatted(datum.id()),
+                    "",
+                    "do not use it"));
+        }
+        double moment = RadialMoment.value(level.state(), power);
+        double radius = Math.pow(moment, 1.0 / power);
+        double[] gradient = new double[numbers];
+        EnergyGradient slopes = RadialMoment.gradient(level.state(), power);
+        level.assembled().addProblemGradient(slopes, radius / (power * moment) * unit, gradient);
+        return Quantity.of(radius * unit, gradient);
     }
 
     private static Quantity notPositive(Datum datum, double energy) {

@@ -54,7 +54,7 @@ final class FitReport {
     }
 
     FitResult result() {
-        LevelTable table = solved.at(values, ModelFit.allKeys(request));
+        LevelTable table = solved.at(values, ModelFit.everything(request));
         remarks.addAll(table.doubts());
         List<Quantity> quantities = setup.data().stream()
                 .map(datum -> model.quantity(datum, table, values))
@@ -124,8 +124,7 @@ final class FitReport {
     }
 
     private List<FittedParameter> parameters() {
-        List<LevelKey> keys = new ArrayList<>(ModelFit.allKeys(request));
-        boolean[] used = LevelTable.dependencies(assembly, keys, values);
+        boolean[] used = LevelTable.dependencies(assembly, ModelFit.everything(request), values);
         List<FittedParameter> parameters = new ArrayList<>();
         List<PoolNumber> numbers = assembly.pool().numbers();
         for (int i = 0; i < numbers.size(); i++) {

@@ -1,7 +1,6 @@
 package org.wellwright.solver.fit;
 
 import java.util.ArrayList;
-import java.util.Collection;
 import java.util.Collections;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
@@ -21,6 +20,7 @@ import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.radial.LevelOutcome;
 import org.wellwright.solver.radial.LevelSearch;
 import org.wellwright.solver.radial.MissingLevel;
+import org.wellwright.solver.radial.RadialState;
 import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
@@ -28,10 +28,24 @@ import org.wellwright.solver.radial.Spectrum;
 final class LevelTable {
     private final Map<LevelKey, Entry> entries = new HashMap<>();
     private final int numbers;
+    private final Set<LevelKey> states;
     private final List<Problem> doubts = new ArrayList<>();
 
-    /** One level: energy with origin, gradient, half-width of the bounds; or why there is none. */
-    record Entry(double energy, Gradient gradient, double halfWidth, Problem problem) {
+    /**
+     * One level: energy with origin, gradient, half-width of the bounds, state if it was asked for; or why there is
+     * none.
+     */
+    record Entry(
+            double energy,
+            Gradient gradient,
+            double halfWidth,
+            RadialState state,
+            AssembledProblem assembled,
+            Problem problem) {
+        static Entry missing(Problem problem) {
+            return new Entry(Double.NaN, null, Double.NaN, null, null, problem);
+        }
+
         boolean found() {
             return problem == null;
         }
@@ -60,20 +74,17 @@ final class LevelTable {
         }
     }
 
-    private LevelTable(int numbers) {
+    private LevelTable(int numbers, Set<LevelKey> states) {
+        this.states = states;
         this.numbers = numbers;
     }
 
     /** Solves every channel that the keys need; a channel that fails keeps its reason. */
     static LevelTable solve(
-            Assembly assembly,
-            Collection<LevelKey> keys,
-            double[] values,
-            SpectrumSource source,
-            SolveMonitor monitor) {
-        LevelTable table = new LevelTable(values.length);
+            Assembly assembly, LevelDemand demand, double[] values, SpectrumSource source, SolveMonitor monitor) {
+        LevelTable table = new LevelTable(values.length, demand.states());
         Map<ChannelPlace, Set<Integer>> indices = new LinkedHashMap<>();
-        for (LevelKey key : keys) {
+        for (LevelKey key : demand.levels()) {
             indices.computeIfAbsent(
                             new ChannelPlace(key.system(), key.curve(), key.channel()), place -> new TreeSet<>())
                     .add(key.index());
@@ -93,17 +104,16 @@ final class LevelTable {
     }
 
     /** Which numbers of the pool the levels of some keys depend on, without solving. */
-    static boolean[] dependencies(Assembly assembly, Collection<LevelKey> keys, double[] values) {
+    static boolean[] dependencies(Assembly assembly, LevelDemand demand, double[] values) {
         boolean[] used = new boolean[values.length];
         Set<ChannelPlace> places = new LinkedHashSet<>();
-        keys.forEach(key -> places.add(new ChannelPlace(key.system(), key.curve(), key.channel())));
+        demand.levels().forEach(key -> places.add(new ChannelPlace(key.system(), key.curve(), key.channel())));
         for (ChannelPlace place : places) {
             try {
                 assembly.problem(place.system(), place.curve(), place.channel(), values)
                         .markUsed(used);
-            } catch (WellwrightException fault) {
+            } catch (WellwrightException reportedLater) {
                 // Solving the channel reports the same fault with the datum that needs it.
-                continue;
             }
         }
         return used;
@@ -114,9 +124,12 @@ final class LevelTable {
         return List.copyOf(doubts);
     }
 
-    /** Whether it has an entry for every one of these keys. */
-    boolean covers(Collection<LevelKey> keys) {
-        return entries.keySet().containsAll(keys);
+    /** Whether it has an entry for everything in a demand. */
+    boolean covers(LevelDemand demand) {
+        return entries.keySet().containsAll(demand.levels())
+                && demand.states().stream()
+                        .allMatch(key -> entries.get(key).state() != null
+                                || !entries.get(key).found());
     }
 
     /** The entry of a key that was asked for. */
@@ -173,13 +186,22 @@ final class LevelTable {
             }
             LevelKey key = wanted.problem().key(outcome.index());
             if (outcome instanceof MissingLevel missing) {
-                entries.put(key, new Entry(Double.NaN, null, Double.NaN, missing.problem()));
+                entries.put(key, Entry.missing(missing.problem()));
             } else if (outcome instanceof Level level) {
                 double[] slopes = new double[numbers];
-                wanted.problem().addGradient(spectrum.state(level.index()).gradient(), 1, slopes);
+                RadialState state = spectrum.state(level.index());
+                wanted.problem().addGradient(state.gradient(), 1, slopes);
                 double energy = level.energy() + wanted.problem().energyOrigin().value();
                 double halfWidth = (level.upper() - level.lower()) / 2;
-                entries.put(key, new Entry(energy, new Gradient(slopes), halfWidth, null));
+                entries.put(
+                        key,
+                        new Entry(
+                                energy,
+                                new Gradient(slopes),
+                                halfWidth,
+                                states.contains(key) ? state : null,
+                                wanted.problem(),
+                                null));
             }
         }
     }
@@ -195,13 +217,13 @@ final class LevelTable {
                         there == 0 ? "none" : "only " + there,
                         place.system());
         Problem problem = new Problem(what, "", "change the level, do not use the datum, or deepen the potential");
-        return new Entry(Double.NaN, null, Double.NaN, problem);
+        return Entry.missing(problem);
     }
 
     private void fail(ChannelPlace place, Set<Integer> indices, Problem problem) {
         for (int index : indices) {
             LevelKey key = new LevelKey(place.system(), place.curve(), place.channel(), index);
-            entries.put(key, new Entry(Double.NaN, null, Double.NaN, problem));
+            entries.put(key, Entry.missing(problem));
         }
     }
 }

@@ -98,7 +98,7 @@ public final class ModelComparer {
         Assembly assembly = Assembly.of(document, model.name(), pool);
         DataModel says = new DataModel(assembly);
         double[] values = pool.typedValues();
-        LevelTable table = LevelTable.solve(assembly, DataModel.keys(document.data()), values, source, monitor);
+        LevelTable table = LevelTable.solve(assembly, LevelDemand.forData(document.data()), values, source, monitor);
         List<Quantity> quantities = new ArrayList<>();
         for (Datum datum : document.data()) {
             quantities.add(says.quantity(datum, table, values));
@@ -111,7 +111,8 @@ public final class ModelComparer {
                 rows.add(i);
             }
         }
-        boolean[] used = LevelTable.dependencies(assembly, DataModel.keys(DataModel.used(document.data())), values);
+        boolean[] used =
+                LevelTable.dependencies(assembly, LevelDemand.forData(DataModel.used(document.data())), values);
         int free = 0;
         int priors = 0;
         double squares = 0;

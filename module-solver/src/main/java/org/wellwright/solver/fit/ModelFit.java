@@ -1,15 +1,12 @@
 package org.wellwright.solver.fit;
 
 import java.util.ArrayList;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 import java.util.concurrent.CancellationException;
 import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.model.Assembly;
 import org.wellwright.solver.model.Datum;
-import org.wellwright.solver.model.LevelKey;
 import org.wellwright.solver.model.ModelCheck;
 import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.model.PoolNumber;
@@ -106,7 +103,7 @@ public final class ModelFit {
                     "there is no datum to fit to", "", "add measured levels or lines, or mark some as used");
         }
         double[] typed = assembly.pool().typedValues();
-        boolean[] used = LevelTable.dependencies(assembly, DataModel.keys(counted), typed);
+        boolean[] used = LevelTable.dependencies(assembly, LevelDemand.forData(counted), typed);
         List<Integer> free = new ArrayList<>();
         List<Integer> priors = new ArrayList<>();
         List<Double> base = new ArrayList<>();
@@ -194,7 +191,7 @@ public final class ModelFit {
             throw new CancellationException("the fit was cancelled");
         }
         List<Datum> counted = setup.rows().stream().map(setup.data()::get).toList();
-        LevelTable table = solved.at(values, DataModel.keys(counted));
+        LevelTable table = solved.at(values, LevelDemand.forData(counted));
         List<Quantity> quantities = new ArrayList<>();
         for (Datum datum : counted) {
             quantities.add(model.quantity(datum, table, values));
@@ -203,10 +200,7 @@ public final class ModelFit {
     }
 
     /** The levels of all data and of the predictions asked for. */
-    static Set<LevelKey> allKeys(FitRequest request) {
-        Set<LevelKey> keys =
-                new LinkedHashSet<>(DataModel.keys(request.document().data()));
-        keys.addAll(request.predict());
-        return keys;
+    static LevelDemand everything(FitRequest request) {
+        return LevelDemand.forData(request.document().data()).plus(request.predict());
     }
 }

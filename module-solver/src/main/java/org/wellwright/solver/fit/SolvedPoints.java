@@ -2,10 +2,8 @@ package org.wellwright.solver.fit;
 
 import java.util.ArrayDeque;
 import java.util.Arrays;
-import java.util.Collection;
 import java.util.Deque;
 import org.wellwright.solver.model.Assembly;
-import org.wellwright.solver.model.LevelKey;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /** Solves a model at sets of values and keeps the last few, since a search comes back to where it was. */
@@ -25,16 +23,16 @@ final class SolvedPoints {
     }
 
     /** The levels at a set of values. */
-    LevelTable at(double[] values, Collection<LevelKey> keys) {
+    LevelTable at(double[] values, LevelDemand demand) {
         for (Point point : points) {
-            if (Arrays.equals(point.values, values) && point.table.covers(keys)) {
+            if (Arrays.equals(point.values, values) && point.table.covers(demand)) {
                 return point.table;
             }
         }
         solves++;
         // The end is not known beforehand: the bar slows down instead of jumping back.
         monitor.progress(solves / (solves + 10.0), "trial " + solves + " of the fit");
-        LevelTable table = LevelTable.solve(assembly, keys, values, source, new Quiet(monitor));
+        LevelTable table = LevelTable.solve(assembly, demand, values, source, new Quiet(monitor));
         points.addFirst(new Point(values.clone(), table));
         if (points.size() > KEPT) {
             points.removeLast();

@@ -64,6 +64,15 @@ public final class AssembledProblem {
      */
     public void addGradient(EnergyGradient level, double weight, double[] gradient) {
         energyOrigin.addTo(gradient, weight);
+        addProblemGradient(level, weight, gradient);
+    }
+
+    /**
+     * Adds {@code weight} times the derivatives of a quantity that does not know the energy origin.
+     *
+     * @param level its derivatives by everything in the problem
+     */
+    public void addProblemGradient(EnergyGradient level, double weight, double[] gradient) {
         kinetic.addTo(gradient, weight * level.kinetic());
         for (int j = 0; j < common.size(); j++) {
             if (!common.get(j).constant()) {

@@ -2,6 +2,7 @@ package org.wellwright.solver.fit;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.wellwright.solver.fit.Documents.document;
+import static org.wellwright.solver.fit.Documents.energy;
 import static org.wellwright.solver.fit.Documents.fixed;
 import static org.wellwright.solver.fit.Documents.hydrogens;
 import static org.wellwright.solver.fit.Documents.level;
@@ -10,9 +11,11 @@ import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.wellwright.solver.model.Curve;
+import org.wellwright.solver.model.Datum;
 import org.wellwright.solver.model.Model;
 import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.model.Parameter;
+import org.wellwright.solver.model.Transform;
 import org.wellwright.solver.pair.Body;
 import org.wellwright.solver.pair.BodyMass;
 import org.wellwright.solver.pair.PairSystem;
@@ -88,5 +91,45 @@ class MovingEdgesTest {
                 .withInnerWall(Argument.named("inner"))
                 .withOuterWall(Argument.named("outer"));
         assertThat(compare(of(pool, curve))).isEqualTo(9);
+    }
+
+    @Test
+    void radiiFollowTheirParametersToo() {
+        List<Parameter> pool = List.of(
+                fixed("k", "hartree bohr", "1.3"),
+                fixed("b", "bohr", "2.2"),
+                fixed("s", "hartree", "0.4"),
+                fixed("inner", "bohr", "0.1"),
+                fixed("outer", "bohr", "7"));
+        Term step =
+                formula("step", "s*r").withFrame(TermFrame.named("step").withRange(Argument.ZERO, Argument.named("b")));
+        Curve curve = Curve.of("ground", List.of(formula("c", "-k/r"), step))
+                .withInnerWall(Argument.named("inner"))
+                .withOuterWall(Argument.named("outer"));
+        ModelDocument document = of(pool, curve);
+        for (int power : new int[] {-1, 1, 2}) {
+            Datum radius = energy("r", level("H", 1, 1), 1, "bohr", 1)
+                    .withTransform(Transform.RADIUS, new Datum.Detail(power, 1), "bohr");
+            assertThat(PoolGradients.assertDatumAgreesWithDifferences(document, radius, SOLVER, 3e-3, 1e-5))
+                    .isEqualTo(5);
+        }
+    }
+
+    @Test
+    void radiusFollowsTheReducedMass() {
+        Body light = new Body("", new BodyMass.FromParameter("light"), ExactNumber.ONE, -1);
+        Body heavy = new Body("", new BodyMass.FromParameter("heavy"), ExactNumber.ONE, -1);
+        List<Parameter> pool = List.of(fixed("light", "m_e", "1.5"), fixed("heavy", "m_e", "4"));
+        ModelDocument document = document(
+                "atomic",
+                List.of(PairSystem.of("H", light, heavy)),
+                pool,
+                List.of(Model.of("m", List.of(Curve.of("ground", List.of(formula("f", "-1/r")))))),
+                List.of(),
+                List.of());
+        Datum radius = energy("r", level("H", 0, 1), 1, "bohr", 1)
+                .withTransform(Transform.RADIUS, Datum.Detail.STANDARD, "bohr");
+        assertThat(PoolGradients.assertDatumAgreesWithDifferences(document, radius, SOLVER, 3e-3, 1e-5))
+                .isEqualTo(2);
     }
 }
