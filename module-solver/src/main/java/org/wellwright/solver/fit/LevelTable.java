@@ -29,7 +29,7 @@ final class LevelTable {
     private final Map<LevelKey, Entry> entries = new HashMap<>();
     private final int numbers;
     private final Set<LevelKey> states;
-    private final List<Problem> doubts = new ArrayList<>();
+    private final Map<String, List<ChannelPlace>> doubts = new LinkedHashMap<>();
 
     /**
      * One level: energy with origin, gradient, half-width of the bounds, state if it was asked for; or why there is
@@ -119,9 +119,19 @@ final class LevelTable {
         return used;
     }
 
-    /** Channels in which a level may have been missed, so that an index may be wrong. */
+    /** Where a level may have been missed, so that an index may be wrong; one problem per reason. */
     List<Problem> doubts() {
-        return List.copyOf(doubts);
+        List<Problem> problems = new ArrayList<>();
+        doubts.forEach((message, places) -> {
+            ChannelPlace first = places.get(0);
+            String others = places.size() == 1 ? "" : " and %d more channels".formatted(places.size() - 1);
+            problems.add(new Problem(
+                    "the levels with %s of '%s'%s may not be complete: %s"
+                            .formatted(first.channel().describe(), first.system(), others, message),
+                    "",
+                    "check the indices of the data there"));
+        });
+        return List.copyOf(problems);
     }
 
     /** Whether it has an entry for everything in a demand. */
@@ -173,12 +183,8 @@ final class LevelTable {
             entries.put(wanted.problem().key(index), missing(wanted, spectrum, index));
         }
         if (spectrum.completeness() == Completeness.NO) {
-            ChannelPlace place = wanted.place();
-            doubts.add(new Problem(
-                    "the levels of the curve '%s' with %s for '%s' may not be complete: %s"
-                            .formatted(place.curve(), place.channel().describe(), place.system(), spectrum.message()),
-                    "",
-                    "check the indices of the data there"));
+            doubts.computeIfAbsent(spectrum.message(), message -> new ArrayList<>())
+                    .add(wanted.place());
         }
         for (LevelOutcome outcome : spectrum.outcomes()) {
             if (!wanted.indices().contains(outcome.index())) {
