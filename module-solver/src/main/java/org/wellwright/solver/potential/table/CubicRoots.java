@@ -3,11 +3,16 @@ package org.wellwright.solver.potential.table;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Real roots of polynomials of low degree in an interval, each found by bisection between the stationary points of the polynomial. */
+/**
+ * Real roots of polynomials of low degree in an interval, each found by bisection between the stationary points of the
+ * polynomial.
+ */
 final class CubicRoots {
     private CubicRoots() {}
 
-    /** Roots of Σ c[k] s^k in [low, high] where the sign changes; a root that only touches zero may be left out or kept. */
+    /**
+     * Roots of Σ c[k] s^k in [low, high] where the sign changes; a root that only touches zero may be left out or kept.
+     */
     static List<Double> in(double[] c, double low, double high) {
         List<Double> edges = new ArrayList<>();
         edges.add(low);

@@ -5,7 +5,10 @@ import java.util.concurrent.atomic.AtomicReferenceArray;
 import org.wellwright.solver.potential.Rounding;
 import org.wellwright.solver.potential.TableInterpolation;
 
-/** S(x) through (x[i], y[i]): on piece i the cubic c₀ + s(c₁ + s(c₂ + s c₃)), s = x − x[i]. Immutable; keeps what it had to compute for derivatives. */
+/**
+ * S(x) through (x[i], y[i]): on piece i the cubic c₀ + s(c₁ + s(c₂ + s c₃)), s = x − x[i]. Immutable; keeps what it had
+ * to compute for derivatives.
+ */
 final class PiecewiseCubic {
     private final double[] x;
     private final double[][] c;
@@ -80,7 +83,9 @@ final class PiecewiseCubic {
     /** Bound on the rounding of {@link #value} but for that of s itself. */
     double error(int piece, double s) {
         double[] p = c[piece];
-        double size = Math.abs(p[0]) + Math.abs(s) * (2 * Math.abs(p[1]) + Math.abs(s) * (3 * Math.abs(p[2]) + Math.abs(s) * 4 * Math.abs(p[3])));
+        double size = Math.abs(p[0])
+                + Math.abs(s)
+                        * (2 * Math.abs(p[1]) + Math.abs(s) * (3 * Math.abs(p[2]) + Math.abs(s) * 4 * Math.abs(p[3])));
         double result = Math.abs(value(piece, s));
         double inner = 2 * (size - Math.abs(p[0]));
         return pieceError[piece] + Rounding.UNIT * (result + inner) * 1.01;

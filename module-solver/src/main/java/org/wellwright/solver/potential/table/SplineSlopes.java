@@ -4,8 +4,9 @@ import org.wellwright.solver.potential.Rounding;
 import org.wellwright.solver.potential.TableInterpolation;
 
 /**
- * The slopes at the knots that make a piecewise cubic: of the natural and the clamped spline (de Boor 1978, chapter IV) or the monotone one (Fritsch and
- * Butland 1984, with the three-point end formula of Kahaner, Moler and Nash 1989). Immutable.
+ * The slopes at the knots that make a piecewise cubic: of the natural and the clamped spline (de Boor 1978, chapter IV)
+ * or the monotone one (Fritsch and Butland 1984, with the three-point end formula of Kahaner, Moler and Nash 1989).
+ * Immutable.
  */
 final class SplineSlopes {
     private final TableInterpolation.Spline kind;
@@ -60,7 +61,8 @@ final class SplineSlopes {
             double left = i > 0 ? secantError(i - 1, knotError) : 0;
             double right = i + 1 < n ? secantError(i, knotError) : 0;
             double size = Math.abs(m[i]) + (i > 0 ? Math.abs(m[i - 1]) : 0) + (i + 1 < n ? Math.abs(m[i + 1]) : 0);
-            double factor = kind == TableInterpolation.Spline.CLAMPED && (i == 0 || i == n - 1) ? endAmplification(i) : 1;
+            double factor =
+                    kind == TableInterpolation.Spline.CLAMPED && (i == 0 || i == n - 1) ? endAmplification(i) : 1;
             e[i] = factor * (3 * Math.max(left, right) + 16 * u * size);
         }
         // The inverse of the spline's matrix decays at least as 2^−|i − j|.
@@ -138,7 +140,10 @@ final class SplineSlopes {
         return slope;
     }
 
-    /** Weights of the derivative at an end knot of the cubic through the four outermost knots (Lagrange); they sum to zero. */
+    /**
+     * Weights of the derivative at an end knot of the cubic through the four outermost knots (Lagrange); they sum to
+     * zero.
+     */
     private static double[] endWeights(double[] knots, boolean first) {
         int start = first ? 0 : knots.length - 4;
         int at = first ? 0 : 3;

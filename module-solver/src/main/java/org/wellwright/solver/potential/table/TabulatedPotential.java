@@ -18,9 +18,9 @@ import org.wellwright.solver.potential.TermEvaluator;
 /**
  * A tabulated potential: a piecewise cubic between the knots, continued below the first and above the last.
  *
- * <p>Its parameters are the N values at the knots, then the steepness of the inner continuation, then limit, coefficient and exponent of the outer one.
- * Between knots q(x) is a piecewise cubic, q = V or r²V, x = r or 1/r. Below r₁: V = V₁ − V₁′(r₁/n)[(r₁/r)ⁿ − 1] or V₁ − (V₁′/c)[e^(−c(r − r₁)) − 1]. Above
- * r_N: limit + coefficient/rⁿ.
+ * <p>Its parameters are the N values at the knots, then the steepness of the inner continuation, then limit,
+ * coefficient and exponent of the outer one. Between knots q(x) is a piecewise cubic, q = V or r²V, x = r or 1/r. Below
+ * r₁: V = V₁ − V₁′(r₁/n)[(r₁/r)ⁿ − 1] or V₁ − (V₁′/c)[e^(−c(r − r₁)) − 1]. Above r_N: limit + coefficient/rⁿ.
  */
 public final class TabulatedPotential implements TermEvaluator {
     private final double[] radii;
@@ -64,7 +64,8 @@ public final class TabulatedPotential implements TermEvaluator {
      */
     public record Continuations(double innerConstant, double innerAmplitude, double outerLimit) {}
 
-    private TabulatedPotential(double[] radii, double[] values, TableInterpolation interpolation, Inner inner, Outer outer) {
+    private TabulatedPotential(
+            double[] radii, double[] values, TableInterpolation interpolation, Inner inner, Outer outer) {
         this.radii = radii;
         this.values = values;
         this.interpolation = interpolation;
@@ -88,7 +89,8 @@ public final class TabulatedPotential implements TermEvaluator {
         this.firstSlope = slopeAtFirst(cubic.slopeAtKnot(knot(0)), y[knot(0)]);
         double r = radii[0];
         double scale = (squared ? 1 / (r * r) : 1) * (inverse ? 1 / (r * r) : 1);
-        this.firstSlopeError = scale * cubic.slopeErrorAtKnot(knot(0)) + 8 * Rounding.UNIT * (Math.abs(firstSlope) + 2 * Math.abs(values[0]) / r);
+        this.firstSlopeError = scale * cubic.slopeErrorAtKnot(knot(0))
+                + 8 * Rounding.UNIT * (Math.abs(firstSlope) + 2 * Math.abs(values[0]) / r);
         this.tailConstant = outer.kind() == OuterContinuation.Kind.JOINED_POWER
                 ? values[n - 1] - outer.coefficient() * Math.pow(radii[n - 1], -outer.exponent())
                 : outer.limit();
@@ -106,9 +108,11 @@ public final class TabulatedPotential implements TermEvaluator {
      * @param values V at the knots; copied
      * @throws InvalidModelException if the numbers do not make a table; names the point
      */
-    public static TabulatedPotential of(double[] radii, double[] values, TableInterpolation interpolation, Inner inner, Outer outer) {
+    public static TabulatedPotential of(
+            double[] radii, double[] values, TableInterpolation interpolation, Inner inner, Outer outer) {
         if (radii.length != values.length) {
-            throw new IllegalArgumentException("a table needs as many values as radii, got %d and %d".formatted(values.length, radii.length));
+            throw new IllegalArgumentException(
+                    "a table needs as many values as radii, got %d and %d".formatted(values.length, radii.length));
         }
         if (radii.length < 4) {
             throw new InvalidModelException("a table needs at least 4 points, got " + radii.length, "", "add points");
@@ -116,20 +120,35 @@ public final class TabulatedPotential implements TermEvaluator {
         for (int i = 0; i < radii.length; i++) {
             String place = "table, point " + (i + 1);
             if (!(radii[i] > 0) || radii[i] == Double.POSITIVE_INFINITY) {
-                throw new InvalidModelException("the radius must be positive and finite, got " + radii[i], place, "change it");
+                throw new InvalidModelException(
+                        "the radius must be positive and finite, got " + radii[i], place, "change it");
             }
             if (i > 0 && !(radii[i] > radii[i - 1])) {
-                throw new InvalidModelException("the radius %s does not lie above the one before, %s".formatted(radii[i], radii[i - 1]), place, "sort the points and remove doubles");
+                throw new InvalidModelException(
+                        "the radius %s does not lie above the one before, %s".formatted(radii[i], radii[i - 1]),
+                        place,
+                        "sort the points and remove doubles");
             }
             if (!Double.isFinite(values[i])) {
                 throw new InvalidModelException("the value must be finite, got " + values[i], place, "change it");
             }
         }
-        if (inner.kind() != InnerContinuation.Kind.WALL && (!Double.isFinite(inner.steepness()) || inner.steepness() == 0)) {
-            throw new InvalidModelException("the steepness of the inner continuation must be a number other than 0, got " + inner.steepness(), "table", "change it");
+        if (inner.kind() != InnerContinuation.Kind.WALL
+                && (!Double.isFinite(inner.steepness()) || inner.steepness() == 0)) {
+            throw new InvalidModelException(
+                    "the steepness of the inner continuation must be a number other than 0, got " + inner.steepness(),
+                    "table",
+                    "change it");
         }
-        if (!Double.isFinite(outer.limit()) || !Double.isFinite(outer.coefficient()) || !(outer.exponent() > 0) || outer.exponent() == Double.POSITIVE_INFINITY) {
-            throw new InvalidModelException("the outer continuation needs finite numbers and a positive exponent, got %s + %s/r^%s".formatted(outer.limit(), outer.coefficient(), outer.exponent()), "table", "change it");
+        if (!Double.isFinite(outer.limit())
+                || !Double.isFinite(outer.coefficient())
+                || !(outer.exponent() > 0)
+                || outer.exponent() == Double.POSITIVE_INFINITY) {
+            throw new InvalidModelException(
+                    "the outer continuation needs finite numbers and a positive exponent, got %s + %s/r^%s"
+                            .formatted(outer.limit(), outer.coefficient(), outer.exponent()),
+                    "table",
+                    "change it");
         }
         return new TabulatedPotential(radii.clone(), values.clone(), interpolation, inner, outer);
     }
@@ -152,17 +171,27 @@ public final class TabulatedPotential implements TermEvaluator {
         double s = inner.steepness();
         return switch (inner.kind()) {
             case WALL -> new Continuations(values[0], 0, tailConstant);
-            case POWER -> new Continuations(values[0] + firstSlope * r / s, -firstSlope / s * Math.pow(r, s + 1), tailConstant);
-            case EXPONENTIAL -> new Continuations(values[0] + firstSlope / s, -firstSlope / s * Math.exp(s * r), tailConstant);
+            case POWER ->
+                new Continuations(values[0] + firstSlope * r / s, -firstSlope / s * Math.pow(r, s + 1), tailConstant);
+            case EXPONENTIAL ->
+                new Continuations(values[0] + firstSlope / s, -firstSlope / s * Math.exp(s * r), tailConstant);
         };
     }
 
     @Override
     public String canonical() {
-        StringBuilder text = new StringBuilder("table(").append(interpolation.quantity()).append(',').append(interpolation.abscissa()).append(',').append(interpolation.spline());
+        StringBuilder text = new StringBuilder("table(")
+                .append(interpolation.quantity())
+                .append(',')
+                .append(interpolation.abscissa())
+                .append(',')
+                .append(interpolation.spline());
         text.append(',').append(inner.kind()).append(',').append(Double.toHexString(inner.steepness()));
         text.append(',').append(outer.kind()).append(',').append(Double.toHexString(outer.limit()));
-        text.append(',').append(Double.toHexString(outer.coefficient())).append(',').append(Double.toHexString(outer.exponent()));
+        text.append(',')
+                .append(Double.toHexString(outer.coefficient()))
+                .append(',')
+                .append(Double.toHexString(outer.exponent()));
         for (int i = 0; i < radii.length; i++) {
             text.append(';').append(Double.toHexString(radii[i])).append(' ').append(Double.toHexString(values[i]));
         }
@@ -245,7 +274,9 @@ public final class TabulatedPotential implements TermEvaluator {
     }
 
     private double outerPower(double r) {
-        return outer.kind() == OuterContinuation.Kind.CONSTANT ? 0 : outer.coefficient() * Math.pow(r, -outer.exponent());
+        return outer.kind() == OuterContinuation.Kind.CONSTANT
+                ? 0
+                : outer.coefficient() * Math.pow(r, -outer.exponent());
     }
 
     @Override
@@ -268,7 +299,10 @@ public final class TabulatedPotential implements TermEvaluator {
         int n = radii.length;
         if (r < radii[0]) {
             if (parameter < n) {
-                return (parameter == 0 ? 1 : 0) - (inner.kind() == InnerContinuation.Kind.WALL ? 0 : firstSlopeDerivative(parameter) * innerShape(r));
+                return (parameter == 0 ? 1 : 0)
+                        - (inner.kind() == InnerContinuation.Kind.WALL
+                                ? 0
+                                : firstSlopeDerivative(parameter) * innerShape(r));
             }
             return parameter == n ? -firstSlope * innerShapeDerivative(r) : 0;
         }
@@ -317,8 +351,10 @@ public final class TabulatedPotential implements TermEvaluator {
             points.add(new BreakPoint(radii[i], BreakPoint.Kind.KNOT, 0, List.of()));
         }
         double jump = tailConstant + outerPower(last()) - values[values.length - 1];
-        boolean jumps = Math.abs(jump) > 1e-13 * (Math.abs(tailConstant) + Math.abs(outerPower(last())) + Math.abs(values[values.length - 1]));
-        points.add(new BreakPoint(last(), jumps ? BreakPoint.Kind.JUMP : BreakPoint.Kind.KINK, jumps ? jump : 0, List.of()));
+        boolean jumps = Math.abs(jump)
+                > 1e-13 * (Math.abs(tailConstant) + Math.abs(outerPower(last())) + Math.abs(values[values.length - 1]));
+        points.add(new BreakPoint(
+                last(), jumps ? BreakPoint.Kind.JUMP : BreakPoint.Kind.KINK, jumps ? jump : 0, List.of()));
         return List.copyOf(points);
     }
 
@@ -356,7 +392,8 @@ public final class TabulatedPotential implements TermEvaluator {
         }
         if (to > last()) {
             double a = Math.max(from, Math.nextUp(last()));
-            hull = hull.hull(at(a)).hull(to == Double.POSITIVE_INFINITY ? Interval.around(tailConstant, tailError()) : at(to));
+            hull = hull.hull(at(a))
+                    .hull(to == Double.POSITIVE_INFINITY ? Interval.around(tailConstant, tailError()) : at(to));
         }
         return hull;
     }
@@ -415,13 +452,25 @@ public final class TabulatedPotential implements TermEvaluator {
             double shape = Math.abs(innerShape(r));
             double s = Math.abs(inner.steepness());
             // The exponent carries 2 roundings and the library's; expm1 turns them into its slope.
-            double exponent = inner.kind() == InnerContinuation.Kind.POWER ? s * Math.abs(Math.log(radii[0] / r)) + s : s * Math.abs(r - radii[0]);
-            double shapeError = 4 * u * exponent * Math.abs(innerShapeSlope(r)) * (inner.kind() == InnerContinuation.Kind.POWER ? r : 1) / s + 6 * u * shape;
-            double bound = firstSlopeError * shape + Math.abs(firstSlope) * shapeError + u * Math.abs(value(r)) + 2 * u * Math.abs(firstSlope) * shape;
+            double exponent = inner.kind() == InnerContinuation.Kind.POWER
+                    ? s * Math.abs(Math.log(radii[0] / r)) + s
+                    : s * Math.abs(r - radii[0]);
+            double shapeError = 4
+                            * u
+                            * exponent
+                            * Math.abs(innerShapeSlope(r))
+                            * (inner.kind() == InnerContinuation.Kind.POWER ? r : 1)
+                            / s
+                    + 6 * u * shape;
+            double bound = firstSlopeError * shape
+                    + Math.abs(firstSlope) * shapeError
+                    + u * Math.abs(value(r))
+                    + 2 * u * Math.abs(firstSlope) * shape;
             return bound <= Double.MAX_VALUE ? bound * Rounding.SLACK + Double.MIN_VALUE : Double.POSITIVE_INFINITY;
         }
         if (r > last()) {
-            return (tailError() + 4 * u * Math.abs(outerPower(r)) + u * Math.abs(value(r))) * Rounding.SLACK + Double.MIN_VALUE;
+            return (tailError() + 4 * u * Math.abs(outerPower(r)) + u * Math.abs(value(r))) * Rounding.SLACK
+                    + Double.MIN_VALUE;
         }
         double x = abscissa(r);
         int piece = cubic.piece(x, 0);

@@ -13,7 +13,10 @@ import org.wellwright.solver.potential.TableInterpolation.Abscissa;
 import org.wellwright.solver.potential.TableInterpolation.Quantity;
 import org.wellwright.solver.potential.TableInterpolation.Spline;
 
-/** The reference solves for the second derivatives of the natural spline at 50 digits (Apache Commons Math), the code under test for its slopes. */
+/**
+ * The reference solves for the second derivatives of the natural spline at 50 digits (Apache Commons Math), the code
+ * under test for its slopes.
+ */
 class TableRoundingTest {
     private static final DfpField FIELD = new DfpField(50);
 
@@ -26,7 +29,10 @@ class TableRoundingTest {
         for (int i = 1; i + 1 < n; i++) {
             Dfp h0 = x[i].subtract(x[i - 1]);
             Dfp h1 = x[i + 1].subtract(x[i]);
-            Dfp right = y[i + 1].subtract(y[i]).divide(h1).subtract(y[i].subtract(y[i - 1]).divide(h0)).multiply(6);
+            Dfp right = y[i + 1].subtract(y[i])
+                    .divide(h1)
+                    .subtract(y[i].subtract(y[i - 1]).divide(h0))
+                    .multiply(6);
             Dfp pivot = h0.add(h1).multiply(2).subtract(h0.multiply(c[i - 1]));
             c[i] = h1.divide(pivot);
             d[i] = right.subtract(h0.multiply(d[i - 1])).divide(pivot);
@@ -49,7 +55,9 @@ class TableRoundingTest {
         Dfp b = at.subtract(x[i]).divide(h);
         Dfp cubicA = a.multiply(a).multiply(a).subtract(a).multiply(m[i]);
         Dfp cubicB = b.multiply(b).multiply(b).subtract(b).multiply(m[i + 1]);
-        return a.multiply(y[i]).add(b.multiply(y[i + 1])).add(cubicA.add(cubicB).multiply(h).multiply(h).divide(6));
+        return a.multiply(y[i])
+                .add(b.multiply(y[i + 1]))
+                .add(cubicA.add(cubicB).multiply(h).multiply(h).divide(6));
     }
 
     @Test
