@@ -77,7 +77,7 @@ public final class Samples {
         PairSystem pair = PairSystem.of(SYSTEM, body("e-", "-1"), body("core", "1"));
         ModelDocument document = new ModelDocument(
                 "CODATA 2022",
-                "AME2020",
+                "CODATA 2022, AME 2020",
                 "atomic",
                 LabelConvention.ATOMIC,
                 Weighting.KNOWN,

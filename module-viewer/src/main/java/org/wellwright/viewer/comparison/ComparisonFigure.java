@@ -8,7 +8,9 @@ import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.solver.Problem;
 import org.wellwright.viewer.plot.Figures;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Residuals in σ of every datum and model. */
 @ServiceProvider(service = FigureProvider.class, position = 150)
@@ -47,8 +49,12 @@ public final class ComparisonFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
-        ResidualPlot plot = ResidualPlot.of(request.input(), request.selection());
-        ResidualPainter.paint(target, width, height, plot, PlotStyle.of(request));
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new ComparisonFigure(), request);
+        return new ResidualPicture(ResidualPlot.of(request.input(), request.selection()));
     }
 }

@@ -12,6 +12,7 @@ import org.wellwright.viewer.plot.LegendEntry;
 import org.wellwright.viewer.plot.PlotFrame;
 import org.wellwright.viewer.plot.PlotStyle;
 import org.wellwright.viewer.plot.ScriptText;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Paints residuals: bands of one and two σ, a row per datum, a mark per model. */
 final class ResidualPainter {
@@ -27,10 +28,10 @@ final class ResidualPainter {
         }
     }
 
-    static Painted paint(Graphics2D g, int width, int height, ResidualPlot plot, PlotStyle style) {
+    static Painted paint(Graphics2D g, int width, int height, ResidualPlot plot, PlotStyle style, Viewport view) {
         int count = plot.rows().size();
         PlotFrame frame = new PlotFrame(
-                "Residuals", plot.subtitle(), legend(plot, style), plot.axis(), rows(plot, height, width, style));
+                "Residuals", plot.subtitle(), legend(plot, style), view.horizontal(plot.axis()), rows(plot, height, width, style));
         PlotFrame.Area area = frame.paint(g, width, height, style, new XYPlot(), PlotFrame.Space.NONE);
         band(g, area, plot.place(2), style);
         band(g, area, plot.place(1), style);
@@ -75,6 +76,9 @@ final class ResidualPainter {
             }
             int series = plot.models().get(k).series();
             double x = area.x(plot.place(residual));
+            if (x < area.area().getMinX() || x > area.area().getMaxX()) {
+                continue;
+            }
             double y = middle + (k - 0.5 * (models - 1)) * apart;
             Color colour = style.theme().seriesColour(series);
             g.setColor(row.used() ? colour : PlotStyle.faded(colour, 0.35));
@@ -122,7 +126,7 @@ final class ResidualPainter {
 
     private static void band(Graphics2D g, PlotFrame.Area area, double half, PlotStyle style) {
         double left = Math.max(area.x(-half), area.area().getX());
-        double right = Math.min(area.x(half), area.area().getMaxX());
+        double right = Math.max(left, Math.min(area.x(half), area.area().getMaxX()));
         g.setColor(PlotStyle.faded(style.theme().axis(), 0.1));
         g.fill(new Rectangle2D.Double(
                 left, area.area().getY(), right - left, area.area().getHeight()));

@@ -10,6 +10,7 @@ import org.wellwright.project.SolvedModel;
 import org.wellwright.solver.fit.ModelComparison;
 import org.wellwright.solver.fit.ResidualRow;
 import org.wellwright.solver.model.Datum;
+import org.wellwright.solver.model.LevelKey;
 import org.wellwright.viewer.plot.AxisSpec;
 import org.wellwright.viewer.plot.DatumText;
 import org.wellwright.viewer.plot.LevelText;
@@ -39,11 +40,12 @@ record ResidualPlot(String subtitle, List<Entry> models, List<Row> rows, AxisSpe
      *
      * @param datum its id
      * @param label its name
+     * @param level the first level that it combines
      * @param used whether it counts
      * @param selected whether one of its levels is selected
      * @param residuals one per model, in σ; NaN where there is none
      */
-    record Row(String datum, String label, boolean used, boolean selected, List<Double> residuals) {
+    record Row(String datum, String label, LevelKey level, boolean used, boolean selected, List<Double> residuals) {
         Row {
             residuals = List.copyOf(residuals);
         }
@@ -84,7 +86,13 @@ record ResidualPlot(String subtitle, List<Entry> models, List<Row> rows, AxisSpe
             }
             boolean selected =
                     datum.levels().stream().anyMatch(part -> selection.levels().contains(part.level()));
-            rows.add(new Row(datum.id(), DatumText.of(datum, names), datum.used(), selected, residuals));
+            rows.add(new Row(
+                    datum.id(),
+                    DatumText.of(datum, names),
+                    datum.levels().get(0).level(),
+                    datum.used(),
+                    selected,
+                    residuals));
         }
         boolean linear = Math.max(-lowest, highest) <= LINEAR_TO;
         return new ResidualPlot(input.title(), entries, rows, axis(lowest, highest, linear), linear);

@@ -11,7 +11,9 @@ import org.wellwright.solver.Problem;
 import org.wellwright.solver.model.LevelKey;
 import org.wellwright.viewer.plot.Figures;
 import org.wellwright.viewer.plot.Picks;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
+import org.wellwright.viewer.plot.Viewport;
 
 /** A slice of |R_nl Y_lm|² of the selected level. */
 @ServiceProvider(service = FigureProvider.class, position = 400)
@@ -63,9 +65,13 @@ public final class DensityFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
-        DensityPlane plane =
-                DensityPlane.of(request.input(), request.selection(), DensityPlane.Plane.of(request.variant()));
-        DensityPainter.paint(target, width, height, plane, 1, PlotStyle.of(request));
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new DensityFigure(), request);
+        DensityPlane.Plane plane = DensityPlane.Plane.of(request.variant());
+        return new DensityPicture(DensityPlane.of(request.input(), request.selection(), plane));
     }
 }

@@ -17,6 +17,7 @@ import org.wellwright.viewer.plot.PlotFrame;
 import org.wellwright.viewer.plot.PlotStyle;
 import org.wellwright.viewer.plot.ScriptText;
 import org.wellwright.viewer.plot.Ticks;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Paints a density with axes, colour bar and scale bar; both axes have one scale. */
 final class DensityPainter {
@@ -25,22 +26,18 @@ final class DensityPainter {
 
     private DensityPainter() {}
 
-    /**
-     * Paints into (0, 0, width, height).
-     *
-     * @param zoom factor by which the plane is enlarged, 1 to show all
-     */
-    static PlotFrame.Area paint(Graphics2D g, int width, int height, DensityPlane plane, double zoom, PlotStyle style) {
+    /** Paints into (0, 0, width, height). */
+    static PlotFrame.Area paint(Graphics2D g, int width, int height, DensityPlane plane, PlotStyle style, Viewport view) {
         double right = colourBarWidth(plane, style);
         PlotFrame.Space space = new PlotFrame.Space(0, right, 0);
         // Painted once out of sight to learn the shape of the area, which the ranges follow.
         Graphics2D rehearsal = new BufferedImage(1, 1, BufferedImage.TYPE_INT_RGB).createGraphics();
-        Rectangle2D shape = frame(plane, zoom, 1, 1)
+        Rectangle2D shape = frame(plane, view, 1, 1)
                 .paint(rehearsal, width, height, style, new XYPlot(), space)
                 .area();
         rehearsal.dispose();
         double shorter = Math.min(shape.getWidth(), shape.getHeight());
-        PlotFrame.Area area = frame(plane, zoom, shape.getWidth() / shorter, shape.getHeight() / shorter)
+        PlotFrame.Area area = frame(plane, view, shape.getWidth() / shorter, shape.getHeight() / shorter)
                 .paint(g, width, height, style, new XYPlot(), space);
         image(g, plane, area);
         scaleBar(g, area, plane.lengthUnit(), style);
@@ -48,12 +45,18 @@ final class DensityPainter {
         return area;
     }
 
-    private static PlotFrame frame(DensityPlane plane, double zoom, double wide, double high) {
-        double reach = plane.reach() / zoom;
+    /** Axes around the middle of the view, the vertical one deciding how much is shown. */
+    private static PlotFrame frame(DensityPlane plane, Viewport view, double wide, double high) {
+        boolean whole = !(view.bottom() < view.top() && view.left() < view.right());
+        double middleAcross = whole ? 0 : 0.5 * (view.left() + view.right());
+        double middleUp = whole ? 0 : 0.5 * (view.bottom() + view.top());
+        double reach = whole ? plane.reach() : 0.5 * (view.top() - view.bottom()) / high;
         AxisSpec across = AxisSpec.of(
-                "%s (%s)".formatted(plane.plane().across(), plane.lengthUnit()), -reach * wide, reach * wide);
-        AxisSpec up =
-                AxisSpec.of("%s (%s)".formatted(plane.plane().up(), plane.lengthUnit()), -reach * high, reach * high);
+                "%s (%s)".formatted(plane.plane().across(), plane.lengthUnit()),
+                middleAcross - reach * wide,
+                middleAcross + reach * wide);
+        AxisSpec up = AxisSpec.of(
+                "%s (%s)".formatted(plane.plane().up(), plane.lengthUnit()), middleUp - reach * high, middleUp + reach * high);
         return new PlotFrame("Density", plane.subtitle(), List.of(), across, up);
     }
 
@@ -110,7 +113,7 @@ final class DensityPainter {
         ScriptText.draw(g, style.smallFont(), Ticks.number(length, 3) + " " + unit, x, y - style.em() * 0.55);
     }
 
-    private static String unit(DensityPlane plane) {
+    static String unit(DensityPlane plane) {
         String length = plane.lengthUnit();
         boolean plain = length.chars().allMatch(Character::isLetter);
         return plain ? length + "⁻³" : "1/(" + length + ")³";

@@ -81,6 +81,11 @@ record LevelDiagram(String title, String subtitle, AxisSpec energy, List<Group> 
         groups = List.copyOf(groups);
     }
 
+    /** The same over another range of energies. */
+    LevelDiagram over(AxisSpec newEnergy) {
+        return new LevelDiagram(title, subtitle, newEnergy, groups);
+    }
+
     /** The diagram of everything that is solved and measured. */
     static LevelDiagram of(FigureInput input, FigureSelection selection) {
         LevelText names = LevelText.of(input.document());

@@ -20,6 +20,7 @@ import org.wellwright.viewer.plot.LegendEntry;
 import org.wellwright.viewer.plot.PlotFrame;
 import org.wellwright.viewer.plot.PlotStyle;
 import org.wellwright.viewer.plot.ScriptText;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Paints a level diagram. */
 final class LevelDiagramPainter {
@@ -29,7 +30,8 @@ final class LevelDiagramPainter {
     record Painted(LevelDiagramLayout layout, PlotFrame.Area area) {}
 
     /** Paints into (0, 0, width, height) and tells what stands where. */
-    static Painted paint(Graphics2D g, int width, int height, LevelDiagram diagram, PlotStyle style) {
+    static Painted paint(Graphics2D g, int width, int height, LevelDiagram whole, PlotStyle style, Viewport view) {
+        LevelDiagram diagram = whole.over(view.vertical(whole.energy()));
         double line = ScriptText.lineHeight(style.font());
         boolean notes =
                 diagram.groups().stream().anyMatch(group -> !group.note().isEmpty());

@@ -8,7 +8,9 @@ import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.solver.Problem;
 import org.wellwright.viewer.plot.Figures;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
+import org.wellwright.viewer.plot.Viewport;
 
 /** The level diagram of all models beside the measured levels. */
 @ServiceProvider(service = FigureProvider.class, position = 100)
@@ -40,8 +42,13 @@ public final class LevelsFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
-        LevelDiagram diagram = LevelDiagram.of(request.input(), request.selection());
-        LevelDiagramPainter.paint(target, width, height, diagram, PlotStyle.of(request));
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new LevelsFigure(), request);
+        String unit = request.input().units().energy().printed();
+        return new LevelsPicture(LevelDiagram.of(request.input(), request.selection()), unit);
     }
 }

@@ -17,14 +17,14 @@ import org.jfree.data.xy.XYSeries;
 import org.jfree.data.xy.XYSeriesCollection;
 
 /** Paints an x–y picture: JFreeChart draws axes and curves, then come the rungs with labels that do not overlap. */
-public final class XyPainter {
+final class XyPainter {
     private XyPainter() {}
 
     /** A rung's label and its box. */
     record PlacedLabel(XyPlotModel.Rung rung, Rectangle2D box) {}
 
     /** Paints into (0, 0, width, height) and tells where the axes stand. */
-    public static PlotFrame.Area paint(Graphics2D g, int width, int height, XyPlotModel model, PlotStyle style) {
+    static PlotFrame.Area paint(Graphics2D g, int width, int height, XyPlotModel model, PlotStyle style) {
         PlotFrame frame = new PlotFrame(
                 model.title(), model.subtitle(), legend(model, style), model.horizontal(), model.vertical());
         XYPlot plot = plot(model, style);

@@ -41,8 +41,10 @@ public record XyPlotModel(
      * @param label text at its right end; empty for none
      * @param series index of its colour
      * @param selected whether it is selected
+     * @param spot what it is when pointed at
      */
-    public record Rung(double from, double to, double at, String label, int series, boolean selected) {}
+    public record Rung(
+            double from, double to, double at, String label, int series, boolean selected, Picture.Spot spot) {}
 
     /** Copies the lists. */
     public XyPlotModel {

@@ -8,8 +8,10 @@ import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.solver.Problem;
 import org.wellwright.viewer.plot.Figures;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
-import org.wellwright.viewer.plot.XyPainter;
+import org.wellwright.viewer.plot.Viewport;
+import org.wellwright.viewer.plot.XyPicture;
 
 /** The potentials of all models in one channel with the levels of the model in front. */
 @ServiceProvider(service = FigureProvider.class, position = 200)
@@ -44,13 +46,13 @@ public final class PotentialFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new PotentialFigure(), request);
         boolean effective = request.variant().equals(EFFECTIVE.id());
-        XyPainter.paint(
-                target,
-                width,
-                height,
-                PotentialPlot.of(request.input(), request.selection(), effective),
-                PlotStyle.of(request));
+        return new XyPicture(PotentialPlot.of(request.input(), request.selection(), effective));
     }
 }

@@ -11,6 +11,7 @@ import org.wellwright.solver.radial.Level;
 import org.wellwright.viewer.plot.AxisSpec;
 import org.wellwright.viewer.plot.LevelText;
 import org.wellwright.viewer.plot.Picks;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.Points;
 import org.wellwright.viewer.plot.XyPlotModel;
 
@@ -56,7 +57,8 @@ final class PotentialPlot {
                     names.level(key),
                     input.models().indexOf(front),
                     selection.levels().contains(key),
-                    range));
+                    range,
+                    spot(front.model(), channel, level, names.full(key), input.units().energy().printed())));
         }
         String energy = input.units().energy().printed();
         String what = effective ? "V(r) + centrifugal term" : "V(r)";
@@ -113,14 +115,33 @@ final class PotentialPlot {
         return Points.of(x, y);
     }
 
+    private static Picture.Spot spot(String model, SolvedChannel channel, Level level, String name, String unit) {
+        String text = "%s, %s\nE = %s %s\nat least %s\nat most %s"
+                .formatted(
+                        name,
+                        model,
+                        level.energy() + channel.origin(),
+                        unit,
+                        level.lower() + channel.origin(),
+                        level.upper() + channel.origin());
+        return new Picture.Spot(text, model, channel.key(level.index()));
+    }
+
     private static List<XyPlotModel.Rung> rungs(
-            PotentialCurve curve, Level level, String label, int series, boolean selected, Range range) {
+            PotentialCurve curve,
+            Level level,
+            String label,
+            int series,
+            boolean selected,
+            Range range,
+            Picture.Spot spot) {
         double energy = level.energy() + curve.channel().origin();
         List<XyPlotModel.Rung> rungs = new ArrayList<>();
         List<PotentialCurve.Allowed> allowed = curve.allowed(energy, range.right());
         for (int i = 0; i < allowed.size(); i++) {
             String text = i == allowed.size() - 1 ? label : "";
-            rungs.add(new XyPlotModel.Rung(allowed.get(i).from(), allowed.get(i).to(), energy, text, series, selected));
+            PotentialCurve.Allowed piece = allowed.get(i);
+            rungs.add(new XyPlotModel.Rung(piece.from(), piece.to(), energy, text, series, selected, spot));
         }
         return rungs;
     }

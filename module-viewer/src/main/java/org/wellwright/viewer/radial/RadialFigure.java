@@ -9,8 +9,10 @@ import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.solver.Problem;
 import org.wellwright.viewer.plot.Figures;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
-import org.wellwright.viewer.plot.XyPainter;
+import org.wellwright.viewer.plot.Viewport;
+import org.wellwright.viewer.plot.XyPicture;
 
 /** Radial functions of the selected levels. */
 @ServiceProvider(service = FigureProvider.class, position = 300)
@@ -44,13 +46,13 @@ public final class RadialFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new RadialFigure(), request);
         RadialQuantity quantity = RadialQuantity.of(request.variant());
-        XyPainter.paint(
-                target,
-                width,
-                height,
-                RadialPlot.of(request.input(), request.selection(), quantity),
-                PlotStyle.of(request));
+        return new XyPicture(RadialPlot.of(request.input(), request.selection(), quantity));
     }
 }

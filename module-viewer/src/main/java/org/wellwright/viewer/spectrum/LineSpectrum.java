@@ -6,6 +6,7 @@ import org.wellwright.project.FigureInput;
 import org.wellwright.project.FigureSelection;
 import org.wellwright.project.SolvedModel;
 import org.wellwright.project.SpectralLine;
+import org.wellwright.solver.model.LevelKey;
 import org.wellwright.viewer.plot.AxisSpec;
 import org.wellwright.viewer.plot.LevelText;
 
@@ -43,12 +44,13 @@ record LineSpectrum(String subtitle, AxisSpec energy, List<Lane> lanes, boolean 
      * One line.
      *
      * @param label upper and lower level
+     * @param upper the upper level
      * @param energy transition energy
      * @param sigma its uncertainty; NaN if none
      * @param height 0 to 1: square root of the strength over the largest
      * @param selected whether one of its levels is selected
      */
-    record Line(String label, double energy, double sigma, double height, boolean selected) {}
+    record Line(String label, LevelKey upper, double energy, double sigma, double height, boolean selected) {}
 
     LineSpectrum {
         lanes = List.copyOf(lanes);
@@ -87,7 +89,7 @@ record LineSpectrum(String subtitle, AxisSpec energy, List<Lane> lanes, boolean 
                 boolean selected = selection.levels().contains(line.upper())
                         || selection.levels().contains(line.lower());
                 String label = names.level(line.upper()) + " → " + names.level(line.lower());
-                lines.add(new Line(label, line.energy(), line.sigma(), Math.sqrt(Math.min(1, share)), selected));
+                lines.add(new Line(label, line.upper(), line.energy(), line.sigma(), Math.sqrt(Math.min(1, share)), selected));
             }
         }
         return lines;

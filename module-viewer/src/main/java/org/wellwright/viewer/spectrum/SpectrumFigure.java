@@ -8,7 +8,9 @@ import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.solver.Problem;
 import org.wellwright.viewer.plot.Figures;
+import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.PlotStyle;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Calculated lines of all models beside the measured ones. */
 @ServiceProvider(service = FigureProvider.class, position = 500)
@@ -47,8 +49,12 @@ public final class SpectrumFigure implements FigureProvider {
 
     @Override
     public void paint(Graphics2D target, int width, int height, FigureRequest request) {
-        Figures.require(this, request);
-        LineSpectrum spectrum = LineSpectrum.of(request.input(), request.selection());
-        SpectrumPainter.paint(target, width, height, spectrum, PlotStyle.of(request));
+        picture(request).paint(target, width, height, PlotStyle.of(request), Viewport.ALL);
+    }
+
+    /** The picture of a request that can be drawn. */
+    static Picture picture(FigureRequest request) {
+        Figures.require(new SpectrumFigure(), request);
+        return new SpectrumPicture(LineSpectrum.of(request.input(), request.selection()));
     }
 }

@@ -15,14 +15,15 @@ import org.wellwright.viewer.plot.LegendEntry;
 import org.wellwright.viewer.plot.PlotFrame;
 import org.wellwright.viewer.plot.PlotStyle;
 import org.wellwright.viewer.plot.ScriptText;
+import org.wellwright.viewer.plot.Viewport;
 
 /** Paints a line spectrum in lanes. */
 final class SpectrumPainter {
     private SpectrumPainter() {}
 
-    static PlotFrame.Area paint(Graphics2D g, int width, int height, LineSpectrum spectrum, PlotStyle style) {
+    static PlotFrame.Area paint(Graphics2D g, int width, int height, LineSpectrum spectrum, PlotStyle style, Viewport view) {
         PlotFrame frame = new PlotFrame(
-                "Lines", spectrum.subtitle(), legend(spectrum, style), spectrum.energy(), AxisSpec.hidden(0, 1));
+                "Lines", spectrum.subtitle(), legend(spectrum, style), view.horizontal(spectrum.energy()), AxisSpec.hidden(0, 1));
         PlotFrame.Area area = frame.paint(g, width, height, style, new XYPlot(), new PlotFrame.Space(0, style.em(), 0));
         double height1 = area.area().getHeight() / Math.max(1, spectrum.lanes().size());
         Shape clip = g.getClip();

@@ -17,6 +17,7 @@ import org.wellwright.solver.model.ChannelKey;
 import org.wellwright.solver.model.LevelKey;
 import org.wellwright.viewer.Samples;
 import org.wellwright.viewer.plot.PlotStyle;
+import org.wellwright.viewer.plot.Viewport;
 
 class LevelDiagramTest {
     private static final LevelKey TWO_P = new LevelKey(Samples.SYSTEM, Samples.CURVE, ChannelKey.ofOrbital(1), 0);
@@ -90,6 +91,6 @@ class LevelDiagramTest {
     private static LevelDiagramPainter.Painted paint(FigureInput input, int width, int height) {
         Graphics2D g = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB).createGraphics();
         PlotStyle style = new PlotStyle(ChartTheme.light(), new Font(Font.SANS_SERIF, Font.PLAIN, 12));
-        return LevelDiagramPainter.paint(g, width, height, LevelDiagram.of(input, FigureSelection.NONE), style);
+        return LevelDiagramPainter.paint(g, width, height, LevelDiagram.of(input, FigureSelection.NONE), style, Viewport.ALL);
     }
 }
