@@ -4,7 +4,8 @@ import java.util.Objects;
 import org.wellwright.solver.Problem;
 
 /**
- * What solving a snapshot of a project gave; it stands in the session's Lookup until the next replaces it. Compared by identity, so that every one is seen.
+ * What solving a snapshot of a project gave; it stands in the session's Lookup until the next replaces it. Compared by
+ * identity, so that every one is seen.
  */
 public final class ProjectSolution {
     private final long run;

@@ -23,10 +23,11 @@ import org.wellwright.solver.service.SolveRequest;
 import org.wellwright.solver.service.SolverService;
 
 /**
- * A solver that remembers: solves are keyed by the digest of their problem, the solver and the search, so that an undo or a note costs none. A request for fewer
- * levels than are known is answered from those.
+ * A solver that remembers: solves are keyed by the digest of their problem, the solver and the search, so that an undo
+ * or a note costs none. A request for fewer levels than are known is answered from those.
  *
- * <p>Every key is solved as a task of its own. A caller that stops waiting does not stop the task: that is what {@link #retain} is for. Thread-safe.
+ * <p>Every key is solved as a task of its own. A caller that stops waiting does not stop the task: that is what
+ * {@link #retain} is for. Thread-safe.
  */
 public final class SolveCache implements SolverService {
     /** Finished solves that are kept, the oldest unused go first. */
@@ -85,7 +86,12 @@ public final class SolveCache implements SolverService {
     public Key key(SolveRequest request) {
         SolverService now = solver.get();
         LevelSearch search = request.search();
-        return new Key(now.id() + " " + now.version(), request.problem().digest(), search.below(), search.tolerance(), request.verify());
+        return new Key(
+                now.id() + " " + now.version(),
+                request.problem().digest(),
+                search.below(),
+                search.tolerance(),
+                request.verify());
     }
 
     @Override

@@ -25,11 +25,12 @@ import org.wellwright.solver.radial.Spectrum;
 import org.wellwright.solver.service.SolveRequest;
 
 /**
- * Keeps the solution of a session up to date: after every change that touches the document it solves again and publishes a {@link ProjectSolution} in the session's
- * Lookup.
+ * Keeps the solution of a session up to date: after every change that touches the document it solves again and
+ * publishes a {@link ProjectSolution} in the session's Lookup.
  *
- * <p>Only one snapshot is worked on at a time, always the newest. Work on a snapshot that has been overtaken is finished if it takes less than {@link #PATIENCE_NANOS},
- * so that a slow hand does not starve the views; after that it is left, and of its solves only those stop that the newest snapshot does not need. Thread-safe.
+ * <p>Only one snapshot is worked on at a time, always the newest. Work on a snapshot that has been overtaken is
+ * finished if it takes less than {@link #PATIENCE_NANOS}, so that a slow hand does not starve the views; after that it
+ * is left, and of its solves only those stop that the newest snapshot does not need. Thread-safe.
  */
 public final class SolveCoordinator implements AutoCloseable {
     /** How long overtaken work may go on, ns. */
@@ -119,7 +120,9 @@ public final class SolveCoordinator implements AutoCloseable {
 
     /** Whether two snapshots give the same results. */
     private static boolean same(Project one, Project other) {
-        return other != null && one.title().equals(other.title()) && one.document().equals(other.document());
+        return other != null
+                && one.title().equals(other.title())
+                && one.document().equals(other.document());
     }
 
     private void work() {
@@ -142,7 +145,8 @@ public final class SolveCoordinator implements AutoCloseable {
         } catch (CancellationException e) {
             cache.retain(closed ? Set.of() : wanted(session.project().document()));
         } catch (RuntimeException e) {
-            // The outermost wrapper of background work: a fault of the program must not end in silence or be tried for ever.
+            // The outermost wrapper of background work: a fault of the program must not end in silence or be tried for
+            // ever.
             LOG.log(Level.WARNING, "solving the project failed", e);
             Problem problem = new Problem("the calculation failed: " + e, "", "report this problem");
             settle(project, new Results(nothing(project), problem), start);
@@ -161,9 +165,10 @@ public final class SolveCoordinator implements AutoCloseable {
             models.add(solver.solve(model, SolveScope.USUAL, monitor));
         }
         try {
-            Comparison comparison = document.data().isEmpty() || document.models().isEmpty()
-                    ? null
-                    : ModelComparer.compare(document, this::spectra, monitor);
+            Comparison comparison =
+                    document.data().isEmpty() || document.models().isEmpty()
+                            ? null
+                            : ModelComparer.compare(document, this::spectra, monitor);
             return new Results(ProjectResults.of(project, models, comparison), null);
         } catch (WellwrightException e) {
             return new Results(ProjectResults.of(project, models, null), e.problem());
@@ -177,7 +182,8 @@ public final class SolveCoordinator implements AutoCloseable {
     }
 
     private static FigureInput nothing(Project project) {
-        return new FigureInput(project.title(), project.digest(), project.document(), List.of(), List.of(), null, List.of());
+        return new FigureInput(
+                project.title(), project.digest(), project.document(), List.of(), List.of(), null, List.of());
     }
 
     private synchronized void settle(Project project, Results results, long start) {
@@ -207,7 +213,8 @@ public final class SolveCoordinator implements AutoCloseable {
             try {
                 Assembly assembly = Assembly.of(document, model.name());
                 for (ProjectSolver.Wanted one : solver.wanted(model, SolveScope.USUAL)) {
-                    RadialProblem problem = assembly.problem(one.system(), one.curve(), one.channel()).problem();
+                    RadialProblem problem = assembly.problem(one.system(), one.curve(), one.channel())
+                            .problem();
                     keys.add(cache.key(SolveRequest.of(problem, LevelSearch.first(one.count()))));
                 }
             } catch (WellwrightException e) {

@@ -45,8 +45,8 @@ class SolveCoordinatorTest {
     private final ExecutorService worker = Executors.newSingleThreadExecutor();
     private final CountingSolver solver = new CountingSolver();
     private final ProjectSession session = new ProjectSession(Project.of("Invented", document("1", "5")), null);
-    private final SolveCoordinator coordinator =
-            new SolveCoordinator(session, new SolveCache(() -> solver, solving), worker, SolveCoordinator.Observer.NONE);
+    private final SolveCoordinator coordinator = new SolveCoordinator(
+            session, new SolveCache(() -> solver, solving), worker, SolveCoordinator.Observer.NONE);
 
     @AfterEach
     void end() {
@@ -133,7 +133,9 @@ class SolveCoordinatorTest {
             pause(8);
         }
         await(() -> solution().project() == session.project());
-        assertThat(runs.stream().distinct().count()).as("solutions during the drag").isGreaterThan(3);
+        assertThat(runs.stream().distinct().count())
+                .as("solutions during the drag")
+                .isGreaterThan(3);
         assertThat(first(solution(), "a")).isEqualTo(69);
     }
 
@@ -187,7 +189,14 @@ class SolveCoordinatorTest {
     }
 
     private static double first(ProjectSolution solution, String model) {
-        return solution.results().model(model).channels().get(0).spectrum().levels().get(0).energy();
+        return solution.results()
+                .model(model)
+                .channels()
+                .get(0)
+                .spectrum()
+                .levels()
+                .get(0)
+                .energy();
     }
 
     private static void await(BooleanSupplier condition) {
@@ -228,7 +237,10 @@ class SolveCoordinatorTest {
     }
 
     private static Model model(String name, String parameter) {
-        return Model.of(name, List.of(Curve.of("V", List.of(new FormulaTerm(TermFrame.named("core"), parameter + " + r - 1", Map.of())))));
+        return Model.of(
+                name,
+                List.of(Curve.of(
+                        "V", List.of(new FormulaTerm(TermFrame.named("core"), parameter + " + r - 1", Map.of())))));
     }
 
     /** Counts, waits, notes what was cancelled. */
@@ -279,7 +291,8 @@ class SolveCoordinatorTest {
                 running.remove(digest);
             }
             double energy = request.problem().common().value(1);
-            Level level = new Level(0, energy, energy, energy, Level.BoundKind.ESTIMATE, 0, 1, Double.NaN, Double.POSITIVE_INFINITY);
+            Level level = new Level(
+                    0, energy, energy, energy, Level.BoundKind.ESTIMATE, 0, 1, Double.NaN, Double.POSITIVE_INFINITY);
             return new Spectrum(
                     request.problem(),
                     request.search(),

@@ -31,7 +31,11 @@ final class ResidualPainter {
     static Painted paint(Graphics2D g, int width, int height, ResidualPlot plot, PlotStyle style, Viewport view) {
         int count = plot.rows().size();
         PlotFrame frame = new PlotFrame(
-                "Residuals", plot.subtitle(), legend(plot, style), view.horizontal(plot.axis()), rows(plot, height, width, style));
+                "Residuals",
+                plot.subtitle(),
+                legend(plot, style),
+                view.horizontal(plot.axis()),
+                rows(plot, height, width, style));
         PlotFrame.Area area = frame.paint(g, width, height, style, new XYPlot(), PlotFrame.Space.NONE);
         band(g, area, plot.place(2), style);
         band(g, area, plot.place(1), style);

@@ -27,7 +27,8 @@ final class DensityPainter {
     private DensityPainter() {}
 
     /** Paints into (0, 0, width, height). */
-    static PlotFrame.Area paint(Graphics2D g, int width, int height, DensityPlane plane, PlotStyle style, Viewport view) {
+    static PlotFrame.Area paint(
+            Graphics2D g, int width, int height, DensityPlane plane, PlotStyle style, Viewport view) {
         double right = colourBarWidth(plane, style);
         PlotFrame.Space space = new PlotFrame.Space(0, right, 0);
         // Painted once out of sight to learn the shape of the area, which the ranges follow.
@@ -56,7 +57,9 @@ final class DensityPainter {
                 middleAcross - reach * wide,
                 middleAcross + reach * wide);
         AxisSpec up = AxisSpec.of(
-                "%s (%s)".formatted(plane.plane().up(), plane.lengthUnit()), middleUp - reach * high, middleUp + reach * high);
+                "%s (%s)".formatted(plane.plane().up(), plane.lengthUnit()),
+                middleUp - reach * high,
+                middleUp + reach * high);
         return new PlotFrame("Density", plane.subtitle(), List.of(), across, up);
     }
 

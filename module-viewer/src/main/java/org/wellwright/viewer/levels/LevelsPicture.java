@@ -40,17 +40,25 @@ record LevelsPicture(LevelDiagram diagram, String unit) implements Picture {
         @Override
         public Spot at(double x, double y) {
             PlacedBar placed = painted.layout().at(x, y, reach);
-            return placed == null ? null : new Spot(text(placed.bar()), placed.bar().model(), placed.bar().key());
+            return placed == null
+                    ? null
+                    : new Spot(
+                            text(placed.bar()),
+                            placed.bar().model(),
+                            placed.bar().key());
         }
 
         private String text(Bar bar) {
             String head = "%s, %s".formatted(bar.label(), bar.model().isEmpty() ? "measured" : bar.model());
             String energy = "E = %s %s".formatted(bar.energy(), unit);
             if (bar.model().isEmpty()) {
-                String sigma = bar.below() == bar.above() ? "± " + bar.above() : "+ %s − %s".formatted(bar.above(), bar.below());
+                String sigma = bar.below() == bar.above()
+                        ? "± " + bar.above()
+                        : "+ %s − %s".formatted(bar.above(), bar.below());
                 return head + "\n" + energy + (bar.above() > 0 ? "\nσ: %s %s".formatted(sigma, unit) : "");
             }
-            return head + "\n" + energy + "\nat least %s\nat most %s".formatted(bar.energy() - bar.below(), bar.energy() + bar.above());
+            return head + "\n" + energy
+                    + "\nat least %s\nat most %s".formatted(bar.energy() - bar.below(), bar.energy() + bar.above());
         }
     }
 }

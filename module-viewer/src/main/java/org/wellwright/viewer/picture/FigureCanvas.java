@@ -32,8 +32,8 @@ import org.wellwright.viewer.plot.PlotStyle;
 import org.wellwright.viewer.plot.Viewport;
 
 /**
- * Shows a picture: painted off the event thread at the screen's own pixels. The wheel and + − zoom, dragging and the arrow keys move, 0 and a double click show all
- * again, a click selects. Event thread only.
+ * Shows a picture: painted off the event thread at the screen's own pixels. The wheel and + − zoom, dragging and the
+ * arrow keys move, 0 and a double click show all again, a click selects. Event thread only.
  */
 public final class FigureCanvas extends JComponent {
     private static final long serialVersionUID = 1L;
@@ -145,7 +145,8 @@ public final class FigureCanvas extends JComponent {
 
     private void zoom(double x, double y, double factor) {
         if (ready()) {
-            setView(rendered.view().zoomed(rendered.painted().area(), x, y, factor, picture.movesAcross(), picture.movesUp()));
+            setView(rendered.view()
+                    .zoomed(rendered.painted().area(), x, y, factor, picture.movesAcross(), picture.movesUp()));
         }
     }
 

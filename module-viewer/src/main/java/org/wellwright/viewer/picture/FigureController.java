@@ -66,7 +66,8 @@ public final class FigureController {
         } catch (RuntimeException e) {
             // The outermost wrapper of background work: without it the window would go on showing the picture before.
             LOG.log(Level.WARNING, "the figure '" + figure.id() + "' failed", e);
-            return new FigureViewModel(null, request, new Problem("the picture failed: " + e, "", "report this problem"));
+            return new FigureViewModel(
+                    null, request, new Problem("the picture failed: " + e, "", "report this problem"));
         }
     }
 

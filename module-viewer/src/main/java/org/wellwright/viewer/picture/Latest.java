@@ -6,8 +6,8 @@ import java.util.concurrent.atomic.AtomicBoolean;
 import java.util.concurrent.atomic.AtomicReference;
 
 /**
- * Runs one job at a time on an executor; of the jobs that come in meanwhile only the newest is kept. A job that runs is finished, so that a stream of jobs faster than
- * they can be done still shows results. Thread-safe.
+ * Runs one job at a time on an executor; of the jobs that come in meanwhile only the newest is kept. A job that runs is
+ * finished, so that a stream of jobs faster than they can be done still shows results. Thread-safe.
  */
 public final class Latest {
     private final Executor executor;

@@ -65,11 +65,16 @@ public record Viewport(double left, double right, double bottom, double top) {
         Viewport next = this;
         if (across) {
             double shift = area.valueAtX(dx) - area.valueAtX(0);
-            next = new Viewport(area.horizontal().lower() - shift, area.horizontal().upper() - shift, next.bottom, next.top);
+            next = new Viewport(
+                    area.horizontal().lower() - shift, area.horizontal().upper() - shift, next.bottom, next.top);
         }
         if (up) {
             double shift = area.valueAtY(dy) - area.valueAtY(0);
-            next = new Viewport(next.left, next.right, area.vertical().lower() - shift, area.vertical().upper() - shift);
+            next = new Viewport(
+                    next.left,
+                    next.right,
+                    area.vertical().lower() - shift,
+                    area.vertical().upper() - shift);
         }
         return next;
     }

@@ -58,7 +58,12 @@ final class PotentialPlot {
                     input.models().indexOf(front),
                     selection.levels().contains(key),
                     range,
-                    spot(front.model(), channel, level, names.full(key), input.units().energy().printed())));
+                    spot(
+                            front.model(),
+                            channel,
+                            level,
+                            names.full(key),
+                            input.units().energy().printed())));
         }
         String energy = input.units().energy().printed();
         String what = effective ? "V(r) + centrifugal term" : "V(r)";

@@ -89,7 +89,8 @@ record LineSpectrum(String subtitle, AxisSpec energy, List<Lane> lanes, boolean 
                 boolean selected = selection.levels().contains(line.upper())
                         || selection.levels().contains(line.lower());
                 String label = names.level(line.upper()) + " → " + names.level(line.lower());
-                lines.add(new Line(label, line.upper(), line.energy(), line.sigma(), Math.sqrt(Math.min(1, share)), selected));
+                lines.add(new Line(
+                        label, line.upper(), line.energy(), line.sigma(), Math.sqrt(Math.min(1, share)), selected));
             }
         }
         return lines;

@@ -21,9 +21,14 @@ import org.wellwright.viewer.plot.Viewport;
 final class SpectrumPainter {
     private SpectrumPainter() {}
 
-    static PlotFrame.Area paint(Graphics2D g, int width, int height, LineSpectrum spectrum, PlotStyle style, Viewport view) {
+    static PlotFrame.Area paint(
+            Graphics2D g, int width, int height, LineSpectrum spectrum, PlotStyle style, Viewport view) {
         PlotFrame frame = new PlotFrame(
-                "Lines", spectrum.subtitle(), legend(spectrum, style), view.horizontal(spectrum.energy()), AxisSpec.hidden(0, 1));
+                "Lines",
+                spectrum.subtitle(),
+                legend(spectrum, style),
+                view.horizontal(spectrum.energy()),
+                AxisSpec.hidden(0, 1));
         PlotFrame.Area area = frame.paint(g, width, height, style, new XYPlot(), new PlotFrame.Space(0, style.em(), 0));
         double height1 = area.area().getHeight() / Math.max(1, spectrum.lanes().size());
         Shape clip = g.getClip();

@@ -33,8 +33,11 @@ record SpectrumPicture(LineSpectrum spectrum) implements Picture {
             if (spectrum.lanes().isEmpty() || !area.area().contains(x, y)) {
                 return null;
             }
-            int index = (int) ((y - area.area().getY()) / area.area().getHeight() * spectrum.lanes().size());
-            LineSpectrum.Lane lane = spectrum.lanes().get(Math.min(index, spectrum.lanes().size() - 1));
+            int index = (int) ((y - area.area().getY())
+                    / area.area().getHeight()
+                    * spectrum.lanes().size());
+            LineSpectrum.Lane lane =
+                    spectrum.lanes().get(Math.min(index, spectrum.lanes().size() - 1));
             LineSpectrum.Line nearest = null;
             double best = reach;
             for (LineSpectrum.Line line : lane.lines()) {
@@ -47,7 +50,8 @@ record SpectrumPicture(LineSpectrum spectrum) implements Picture {
             if (nearest == null) {
                 return null;
             }
-            String text = "%s, %s\n%s: %s".formatted(nearest.label(), lane.name(), spectrum.energy().label(), nearest.energy());
+            String text = "%s, %s\n%s: %s"
+                    .formatted(nearest.label(), lane.name(), spectrum.energy().label(), nearest.energy());
             return new Spot(text, lane.measured() ? "" : lane.name(), nearest.upper());
         }
     }

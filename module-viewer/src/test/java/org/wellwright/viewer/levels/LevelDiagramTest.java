@@ -91,6 +91,7 @@ class LevelDiagramTest {
     private static LevelDiagramPainter.Painted paint(FigureInput input, int width, int height) {
         Graphics2D g = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB).createGraphics();
         PlotStyle style = new PlotStyle(ChartTheme.light(), new Font(Font.SANS_SERIF, Font.PLAIN, 12));
-        return LevelDiagramPainter.paint(g, width, height, LevelDiagram.of(input, FigureSelection.NONE), style, Viewport.ALL);
+        return LevelDiagramPainter.paint(
+                g, width, height, LevelDiagram.of(input, FigureSelection.NONE), style, Viewport.ALL);
     }
 }

@@ -92,8 +92,10 @@ class FigureCanvasTest {
 
     @Test
     void theHintIsEscapedAndNothingIsHintedBesideIt() {
-        assertThat(canvas.getToolTipText(event(MouseEvent.MOUSE_MOVED, 200, 150, 0, 0))).isEqualTo("<html>a &lt;b&gt;");
-        assertThat(canvas.getToolTipText(event(MouseEvent.MOUSE_MOVED, 20, 20, 0, 0))).isNull();
+        assertThat(canvas.getToolTipText(event(MouseEvent.MOUSE_MOVED, 200, 150, 0, 0)))
+                .isEqualTo("<html>a &lt;b&gt;");
+        assertThat(canvas.getToolTipText(event(MouseEvent.MOUSE_MOVED, 20, 20, 0, 0)))
+                .isNull();
     }
 
     @Test
@@ -122,7 +124,9 @@ class FigureCanvasTest {
 
     private MouseEvent event(int id, int x, int y, int modifiers, int clicks) {
         int held = id == MouseEvent.MOUSE_DRAGGED ? MouseEvent.BUTTON1_DOWN_MASK : 0;
-        int button = id == MouseEvent.MOUSE_DRAGGED || id == MouseEvent.MOUSE_MOVED ? MouseEvent.NOBUTTON : MouseEvent.BUTTON1;
+        int button = id == MouseEvent.MOUSE_DRAGGED || id == MouseEvent.MOUSE_MOVED
+                ? MouseEvent.NOBUTTON
+                : MouseEvent.BUTTON1;
         return new MouseEvent(canvas, id, 0, modifiers | held, x, y, clicks, false, button);
     }
 

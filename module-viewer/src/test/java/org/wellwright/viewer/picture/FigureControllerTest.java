@@ -44,7 +44,9 @@ class FigureControllerTest {
 
     @Test
     void whatIsMissingIsShownInsteadOfAPicture() {
-        controller().show(request(new FigureSelection("", List.of(new LevelKey(Samples.SYSTEM, Samples.CURVE, ChannelKey.ofOrbital(1), 40)), 0)));
+        controller()
+                .show(request(new FigureSelection(
+                        "", List.of(new LevelKey(Samples.SYSTEM, Samples.CURVE, ChannelKey.ofOrbital(1), 40)), 0)));
         work();
         assertThat(shown).singleElement().satisfies(model -> {
             assertThat(model.picture()).isNull();
@@ -64,7 +66,9 @@ class FigureControllerTest {
                 shown::add);
         controller.show(request(FigureSelection.NONE));
         work();
-        assertThat(shown).singleElement().satisfies(model -> assertThat(model.problem().what()).contains("broken on purpose"));
+        assertThat(shown)
+                .singleElement()
+                .satisfies(model -> assertThat(model.problem().what()).contains("broken on purpose"));
     }
 
     @Test
@@ -82,8 +86,12 @@ class FigureControllerTest {
     @Test
     void mStaysWithinTheLOfTheLevelInFront() {
         FigureSelection before = new FigureSelection("", List.of(THREE_D), -2);
-        assertThat(FigureController.picked(before, new Picture.Spot("", "", TWO_P), false).magnetic()).isEqualTo(-1);
-        assertThat(FigureController.picked(before, new Picture.Spot("", "x", null), false).magnetic()).isEqualTo(-2);
+        assertThat(FigureController.picked(before, new Picture.Spot("", "", TWO_P), false)
+                        .magnetic())
+                .isEqualTo(-1);
+        assertThat(FigureController.picked(before, new Picture.Spot("", "x", null), false)
+                        .magnetic())
+                .isEqualTo(-2);
     }
 
     private FigureController controller() {
