@@ -25,8 +25,10 @@ import javax.swing.ListSelectionModel;
 import javax.swing.TransferHandler;
 import javax.swing.table.AbstractTableModel;
 import javax.swing.table.JTableHeader;
+import javax.swing.table.TableCellEditor;
 import javax.swing.table.TableColumn;
 import javax.swing.text.DefaultEditorKit;
+import org.wellwright.solver.Problem;
 
 /**
  * A table of rows whose cells check what is typed into them: what cannot be used stays in the cell, marked, with the reason in the problem line.
@@ -173,7 +175,7 @@ public final class Grid<R> extends JTable {
     }
 
     /** Takes up what was typed into a cell. */
-    Optional<org.wellwright.solver.Problem> take(int row, int column, String text) {
+    Optional<Problem> take(int row, int column, String text) {
         GridColumn<R> of = columns.get(column);
         if (row >= rows.size() || text.equals(of.text().apply(rows.get(row)))) {
             return Optional.empty();
@@ -200,7 +202,7 @@ public final class Grid<R> extends JTable {
                 return true;
             }
         } catch (UnsupportedFlavorException | IOException e) {
-            line.say(Optional.of(new org.wellwright.solver.Problem("the clipboard cannot be read", "", "copy the cells again")));
+            line.say(Optional.of(new Problem("the clipboard cannot be read", "", "copy the cells again")));
         }
         return false;
     }
@@ -253,7 +255,7 @@ public final class Grid<R> extends JTable {
     }
 
     @Override
-    public Component prepareEditor(javax.swing.table.TableCellEditor editor, int row, int column) {
+    public Component prepareEditor(TableCellEditor editor, int row, int column) {
         Component component = super.prepareEditor(editor, row, column);
         if (component instanceof JComponent typed) {
             typed.setName(getName() + ".editor");
