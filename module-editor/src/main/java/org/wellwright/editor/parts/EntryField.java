@@ -47,25 +47,20 @@ public final class EntryField extends JTextField {
         return this;
     }
 
-    /** Shows a text, unless the user is typing another one. */
+    /** Shows a text. What the user is typing, or has typed in vain, stays while what it stands for is the same. */
     public void show(String text) {
-        if (faulty || isFocusOwner() && pending()) {
+        boolean unchanged = text.equals(shown);
+        if (unchanged && pending() || isFocusOwner() && pending() && !faulty) {
             return;
+        }
+        if (faulty) {
+            mark(Optional.empty());
         }
         shown = text;
         if (!getText().equals(text)) {
             setText(text);
             setCaretPosition(0);
         }
-    }
-
-    /** Shows a text, whatever stands there. */
-    public void reset(String text) {
-        faulty = false;
-        putClientProperty("JComponent.outline", null);
-        shown = text;
-        setText(text);
-        setCaretPosition(0);
     }
 
     private boolean pending() {
