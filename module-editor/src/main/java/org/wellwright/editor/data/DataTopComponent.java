@@ -6,6 +6,7 @@ import java.io.IOException;
 import java.nio.charset.MalformedInputException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.BiFunction;
@@ -16,6 +17,7 @@ import javax.swing.JComboBox;
 import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
+import javax.swing.SwingUtilities;
 import org.openide.awt.ActionID;
 import org.openide.awt.ActionReference;
 import org.openide.filesystems.FileChooserBuilder;
@@ -153,7 +155,7 @@ public final class DataTopComponent extends SessionWindow {
                 typed("Groups", "Groups that share an error", Kind.OPEN_CHOICE, "calibration", Row::groups, (row, text) -> controller.setGroups(row, text))
                         .withProblem(Row::groupProblem)
                         .withChoices(row -> {
-                            List<String> ids = new java.util.ArrayList<>(List.of(""));
+                            List<String> ids = new ArrayList<>(List.of(""));
                             controller.document().groups().stream().map(DataGroup::id).forEach(ids::add);
                             return ids;
                         }),
@@ -164,14 +166,21 @@ public final class DataTopComponent extends SessionWindow {
                         .where(row -> !row.draft()));
     }
 
-    private static GridColumn<Row> typed(
+    private GridColumn<Row> typed(
             String title,
             String hint,
             Kind kind,
             String sample,
             Function<Row, String> text,
             BiFunction<Row, String, Optional<Problem>> take) {
-        return GridColumn.typed(title, hint, kind, sample, text, take);
+        return GridColumn.typed(title, hint, kind, sample, text, (row, typed) -> {
+            Optional<Problem> problem = take.apply(row, typed);
+            if (row.draft()) {
+                // The row that is being filled is no part of the project, so nothing else tells of its change.
+                SwingUtilities.invokeLater(() -> show(session()));
+            }
+            return problem;
+        });
     }
 
     @Override

@@ -2,16 +2,16 @@ package org.wellwright.editor.models;
 
 import java.awt.BorderLayout;
 import java.awt.CardLayout;
+import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JPanel;
 import javax.swing.JPopupMenu;
 import javax.swing.JScrollPane;
 import javax.swing.JSplitPane;
-import javax.swing.SwingUtilities;
+import javax.swing.KeyStroke;
 import org.openide.awt.ActionID;
 import org.openide.awt.ActionReference;
-import org.openide.util.Lookup;
 import org.openide.util.NbBundle.Messages;
 import org.openide.windows.TopComponent;
 import org.wellwright.branding.EmptyState;
@@ -22,7 +22,6 @@ import org.wellwright.editor.parts.Glyph;
 import org.wellwright.editor.parts.ProblemLine;
 import org.wellwright.editor.parts.ToolStrip;
 import org.wellwright.project.FigureSelection;
-import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 import org.wellwright.project.window.session.SessionWindow;
 import org.wellwright.solver.model.ModelDocument;
@@ -71,9 +70,6 @@ public final class ModelsTopComponent extends SessionWindow {
     private final JButton remove;
     private final JButton up;
     private final JButton down;
-    private final transient OpenProjects open = Lookup.getDefault().lookup(OpenProjects.class);
-    private final transient Lookup.Result<FigureSelection> selection =
-            open.getLookup().lookupResult(FigureSelection.class);
     private transient ModelsController controller;
     private transient ModelDocument shown;
     private transient TermPath formPath = TermPath.NONE;
@@ -93,7 +89,7 @@ public final class ModelsTopComponent extends SessionWindow {
         remove = tools.icon("remove", Glyph.REMOVE, Bundle.LBL_RemoveNode(), this::remove);
         up = tools.icon("up", Glyph.UP, Bundle.LBL_UpNode(), () -> go(controller.move(tree.selected(), -1)));
         down = tools.icon("down", Glyph.DOWN, Bundle.LBL_DownNode(), () -> go(controller.move(tree.selected(), 1)));
-        tree.getInputMap().put(javax.swing.KeyStroke.getKeyStroke("DELETE"), "remove");
+        tree.getInputMap().put(KeyStroke.getKeyStroke("DELETE"), "remove");
         tree.getActionMap().put("remove", ToolStrip.action("remove", this::remove));
         tree.addTreeSelectionListener(event -> {
             if (!tree.filling()) {
@@ -116,7 +112,6 @@ public final class ModelsTopComponent extends SessionWindow {
         line.setBorder(BorderFactory.createEmptyBorder(2, 8, 4, 8));
         content.add(line, BorderLayout.SOUTH);
         install(content, new EmptyState(Bundle.MSG_ModelsMissing(), Bundle.MSG_ModelsRemedy()));
-        selection.addLookupListener(event -> SwingUtilities.invokeLater(this::followFigures));
     }
 
     private JPopupMenu addMenu() {
@@ -156,11 +151,7 @@ public final class ModelsTopComponent extends SessionWindow {
     private void followSelection() {
         TermPath path = tree.selected();
         if (path.model() >= 0 && shown != null && path.model() < shown.models().size()) {
-            String name = shown.models().get(path.model()).name();
-            FigureSelection now = figures();
-            if (!name.equals(now.model())) {
-                open.select(new FigureSelection(name, now.levels(), now.magnetic()));
-            }
+            pickModel(shown.models().get(path.model()).name());
         }
         showForm();
     }
@@ -170,15 +161,16 @@ public final class ModelsTopComponent extends SessionWindow {
         if (shown == null || shown.models().isEmpty()) {
             return;
         }
-        String wanted = figures().model();
+        String wanted = selection().model();
         int index = Math.max(0, shown.models().stream().map(m -> m.name()).toList().indexOf(wanted));
         if (tree.selected().model() != index) {
             tree.select(TermPath.model(index));
         }
     }
 
-    private FigureSelection figures() {
-        return selection.allInstances().stream().findFirst().map(FigureSelection.class::cast).orElse(FigureSelection.NONE);
+    @Override
+    protected void picked(FigureSelection selection) {
+        followFigures();
     }
 
     private void showForm() {
@@ -219,7 +211,7 @@ public final class ModelsTopComponent extends SessionWindow {
         }
         formPath = path;
         form.clear();
-        line.say(java.util.Optional.empty());
+        line.say(Optional.empty());
         switch (path.kind()) {
             case MODEL -> modelForm = new ModelForm(form, controller, path, line);
             case CURVE -> curveForm = new CurveForm(form, controller, path, line);

@@ -14,6 +14,7 @@ import org.openide.util.lookup.InstanceContent;
 import org.openide.util.lookup.Lookups;
 import org.openide.util.lookup.ProxyLookup;
 import org.openide.windows.TopComponent;
+import org.wellwright.project.FigureSelection;
 import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 
@@ -29,6 +30,7 @@ public abstract class SessionWindow extends TopComponent {
     private final transient InstanceContent own = new InstanceContent();
     private final transient OpenProjects open = Lookup.getDefault().lookup(OpenProjects.class);
     private final transient Lookup.Result<ProjectSession> result = open.getLookup().lookupResult(ProjectSession.class);
+    private final transient Lookup.Result<FigureSelection> picks = open.getLookup().lookupResult(FigureSelection.class);
     private final transient AtomicBoolean due = new AtomicBoolean();
     private final transient Runnable changed = this::later;
     private final CardLayout cards = new CardLayout();
@@ -42,6 +44,11 @@ public abstract class SessionWindow extends TopComponent {
         add(deck, BorderLayout.CENTER);
         associateLookup(new ProxyLookup(Lookups.singleton(getActionMap()), new AbstractLookup(own), open.getLookup()));
         result.addLookupListener((LookupEvent event) -> SwingUtilities.invokeLater(this::follow));
+        picks.addLookupListener((LookupEvent event) -> SwingUtilities.invokeLater(() -> {
+            if (isOpened() && session != null) {
+                picked(selection());
+            }
+        }));
     }
 
     /**
@@ -61,6 +68,25 @@ public abstract class SessionWindow extends TopComponent {
 
     /** Called when another project is selected, before {@link #show}; null if none is open any more. */
     protected void selected(ProjectSession selected) {}
+
+    /** Called when another model or level is selected in the selected project, here or elsewhere. */
+    protected void picked(FigureSelection selection) {}
+
+    /** The selected model and levels. */
+    protected final FigureSelection selection() {
+        for (FigureSelection selection : picks.allInstances()) {
+            return selection;
+        }
+        return FigureSelection.NONE;
+    }
+
+    /** Selects a model for every window; its levels stay selected. */
+    protected final void pickModel(String model) {
+        FigureSelection now = selection();
+        if (!model.equals(now.model())) {
+            open.select(new FigureSelection(model, now.levels(), now.magnetic()));
+        }
+    }
 
     /** The selected project, or null. */
     protected final ProjectSession session() {
