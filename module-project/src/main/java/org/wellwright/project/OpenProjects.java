@@ -52,4 +52,23 @@ public interface OpenProjects extends Lookup.Provider {
 
     /** Closes a project, saved or not, and selects its neighbour. */
     void close(ProjectSession session);
+
+    /**
+     * Whether somebody else changed or removed the file of a project since it was read or written here; false for one
+     * that is in no file.
+     */
+    boolean changedOutside(ProjectSession session);
+
+    /**
+     * Takes up what somebody else wrote into the file of a project, as one undoable step.
+     *
+     * @throws org.wellwright.solver.WellwrightException if the file cannot be used; the project is then as before
+     */
+    void readAgain(ProjectSession session);
+
+    /** Calls a listener after a project was opened, closed or selected, on the thread that did it. */
+    void addListener(Runnable listener);
+
+    /** Stops calling a listener. */
+    void removeListener(Runnable listener);
 }

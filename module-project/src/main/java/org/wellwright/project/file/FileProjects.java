@@ -10,6 +10,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.CopyOnWriteArrayList;
 import org.openide.util.Lookup;
 import org.openide.util.lookup.AbstractLookup;
 import org.openide.util.lookup.InstanceContent;
@@ -28,6 +29,7 @@ public final class FileProjects implements OpenProjects {
     private final Map<ProjectSession, byte[]> onDisk = new HashMap<>();
     private final InstanceContent content = new InstanceContent();
     private final Lookup lookup = new AbstractLookup(content);
+    private final List<Runnable> listeners = new CopyOnWriteArrayList<>();
     private ProjectSession selected;
     private FigureSelection selection = FigureSelection.NONE;
 
@@ -105,17 +107,47 @@ public final class FileProjects implements OpenProjects {
         Path file = session.file()
                 .orElseThrow(() -> new ProjectFileException(
                         new Problem("the project is in no file yet", session.displayName(), "save it under a name")));
-        byte[] known;
-        synchronized (lock) {
-            known = onDisk.get(session);
-        }
-        if (Files.exists(file) && known != null && !Arrays.equals(SafeFile.read(file), known)) {
+        if (Files.exists(file) && changedOutside(session)) {
             throw new ProjectFileException(new Problem(
                     "the file was changed by someone else since it was opened",
                     file.toString(),
                     "save it under another name, or open it again"));
         }
         saveAs(session, file);
+    }
+
+    @Override
+    public boolean changedOutside(ProjectSession session) {
+        byte[] known;
+        synchronized (lock) {
+            known = onDisk.get(session);
+        }
+        Path file = session.file().orElse(null);
+        return known != null && file != null && (!Files.exists(file) || !Arrays.equals(SafeFile.read(file), known));
+    }
+
+    @Override
+    public void readAgain(ProjectSession session) {
+        Path file = session.file()
+                .orElseThrow(() -> new ProjectFileException(
+                        new Problem("the project is in no file yet", session.displayName(), "save it under a name")));
+        byte[] bytes = SafeFile.read(file);
+        Project read = ProjectFile.parse(bytes, file.toString()).project();
+        session.edit("Read the file again", project -> read.withViews(project.views()));
+        synchronized (lock) {
+            onDisk.put(session, bytes);
+        }
+        session.markSaved(read, file);
+    }
+
+    @Override
+    public void addListener(Runnable listener) {
+        listeners.add(listener);
+    }
+
+    @Override
+    public void removeListener(Runnable listener) {
+        listeners.remove(listener);
     }
 
     @Override
@@ -162,6 +194,7 @@ public final class FileProjects implements OpenProjects {
             }
         }
         content.set(items, null);
+        listeners.forEach(Runnable::run);
     }
 
     private static Path place(Path file) {
