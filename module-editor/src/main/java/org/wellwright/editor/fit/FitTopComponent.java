@@ -283,7 +283,7 @@ public final class FitTopComponent extends SessionWindow {
         discard.setEnabled(done);
         progress.setVisible(running);
         progress.setValue((int) (1000 * fit.fraction()));
-        doing.setText(fit.doing().isEmpty() ? " " : done ? fit.model() + ": " + fit.doing() : fit.doing());
+        doing.setText(fit.doing().isEmpty() ? " " : fit.doing());
         quality.setText("<html>" + String.join("<br>", fit.quality()));
         if (fit.state() == FitViewModel.State.FAILED) {
             deck.remove(failure);

@@ -3,11 +3,13 @@ package org.wellwright.editor.models;
 import java.awt.Color;
 import java.awt.Component;
 import java.awt.FlowLayout;
+import java.awt.Font;
 import java.awt.Rectangle;
 import java.awt.event.KeyEvent;
 import java.awt.event.MouseAdapter;
 import java.awt.event.MouseEvent;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Set;
 import java.util.function.BiConsumer;
 import javax.swing.JCheckBox;
@@ -29,9 +31,10 @@ import org.wellwright.editor.parts.Tones;
 /** The tree of models, curves and terms; a box before each term switches it on and off. */
 final class ModelTree extends JTree {
     private static final long serialVersionUID = 1L;
+    private static final int LONGEST_DETAIL = 32;
 
     private final transient BiConsumer<TermPath, Boolean> toggle;
-    private transient ModelsViewModel shown = new ModelsViewModel(java.util.List.of());
+    private transient ModelsViewModel shown = new ModelsViewModel(List.of());
     private boolean filling;
 
     ModelTree(String name, String title, BiConsumer<TermPath, Boolean> toggle) {
@@ -89,7 +92,8 @@ final class ModelTree extends JTree {
         for (int i = 0; i < getRowCount(); i++) {
             if (node(getPathForRow(i)).path().equals(path)) {
                 setSelectionRow(i);
-                scrollRowToVisible(i);
+                Rectangle bounds = getRowBounds(i);
+                scrollRectToVisible(new Rectangle(0, bounds.y, 1, bounds.height));
                 return;
             }
         }
@@ -153,6 +157,7 @@ final class ModelTree extends JTree {
                 : "";
     }
 
+    /** The box of a term, then its name, then in fainter colour what it is. */
     private static final class Renderer implements TreeCellRenderer {
         private final JPanel line = new JPanel(new FlowLayout(FlowLayout.LEADING, 4, 1));
         private final JCheckBox box = new JCheckBox();
@@ -174,19 +179,29 @@ final class ModelTree extends JTree {
             if (!(((DefaultMutableTreeNode) value).getUserObject() instanceof ModelsViewModel.Node node)) {
                 return line;
             }
-            boolean term = node.path().kind() == TermPath.Kind.TERM;
-            box.setVisible(term);
+            box.setVisible(node.path().kind() == TermPath.Kind.TERM);
             box.setSelected(node.enabled());
             title.setText(node.title());
-            title.setFont(tree.getFont().deriveFont(node.path().kind() == TermPath.Kind.MODEL ? java.awt.Font.BOLD : java.awt.Font.PLAIN));
-            boolean same = node.detail().equals(node.title());
-            detail.setText(same ? "" : node.detail().length() > 60 ? node.detail().substring(0, 59) + "…" : node.detail());
-            Color text = UIManager.getColor(selected ? "Tree.selectionForeground" : "Tree.textForeground");
+            title.setFont(tree.getFont().deriveFont(node.path().kind() == TermPath.Kind.MODEL ? Font.BOLD : Font.PLAIN));
+            detail.setText(detail(node));
+            Color text = UIManager.getColor(
+                    !selected
+                            ? "Tree.textForeground"
+                            : tree.isFocusOwner() ? "Tree.selectionForeground" : "Tree.selectionInactiveForeground");
             boolean faulty = !node.problem().isEmpty();
-            title.setForeground(faulty && !selected ? Tones.problem() : node.enabled() ? text : Tones.faint());
+            title.setForeground(faulty && !selected ? Tones.problem() : node.enabled() || selected ? text : Tones.faint());
             detail.setForeground(selected ? text : Tones.faint());
-            line.getAccessibleContext().setAccessibleName(node.title() + (node.enabled() ? "" : ", off") + (faulty ? ", " + node.problem() : ""));
+            line.getAccessibleContext()
+                    .setAccessibleName(node.title() + (node.enabled() ? "" : ", off") + (faulty ? ", " + node.problem() : ""));
             return line;
+        }
+
+        /** A model's note is too long for a line of a tree; it is in the tooltip. */
+        private static String detail(ModelsViewModel.Node node) {
+            if (node.path().kind() == TermPath.Kind.MODEL || node.detail().equals(node.title())) {
+                return "";
+            }
+            return node.detail().length() > LONGEST_DETAIL ? node.detail().substring(0, LONGEST_DETAIL - 1) + "…" : node.detail();
         }
     }
 }

@@ -169,6 +169,11 @@ public final class Grid<R> extends JTable {
         return String.join("\n", lines) + "\n";
     }
 
+    /** Whether any of its columns can be typed into. */
+    boolean editable() {
+        return columns.stream().anyMatch(column -> column.take() != null);
+    }
+
     /** The line in which problems are said. */
     ProblemLine line() {
         return line;

@@ -17,7 +17,7 @@ import org.wellwright.solver.Problem;
  * @param text the text of a row's cell
  * @param problem what is wrong with a row's cell; empty if nothing
  * @param editable whether a row's cell can be changed
- * @param take takes up what was typed into a row's cell
+ * @param take takes up what was typed into a row's cell; null for a column that is only shown
  * @param choices the texts to choose from in a {@link Kind#CHOICE}; offered and not binding in an {@link Kind#OPEN_CHOICE}
  */
 public record GridColumn<R>(
@@ -47,8 +47,7 @@ public record GridColumn<R>(
 
     /** A column that is only shown. */
     public static <R> GridColumn<R> shown(String title, String hint, Kind kind, String sample, Function<R, String> text) {
-        return new GridColumn<>(
-                title, hint, kind, sample, text, row -> "", row -> false, (row, typed) -> Optional.empty(), row -> List.of());
+        return new GridColumn<>(title, hint, kind, sample, text, row -> "", row -> false, null, row -> List.of());
     }
 
     /** A column that can be typed into. */

@@ -48,7 +48,7 @@ final class GridRenderer<R> extends DefaultTableCellRenderer {
         if (faulty && !selected) {
             setForeground(Tones.problem());
         } else if (!selected) {
-            setForeground(editable ? table.getForeground() : Tones.faint());
+            setForeground(editable || !grid.editable() ? table.getForeground() : Tones.faint());
         }
         return this;
     }

@@ -5,6 +5,7 @@ import java.awt.Component;
 import java.awt.Cursor;
 import java.awt.Dimension;
 import java.awt.Font;
+import java.awt.Insets;
 import java.nio.file.Path;
 import java.util.List;
 import javax.swing.BorderFactory;
@@ -16,12 +17,12 @@ import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.SwingConstants;
+import javax.swing.SwingUtilities;
 import org.openide.awt.ActionID;
 import org.openide.awt.ActionReference;
 import org.openide.util.NbBundle.Messages;
 import org.openide.windows.TopComponent;
 import org.openide.windows.WindowManager;
-import org.wellwright.project.ProjectSession;
 import org.wellwright.solver.WellwrightException;
 
 /** The start page: a new project, one from disk, an example, or a recent one. */
@@ -49,6 +50,8 @@ public final class StartTopComponent extends TopComponent {
     private static final int TEXT_WIDTH = 460;
 
     private final JPanel column = new JPanel();
+    private final transient Runnable changed = () -> SwingUtilities.invokeLater(this::makeRoom);
+    private boolean empty = true;
 
     /** Made by the window system. */
     public StartTopComponent() {
@@ -74,7 +77,7 @@ public final class StartTopComponent extends TopComponent {
         column.add(Box.createVerticalStrut(14));
         Box buttons = Box.createHorizontalBox();
         buttons.setAlignmentX(Component.LEFT_ALIGNMENT);
-        buttons.add(button("start.new", Bundle.BTN_StartNew(), () -> NewProject.ask().ifPresent(project -> shown(ProjectDesk.get().create(project)))));
+        buttons.add(button("start.new", Bundle.BTN_StartNew(), () -> NewProject.ask().ifPresent(ProjectDesk.get()::create)));
         buttons.add(Box.createHorizontalStrut(8));
         buttons.add(button("start.open", Bundle.BTN_StartOpen(), ProjectDesk.get()::askAndOpen));
         column.add(buttons);
@@ -94,26 +97,44 @@ public final class StartTopComponent extends TopComponent {
         }
         for (int i = 0; i < recent.size(); i++) {
             Path file = recent.get(i);
-            column.add(link("start.recent." + (i + 1), file.getFileName().toString(), file.getParent().toString(), () -> ProjectDesk.get().open(file, this::shown)));
+            column.add(link("start.recent." + (i + 1), file.getFileName().toString(), file.getParent().toString(), () -> ProjectDesk.get().open(file, session -> {})));
         }
         column.revalidate();
     }
 
     private void open(Examples.Example example) {
         try {
-            shown(ProjectDesk.get().create(Examples.copy(example)));
+            ProjectDesk.get().create(Examples.copy(example));
+            makeRoom();
         } catch (WellwrightException e) {
             Ask.tell(e);
         }
     }
 
-    /** Makes room for the windows that show the project. */
-    private void shown(ProjectSession session) {
+    /** Once the first project is open, the windows that show it come to the front. */
+    private void makeRoom() {
+        boolean none = ProjectDesk.get().projects().sessions().isEmpty();
+        boolean first = empty && !none;
+        empty = none;
+        if (!first) {
+            return;
+        }
         close();
         TopComponent levels = WindowManager.getDefault().findTopComponent("LevelsTopComponent");
         if (levels != null && levels.isOpened()) {
             levels.requestActive();
         }
+    }
+
+    @Override
+    protected void componentOpened() {
+        empty = ProjectDesk.get().projects().sessions().isEmpty();
+        ProjectDesk.get().projects().addListener(changed);
+    }
+
+    @Override
+    protected void componentClosed() {
+        ProjectDesk.get().projects().removeListener(changed);
     }
 
     private static JLabel heading(String text, float scale) {
@@ -145,7 +166,7 @@ public final class StartTopComponent extends TopComponent {
         button.setHorizontalAlignment(SwingConstants.LEADING);
         button.setCursor(Cursor.getPredefinedCursor(Cursor.HAND_CURSOR));
         button.putClientProperty("JButton.buttonType", "toolBarButton");
-        button.setMargin(new java.awt.Insets(6, 8, 6, 8));
+        button.setMargin(new Insets(6, 8, 6, 8));
         button.setAlignmentX(Component.LEFT_ALIGNMENT);
         button.addActionListener(event -> code.run());
         Dimension size = button.getPreferredSize();

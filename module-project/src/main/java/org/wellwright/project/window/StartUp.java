@@ -158,12 +158,15 @@ public final class StartUp implements Runnable {
         List<Path> named = List.copyOf(NAMED);
         NAMED.clear();
         openNext(new ArrayList<>(named), () -> {
+            TopComponent start = WindowManager.getDefault().findTopComponent(StartTopComponent.ID);
+            if (start == null) {
+                return;
+            }
             if (desk.projects().sessions().isEmpty()) {
-                TopComponent start = WindowManager.getDefault().findTopComponent(StartTopComponent.ID);
-                if (start != null) {
-                    start.open();
-                    start.requestActive();
-                }
+                start.open();
+                start.requestActive();
+            } else {
+                start.close();
             }
         });
     }
