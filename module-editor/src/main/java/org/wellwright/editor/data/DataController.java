@@ -32,7 +32,10 @@ import org.wellwright.solver.units.Dimension;
 import org.wellwright.solver.units.Names;
 import org.wellwright.solver.units.UnitExpression;
 
-/** Turns what is typed and pasted in the window of measured data into edits of its project. Keeps the row that is being filled. */
+/**
+ * Turns what is typed and pasted in the window of measured data into edits of its project. Keeps the row that is being
+ * filled.
+ */
 final class DataController {
     private final ProjectSession session;
     private Row draft;
@@ -93,7 +96,8 @@ final class DataController {
         List<List<Datum.Contribution>> parts = ratio(text, names);
         boolean ratio = parts.size() == 2;
         if (ratio && datum.transform() != Transform.RATIO) {
-            return datum.withTransform(Transform.RATIO, Datum.Detail.STANDARD, "").withLevels(parts.get(0), parts.get(1));
+            return datum.withTransform(Transform.RATIO, Datum.Detail.STANDARD, "")
+                    .withLevels(parts.get(0), parts.get(1));
         }
         if (!ratio && datum.transform() == Transform.RATIO) {
             throw new InvalidModelException("a ratio needs two combinations", "", "write (3p - 3s) / (4p - 3s)");
@@ -117,7 +121,13 @@ final class DataController {
     /** Another quantity; its usual unit comes with it where the present one cannot stay. */
     Optional<Problem> setQuantity(Row row, String text) {
         if (row.draft()) {
-            return fill(draft.levels(), draft.value(), text, usualUnit(QuantityNames.transform(text), draft.unit()), draft.groups(), draft.source());
+            return fill(
+                    draft.levels(),
+                    draft.value(),
+                    text,
+                    usualUnit(QuantityNames.transform(text), draft.unit()),
+                    draft.groups(),
+                    draft.source());
         }
         return datum(row, "Change the quantity of a value", datum -> {
             Transform transform = QuantityNames.transform(text);
@@ -128,16 +138,17 @@ final class DataController {
     private String usualUnit(Transform transform, String present) {
         var units = Units.of(document());
         return switch (transform) {
-            case VACUUM_WAVELENGTH, AIR_WAVELENGTH, RADIUS -> fits(present, Dimension.LENGTH)
-                    ? present
-                    : transform == Transform.RADIUS ? units.length().symbol() : TransformText.usualUnit(transform);
+            case VACUUM_WAVELENGTH, AIR_WAVELENGTH, RADIUS ->
+                fits(present, Dimension.LENGTH)
+                        ? present
+                        : transform == Transform.RADIUS ? units.length().symbol() : TransformText.usualUnit(transform);
             case FREQUENCY -> frequency(present) ? present : TransformText.usualUnit(transform);
-            case ABSOLUTE_MASS -> fits(present, Dimension.MASS) ? present : units.mass().symbol();
+            case ABSOLUTE_MASS ->
+                fits(present, Dimension.MASS) ? present : units.mass().symbol();
             case RATIO -> "";
             case RATE -> "1/s";
-            case NONE, PHOTON_EMISSION, PHOTON_ABSORPTION, WIDTH -> fits(present, Dimension.ENERGY)
-                    ? present
-                    : units.energy().symbol();
+            case NONE, PHOTON_EMISSION, PHOTON_ABSORPTION, WIDTH ->
+                fits(present, Dimension.ENERGY) ? present : units.energy().symbol();
         };
     }
 
@@ -165,7 +176,8 @@ final class DataController {
         return datum(row, "Change a value", datum -> {
             MeasuredText measured = MeasuredText.parse(text);
             String unit = measured.unit().isEmpty() ? datum.unit() : unit(measured.unit(), datum.transform());
-            return datum.withValue(measured.value(), measured.sigmaMinus(), measured.sigmaPlus(), measured.limit(), unit);
+            return datum.withValue(
+                    measured.value(), measured.sigmaMinus(), measured.sigmaPlus(), measured.limit(), unit);
         });
     }
 
@@ -173,20 +185,30 @@ final class DataController {
         if (row.draft()) {
             return fill(draft.levels(), draft.value(), draft.quantity(), text.strip(), draft.groups(), draft.source());
         }
-        return datum(row, "Change the unit of a value", datum -> datum.withValue(
-                datum.value(), datum.sigmaMinus(), datum.sigmaPlus(), datum.limit(), unit(text, datum.transform())));
+        return datum(
+                row,
+                "Change the unit of a value",
+                datum -> datum.withValue(
+                        datum.value(),
+                        datum.sigmaMinus(),
+                        datum.sigmaPlus(),
+                        datum.limit(),
+                        unit(text, datum.transform())));
     }
 
     /** Rates have units of their own, which {@link UnitExpression} does not know. */
     private static String unit(String text, Transform transform) {
-        return transform == Transform.RATE ? text.strip() : UnitExpression.parse(text).text();
+        return transform == Transform.RATE
+                ? text.strip()
+                : UnitExpression.parse(text).text();
     }
 
     Optional<Problem> setGroups(Row row, String text) {
         if (row.draft()) {
             return Entry.attempt(() -> {
                 groups(text);
-                draft = Row.draft(draft.levels(), draft.quantity(), draft.value(), draft.unit(), text.strip(), draft.source());
+                draft = Row.draft(
+                        draft.levels(), draft.quantity(), draft.value(), draft.unit(), text.strip(), draft.source());
             });
         }
         return datum(row, "Change the groups of a value", datum -> datum.withGroups(groups(text)));
@@ -211,7 +233,8 @@ final class DataController {
 
     Optional<Problem> setSource(Row row, String text) {
         if (row.draft()) {
-            draft = Row.draft(draft.levels(), draft.quantity(), draft.value(), draft.unit(), draft.groups(), text.strip());
+            draft = Row.draft(
+                    draft.levels(), draft.quantity(), draft.value(), draft.unit(), draft.groups(), text.strip());
             return Optional.empty();
         }
         return datum(row, "Change the source of a value", datum -> datum.withSource(text.strip()));
@@ -226,18 +249,24 @@ final class DataController {
             String id = text.strip();
             for (int i = 0; i < document.data().size(); i++) {
                 if (i != row.index() && document.data().get(i).id().equals(id)) {
-                    throw new InvalidModelException("there is a value '%s' already".formatted(Names.shortened(id)), "", "choose another id");
+                    throw new InvalidModelException(
+                            "there is a value '%s' already".formatted(Names.shortened(id)), "", "choose another id");
                 }
             }
             return document.withData(Lists.with(document.data(), row.index(), datum -> datum.withId(id)));
         });
     }
 
-    /** Takes up a cell of the row that is being filled; as soon as levels and value are there, it becomes a value of the project. */
-    private Optional<Problem> fill(String levels, String value, String quantity, String unit, String groups, String source) {
+    /**
+     * Takes up a cell of the row that is being filled; as soon as levels and value are there, it becomes a value of the
+     * project.
+     */
+    private Optional<Problem> fill(
+            String levels, String value, String quantity, String unit, String groups, String source) {
         return Entry.attempt(() -> {
             Transform transform = QuantityNames.transform(quantity);
-            List<List<Datum.Contribution>> parts = levels.isBlank() ? List.of() : ratio(levels, LevelNames.of(document()));
+            List<List<Datum.Contribution>> parts =
+                    levels.isBlank() ? List.of() : ratio(levels, LevelNames.of(document()));
             MeasuredText measured = value.isBlank() ? null : MeasuredText.parse(value);
             String own = measured == null || measured.unit().isEmpty() ? unit : measured.unit();
             if (!own.isBlank()) {
@@ -265,8 +294,10 @@ final class DataController {
                     source,
                     true,
                     "");
-            session.edit("Add a value", project -> project.withDocument(
-                    project.document().withData(Lists.added(project.document().data(), datum))));
+            session.edit(
+                    "Add a value",
+                    project -> project.withDocument(project.document()
+                            .withData(Lists.added(project.document().data(), datum))));
             draft = emptyDraft();
         });
     }
@@ -359,7 +390,8 @@ final class DataController {
             groups.forEach(group -> ids.add(group.id()));
             List<Datum> data = new ArrayList<>();
             for (Datum datum : next.data()) {
-                data.add(datum.withGroups(datum.groups().stream().filter(ids::contains).toList()));
+                data.add(datum.withGroups(
+                        datum.groups().stream().filter(ids::contains).toList()));
             }
             return next.withData(data).withGroups(groups);
         });
@@ -367,7 +399,9 @@ final class DataController {
 
     /** Whether a text looks like more than one cell. */
     static boolean table(String text) {
-        return text.strip().indexOf('\n') >= 0 || text.indexOf('\t') >= 0 || text.toLowerCase(Locale.ROOT).contains(",");
+        return text.strip().indexOf('\n') >= 0
+                || text.indexOf('\t') >= 0
+                || text.toLowerCase(Locale.ROOT).contains(",");
     }
 
     private Optional<Problem> datum(Row row, String label, UnaryOperator<Datum> change) {

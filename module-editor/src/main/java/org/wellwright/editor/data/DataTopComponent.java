@@ -88,9 +88,8 @@ public final class DataTopComponent extends SessionWindow {
     private final JButton remove;
     private final JButton up;
     private final JButton down;
-    private final JComboBox<String> weighting = new JComboBox<>(new String[] {
-        Bundle.LBL_WeightingKnown(), Bundle.LBL_WeightingScale(), Bundle.LBL_WeightingMissing()
-    });
+    private final JComboBox<String> weighting = new JComboBox<>(
+            new String[] {Bundle.LBL_WeightingKnown(), Bundle.LBL_WeightingScale(), Bundle.LBL_WeightingMissing()});
     private final transient Grid<Row> grid;
     private transient DataController controller;
     private transient ModelDocument shown;
@@ -104,7 +103,11 @@ public final class DataTopComponent extends SessionWindow {
         setToolTipText(Bundle.HINT_DataWindow());
         grid = new Grid<>("data.table", Bundle.CTL_DataWindow(), columns(), line);
         ToolStrip tools = new ToolStrip("data");
-        tools.icon("add", Glyph.ADD, Bundle.LBL_DatumAdd(), () -> grid.startTyping(grid.rows().size() - 1, 1));
+        tools.icon(
+                "add",
+                Glyph.ADD,
+                Bundle.LBL_DatumAdd(),
+                () -> grid.startTyping(grid.rows().size() - 1, 1));
         duplicate = tools.icon("duplicate", Glyph.DUPLICATE, Bundle.LBL_DatumDuplicate(), this::duplicate);
         remove = tools.icon("remove", Glyph.REMOVE, Bundle.LBL_DatumRemove(), this::remove);
         up = tools.icon("up", Glyph.UP, Bundle.LBL_DatumUp(), () -> move(-1));
@@ -128,7 +131,10 @@ public final class DataTopComponent extends SessionWindow {
         grid.onPaste(this::paste);
         grid.onMenu(Bundle.LBL_DataUse(), null, () -> controller.setUsed(selectedRows(), true));
         grid.onMenu(Bundle.LBL_DataLeave(), null, () -> controller.setUsed(selectedRows(), false));
-        grid.onMenu(Bundle.LBL_DatumAdd(), "INSERT", () -> grid.startTyping(grid.rows().size() - 1, 1));
+        grid.onMenu(
+                Bundle.LBL_DatumAdd(),
+                "INSERT",
+                () -> grid.startTyping(grid.rows().size() - 1, 1));
         grid.onMenu(Bundle.LBL_DatumRemove(), "DELETE", this::remove);
         grid.getSelectionModel().addListSelectionListener(event -> followSelection());
         JPanel content = new JPanel(new BorderLayout());
@@ -142,27 +148,83 @@ public final class DataTopComponent extends SessionWindow {
 
     private List<GridColumn<Row>> columns() {
         return List.of(
-                typed("Use", "Whether it counts", Kind.CHECK, "Use", Row::used, (row, text) -> controller.setUsed(row, text))
+                typed(
+                                "Use",
+                                "Whether it counts",
+                                Kind.CHECK,
+                                "Use",
+                                Row::used,
+                                (row, text) -> controller.setUsed(row, text))
                         .where(row -> !row.draft()),
-                typed("Levels", "A level, or a combination: 3p - 3s, 3p → 3s, 1/3 * 2p1/2 + 2/3 * 2p3/2 - 1s", Kind.TEXT, "v=1 J=12 - v=0 J=11 00", Row::levels, (row, text) -> controller.setLevels(row, text))
+                typed(
+                                "Levels",
+                                "A level, or a combination: 3p - 3s, 3p → 3s, 1/3 * 2p1/2 + 2/3 * 2p3/2 - 1s",
+                                Kind.TEXT,
+                                "v=1 J=12 - v=0 J=11 00",
+                                Row::levels,
+                                (row, text) -> controller.setLevels(row, text))
                         .withProblem(Row::levelProblem),
-                typed("Quantity", "What was measured", Kind.OPEN_CHOICE, "vacuum wavelength", Row::quantity, (row, text) -> controller.setQuantity(row, text))
+                typed(
+                                "Quantity",
+                                "What was measured",
+                                Kind.OPEN_CHOICE,
+                                "vacuum wavelength",
+                                Row::quantity,
+                                (row, text) -> controller.setQuantity(row, text))
                         .withChoices(row -> DataViewModel.quantities()),
-                typed("Value", "With its uncertainty: 1.23456(12), 1.23456 ± 0.00012, 1.2 +0.3 -0.2, or < 1.2 for a limit", Kind.NUMBER, "16956.17025(123)", Row::value, (row, text) -> controller.setValue(row, text))
+                typed(
+                                "Value",
+                                "With its uncertainty: 1.23456(12), 1.23456 ± 0.00012, 1.2 +0.3 -0.2, or < 1.2 for a limit",
+                                Kind.NUMBER,
+                                "16956.17025(123)",
+                                Row::value,
+                                (row, text) -> controller.setValue(row, text))
                         .withProblem(Row::valueProblem),
-                typed("Unit", "The unit of the value", Kind.TEXT, "GeV/c^2", Row::unit, (row, text) -> controller.setUnit(row, text))
+                typed(
+                                "Unit",
+                                "The unit of the value",
+                                Kind.TEXT,
+                                "GeV/c^2",
+                                Row::unit,
+                                (row, text) -> controller.setUnit(row, text))
                         .withProblem(Row::unitProblem),
-                typed("Groups", "Groups that share an error", Kind.OPEN_CHOICE, "calibration", Row::groups, (row, text) -> controller.setGroups(row, text))
+                typed(
+                                "Groups",
+                                "Groups that share an error",
+                                Kind.OPEN_CHOICE,
+                                "calibration",
+                                Row::groups,
+                                (row, text) -> controller.setGroups(row, text))
                         .withProblem(Row::groupProblem)
                         .withChoices(row -> {
                             List<String> ids = new ArrayList<>(List.of(""));
-                            controller.document().groups().stream().map(DataGroup::id).forEach(ids::add);
+                            controller.document().groups().stream()
+                                    .map(DataGroup::id)
+                                    .forEach(ids::add);
                             return ids;
                         }),
-                typed("Source", "Where it comes from", Kind.TEXT, "laboratory book 12", Row::source, (row, text) -> controller.setSource(row, text)),
-                typed("Remark", "A remark, or why it does not count", Kind.TEXT, "a remark of some length", Row::remark, (row, text) -> controller.setRemark(row, text))
+                typed(
+                        "Source",
+                        "Where it comes from",
+                        Kind.TEXT,
+                        "laboratory book 12",
+                        Row::source,
+                        (row, text) -> controller.setSource(row, text)),
+                typed(
+                                "Remark",
+                                "A remark, or why it does not count",
+                                Kind.TEXT,
+                                "a remark of some length",
+                                Row::remark,
+                                (row, text) -> controller.setRemark(row, text))
                         .where(row -> !row.draft()),
-                typed("Id", "How results refer to it", Kind.TEXT, "d123", Row::id, (row, text) -> controller.setId(row, text))
+                typed(
+                                "Id",
+                                "How results refer to it",
+                                Kind.TEXT,
+                                "d123",
+                                Row::id,
+                                (row, text) -> controller.setId(row, text))
                         .where(row -> !row.draft()));
     }
 
@@ -217,7 +279,9 @@ public final class DataTopComponent extends SessionWindow {
 
     /** The selected rows that hold values. */
     private List<Integer> values() {
-        return grid.selection().stream().filter(row -> !grid.rows().get(row).draft()).toList();
+        return grid.selection().stream()
+                .filter(row -> !grid.rows().get(row).draft())
+                .toList();
     }
 
     private List<Row> selectedRows() {
@@ -285,7 +349,9 @@ public final class DataTopComponent extends SessionWindow {
             add(data, Bundle.LBL_Imported(data.size()));
         } catch (IOException e) {
             line.say(Optional.of(new Problem(
-                    Bundle.MSG_ImportUnreadable(file.getName()), "", "save it from the spreadsheet as text with commas or tabs, in UTF-8")));
+                    Bundle.MSG_ImportUnreadable(file.getName()),
+                    "",
+                    "save it from the spreadsheet as text with commas or tabs, in UTF-8")));
         }
     }
 

@@ -59,7 +59,8 @@ final class GroupsDialog {
     private GroupsDialog(ModelDocument document) {
         this.document = document;
         this.groups = new ArrayList<>(document.groups());
-        this.originals = new ArrayList<>(document.groups().stream().map(DataGroup::id).toList());
+        this.originals =
+                new ArrayList<>(document.groups().stream().map(DataGroup::id).toList());
     }
 
     /**
@@ -103,13 +104,46 @@ final class GroupsDialog {
 
     private List<GridColumn<Row>> columns() {
         return List.of(
-                GridColumn.typed("Id", "How data refer to it", Kind.TEXT, "calibration", row -> row.group().id(), this::setId),
-                GridColumn.typed("Title", "Its name in reports", Kind.TEXT, "neon lamp, second order", row -> row.group().title(), (row, text) -> set(row, g -> new DataGroup(g.id(), text.strip(), g.kind(), g.sigma(), g.unit()))),
-                GridColumn.<Row>typed("Shared error", "How the error acts", Kind.CHOICE, "offset with sigma ▾", Row::kind, this::setKind).withChoices(row -> KINDS),
-                GridColumn.<Row>typed("Sigma", "Its standard uncertainty; a pure number for a scale", Kind.NUMBER, "0.123456", Row::sigma, this::setSigma)
+                GridColumn.typed(
+                        "Id",
+                        "How data refer to it",
+                        Kind.TEXT,
+                        "calibration",
+                        row -> row.group().id(),
+                        this::setId),
+                GridColumn.typed(
+                        "Title",
+                        "Its name in reports",
+                        Kind.TEXT,
+                        "neon lamp, second order",
+                        row -> row.group().title(),
+                        (row, text) ->
+                                set(row, g -> new DataGroup(g.id(), text.strip(), g.kind(), g.sigma(), g.unit()))),
+                GridColumn.<Row>typed(
+                                "Shared error",
+                                "How the error acts",
+                                Kind.CHOICE,
+                                "offset with sigma ▾",
+                                Row::kind,
+                                this::setKind)
+                        .withChoices(row -> KINDS),
+                GridColumn.<Row>typed(
+                                "Sigma",
+                                "Its standard uncertainty; a pure number for a scale",
+                                Kind.NUMBER,
+                                "0.123456",
+                                Row::sigma,
+                                this::setSigma)
                         .where(row -> row.group().sigma() != null),
-                GridColumn.<Row>typed("Unit", "Unit of an offset", Kind.TEXT, "cm^-1 00", row -> row.group().unit(), this::setUnit)
-                        .where(row -> row.group().kind() == DataGroup.Kind.ADDITIVE || row.group().kind() == DataGroup.Kind.UNKNOWN_OFFSET));
+                GridColumn.<Row>typed(
+                                "Unit",
+                                "Unit of an offset",
+                                Kind.TEXT,
+                                "cm^-1 00",
+                                row -> row.group().unit(),
+                                this::setUnit)
+                        .where(row -> row.group().kind() == DataGroup.Kind.ADDITIVE
+                                || row.group().kind() == DataGroup.Kind.UNKNOWN_OFFSET));
     }
 
     private void fill() {
@@ -121,8 +155,16 @@ final class GroupsDialog {
     }
 
     private void add() {
-        String id = Lists.free("group" + (groups.size() + 1), "-", groups.stream().map(DataGroup::id).toList());
-        groups.add(new DataGroup(id, "", DataGroup.Kind.UNKNOWN_OFFSET, null, Units.of(document).energy().symbol()));
+        String id = Lists.free(
+                "group" + (groups.size() + 1),
+                "-",
+                groups.stream().map(DataGroup::id).toList());
+        groups.add(new DataGroup(
+                id,
+                "",
+                DataGroup.Kind.UNKNOWN_OFFSET,
+                null,
+                Units.of(document).energy().symbol()));
         originals.add(null);
         fill();
         grid.startTyping(groups.size() - 1, 0);
@@ -141,9 +183,11 @@ final class GroupsDialog {
         return set(row, group -> {
             String id = text.strip();
             if (!id.matches("[\\p{L}\\p{N}_.\\-]+")) {
-                throw new InvalidModelException("'%s' is not an id".formatted(id), "", "use letters, digits, dots, dashes and underscores");
+                throw new InvalidModelException(
+                        "'%s' is not an id".formatted(id), "", "use letters, digits, dots, dashes and underscores");
             }
-            if (!id.equals(group.id()) && groups.stream().anyMatch(other -> other.id().equals(id))) {
+            if (!id.equals(group.id())
+                    && groups.stream().anyMatch(other -> other.id().equals(id))) {
                 throw new InvalidModelException("there is a group '%s' already".formatted(id), "", "choose another id");
             }
             return new DataGroup(id, group.title(), group.kind(), group.sigma(), group.unit());
@@ -164,13 +208,21 @@ final class GroupsDialog {
     private Optional<Problem> setSigma(Row row, String text) {
         return set(row, group -> {
             boolean scale = group.kind() == DataGroup.Kind.MULTIPLICATIVE;
-            ExactNumber sigma = QuantityText.parse(text, scale ? "" : group.unit(), scale ? UnitSystem.ATOMIC : Units.of(document));
+            ExactNumber sigma =
+                    QuantityText.parse(text, scale ? "" : group.unit(), scale ? UnitSystem.ATOMIC : Units.of(document));
             return new DataGroup(group.id(), group.title(), group.kind(), sigma, group.unit());
         });
     }
 
     private Optional<Problem> setUnit(Row row, String text) {
-        return set(row, g -> new DataGroup(g.id(), g.title(), g.kind(), g.sigma(), UnitExpression.parse(text).text()));
+        return set(
+                row,
+                g -> new DataGroup(
+                        g.id(),
+                        g.title(),
+                        g.kind(),
+                        g.sigma(),
+                        UnitExpression.parse(text).text()));
     }
 
     private Optional<Problem> set(Row row, UnaryOperator<DataGroup> change) {

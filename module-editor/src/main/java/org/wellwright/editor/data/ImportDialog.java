@@ -8,7 +8,6 @@ import java.util.Optional;
 import javax.swing.BorderFactory;
 import javax.swing.JButton;
 import javax.swing.JComboBox;
-import javax.swing.JLabel;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
 import javax.swing.JTextField;
@@ -31,7 +30,10 @@ import org.wellwright.solver.model.ModelDocument;
 import org.wellwright.solver.model.Transform;
 import org.wellwright.solver.units.UnitExpression;
 
-/** Shows how rows of a file or of the clipboard will be read, lets faults be mended in place, and takes up the rows that are sound. */
+/**
+ * Shows how rows of a file or of the clipboard will be read, lets faults be mended in place, and takes up the rows that
+ * are sound.
+ */
 @Messages({
     "# {0} - file or clipboard",
     "TTL_Import=Import measured data from {0}",
@@ -63,7 +65,8 @@ final class ImportDialog {
     private final ModelDocument document;
     private final ProblemLine line = new ProblemLine("import.message");
     private final JComboBox<String> separator = new JComboBox<>(SEPARATORS);
-    private final JComboBox<String> quantity = new JComboBox<>(DataViewModel.quantities().toArray(new String[0]));
+    private final JComboBox<String> quantity =
+            new JComboBox<>(DataViewModel.quantities().toArray(new String[0]));
     private final JTextField unit = new JTextField(10);
     private final JTextField source = new JTextField(10);
     private final Form columnsForm = new Form();
@@ -148,7 +151,10 @@ final class ImportDialog {
         if (grid != null && grid.isEditing()) {
             grid.getCellEditor().stopCellEditing();
         }
-        return outcomes.stream().map(DatumTable.Outcome::datum).filter(datum -> datum != null).toList();
+        return outcomes.stream()
+                .map(DatumTable.Outcome::datum)
+                .filter(datum -> datum != null)
+                .toList();
     }
 
     private void split(DelimitedText split) {
@@ -189,7 +195,8 @@ final class ImportDialog {
                 read();
             });
             String first = cells.isEmpty() ? "" : cells.get(0).get(i);
-            columnsForm.field(Bundle.LBL_ImportColumn(i + 1, first.length() > 16 ? first.substring(0, 15) + "…" : first), box);
+            columnsForm.field(
+                    Bundle.LBL_ImportColumn(i + 1, first.length() > 16 ? first.substring(0, 15) + "…" : first), box);
         }
         columnsForm.revalidate();
         filling = false;
@@ -201,10 +208,20 @@ final class ImportDialog {
         List<GridColumn<Line>> shown = new ArrayList<>();
         for (int i = 0; i < columns.size(); i++) {
             int column = i;
-            String title = columns.get(i) == DatumColumn.NONE ? "(not used)" : columns.get(i).title();
+            String title = columns.get(i) == DatumColumn.NONE
+                    ? "(not used)"
+                    : columns.get(i).title();
             shown.add(GridColumn.<Line>typed(
-                            title, "Double-click to change a cell", GridColumn.Kind.TEXT, "00000000000000", row -> row.cells().get(column), (row, typed) -> mend(row, column, typed))
-                    .withProblem(row -> row.faulty() == column || row.faulty() < 0 && !row.problem().isEmpty() && column == 0 ? row.problem() : ""));
+                            title,
+                            "Double-click to change a cell",
+                            GridColumn.Kind.TEXT,
+                            "00000000000000",
+                            row -> row.cells().get(column),
+                            (row, typed) -> mend(row, column, typed))
+                    .withProblem(row -> row.faulty() == column
+                                    || row.faulty() < 0 && !row.problem().isEmpty() && column == 0
+                            ? row.problem()
+                            : ""));
         }
         grid = new Grid<>("import.table", "Preview", shown, line);
         preview.removeAll();
@@ -230,7 +247,12 @@ final class ImportDialog {
         }
         Transform transform = TransformText.parse((String) quantity.getSelectedItem());
         DatumTable reader = new DatumTable(
-                columns, new DatumTable.Defaults(transform, fault.isPresent() ? "" : unit.getText(), List.of(), source.getText().strip()));
+                columns,
+                new DatumTable.Defaults(
+                        transform,
+                        fault.isPresent() ? "" : unit.getText(),
+                        List.of(),
+                        source.getText().strip()));
         outcomes = reader.read(new DelimitedText(table.separator(), rows), document);
         List<Line> lines = new ArrayList<>();
         int first = cells.size() - outcomes.size();
@@ -240,10 +262,13 @@ final class ImportDialog {
             lines.add(new Line(first + i, List.copyOf(cells.get(first + i)), outcome.column(), problem));
         }
         grid.setRows(lines);
-        long sound = outcomes.stream().filter(outcome -> outcome.datum() != null).count();
+        long sound =
+                outcomes.stream().filter(outcome -> outcome.datum() != null).count();
         String message = sound == 0
                 ? Bundle.MSG_ImportNone()
-                : sound == outcomes.size() ? Bundle.MSG_ImportAll(sound) : Bundle.MSG_ImportSome(sound, outcomes.size());
+                : sound == outcomes.size()
+                        ? Bundle.MSG_ImportAll(sound)
+                        : Bundle.MSG_ImportSome(sound, outcomes.size());
         Optional<String> why = outcomes.stream()
                 .filter(outcome -> outcome.problem() != null)
                 .map(outcome -> outcome.problem().sentence())

@@ -14,7 +14,9 @@ import org.wellwright.solver.units.Names;
 import org.wellwright.solver.units.UnitExpression;
 import org.wellwright.solver.units.UnitSystem;
 
-/** Arguments of terms as text: the name of a parameter, a number, or a number with its unit; empty for "not restricted". */
+/**
+ * Arguments of terms as text: the name of a parameter, a number, or a number with its unit; empty for "not restricted".
+ */
 public final class ArgumentText {
     private ArgumentText() {}
 
@@ -50,11 +52,13 @@ public final class ArgumentText {
         UnitSystem units = UnitSystem.named(document.units());
         String own = units.unitText(expected);
         double value = QuantityText.parse(plain, own, units).value();
-        String unit = plain.replaceFirst("^[+\\-\u2212]?[\\d.]+(?:[eE][+-]?\\d+)?", "").strip();
+        String unit = plain.replaceFirst("^[+\\-\u2212]?[\\d.]+(?:[eE][+-]?\\d+)?", "")
+                .strip();
         if (unit.isEmpty()) {
             return new Argument.Literal(value, "");
         }
-        double typed = QuantityText.parse(plain.substring(0, plain.length() - unit.length()), "", units).value();
+        double typed = QuantityText.parse(plain.substring(0, plain.length() - unit.length()), "", units)
+                .value();
         return new Argument.Literal(typed, unit);
     }
 
@@ -82,7 +86,8 @@ public final class ArgumentText {
         if (!UnitExpression.parse(parameter.unit()).fits(units, expected)) {
             String wanted = units.unitText(expected);
             throw new InvalidModelException(
-                    "the unit of '%s' (%s) does not fit here".formatted(parameter.name(), parameter.unit().isEmpty() ? "none" : parameter.unit()),
+                    "the unit of '%s' (%s) does not fit here"
+                            .formatted(parameter.name(), parameter.unit().isEmpty() ? "none" : parameter.unit()),
                     "",
                     wanted.isEmpty() ? "use a pure number" : "use a parameter with a unit like '%s'".formatted(wanted));
         }

@@ -9,7 +9,8 @@ import org.wellwright.solver.potential.ChannelFilter;
 
 /** Channel filters as text: "all", "l = 0", "l = 0..2", "l >= 1", "l = 1, j = 1/2 3/2, S = 1". */
 public final class ChannelText {
-    private static final Pattern ORBITAL = Pattern.compile("l\\s*(=|>=|≥|<=|≤)\\s*(\\d{1,4})(?:\\s*(?:\\.\\.|-|to)\\s*(\\d{1,4}))?");
+    private static final Pattern ORBITAL =
+            Pattern.compile("l\\s*(=|>=|≥|<=|≤)\\s*(\\d{1,4})(?:\\s*(?:\\.\\.|-|to)\\s*(\\d{1,4}))?");
     private static final Pattern SPIN = Pattern.compile("([jJSs])\\s*=\\s*((?:\\d{1,3}(?:/2)?\\s*)+)");
 
     private ChannelText() {}
@@ -54,24 +55,37 @@ public final class ChannelText {
             Matcher spin = SPIN.matcher(part.strip());
             if (orbital.matches()) {
                 int first = Integer.parseInt(orbital.group(2));
-                boolean atLeast = orbital.group(1).equals(">=") || orbital.group(1).equals("≥");
-                boolean atMost = orbital.group(1).equals("<=") || orbital.group(1).equals("≤");
+                boolean atLeast =
+                        orbital.group(1).equals(">=") || orbital.group(1).equals("≥");
+                boolean atMost =
+                        orbital.group(1).equals("<=") || orbital.group(1).equals("≤");
                 from = atMost ? 0 : first;
-                to = atLeast ? Integer.MAX_VALUE : orbital.group(3) == null ? first : Integer.parseInt(orbital.group(3));
+                to = atLeast
+                        ? Integer.MAX_VALUE
+                        : orbital.group(3) == null ? first : Integer.parseInt(orbital.group(3));
             } else if (spin.matches()) {
                 List<Integer> into = spin.group(1).equalsIgnoreCase("j") ? totals : spins;
                 for (String half : spin.group(2).strip().split("\\s+")) {
-                    into.add(half.endsWith("/2") ? Integer.parseInt(half.substring(0, half.length() - 2)) : 2 * Integer.parseInt(half));
+                    into.add(
+                            half.endsWith("/2")
+                                    ? Integer.parseInt(half.substring(0, half.length() - 2))
+                                    : 2 * Integer.parseInt(half));
                 }
             } else {
                 throw new InvalidModelException(
-                        "'%s' names no channels".formatted(part.strip()), "", "write 'all', 'l = 0', 'l = 1..3', 'l >= 2' or 'l = 1, j = 3/2'");
+                        "'%s' names no channels".formatted(part.strip()),
+                        "",
+                        "write 'all', 'l = 0', 'l = 1..3', 'l >= 2' or 'l = 1, j = 3/2'");
             }
         }
         return new ChannelFilter(from, to, totals, spins);
     }
 
     private static String halves(List<Integer> twice) {
-        return String.join(" ", twice.stream().map(t -> t % 2 == 0 ? Integer.toString(t / 2) : t + "/2").toList());
+        return String.join(
+                " ",
+                twice.stream()
+                        .map(t -> t % 2 == 0 ? Integer.toString(t / 2) : t + "/2")
+                        .toList());
     }
 }

@@ -45,7 +45,9 @@ public final class LabelText {
             Matcher matcher = PART.matcher(part.strip());
             if (!matcher.matches()) {
                 throw new InvalidModelException(
-                        "'%s' is not a label rule".formatted(part.strip()), "", "write 'l=0: +2' to add 2 to n of s levels, or 'v: +1'");
+                        "'%s' is not a label rule".formatted(part.strip()),
+                        "",
+                        "write 'l=0: +2' to add 2 to n of s levels, or 'v: +1'");
             }
             int offset = Integer.parseInt(matcher.group(2));
             if (matcher.group(1) == null) {
@@ -74,7 +76,8 @@ public final class LabelText {
      */
     public static List<OccupiedLevel> parseOccupied(String text, Curve curve, ModelDocument document) {
         LevelNames names = LevelNames.of(document);
-        String system = document.systems().isEmpty() ? "" : document.systems().get(0).id() + "/" + curve.name() + ": ";
+        String system =
+                document.systems().isEmpty() ? "" : document.systems().get(0).id() + "/" + curve.name() + ": ";
         List<OccupiedLevel> levels = new ArrayList<>();
         for (String part : text.split("[,;]")) {
             if (!part.isBlank()) {

@@ -45,7 +45,10 @@ public final class Lists {
         return copy;
     }
 
-    /** The wanted name, or with a number behind it if it is taken: "x", "x 2", "x 3"; {@code joint} stands before the number. */
+    /**
+     * The wanted name, or with a number behind it if it is taken: "x", "x 2", "x 3"; {@code joint} stands before the
+     * number.
+     */
     public static String free(String wanted, String joint, Collection<String> taken) {
         if (!taken.contains(wanted)) {
             return wanted;

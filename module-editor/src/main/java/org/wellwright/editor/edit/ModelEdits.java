@@ -18,21 +18,32 @@ public final class ModelEdits {
                 ? "V"
                 : document.models().get(0).curves().get(0).name();
         Model model = Model.of(
-                Lists.free("model " + (document.models().size() + 1), " ", modelNames(document)), List.of(Curve.of(curve, List.of())));
+                Lists.free("model " + (document.models().size() + 1), " ", modelNames(document)),
+                List.of(Curve.of(curve, List.of())));
         return document.withModels(Lists.added(document.models(), model));
     }
 
     /** A new empty curve of a model, last. */
     public static ModelDocument addCurve(ModelDocument document, int model) {
-        return model(document, model, old -> old.withCurves(Lists.added(
-                old.curves(), Curve.of(Lists.free("V", "", old.curves().stream().map(Curve::name).toList()), List.of()))));
+        return model(
+                document,
+                model,
+                old -> old.withCurves(Lists.added(
+                        old.curves(),
+                        Curve.of(
+                                Lists.free(
+                                        "V",
+                                        "",
+                                        old.curves().stream().map(Curve::name).toList()),
+                                List.of()))));
     }
 
     /** A new term in a curve, before an index. Its name is made unique. */
     public static ModelDocument addTerm(ModelDocument document, TermPath curve, int index, Term term) {
         return curve(document, curve, old -> {
             String name = Lists.free(term.frame().name(), " ", termNames(old));
-            return old.withTerms(Lists.inserted(old.terms(), index, term.withFrame(term.frame().withName(name))));
+            return old.withTerms(Lists.inserted(
+                    old.terms(), index, term.withFrame(term.frame().withName(name))));
         });
     }
 
@@ -45,12 +56,16 @@ public final class ModelEdits {
                 Model copy = model.withName(Lists.free(model.name() + " copy", " ", modelNames(document)));
                 yield document.withModels(Lists.inserted(document.models(), path.model() + 1, copy));
             }
-            case CURVE -> model(document, path.model(), model -> {
-                Curve curve = model.curves().get(path.curve());
-                List<String> names = model.curves().stream().map(Curve::name).toList();
-                return model.withCurves(Lists.inserted(
-                        model.curves(), path.curve() + 1, curve.withName(Lists.free(curve.name() + "2", "_", names))));
-            });
+            case CURVE ->
+                model(document, path.model(), model -> {
+                    Curve curve = model.curves().get(path.curve());
+                    List<String> names =
+                            model.curves().stream().map(Curve::name).toList();
+                    return model.withCurves(Lists.inserted(
+                            model.curves(),
+                            path.curve() + 1,
+                            curve.withName(Lists.free(curve.name() + "2", "_", names))));
+                });
             case TERM -> addTerm(document, path, path.term() + 1, term(document, path));
         };
     }
@@ -64,19 +79,22 @@ public final class ModelEdits {
         return switch (path.kind()) {
             case NONE -> document;
             case MODEL -> document.withModels(Lists.without(document.models(), path.model()));
-            case CURVE -> model(document, path.model(), model -> {
-                if (model.curves().size() == 1) {
-                    throw new InvalidModelException(
-                            "'%s' is the only curve of its model".formatted(model.curves().get(0).name()),
-                            "",
-                            "remove the model instead");
-                }
-                String name = model.curves().get(path.curve()).name();
-                return model.withCouplings(model.couplings().stream()
-                                .filter(c -> !c.first().equals(name) && !c.second().equals(name))
-                                .toList())
-                        .withCurves(Lists.without(model.curves(), path.curve()));
-            });
+            case CURVE ->
+                model(document, path.model(), model -> {
+                    if (model.curves().size() == 1) {
+                        throw new InvalidModelException(
+                                "'%s' is the only curve of its model"
+                                        .formatted(model.curves().get(0).name()),
+                                "",
+                                "remove the model instead");
+                    }
+                    String name = model.curves().get(path.curve()).name();
+                    return model.withCouplings(model.couplings().stream()
+                                    .filter(c -> !c.first().equals(name)
+                                            && !c.second().equals(name))
+                                    .toList())
+                            .withCurves(Lists.without(model.curves(), path.curve()));
+                });
             case TERM -> curve(document, path, curve -> curve.withTerms(Lists.without(curve.terms(), path.term())));
         };
     }
@@ -109,7 +127,10 @@ public final class ModelEdits {
             }
             case CURVE -> {
                 List<String> others = Lists.without(
-                        document.models().get(path.model()).curves().stream().map(Curve::name).toList(), path.curve());
+                        document.models().get(path.model()).curves().stream()
+                                .map(Curve::name)
+                                .toList(),
+                        path.curve());
                 requireFree(wanted, others, "curve of this model");
                 yield References.renameCurve(document, path, wanted);
             }
@@ -143,7 +164,8 @@ public final class ModelEdits {
         }
         List<Curve> curves = document.models().get(path.model()).curves();
         return path.curve() < curves.size()
-                && (path.curve() < 0 || path.term() < curves.get(path.curve()).terms().size());
+                && (path.curve() < 0
+                        || path.term() < curves.get(path.curve()).terms().size());
     }
 
     /** The curve of a path. */
@@ -168,7 +190,8 @@ public final class ModelEdits {
 
     private static void requireFree(String name, List<String> taken, String kind) {
         if (taken.contains(name)) {
-            throw new InvalidModelException("there is a %s '%s' already".formatted(kind, name), "", "choose another name");
+            throw new InvalidModelException(
+                    "there is a %s '%s' already".formatted(kind, name), "", "choose another name");
         }
     }
 

@@ -15,8 +15,8 @@ import org.wellwright.solver.units.UnitExpression;
 import org.wellwright.solver.units.UnitSystem;
 
 /**
- * Edits of the pool of parameters. A number of the pool is addressed by the index of its parameter and its own index there; the number for all other
- * places comes last.
+ * Edits of the pool of parameters. A number of the pool is addressed by the index of its parameter and its own index
+ * there; the number for all other places comes last.
  */
 public final class ParameterEdits {
     private ParameterEdits() {}
@@ -47,7 +47,8 @@ public final class ParameterEdits {
         String name = document.parameters().get(index).name();
         List<String> users = References.usersOf(document, name);
         if (!users.isEmpty()) {
-            String all = String.join("; ", users.subList(0, Math.min(3, users.size()))) + (users.size() > 3 ? "; …" : "");
+            String all =
+                    String.join("; ", users.subList(0, Math.min(3, users.size()))) + (users.size() > 3 ? "; …" : "");
             throw new InvalidModelException("'%s' is used by %s".formatted(name, all), "", "take it out there first");
         }
         return document.withParameters(Lists.without(document.parameters(), index));
@@ -70,10 +71,12 @@ public final class ParameterEdits {
             return document;
         }
         if (names(document).contains(wanted)) {
-            throw new InvalidModelException("there is a parameter '%s' already".formatted(wanted), "", "choose another name");
+            throw new InvalidModelException(
+                    "there is a parameter '%s' already".formatted(wanted), "", "choose another name");
         }
         if (wanted.equals("r") || wanted.equals("l") || wanted.equals("pi")) {
-            throw new InvalidModelException("'%s' has a meaning of its own in formulas".formatted(wanted), "", "choose another name");
+            throw new InvalidModelException(
+                    "'%s' has a meaning of its own in formulas".formatted(wanted), "", "choose another name");
         }
         if (!wanted.matches("\\p{L}[\\p{L}\\p{N}_]*")) {
             throw new InvalidModelException(
@@ -83,7 +86,8 @@ public final class ParameterEdits {
     }
 
     /**
-     * Another unit. Numbers are converted where the old and the new unit go together, and kept as they are where they do not.
+     * Another unit. Numbers are converted where the old and the new unit go together, and kept as they are where they
+     * do not.
      *
      * @throws InvalidModelException if the unit cannot be read
      */
@@ -106,9 +110,15 @@ public final class ParameterEdits {
     }
 
     /** With one number changed; a tied parameter stays as it is. */
-    public static ModelDocument withSetting(ModelDocument document, int index, int entry, UnaryOperator<Setting> change) {
+    public static ModelDocument withSetting(
+            ModelDocument document, int index, int entry, UnaryOperator<Setting> change) {
         int[] at = {0};
-        return withShape(document, index, mapped(document.parameters().get(index).shape(), setting -> at[0]++ == entry ? change.apply(setting) : setting));
+        return withShape(
+                document,
+                index,
+                mapped(
+                        document.parameters().get(index).shape(),
+                        setting -> at[0]++ == entry ? change.apply(setting) : setting));
     }
 
     /** With other numbers. */
@@ -177,7 +187,9 @@ public final class ParameterEdits {
     private static Setting scaled(Setting setting, double factor) {
         Prior prior = setting.prior() == null
                 ? null
-                : new Prior(scaled(setting.prior().value(), factor), scaled(setting.prior().sigma(), factor));
+                : new Prior(
+                        scaled(setting.prior().value(), factor),
+                        scaled(setting.prior().sigma(), factor));
         return new Setting(
                 scaled(setting.value(), factor),
                 setting.free(),

@@ -72,16 +72,21 @@ public final class References {
             parameters.add(next);
         }
         List<PairSystem> systems = document.systems().stream()
-                .map(system -> system.withFirst(renamedMass(system.first(), old, name)).withSecond(renamedMass(system.second(), old, name)))
+                .map(system -> system.withFirst(renamedMass(system.first(), old, name))
+                        .withSecond(renamedMass(system.second(), old, name)))
                 .toList();
         List<Model> models = new ArrayList<>();
         for (Model model : document.models()) {
-            List<Curve> curves = model.curves().stream().map(curve -> renamedCurve(curve, old, name)).toList();
+            List<Curve> curves = model.curves().stream()
+                    .map(curve -> renamedCurve(curve, old, name))
+                    .toList();
             List<CurveCoupling> couplings = model.couplings().stream()
                     .map(coupling -> new CurveCoupling(
                             coupling.first(),
                             coupling.second(),
-                            coupling.terms().stream().map(term -> renamedTerm(term, old, name)).toList()))
+                            coupling.terms().stream()
+                                    .map(term -> renamedTerm(term, old, name))
+                                    .toList()))
                     .toList();
             models.add(model.withCurves(curves).withCouplings(couplings));
         }
@@ -91,17 +96,19 @@ public final class References {
     /** Gives a pair system another id, everywhere. */
     public static ModelDocument renameSystem(ModelDocument document, String old, String id) {
         UnaryOperator<String> rename = name -> name.equals(old) ? id : name;
-        List<PairSystem> systems =
-                document.systems().stream().map(system -> system.withId(rename.apply(system.id()))).toList();
+        List<PairSystem> systems = document.systems().stream()
+                .map(system -> system.withId(rename.apply(system.id())))
+                .toList();
         List<Model> models = document.models().stream()
-                .map(model -> model.withSystems(model.systems().stream().map(rename).toList()))
+                .map(model ->
+                        model.withSystems(model.systems().stream().map(rename).toList()))
                 .toList();
         List<Parameter> parameters = document.parameters().stream()
                 .map(parameter -> parameter.withShape(renamedPlaces(parameter.shape(), rename)))
                 .toList();
         return levels(
-                        document.withSystems(systems).withModels(models).withParameters(parameters),
-                        key -> new LevelKey(rename.apply(key.system()), key.curve(), key.channel(), key.index()));
+                document.withSystems(systems).withModels(models).withParameters(parameters),
+                key -> new LevelKey(rename.apply(key.system()), key.curve(), key.channel(), key.index()));
     }
 
     /** Gives a curve another name; data follow unless another model has a curve of the old name. */
@@ -117,7 +124,8 @@ public final class References {
         boolean elsewhere = next.models().stream().anyMatch(other -> other.curve(old) != null);
         return elsewhere
                 ? next
-                : levels(next, key -> new LevelKey(key.system(), rename.apply(key.curve()), key.channel(), key.index()));
+                : levels(
+                        next, key -> new LevelKey(key.system(), rename.apply(key.curve()), key.channel(), key.index()));
     }
 
     /** Gives a data group another id, everywhere. */
@@ -131,7 +139,8 @@ public final class References {
                 .toList();
         return document.withModels(models)
                 .withData(document.data().stream()
-                        .map(datum -> datum.withGroups(datum.groups().stream().map(rename).toList()))
+                        .map(datum -> datum.withGroups(
+                                datum.groups().stream().map(rename).toList()))
                         .toList())
                 .withGroups(document.groups().stream()
                         .map(group -> new DataGroup(
@@ -143,7 +152,9 @@ public final class References {
     static Term mapped(Term term, UnaryOperator<Argument> change) {
         Term framed = term.withFrame(term.frame()
                 .withScale(change.apply(term.frame().scale()))
-                .withRange(change.apply(term.frame().from()), change.apply(term.frame().to())));
+                .withRange(
+                        change.apply(term.frame().from()),
+                        change.apply(term.frame().to())));
         if (framed instanceof FamilyTerm family) {
             return new FamilyTerm(family.frame(), family.family(), mapped(family.arguments(), change));
         }
@@ -161,7 +172,8 @@ public final class References {
                 table.valueUnit(),
                 knots,
                 table.interpolation(),
-                new InnerContinuation(table.inner().kind(), change.apply(table.inner().steepness())),
+                new InnerContinuation(
+                        table.inner().kind(), change.apply(table.inner().steepness())),
                 new OuterContinuation(
                         outer.kind(),
                         change.apply(outer.limit()),
@@ -176,7 +188,8 @@ public final class References {
     }
 
     private static Argument renamed(Argument argument, String old, String name) {
-        boolean same = argument instanceof Argument.Named named && named.parameter().equals(old);
+        boolean same =
+                argument instanceof Argument.Named named && named.parameter().equals(old);
         if (!same) {
             return argument;
         }
@@ -188,9 +201,12 @@ public final class References {
         return curve.withEnergyOrigin(change.apply(curve.energyOrigin()))
                 .withInnerWall(change.apply(curve.innerWall()))
                 .withOuterWall(change.apply(curve.outerWall()))
-                .withTerms(name.isEmpty()
-                        ? curve.terms()
-                        : curve.terms().stream().map(term -> renamedTerm(term, old, name)).toList());
+                .withTerms(
+                        name.isEmpty()
+                                ? curve.terms()
+                                : curve.terms().stream()
+                                        .map(term -> renamedTerm(term, old, name))
+                                        .toList());
     }
 
     private static Term renamedTerm(Term term, String old, String name) {
@@ -210,12 +226,12 @@ public final class References {
     }
 
     private static Pattern word(String name) {
-        return Pattern.compile(
-                "(?<![\\p{L}\\p{N}_.])" + Pattern.quote(name) + "(?![\\p{L}\\p{N}_(\\[])");
+        return Pattern.compile("(?<![\\p{L}\\p{N}_.])" + Pattern.quote(name) + "(?![\\p{L}\\p{N}_(\\[])");
     }
 
     private static boolean usesMass(Body body, String parameter) {
-        return body.mass() instanceof BodyMass.FromParameter named && named.parameter().equals(parameter);
+        return body.mass() instanceof BodyMass.FromParameter named
+                && named.parameter().equals(parameter);
     }
 
     private static Body renamedMass(Body body, String old, String name) {
@@ -226,7 +242,8 @@ public final class References {
         if (shape instanceof ParameterShape.BySystem by) {
             return new ParameterShape.BySystem(
                     by.entries().stream()
-                            .map(entry -> new ParameterShape.BySystem.Entry(rename.apply(entry.system()), entry.setting()))
+                            .map(entry ->
+                                    new ParameterShape.BySystem.Entry(rename.apply(entry.system()), entry.setting()))
                             .toList(),
                     by.others());
         }

@@ -43,26 +43,35 @@ public final class SystemEdits {
     public static ModelDocument remove(ModelDocument document, int index) {
         String id = document.systems().get(index).id();
         long data = document.data().stream()
-                .filter(datum -> datum.levels().stream().anyMatch(c -> c.level().system().equals(id))
-                        || datum.denominator().stream().anyMatch(c -> c.level().system().equals(id)))
+                .filter(datum ->
+                        datum.levels().stream().anyMatch(c -> c.level().system().equals(id))
+                                || datum.denominator().stream()
+                                        .anyMatch(c -> c.level().system().equals(id)))
                 .count();
         if (data > 0) {
             throw new InvalidModelException(
-                    "%d measured %s to '%s'".formatted(data, data == 1 ? "value belongs" : "values belong", id), "", "remove the data first");
+                    "%d measured %s to '%s'".formatted(data, data == 1 ? "value belongs" : "values belong", id),
+                    "",
+                    "remove the data first");
         }
         for (Parameter parameter : document.parameters()) {
             boolean used = parameter.shape() instanceof ParameterShape.BySystem by
-                            && by.entries().stream().anyMatch(entry -> entry.system().equals(id))
-                    || parameter.shape() instanceof ParameterShape.MassScaled scaled && scaled.reference().equals(id);
+                            && by.entries().stream()
+                                    .anyMatch(entry -> entry.system().equals(id))
+                    || parameter.shape() instanceof ParameterShape.MassScaled scaled
+                            && scaled.reference().equals(id);
             if (used) {
                 throw new InvalidModelException(
-                        "the parameter '%s' has a number for '%s'".formatted(parameter.name(), id), "", "change what the parameter depends on first");
+                        "the parameter '%s' has a number for '%s'".formatted(parameter.name(), id),
+                        "",
+                        "change what the parameter depends on first");
             }
         }
         return document.withSystems(Lists.without(document.systems(), index))
                 .withModels(document.models().stream()
-                        .map(model -> model.withSystems(
-                                model.systems().stream().filter(s -> !s.equals(id)).toList()))
+                        .map(model -> model.withSystems(model.systems().stream()
+                                .filter(s -> !s.equals(id))
+                                .toList()))
                         .toList());
     }
 
@@ -78,10 +87,12 @@ public final class SystemEdits {
             return document;
         }
         if (wanted.isEmpty() || wanted.contains(":") || wanted.contains("/")) {
-            throw new InvalidModelException("an id needs letters or digits, and neither ':' nor '/'", "", "choose another one");
+            throw new InvalidModelException(
+                    "an id needs letters or digits, and neither ':' nor '/'", "", "choose another one");
         }
         if (ids(document).contains(wanted)) {
-            throw new InvalidModelException("there is a system '%s' already".formatted(wanted), "", "choose another id");
+            throw new InvalidModelException(
+                    "there is a system '%s' already".formatted(wanted), "", "choose another id");
         }
         return References.renameSystem(document, old, wanted);
     }
@@ -100,8 +111,7 @@ public final class SystemEdits {
             boolean exact = typed.sigma() == null || typed.sigma().sign() == 0;
             String number = exact
                     ? typed.value().text()
-                    : MeasuredText.format(
-                            typed.value(), typed.sigma(), typed.sigma(), Datum.Limit.NONE);
+                    : MeasuredText.format(typed.value(), typed.sigma(), typed.sigma(), Datum.Limit.NONE);
             return number + " " + typed.unit();
         }
         return ((BodyMass.FromParameter) mass).parameter();
@@ -115,27 +125,33 @@ public final class SystemEdits {
     public static BodyMass mass(String text, ModelDocument document) {
         String plain = text.strip();
         if (ParticleCatalogue.STANDARD.contains(plain)) {
-            return new BodyMass.Catalogued(ParticleCatalogue.STANDARD.find(plain).id());
+            return new BodyMass.Catalogued(
+                    ParticleCatalogue.STANDARD.find(plain).id());
         }
         if (plain.matches("[-+.\\d].*")) {
             MeasuredText typed = MeasuredText.parse(plain);
             if (typed.unit().isEmpty()) {
-                throw new InvalidModelException("the mass has no unit", "", "write it like '22.98977 u' or '511 keV/c^2'");
+                throw new InvalidModelException(
+                        "the mass has no unit", "", "write it like '22.98977 u' or '511 keV/c^2'");
             }
             UnitExpression unit = UnitExpression.parse(typed.unit());
             if (!unit.fits(Units.of(document), Dimension.MASS)) {
-                throw new InvalidModelException("'%s' is not a unit of mass".formatted(unit.text()), "", "use one like u, m_e or MeV/c^2");
+                throw new InvalidModelException(
+                        "'%s' is not a unit of mass".formatted(unit.text()), "", "use one like u, m_e or MeV/c^2");
             }
             return new BodyMass.Typed(typed.value(), typed.sigmaPlus(), unit.text());
         }
-        List<String> parameters = document.parameters().stream().map(Parameter::name).toList();
+        List<String> parameters =
+                document.parameters().stream().map(Parameter::name).toList();
         if (parameters.contains(plain)) {
             return new BodyMass.FromParameter(plain);
         }
-        List<String> particles =
-                ParticleCatalogue.STANDARD.particles().stream().map(particle -> particle.id()).toList();
+        List<String> particles = ParticleCatalogue.STANDARD.particles().stream()
+                .map(particle -> particle.id())
+                .toList();
         throw new InvalidModelException(
-                "'%s' is neither a particle of the table, nor a mass, nor a parameter".formatted(Names.shortened(plain)),
+                "'%s' is neither a particle of the table, nor a mass, nor a parameter"
+                        .formatted(Names.shortened(plain)),
                 "",
                 Names.remedy(plain, particles));
     }

@@ -35,9 +35,13 @@ public final class Uncertain {
         if (value == 0) {
             return "0";
         }
-        BigDecimal rounded = new BigDecimal(value).round(new MathContext(digits, RoundingMode.HALF_EVEN)).stripTrailingZeros();
+        BigDecimal rounded = new BigDecimal(value)
+                .round(new MathContext(digits, RoundingMode.HALF_EVEN))
+                .stripTrailingZeros();
         int exponent = rounded.precision() - rounded.scale() - 1;
-        return exponent >= -5 && exponent < 12 ? rounded.toPlainString() : rounded.toString().replace("E+", "e").replace('E', 'e');
+        return exponent >= -5 && exponent < 12
+                ? rounded.toPlainString()
+                : rounded.toString().replace("E+", "e").replace('E', 'e');
     }
 
     private static String scientific(double value, BigDecimal error, int exponent) {
@@ -46,7 +50,9 @@ public final class Uncertain {
             return rounded.toPlainString() + "(" + error.toPlainString() + ")";
         }
         BigDecimal scaledError = error.movePointLeft(exponent);
-        BigDecimal scaled = new BigDecimal(value).movePointLeft(exponent).setScale(Math.max(0, scaledError.scale()), RoundingMode.HALF_EVEN);
+        BigDecimal scaled = new BigDecimal(value)
+                .movePointLeft(exponent)
+                .setScale(Math.max(0, scaledError.scale()), RoundingMode.HALF_EVEN);
         return scaled.toPlainString() + "(" + scaledError.unscaledValue() + ")e" + exponent;
     }
 }

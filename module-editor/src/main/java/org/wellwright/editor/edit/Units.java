@@ -8,7 +8,10 @@ import org.wellwright.solver.units.UnitSystem;
 public final class Units {
     private Units() {}
 
-    /** The document's; atomic units where it names one that is not known, which the windows report as a fault of the project. */
+    /**
+     * The document's; atomic units where it names one that is not known, which the windows report as a fault of the
+     * project.
+     */
     public static UnitSystem of(ModelDocument document) {
         try {
             return UnitSystem.named(document.units());

@@ -17,8 +17,8 @@ import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.service.FitService;
 
 /**
- * Runs a fit of one project off the event thread and keeps its result until it is accepted or discarded. Its methods are called on one thread; the view
- * is told through {@code ui}.
+ * Runs a fit of one project off the event thread and keeps its result until it is accepted or discarded. Its methods
+ * are called on one thread; the view is told through {@code ui}.
  */
 final class FitController {
     private final ProjectSession session;
@@ -60,7 +60,12 @@ final class FitController {
     }
 
     FitController(
-            ProjectSession session, FitService service, Executor worker, Executor ui, Consumer<FitViewModel> view, FitWatcher watcher) {
+            ProjectSession session,
+            FitService service,
+            Executor worker,
+            Executor ui,
+            Consumer<FitViewModel> view,
+            FitWatcher watcher) {
         this.session = session;
         this.service = service;
         this.worker = worker;
@@ -104,13 +109,16 @@ final class FitController {
                 end(FitViewModel.done(project.document(), fitted));
             });
         } catch (CancellationException e) {
-            ui.execute(() -> end(FitViewModel.failed(model, new Problem("the fit was cancelled", "", "nothing was changed"))));
+            ui.execute(() ->
+                    end(FitViewModel.failed(model, new Problem("the fit was cancelled", "", "nothing was changed"))));
         } catch (WellwrightException e) {
             ui.execute(() -> end(FitViewModel.failed(model, e.problem())));
         } catch (IllegalArgumentException | IllegalStateException | ArithmeticException e) {
             // A fault of the program, which the user cannot mend; the log has its trace.
             Logger.getLogger(FitController.class.getName()).log(Level.WARNING, "fit of " + model, e);
-            ui.execute(() -> end(FitViewModel.failed(model, new Problem("the fit failed inside the program: " + e.getMessage(), "", "nothing was changed"))));
+            ui.execute(() -> end(FitViewModel.failed(
+                    model,
+                    new Problem("the fit failed inside the program: " + e.getMessage(), "", "nothing was changed"))));
         }
     }
 
@@ -124,7 +132,8 @@ final class FitController {
             return Optional.of(new Problem("there is no fit to accept", "", "run one first"));
         }
         FitResult accepted = result;
-        boolean done = session.editIf(digest, "Accept the fit of " + accepted.model(), project -> project.withDocument(accepted.document()));
+        boolean done = session.editIf(
+                digest, "Accept the fit of " + accepted.model(), project -> project.withDocument(accepted.document()));
         if (!done && outdated()) {
             return Optional.of(new Problem("the project has changed since this fit was started", "", "run it again"));
         }

@@ -39,7 +39,6 @@ import org.wellwright.project.FigureSelection;
 import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 import org.wellwright.project.window.session.SessionWindow;
-import org.wellwright.solver.Problem;
 import org.wellwright.solver.fit.FitResult;
 import org.wellwright.solver.model.Model;
 import org.wellwright.solver.model.ModelDocument;
@@ -171,7 +170,9 @@ public final class FitTopComponent extends SessionWindow {
         tabs.addTab(Bundle.TAB_FitRemarks(), new JScrollPane(remarks));
         deck.add(new EmptyState(Bundle.MSG_FitNoModel(), Bundle.MSG_FitNoModelRemedy()), "none");
         deck.add(new EmptyState(Bundle.MSG_FitIdle(), Bundle.MSG_FitIdleRemedy()), FitViewModel.State.IDLE.name());
-        deck.add(new EmptyState(Bundle.MSG_FitRunning(), Bundle.MSG_FitRunningRemedy()), FitViewModel.State.RUNNING.name());
+        deck.add(
+                new EmptyState(Bundle.MSG_FitRunning(), Bundle.MSG_FitRunningRemedy()),
+                FitViewModel.State.RUNNING.name());
         deck.add(failure, FitViewModel.State.FAILED.name());
         deck.add(tabs, FitViewModel.State.DONE.name());
         return deck;
@@ -186,10 +187,25 @@ public final class FitTopComponent extends SessionWindow {
     private static List<GridColumn<FitViewModel.ParameterRow>> parameterColumns() {
         return List.of(
                 GridColumn.shown("Parameter", "", Kind.TEXT, "error of calibration", FitViewModel.ParameterRow::name),
-                GridColumn.shown("Before", "Its value in the project", Kind.NUMBER, "0.1234567890", FitViewModel.ParameterRow::before),
-                GridColumn.shown("Fitted", "Its value with the standard uncertainty of its last digits", Kind.NUMBER, "0.1234567890(12)", FitViewModel.ParameterRow::after),
+                GridColumn.shown(
+                        "Before",
+                        "Its value in the project",
+                        Kind.NUMBER,
+                        "0.1234567890",
+                        FitViewModel.ParameterRow::before),
+                GridColumn.shown(
+                        "Fitted",
+                        "Its value with the standard uncertainty of its last digits",
+                        Kind.NUMBER,
+                        "0.1234567890(12)",
+                        FitViewModel.ParameterRow::after),
                 GridColumn.shown("Unit", "", Kind.TEXT, "cm^-1 angstrom", FitViewModel.ParameterRow::unit),
-                GridColumn.shown("Moved by", "The change, in standard uncertainties where there are any", Kind.NUMBER, "+12.3 σ 00", FitViewModel.ParameterRow::change),
+                GridColumn.shown(
+                        "Moved by",
+                        "The change, in standard uncertainties where there are any",
+                        Kind.NUMBER,
+                        "+12.3 σ 00",
+                        FitViewModel.ParameterRow::change),
                 GridColumn.shown("Note", "", Kind.TEXT, "not determined by the data", FitViewModel.ParameterRow::note));
     }
 
@@ -198,23 +214,36 @@ public final class FitTopComponent extends SessionWindow {
                 GridColumn.shown("Levels", "", Kind.TEXT, "v=1 J=12 - v=0 J=11", FitViewModel.DatumRow::levels),
                 GridColumn.shown("Quantity", "", Kind.TEXT, "vacuum wavelength", FitViewModel.DatumRow::quantity),
                 GridColumn.shown("Measured", "", Kind.NUMBER, "16956.17025", FitViewModel.DatumRow::measured),
-                GridColumn.shown("Fitted", "What the fitted model says, shared errors included", Kind.NUMBER, "16956.17025(12)", FitViewModel.DatumRow::predicted),
+                GridColumn.shown(
+                        "Fitted",
+                        "What the fitted model says, shared errors included",
+                        Kind.NUMBER,
+                        "16956.17025(12)",
+                        FitViewModel.DatumRow::predicted),
                 GridColumn.shown("Unit", "", Kind.TEXT, "GeV/c^2", FitViewModel.DatumRow::unit),
-                GridColumn.shown("Residual / σ", "(measured − fitted)/σ", Kind.NUMBER, "+12.34 00", FitViewModel.DatumRow::residual)
+                GridColumn.shown(
+                                "Residual / σ",
+                                "(measured − fitted)/σ",
+                                Kind.NUMBER,
+                                "+12.34 00",
+                                FitViewModel.DatumRow::residual)
                         .withProblem(row -> row.far() ? "more than 3 σ away" : ""),
                 GridColumn.shown("Remark", "", Kind.TEXT, "not used, or the like", FitViewModel.DatumRow::problem));
     }
 
     private static List<GridColumn<FitViewModel.CorrelationRow>> correlationColumns() {
         return List.of(
-                GridColumn.shown("Parameter", "", Kind.TEXT, "error of calibration", FitViewModel.CorrelationRow::first),
+                GridColumn.shown(
+                        "Parameter", "", Kind.TEXT, "error of calibration", FitViewModel.CorrelationRow::first),
                 GridColumn.shown("with", "", Kind.TEXT, "error of calibration", FitViewModel.CorrelationRow::second),
                 GridColumn.shown("Correlation", "−1 to 1", Kind.NUMBER, "+0.123", FitViewModel.CorrelationRow::value));
     }
 
     @Override
     protected void selected(ProjectSession selected) {
-        controllers.keySet().retainAll(Lookup.getDefault().lookup(OpenProjects.class).sessions());
+        controllers
+                .keySet()
+                .retainAll(Lookup.getDefault().lookup(OpenProjects.class).sessions());
         controller = selected == null ? null : controllers.computeIfAbsent(selected, this::controllerOf);
         line.say(Optional.empty());
     }
@@ -295,7 +324,11 @@ public final class FitTopComponent extends SessionWindow {
         residuals.setRows(fit.residuals());
         correlations.setRows(fit.correlations());
         remarks.setListData(fit.remarks().toArray(new String[0]));
-        tabs.setTitleAt(3, fit.remarks().isEmpty() ? Bundle.TAB_FitRemarks() : Bundle.TAB_FitRemarksCounted(fit.remarks().size()));
+        tabs.setTitleAt(
+                3,
+                fit.remarks().isEmpty()
+                        ? Bundle.TAB_FitRemarks()
+                        : Bundle.TAB_FitRemarksCounted(fit.remarks().size()));
         line.setHint(outdated ? Bundle.MSG_FitOutdated() : "");
         cards.show(deck, !any ? "none" : fit.state().name());
     }

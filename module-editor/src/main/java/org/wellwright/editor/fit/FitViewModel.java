@@ -62,7 +62,16 @@ record FitViewModel(
     record ParameterRow(String name, String before, String after, String unit, String change, String note) {}
 
     /** One datum beside the fitted model. */
-    record DatumRow(String id, String levels, String quantity, String measured, String predicted, String unit, String residual, boolean far, String problem) {}
+    record DatumRow(
+            String id,
+            String levels,
+            String quantity,
+            String measured,
+            String predicted,
+            String unit,
+            String residual,
+            boolean far,
+            String problem) {}
 
     /** How strongly two fitted numbers hang together. */
     record CorrelationRow(String first, String second, String value) {}
@@ -80,7 +89,8 @@ record FitViewModel(
     }
 
     static FitViewModel running(String model, double fraction, String doing) {
-        return new FitViewModel(State.RUNNING, model, fraction, doing, null, List.of(), List.of(), List.of(), List.of(), List.of());
+        return new FitViewModel(
+                State.RUNNING, model, fraction, doing, null, List.of(), List.of(), List.of(), List.of(), List.of());
     }
 
     static FitViewModel failed(String model, Problem problem) {
@@ -91,8 +101,11 @@ record FitViewModel(
     static FitViewModel done(ModelDocument before, FitResult result) {
         List<String> remarks = new ArrayList<>();
         result.remarks().forEach(remark -> remarks.add(remark.sentence()));
-        result.rows().stream().filter(row -> row.problem() != null).forEach(row -> remarks.add(row.datum() + ": " + row.problem().sentence()));
-        String doing = "%s after %d steps".formatted(result.converged() ? "A minimum" : "No minimum", result.iterations());
+        result.rows().stream()
+                .filter(row -> row.problem() != null)
+                .forEach(row -> remarks.add(row.datum() + ": " + row.problem().sentence()));
+        String doing =
+                "%s after %d steps".formatted(result.converged() ? "A minimum" : "No minimum", result.iterations());
         return new FitViewModel(
                 State.DONE,
                 result.model(),
@@ -114,14 +127,19 @@ record FitViewModel(
             lines.add("χ²/ν = " + Uncertain.number(quality.reducedChiSquare(), 4));
         }
         lines.add("χ² + 2k = " + Uncertain.number(quality.criterion(), 5));
-        lines.add(switch (result.mode()) {
-            case KNOWN -> "σ as stated";
-            case KNOWN_UP_TO_SCALE -> "σ times %s, from the scatter".formatted(Uncertain.number(result.sigmaScale(), 4));
-            case MISSING -> "σ from the scatter: %s".formatted(Uncertain.number(result.sigmaScale(), 4));
-        });
+        lines.add(
+                switch (result.mode()) {
+                    case KNOWN -> "σ as stated";
+                    case KNOWN_UP_TO_SCALE ->
+                        "σ times %s, from the scatter".formatted(Uncertain.number(result.sigmaScale(), 4));
+                    case MISSING -> "σ from the scatter: %s".formatted(Uncertain.number(result.sigmaScale(), 4));
+                });
         for (ModelErrorEstimate error : result.modelErrors()) {
             String group = error.group().isEmpty() ? "" : " of " + error.group();
-            lines.add("σ of the model%s: %s %s%s".formatted(group, Uncertain.number(error.value(), 3), error.unit(), error.fitted() ? " (fitted)" : "").strip());
+            lines.add("σ of the model%s: %s %s%s"
+                    .formatted(
+                            group, Uncertain.number(error.value(), 3), error.unit(), error.fitted() ? " (fitted)" : "")
+                    .strip());
         }
         return lines;
     }
@@ -146,12 +164,21 @@ record FitViewModel(
                     Uncertain.number(old, 10),
                     Uncertain.text(fitted.value(), fitted.free() ? fitted.sigma() : 0),
                     fitted.unit(),
-                    !fitted.free() ? "" : fitted.sigma() > 0 ? "%+.1f σ".formatted(moved / fitted.sigma()) : Uncertain.number(moved, 3),
+                    !fitted.free()
+                            ? ""
+                            : fitted.sigma() > 0
+                                    ? "%+.1f σ".formatted(moved / fitted.sigma())
+                                    : Uncertain.number(moved, 3),
                     note));
         }
         for (GroupError error : result.groupErrors()) {
             rows.add(new ParameterRow(
-                    "error of " + error.group(), "", Uncertain.text(error.value(), error.sigma()), error.unit(), "", "shared error of the group"));
+                    "error of " + error.group(),
+                    "",
+                    Uncertain.text(error.value(), error.sigma()),
+                    error.unit(),
+                    "",
+                    "shared error of the group"));
         }
         return rows;
     }
@@ -168,12 +195,16 @@ record FitViewModel(
                     row.datum(),
                     datum == null ? "" : LevelSums.text(datum.levels(), names),
                     datum == null ? "" : TransformText.title(datum.transform()),
-                    datum == null ? Uncertain.number(row.measured(), 10) : datum.value().text(),
+                    datum == null
+                            ? Uncertain.number(row.measured(), 10)
+                            : datum.value().text(),
                     Uncertain.text(row.predicted() + row.groupShift(), row.predictedSigma()),
                     row.unit(),
                     row.used() || Double.isFinite(row.residual()) ? residual(row) : "",
                     row.used() && Math.abs(row.residual()) > 3,
-                    row.problem() == null ? row.used() ? "" : "not used" : row.problem().sentence()));
+                    row.problem() == null
+                            ? row.used() ? "" : "not used"
+                            : row.problem().sentence()));
         }
         return rows;
     }

@@ -40,10 +40,34 @@ final class CurveForm {
     private boolean filling;
 
     CurveForm(Form form, ModelsController controller, TermPath path, ProblemLine line) {
-        name = field(form, line, "curve.name", Bundle.LBL_CurveName(), Bundle.HINT_CurveName(), text -> controller.rename(path, text));
-        origin = field(form, line, "curve.origin", Bundle.LBL_CurveOrigin(), Bundle.HINT_CurveOrigin(), text -> controller.setOrigin(path, text));
-        inner = field(form, line, "curve.inner", Bundle.LBL_CurveInner(), Bundle.HINT_CurveWall(), text -> controller.setInnerWall(path, text));
-        outer = field(form, line, "curve.outer", Bundle.LBL_CurveOuter(), Bundle.HINT_CurveWall(), text -> controller.setOuterWall(path, text));
+        name = field(
+                form,
+                line,
+                "curve.name",
+                Bundle.LBL_CurveName(),
+                Bundle.HINT_CurveName(),
+                text -> controller.rename(path, text));
+        origin = field(
+                form,
+                line,
+                "curve.origin",
+                Bundle.LBL_CurveOrigin(),
+                Bundle.HINT_CurveOrigin(),
+                text -> controller.setOrigin(path, text));
+        inner = field(
+                form,
+                line,
+                "curve.inner",
+                Bundle.LBL_CurveInner(),
+                Bundle.HINT_CurveWall(),
+                text -> controller.setInnerWall(path, text));
+        outer = field(
+                form,
+                line,
+                "curve.outer",
+                Bundle.LBL_CurveOuter(),
+                Bundle.HINT_CurveWall(),
+                text -> controller.setOuterWall(path, text));
         outer.putClientProperty("JTextField.placeholderText", "none");
         spins.setName("curve.spins");
         spins.addActionListener(event -> {
@@ -52,9 +76,21 @@ final class CurveForm {
             }
         });
         form.field(Bundle.LBL_CurveSpins(), spins);
-        labels = field(form, line, "curve.labels", Bundle.LBL_CurveLabels(), Bundle.HINT_CurveLabels(), text -> controller.setLabels(path, text));
+        labels = field(
+                form,
+                line,
+                "curve.labels",
+                Bundle.LBL_CurveLabels(),
+                Bundle.HINT_CurveLabels(),
+                text -> controller.setLabels(path, text));
         labels.putClientProperty("JTextField.placeholderText", "plain");
-        occupied = field(form, line, "curve.occupied", Bundle.LBL_CurveOccupied(), Bundle.HINT_CurveOccupied(), text -> controller.setOccupied(path, text));
+        occupied = field(
+                form,
+                line,
+                "curve.occupied",
+                Bundle.LBL_CurveOccupied(),
+                Bundle.HINT_CurveOccupied(),
+                text -> controller.setOccupied(path, text));
         occupied.putClientProperty("JTextField.placeholderText", "none");
         form.end();
     }

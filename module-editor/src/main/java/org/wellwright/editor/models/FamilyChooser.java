@@ -27,7 +27,9 @@ import org.wellwright.solver.potential.FamilyCatalogue;
 import org.wellwright.solver.potential.FamilyParameter;
 import org.wellwright.solver.potential.PotentialFamily;
 
-/** Lets the user choose a family of potentials, with its formula and validity, and say what stands for its parameters. */
+/**
+ * Lets the user choose a family of potentials, with its formula and validity, and say what stands for its parameters.
+ */
 @Messages({
     "TTL_FamilyChooser=Add a term of a family",
     "LBL_Families=Families",
@@ -111,7 +113,10 @@ final class FamilyChooser {
             field.getDocument().addDocumentListener(new Typing(this::check));
             fields.put(parameter.name(), field);
             form.field(FamilyText.title(parameter), field);
-            form.field("", new JLabel("<html><div style='width:190px'>" + parameter.meaning() + (unit.isEmpty() ? "" : ", " + unit)));
+            form.field(
+                    "",
+                    new JLabel("<html><div style='width:190px'>" + parameter.meaning()
+                            + (unit.isEmpty() ? "" : ", " + unit)));
         }
         form.wide(new JLabel("<html><div style='width:300px'>" + Bundle.HINT_FamilyParameters()));
         form.end();
@@ -123,11 +128,15 @@ final class FamilyChooser {
     private void check() {
         Optional<Problem> problem = Optional.empty();
         for (FamilyParameter parameter : family().parameters()) {
-            String text = fields.get(parameter.name()) == null ? "" : fields.get(parameter.name()).getText();
+            String text = fields.get(parameter.name()) == null
+                    ? ""
+                    : fields.get(parameter.name()).getText();
             boolean fresh = text.strip().matches("\\p{L}[\\p{L}\\p{N}_]*")
-                    && controller.document().parameters().stream().noneMatch(p -> p.name().equals(text.strip()));
+                    && controller.document().parameters().stream()
+                            .noneMatch(p -> p.name().equals(text.strip()));
             if (problem.isEmpty() && !fresh) {
-                problem = Entry.attempt(() -> ArgumentText.parse(text, parameter.dimension(), null, controller.document()));
+                problem = Entry.attempt(
+                        () -> ArgumentText.parse(text, parameter.dimension(), null, controller.document()));
             }
         }
         dialog.setValid(problem.isEmpty());

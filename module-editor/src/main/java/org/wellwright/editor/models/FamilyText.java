@@ -12,7 +12,8 @@ final class FamilyText {
     static JLabel label(PotentialFamily family) {
         JLabel label = new JLabel(html(family, 230));
         label.setName("family.description");
-        label.getAccessibleContext().setAccessibleName(family.formula() + ". " + family.validity() + " " + family.source());
+        label.getAccessibleContext()
+                .setAccessibleName(family.formula() + ". " + family.validity() + " " + family.source());
         return label;
     }
 
@@ -23,7 +24,9 @@ final class FamilyText {
 
     /** "depth D". */
     static String title(FamilyParameter parameter) {
-        return parameter.name().equals(parameter.symbol()) ? parameter.name() : parameter.name() + " " + parameter.symbol();
+        return parameter.name().equals(parameter.symbol())
+                ? parameter.name()
+                : parameter.name() + " " + parameter.symbol();
     }
 
     private static String escape(String text) {

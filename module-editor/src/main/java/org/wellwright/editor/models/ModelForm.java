@@ -95,7 +95,9 @@ final class ModelForm {
         label.setLabelFor(note);
         note.getAccessibleContext().setAccessibleName(Bundle.LBL_ModelNote());
         form.wide(new JScrollPane(note));
-        systemIds = controller.document().systems().stream().map(system -> system.id()).toList();
+        systemIds = controller.document().systems().stream()
+                .map(system -> system.id())
+                .toList();
         if (systemIds.size() > 1) {
             systems();
         }
@@ -136,19 +138,45 @@ final class ModelForm {
 
     private List<GridColumn<ErrorRow>> columns() {
         return List.of(
-                GridColumn.typed("Data group", "The group of data it belongs to", GridColumn.Kind.CHOICE, ALL_DATA, ErrorRow::group, this::setGroup)
+                GridColumn.typed(
+                                "Data group",
+                                "The group of data it belongs to",
+                                GridColumn.Kind.CHOICE,
+                                ALL_DATA,
+                                ErrorRow::group,
+                                this::setGroup)
                         .withChoices(row -> {
                             List<String> groups = new ArrayList<>(List.of(ALL_DATA));
-                            controller.document().groups().stream().map(DataGroup::id).forEach(groups::add);
+                            controller.document().groups().stream()
+                                    .map(DataGroup::id)
+                                    .forEach(groups::add);
                             return groups;
                         }),
-                GridColumn.typed("Size", "A number with its unit, or a fraction of the value (0.01 or 1 %)", GridColumn.Kind.NUMBER, "0.0123 cm^-1", row -> (row.value() + " " + row.unit()).strip(), this::setSize),
-                GridColumn.shown("Measure", "Absolute or a fraction of the value", GridColumn.Kind.TEXT, ABSOLUTE, ErrorRow::measure),
-                GridColumn.typed("Fit it", "Whether a fit finds it by maximum likelihood", GridColumn.Kind.CHECK, "Fit it", ErrorRow::fitted, this::setFitted));
+                GridColumn.typed(
+                        "Size",
+                        "A number with its unit, or a fraction of the value (0.01 or 1 %)",
+                        GridColumn.Kind.NUMBER,
+                        "0.0123 cm^-1",
+                        row -> (row.value() + " " + row.unit()).strip(),
+                        this::setSize),
+                GridColumn.shown(
+                        "Measure",
+                        "Absolute or a fraction of the value",
+                        GridColumn.Kind.TEXT,
+                        ABSOLUTE,
+                        ErrorRow::measure),
+                GridColumn.typed(
+                        "Fit it",
+                        "Whether a fit finds it by maximum likelihood",
+                        GridColumn.Kind.CHECK,
+                        "Fit it",
+                        ErrorRow::fitted,
+                        this::setFitted));
     }
 
     boolean fits(ModelDocument document) {
-        return systemIds.equals(document.systems().stream().map(system -> system.id()).toList());
+        return systemIds.equals(
+                document.systems().stream().map(system -> system.id()).toList());
     }
 
     void show(Model model) {
@@ -180,14 +208,16 @@ final class ModelForm {
 
     private void addError() {
         line.say(controller.setError(path, model -> {
-            List<String> taken = model.error().parts().stream().map(ModelError.Part::group).toList();
+            List<String> taken =
+                    model.error().parts().stream().map(ModelError.Part::group).toList();
             List<String> free = new ArrayList<>(List.of(""));
             controller.document().groups().stream().map(DataGroup::id).forEach(free::add);
             free.removeAll(taken);
             if (free.isEmpty()) {
                 throw new InvalidModelException("every data group has an error already", "", "change one of them");
             }
-            ModelError.Part part = new ModelError.Part(free.get(0), ModelError.Measure.RELATIVE, new ExactNumber("0.01"), "", false);
+            ModelError.Part part =
+                    new ModelError.Part(free.get(0), ModelError.Measure.RELATIVE, new ExactNumber("0.01"), "", false);
             return model.withError(new ModelError(Lists.added(model.error().parts(), part)));
         }));
     }
@@ -204,24 +234,31 @@ final class ModelForm {
     }
 
     private Optional<Problem> setGroup(ErrorRow row, String group) {
-        return part(row, part -> new ModelError.Part(
-                group.equals(ALL_DATA) ? "" : group, part.measure(), part.value(), part.unit(), part.fitted()));
+        return part(
+                row,
+                part -> new ModelError.Part(
+                        group.equals(ALL_DATA) ? "" : group, part.measure(), part.value(), part.unit(), part.fitted()));
     }
 
     private Optional<Problem> setFitted(ErrorRow row, String yes) {
-        return part(row, part -> new ModelError.Part(
-                part.group(), part.measure(), part.value(), part.unit(), yes.equals("yes")));
+        return part(
+                row,
+                part -> new ModelError.Part(
+                        part.group(), part.measure(), part.value(), part.unit(), yes.equals("yes")));
     }
 
     private Optional<Problem> setSize(ErrorRow row, String text) {
         return part(row, part -> {
             String plain = text.strip();
             if (plain.endsWith("%")) {
-                double percent = QuantityText.parse(plain.substring(0, plain.length() - 1), "", UnitSystem.ATOMIC).value();
-                return new ModelError.Part(part.group(), ModelError.Measure.RELATIVE, ExactNumber.of(percent / 100), "", part.fitted());
+                double percent = QuantityText.parse(plain.substring(0, plain.length() - 1), "", UnitSystem.ATOMIC)
+                        .value();
+                return new ModelError.Part(
+                        part.group(), ModelError.Measure.RELATIVE, ExactNumber.of(percent / 100), "", part.fitted());
             }
             int end = plain.replaceFirst("^[+-]?[\\d.]+(?:[eE][+-]?\\d+)?", "").length();
-            String unit = UnitExpression.parse(plain.substring(plain.length() - end)).text();
+            String unit =
+                    UnitExpression.parse(plain.substring(plain.length() - end)).text();
             ExactNumber number = QuantityText.parse(plain.substring(0, plain.length() - end), "", UnitSystem.ATOMIC);
             ModelError.Measure measure = unit.isEmpty() ? ModelError.Measure.RELATIVE : ModelError.Measure.ABSOLUTE;
             return new ModelError.Part(part.group(), measure, number, unit, part.fitted());
@@ -230,7 +267,10 @@ final class ModelForm {
 
     private Optional<Problem> part(ErrorRow row, java.util.function.UnaryOperator<ModelError.Part> change) {
         return Entry.attempt(() -> controller
-                .setError(path, model -> model.withError(new ModelError(Lists.with(model.error().parts(), row.index(), change))))
+                .setError(
+                        path,
+                        model -> model.withError(
+                                new ModelError(Lists.with(model.error().parts(), row.index(), change))))
                 .ifPresent(problem -> {
                     throw new InvalidModelException(problem);
                 }));

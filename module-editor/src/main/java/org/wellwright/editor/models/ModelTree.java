@@ -25,8 +25,8 @@ import javax.swing.tree.TreeCellRenderer;
 import javax.swing.tree.TreePath;
 import javax.swing.tree.TreeSelectionModel;
 import org.wellwright.editor.edit.TermPath;
-import org.wellwright.editor.parts.ToolStrip;
 import org.wellwright.editor.parts.Tones;
+import org.wellwright.editor.parts.ToolStrip;
 
 /** The tree of models, curves and terms; a box before each term switches it on and off. */
 final class ModelTree extends JTree {
@@ -182,17 +182,20 @@ final class ModelTree extends JTree {
             box.setVisible(node.path().kind() == TermPath.Kind.TERM);
             box.setSelected(node.enabled());
             title.setText(node.title());
-            title.setFont(tree.getFont().deriveFont(node.path().kind() == TermPath.Kind.MODEL ? Font.BOLD : Font.PLAIN));
+            title.setFont(
+                    tree.getFont().deriveFont(node.path().kind() == TermPath.Kind.MODEL ? Font.BOLD : Font.PLAIN));
             detail.setText(detail(node));
             Color text = UIManager.getColor(
                     !selected
                             ? "Tree.textForeground"
                             : tree.isFocusOwner() ? "Tree.selectionForeground" : "Tree.selectionInactiveForeground");
             boolean faulty = !node.problem().isEmpty();
-            title.setForeground(faulty && !selected ? Tones.problem() : node.enabled() || selected ? text : Tones.faint());
+            title.setForeground(
+                    faulty && !selected ? Tones.problem() : node.enabled() || selected ? text : Tones.faint());
             detail.setForeground(selected ? text : Tones.faint());
             line.getAccessibleContext()
-                    .setAccessibleName(node.title() + (node.enabled() ? "" : ", off") + (faulty ? ", " + node.problem() : ""));
+                    .setAccessibleName(
+                            node.title() + (node.enabled() ? "" : ", off") + (faulty ? ", " + node.problem() : ""));
             return line;
         }
 
@@ -201,7 +204,9 @@ final class ModelTree extends JTree {
             if (node.path().kind() == TermPath.Kind.MODEL || node.detail().equals(node.title())) {
                 return "";
             }
-            return node.detail().length() > LONGEST_DETAIL ? node.detail().substring(0, LONGEST_DETAIL - 1) + "…" : node.detail();
+            return node.detail().length() > LONGEST_DETAIL
+                    ? node.detail().substring(0, LONGEST_DETAIL - 1) + "…"
+                    : node.detail();
         }
     }
 }

@@ -69,7 +69,10 @@ final class ModelsController {
         return TermPath.curve(model, document().models().get(model).curves().size() - 1);
     }
 
-    /** A term of a family, each of whose parameters is given as text; a name that is not in the pool yet becomes a parameter of it. */
+    /**
+     * A term of a family, each of whose parameters is given as text; a name that is not in the pool yet becomes a
+     * parameter of it.
+     */
     Optional<Problem> addFamily(TermPath selected, PotentialFamily family, Map<String, String> texts) {
         return edit("Add " + family.displayName(), null, document -> {
             ModelDocument next = withNewParameters(document, family, texts);
@@ -85,7 +88,10 @@ final class ModelsController {
     }
 
     Optional<Problem> addFormula(TermPath selected) {
-        return edit("Add a formula", null, document -> insert(document, selected, new FormulaTerm(TermFrame.named("formula"), "0", Map.of())));
+        return edit(
+                "Add a formula",
+                null,
+                document -> insert(document, selected, new FormulaTerm(TermFrame.named("formula"), "0", Map.of())));
     }
 
     Optional<Problem> addTable(TermPath selected, TableTerm table) {
@@ -95,7 +101,9 @@ final class ModelsController {
     /** Where a term added at a selected place goes: behind a selected term, else at the end of the curve. */
     TermPath insertedAt(TermPath selected) {
         TermPath curve = TermPath.curve(Math.max(0, selected.model()), Math.max(0, selected.curve()));
-        int size = ModelEdits.exists(document(), curve) ? ModelEdits.curveAt(document(), curve).terms().size() : 0;
+        int size = ModelEdits.exists(document(), curve)
+                ? ModelEdits.curveAt(document(), curve).terms().size()
+                : 0;
         return new TermPath(curve.model(), curve.curve(), selected.term() >= 0 ? selected.term() + 1 : size);
     }
 
@@ -105,10 +113,14 @@ final class ModelsController {
         return ModelEdits.addTerm(next, at, at.term(), term);
     }
 
-    /** The names that a family's parameters get when it is added: their own, with the term's where they are taken by something else. */
+    /**
+     * The names that a family's parameters get when it is added: their own, with the term's where they are taken by
+     * something else.
+     */
     Map<String, String> suggestedNames(PotentialFamily family) {
         Map<String, String> names = new LinkedHashMap<>();
-        List<String> taken = new ArrayList<>(document().parameters().stream().map(Parameter::name).toList());
+        List<String> taken = new ArrayList<>(
+                document().parameters().stream().map(Parameter::name).toList());
         taken.addAll(List.of("r", "l", "pi"));
         for (FamilyParameter parameter : family.parameters()) {
             String suggested = parameter.name().replaceAll("[^\\p{L}\\p{N}_]", "_");
@@ -123,10 +135,12 @@ final class ModelsController {
     private boolean betweenCharges(PotentialFamily family) {
         return family.id().equals("coulomb")
                 && document().systems().stream()
-                        .allMatch(system -> system.first().charge().sign() != 0 && system.second().charge().sign() != 0);
+                        .allMatch(system -> system.first().charge().sign() != 0
+                                && system.second().charge().sign() != 0);
     }
 
-    private static ModelDocument withNewParameters(ModelDocument document, PotentialFamily family, Map<String, String> texts) {
+    private static ModelDocument withNewParameters(
+            ModelDocument document, PotentialFamily family, Map<String, String> texts) {
         List<Parameter> parameters = new ArrayList<>(document.parameters());
         for (FamilyParameter parameter : family.parameters()) {
             String text = texts.getOrDefault(parameter.name(), "").strip();
@@ -143,12 +157,9 @@ final class ModelsController {
     /** A free parameter with a value given in atomic units. */
     private static Parameter newParameter(String name, Dimension dimension, double atomic, ModelDocument document) {
         String unit = Units.of(document).unitText(dimension);
-        double factor = UnitExpression.parse(
-                        UnitSystem.ATOMIC.unitText(dimension))
-                .factorTo(Units.of(document), dimension);
-        double value = new BigDecimal(atomic * factor)
-                .round(new MathContext(4))
-                .doubleValue();
+        double factor =
+                UnitExpression.parse(UnitSystem.ATOMIC.unitText(dimension)).factorTo(Units.of(document), dimension);
+        double value = new BigDecimal(atomic * factor).round(new MathContext(4)).doubleValue();
         return Parameter.scalar(name, unit, Setting.free(ExactNumber.of(value)));
     }
 
@@ -175,7 +186,8 @@ final class ModelsController {
         for (String name : FormulaText.parse(formula.text()).names()) {
             boolean known = ParameterPool.SYSTEM_NAMES.contains(name)
                     || formula.arguments().containsKey(name)
-                    || document.parameters().stream().anyMatch(parameter -> parameter.name().equals(name));
+                    || document.parameters().stream()
+                            .anyMatch(parameter -> parameter.name().equals(name));
             if (!known && name.matches("\\p{L}[\\p{L}\\p{N}_]*")) {
                 missing.add(name);
             }
@@ -206,7 +218,10 @@ final class ModelsController {
     }
 
     Optional<Problem> setEnabled(TermPath path, boolean on) {
-        return term((on ? "Switch on " : "Switch off ") + name(path), path, term -> term.withFrame(term.frame().withEnabled(on)));
+        return term(
+                (on ? "Switch on " : "Switch off ") + name(path),
+                path,
+                term -> term.withFrame(term.frame().withEnabled(on)));
     }
 
     Optional<Problem> setNote(TermPath path, String text) {
@@ -223,7 +238,8 @@ final class ModelsController {
     /** The systems that a model serves; all listed counts as "all, also those to come". */
     Optional<Problem> setSystems(TermPath path, List<String> systems) {
         boolean all = systems.size() == document().systems().size();
-        return model("Change the systems of " + name(path), path, model -> model.withSystems(all ? List.of() : systems));
+        return model(
+                "Change the systems of " + name(path), path, model -> model.withSystems(all ? List.of() : systems));
     }
 
     Optional<Problem> setError(TermPath path, UnaryOperator<Model> change) {
@@ -267,15 +283,22 @@ final class ModelsController {
     }
 
     Optional<Problem> setTo(TermPath path, String text) {
-        return frame(path, text, Dimension.LENGTH, Argument.UNBOUNDED, (frame, to) -> frame.withRange(frame.from(), to));
+        return frame(
+                path, text, Dimension.LENGTH, Argument.UNBOUNDED, (frame, to) -> frame.withRange(frame.from(), to));
     }
 
     Optional<Problem> setChannels(TermPath path, String text) {
-        return term("Change the channels of " + name(path), path, term -> term.withFrame(term.frame().withChannels(ChannelText.parse(text))));
+        return term(
+                "Change the channels of " + name(path),
+                path,
+                term -> term.withFrame(term.frame().withChannels(ChannelText.parse(text))));
     }
 
     Optional<Problem> setAngular(TermPath path, AngularFactor factor) {
-        return term("Change the operator of " + name(path), path, term -> term.withFrame(term.frame().withAngular(factor)));
+        return term(
+                "Change the operator of " + name(path),
+                path,
+                term -> term.withFrame(term.frame().withAngular(factor)));
     }
 
     /** A burst of typing into one formula is one step. A faulty formula is kept; it counts as a fault of its model. */
@@ -301,11 +324,19 @@ final class ModelsController {
         return edit(
                 "Change %s of %s".formatted(parameter.name(), name(path)),
                 null,
-                document -> ModelEdits.term(document, path, term -> ((FamilyTerm) term)
-                        .withArgument(parameter.name(), ArgumentText.parse(text, parameter.dimension(), null, document))));
+                document -> ModelEdits.term(
+                        document,
+                        path,
+                        term -> ((FamilyTerm) term)
+                                .withArgument(
+                                        parameter.name(),
+                                        ArgumentText.parse(text, parameter.dimension(), null, document))));
     }
 
-    /** Another family: what its parameters have in common by name with the old one's is kept, the rest becomes new parameters. */
+    /**
+     * Another family: what its parameters have in common by name with the old one's is kept, the rest becomes new
+     * parameters.
+     */
     Optional<Problem> setFamily(TermPath path, String id) {
         PotentialFamily family = FamilyCatalogue.require(id);
         return edit("Change the family of " + name(path), null, document -> {

@@ -82,10 +82,15 @@ public final class ModelsTopComponent extends SessionWindow {
         setName(Bundle.CTL_ModelsWindow());
         setDisplayName(Bundle.CTL_ModelsWindow());
         setToolTipText(Bundle.HINT_ModelsWindow());
-        tree = new ModelTree("models.tree", Bundle.CTL_ModelsWindow(), (path, on) -> line.say(controller.setEnabled(path, on)));
+        tree = new ModelTree(
+                "models.tree", Bundle.CTL_ModelsWindow(), (path, on) -> line.say(controller.setEnabled(path, on)));
         ToolStrip tools = new ToolStrip("models");
         tools.menu("add", Glyph.ADD, Bundle.LBL_Add(), Bundle.HINT_Add(), addMenu());
-        duplicate = tools.icon("duplicate", Glyph.DUPLICATE, Bundle.LBL_DuplicateNode(), () -> go(controller.duplicate(tree.selected())));
+        duplicate = tools.icon(
+                "duplicate",
+                Glyph.DUPLICATE,
+                Bundle.LBL_DuplicateNode(),
+                () -> go(controller.duplicate(tree.selected())));
         remove = tools.icon("remove", Glyph.REMOVE, Bundle.LBL_RemoveNode(), this::remove);
         up = tools.icon("up", Glyph.UP, Bundle.LBL_UpNode(), () -> go(controller.move(tree.selected(), -1)));
         down = tools.icon("down", Glyph.DOWN, Bundle.LBL_DownNode(), () -> go(controller.move(tree.selected(), 1)));
@@ -121,7 +126,8 @@ public final class ModelsTopComponent extends SessionWindow {
         menu.add(ToolStrip.action(Bundle.LBL_AddTable(), this::addTable)).setName("models.addTable");
         menu.addSeparator();
         menu.add(ToolStrip.action(Bundle.LBL_AddCurve(), this::addCurve)).setName("models.addCurve");
-        menu.add(ToolStrip.action(Bundle.LBL_AddModel(), () -> go(controller.addModel()))).setName("models.addModel");
+        menu.add(ToolStrip.action(Bundle.LBL_AddModel(), () -> go(controller.addModel())))
+                .setName("models.addModel");
         return menu;
     }
 
@@ -162,7 +168,8 @@ public final class ModelsTopComponent extends SessionWindow {
             return;
         }
         String wanted = selection().model();
-        int index = Math.max(0, shown.models().stream().map(m -> m.name()).toList().indexOf(wanted));
+        int index =
+                Math.max(0, shown.models().stream().map(m -> m.name()).toList().indexOf(wanted));
         if (tree.selected().model() != index) {
             tree.select(TermPath.model(index));
         }

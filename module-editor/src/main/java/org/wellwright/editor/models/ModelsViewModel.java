@@ -60,7 +60,8 @@ record ModelsViewModel(List<Node> models) {
         for (int t = 0; t < curve.terms().size(); t++) {
             Term term = curve.terms().get(t);
             TermPath at = new TermPath(path.model(), path.curve(), t);
-            terms.add(new Node(at, term.frame().name(), detail(term), term.frame().enabled(), faults.at(at.pointer()), List.of()));
+            terms.add(new Node(
+                    at, term.frame().name(), detail(term), term.frame().enabled(), faults.at(at.pointer()), List.of()));
         }
         String detail = terms.isEmpty() ? "no terms yet" : terms.size() == 1 ? "1 term" : terms.size() + " terms";
         return new Node(path, curve.name(), detail, true, faults.at(path.pointer()), terms);
@@ -69,7 +70,9 @@ record ModelsViewModel(List<Node> models) {
     /** A term in a few words: the family's name, the formula, or the size of the table. */
     static String detail(Term term) {
         if (term instanceof FamilyTerm family) {
-            return FamilyCatalogue.find(family.family()).map(PotentialFamily::displayName).orElse(family.family());
+            return FamilyCatalogue.find(family.family())
+                    .map(PotentialFamily::displayName)
+                    .orElse(family.family());
         }
         if (term instanceof FormulaTerm formula) {
             return formula.text().strip().replaceAll("\\s*\\R\\s*", "; ");

@@ -98,7 +98,9 @@ final class TableAsker {
     private static void requireUnit(String text, org.wellwright.solver.units.Dimension expected, UnitSystem units) {
         if (!text.isBlank() && !UnitExpression.parse(text).fits(units, expected)) {
             throw new InvalidModelException(
-                    "the unit '%s' does not fit".formatted(text.strip()), "", "use one like '%s'".formatted(units.unitText(expected)));
+                    "the unit '%s' does not fit".formatted(text.strip()),
+                    "",
+                    "use one like '%s'".formatted(units.unitText(expected)));
         }
     }
 }

@@ -62,8 +62,8 @@ final class TableForm {
     private final JComboBox<String> quantity = new JComboBox<>(new String[] {"V", "r²V"});
     private final JComboBox<String> abscissa = new JComboBox<>(new String[] {"r", "1/r"});
     private final JComboBox<String> spline = new JComboBox<>(new String[] {"natural", "clamped", "monotone"});
-    private final JComboBox<String> inner =
-            new JComboBox<>(new String[] {"a hard wall", "a + b/rⁿ, joined smoothly", "a + b·exp(−cr), joined smoothly"});
+    private final JComboBox<String> inner = new JComboBox<>(
+            new String[] {"a hard wall", "a + b/rⁿ, joined smoothly", "a + b·exp(−cr), joined smoothly"});
     private final EntryField steepness;
     private final JComboBox<String> outer =
             new JComboBox<>(new String[] {"the limit", "limit + coefficient/rⁿ", "the same, limit from continuity"});
@@ -81,8 +81,20 @@ final class TableForm {
                 "table.points",
                 Bundle.HEAD_TablePoints(),
                 List.of(
-                        GridColumn.typed("r", Bundle.HINT_TablePoints(), GridColumn.Kind.NUMBER, "0.12345678", Point::radius, this::setRadius),
-                        GridColumn.typed("V", Bundle.HINT_TablePoints(), GridColumn.Kind.NUMBER, "0.12345678901", Point::value, this::setValue)),
+                        GridColumn.typed(
+                                "r",
+                                Bundle.HINT_TablePoints(),
+                                GridColumn.Kind.NUMBER,
+                                "0.12345678",
+                                Point::radius,
+                                this::setRadius),
+                        GridColumn.typed(
+                                "V",
+                                Bundle.HINT_TablePoints(),
+                                GridColumn.Kind.NUMBER,
+                                "0.12345678901",
+                                Point::value,
+                                this::setValue)),
                 line);
         points.onPaste(this::paste);
         points.onMenu("Insert a point", "INSERT", this::insert);
@@ -96,15 +108,46 @@ final class TableForm {
         choice(form, "table.abscissa", Bundle.LBL_TableAbscissa(), abscissa);
         choice(form, "table.spline", Bundle.LBL_TableSpline(), spline);
         choice(form, "table.inner", Bundle.LBL_TableInner(), inner);
-        steepness = argument(form, "table.steepness", Bundle.LBL_TableSteepness(), (table, argument) ->
-                with(table, table.interpolation(), new InnerContinuation(table.inner().kind(), argument), table.outer()));
+        steepness = argument(
+                form,
+                "table.steepness",
+                Bundle.LBL_TableSteepness(),
+                (table, argument) -> with(
+                        table,
+                        table.interpolation(),
+                        new InnerContinuation(table.inner().kind(), argument),
+                        table.outer()));
         choice(form, "table.outer", Bundle.LBL_TableOuter(), outer);
-        limit = argument(form, "table.limit", Bundle.LBL_TableLimit(), (table, argument) -> outer(
-                table, table.outer().kind(), argument, table.outer().coefficient(), table.outer().exponent()));
-        coefficient = argument(form, "table.coefficient", Bundle.LBL_TableCoefficient(), (table, argument) ->
-                outer(table, table.outer().kind(), table.outer().limit(), argument, table.outer().exponent()));
-        exponent = argument(form, "table.exponent", Bundle.LBL_TableExponent(), (table, argument) ->
-                outer(table, table.outer().kind(), table.outer().limit(), table.outer().coefficient(), argument));
+        limit = argument(
+                form,
+                "table.limit",
+                Bundle.LBL_TableLimit(),
+                (table, argument) -> outer(
+                        table,
+                        table.outer().kind(),
+                        argument,
+                        table.outer().coefficient(),
+                        table.outer().exponent()));
+        coefficient = argument(
+                form,
+                "table.coefficient",
+                Bundle.LBL_TableCoefficient(),
+                (table, argument) -> outer(
+                        table,
+                        table.outer().kind(),
+                        table.outer().limit(),
+                        argument,
+                        table.outer().exponent()));
+        exponent = argument(
+                form,
+                "table.exponent",
+                Bundle.LBL_TableExponent(),
+                (table, argument) -> outer(
+                        table,
+                        table.outer().kind(),
+                        table.outer().limit(),
+                        table.outer().coefficient(),
+                        argument));
     }
 
     void show(TableTerm table, ModelDocument document) {
@@ -118,7 +161,8 @@ final class TableForm {
         radiusUnit.show(table.radiusUnit());
         valueUnit.show(table.valueUnit());
         UnitSystem units = org.wellwright.editor.edit.Units.of(document);
-        radiusUnit.putClientProperty("JTextField.placeholderText", units.length().symbol());
+        radiusUnit.putClientProperty(
+                "JTextField.placeholderText", units.length().symbol());
         valueUnit.putClientProperty("JTextField.placeholderText", units.energy().symbol());
         quantity.setSelectedIndex(table.interpolation().quantity().ordinal());
         abscissa.setSelectedIndex(table.interpolation().abscissa().ordinal());
@@ -145,11 +189,14 @@ final class TableForm {
                 continue;
             }
             try {
-                double radius = QuantityText.parse(row.cell(0), "", UnitSystem.ATOMIC).value();
-                double value = QuantityText.parse(row.cell(1), "", UnitSystem.ATOMIC).value();
+                double radius =
+                        QuantityText.parse(row.cell(0), "", UnitSystem.ATOMIC).value();
+                double value =
+                        QuantityText.parse(row.cell(1), "", UnitSystem.ATOMIC).value();
                 knots.add(new TableKnot(radius, Argument.of(value)));
             } catch (InvalidModelException e) {
-                throw new InvalidModelException(e.problem().what(), "line " + row.line(), "write r and V, two plain numbers");
+                throw new InvalidModelException(
+                        e.problem().what(), "line " + row.line(), "write r and V, two plain numbers");
             } catch (IllegalArgumentException e) {
                 throw new InvalidModelException(e.getMessage(), "line " + row.line(), "");
             }
@@ -159,25 +206,34 @@ final class TableForm {
     }
 
     private EntryField unit(Form form, String name, String label, boolean radius) {
-        EntryField field = new EntryField(name, 8).onEntry(text -> set(table -> {
-            String unit = text.isBlank() ? "" : UnitExpression.parse(text).text();
-            return new TableTerm(
-                    table.frame(),
-                    radius ? unit : table.radiusUnit(),
-                    radius ? table.valueUnit() : unit,
-                    table.knots(),
-                    table.interpolation(),
-                    table.inner(),
-                    table.outer());
-        }), line);
+        EntryField field = new EntryField(name, 8)
+                .onEntry(
+                        text -> set(table -> {
+                            String unit = text.isBlank()
+                                    ? ""
+                                    : UnitExpression.parse(text).text();
+                            return new TableTerm(
+                                    table.frame(),
+                                    radius ? unit : table.radiusUnit(),
+                                    radius ? table.valueUnit() : unit,
+                                    table.knots(),
+                                    table.interpolation(),
+                                    table.inner(),
+                                    table.outer());
+                        }),
+                        line);
         field.setToolTipText(Bundle.HINT_TableUnit());
         form.field(label, field);
         return field;
     }
 
     private EntryField argument(
-            Form form, String name, String label, java.util.function.BiFunction<TableTerm, Argument, TableTerm> change) {
-        EntryField field = new EntryField(name, 8).onEntry(text -> set(table -> change.apply(table, plain(text))), line);
+            Form form,
+            String name,
+            String label,
+            java.util.function.BiFunction<TableTerm, Argument, TableTerm> change) {
+        EntryField field =
+                new EntryField(name, 8).onEntry(text -> set(table -> change.apply(table, plain(text))), line);
         form.field(label, field);
         return field;
     }
@@ -207,10 +263,16 @@ final class TableForm {
                 TableInterpolation.Spline.values()[spline.getSelectedIndex()]);
         InnerContinuation.Kind innerKind = InnerContinuation.Kind.values()[inner.getSelectedIndex()];
         boolean unset = table.inner().steepness().equals(Argument.ZERO) && innerKind != InnerContinuation.Kind.WALL;
-        InnerContinuation below = new InnerContinuation(innerKind, unset ? Argument.of(2) : table.inner().steepness());
+        InnerContinuation below = new InnerContinuation(
+                innerKind, unset ? Argument.of(2) : table.inner().steepness());
         TableTerm next = with(table, interpolation, below, table.outer());
         OuterContinuation.Kind outerKind = OuterContinuation.Kind.values()[outer.getSelectedIndex()];
-        return outer(next, outerKind, table.outer().limit(), table.outer().coefficient(), table.outer().exponent());
+        return outer(
+                next,
+                outerKind,
+                table.outer().limit(),
+                table.outer().coefficient(),
+                table.outer().exponent());
     }
 
     private static TableTerm with(
@@ -221,18 +283,27 @@ final class TableForm {
 
     private static TableTerm outer(
             TableTerm table, OuterContinuation.Kind kind, Argument limit, Argument coefficient, Argument exponent) {
-        return with(table, table.interpolation(), table.inner(), new OuterContinuation(kind, limit, coefficient, exponent));
+        return with(
+                table, table.interpolation(), table.inner(), new OuterContinuation(kind, limit, coefficient, exponent));
     }
 
     private static TableTerm withKnots(TableTerm table, List<TableKnot> knots) {
         return new TableTerm(
-                table.frame(), table.radiusUnit(), table.valueUnit(), knots, table.interpolation(), table.inner(), table.outer());
+                table.frame(),
+                table.radiusUnit(),
+                table.valueUnit(),
+                knots,
+                table.interpolation(),
+                table.inner(),
+                table.outer());
     }
 
     private Optional<Problem> setRadius(Point point, String text) {
         return set(table -> {
-            double radius = QuantityText.parse(text, table.radiusUnit(), UnitSystem.ATOMIC).value();
-            return withKnots(table, Lists.with(table.knots(), point.index(), knot -> new TableKnot(radius, knot.value())));
+            double radius = QuantityText.parse(text, table.radiusUnit(), UnitSystem.ATOMIC)
+                    .value();
+            return withKnots(
+                    table, Lists.with(table.knots(), point.index(), knot -> new TableKnot(radius, knot.value())));
         });
     }
 
@@ -246,12 +317,17 @@ final class TableForm {
     }
 
     private void insert() {
-        int at = points.selection().isEmpty() ? points.rows().size() - 1 : points.selection().get(0);
+        int at = points.selection().isEmpty()
+                ? points.rows().size() - 1
+                : points.selection().get(0);
         line.say(set(table -> {
             List<TableKnot> knots = table.knots();
             TableKnot here = knots.get(at);
-            double next = at + 1 < knots.size() ? knots.get(at + 1).radius() : 2 * here.radius() - knots.get(at - 1).radius();
-            return withKnots(table, Lists.inserted(knots, at + 1, new TableKnot((here.radius() + next) / 2, here.value())));
+            double next = at + 1 < knots.size()
+                    ? knots.get(at + 1).radius()
+                    : 2 * here.radius() - knots.get(at - 1).radius();
+            return withKnots(
+                    table, Lists.inserted(knots, at + 1, new TableKnot((here.radius() + next) / 2, here.value())));
         }));
     }
 

@@ -95,11 +95,17 @@ final class TermForm {
             table = new TableForm(form, controller, path, line);
         }
         form.heading(Bundle.HEAD_TermWhere());
-        scale = field("term.scale", Bundle.LBL_TermScale(), Bundle.HINT_TermScale(), text -> controller.setScale(path, text));
-        from = field("term.from", Bundle.LBL_TermFrom(), Bundle.HINT_TermRange(), text -> controller.setFrom(path, text));
+        scale = field(
+                "term.scale", Bundle.LBL_TermScale(), Bundle.HINT_TermScale(), text -> controller.setScale(path, text));
+        from = field(
+                "term.from", Bundle.LBL_TermFrom(), Bundle.HINT_TermRange(), text -> controller.setFrom(path, text));
         to = field("term.to", Bundle.LBL_TermTo(), Bundle.HINT_TermRange(), text -> controller.setTo(path, text));
         to.putClientProperty("JTextField.placeholderText", "unbounded");
-        channels = field("term.channels", Bundle.LBL_TermChannels(), Bundle.HINT_TermChannels(), text -> controller.setChannels(path, text));
+        channels = field(
+                "term.channels",
+                Bundle.LBL_TermChannels(),
+                Bundle.HINT_TermChannels(),
+                text -> controller.setChannels(path, text));
         operator = new JComboBox<>(new String[] {"1", "L·S", "S₁·S₂", "S₁₂ (tensor)"});
         operator.setName("term.operator");
         operator.addActionListener(event -> {
@@ -113,7 +119,8 @@ final class TermForm {
 
     private void family(FamilyTerm term) {
         List<PotentialFamily> families = FamilyCatalogue.families();
-        JComboBox<String> choice = new JComboBox<>(families.stream().map(PotentialFamily::displayName).toArray(String[]::new));
+        JComboBox<String> choice = new JComboBox<>(
+                families.stream().map(PotentialFamily::displayName).toArray(String[]::new));
         choice.setName("term.family");
         PotentialFamily family = FamilyCatalogue.find(term.family()).orElse(null);
         choice.setSelectedItem(family == null ? null : family.displayName());
@@ -126,7 +133,8 @@ final class TermForm {
         form.field(Bundle.LBL_TermFamily(), choice);
         if (family == null) {
             JLabel unknown = form.wide(new JLabel(
-                    "<html>The family '%s' is not installed; choose another, or install the module that brings it.".formatted(term.family())));
+                    "<html>The family '%s' is not installed; choose another, or install the module that brings it."
+                            .formatted(term.family())));
             unknown.setName("term.unknown");
             return;
         }
@@ -146,15 +154,17 @@ final class TermForm {
                 "term.formula",
                 line,
                 () -> {
-                    List<String> names = new java.util.ArrayList<>(
-                            controller.document().parameters().stream().map(Parameter::name).toList());
+                    List<String> names = new java.util.ArrayList<>(controller.document().parameters().stream()
+                            .map(Parameter::name)
+                            .toList());
                     names.addAll(ParameterPool.SYSTEM_NAMES);
                     return names;
                 },
                 text -> controller.setFormula(path, text),
                 controller::endTyping);
         JScrollPane scroll = new JScrollPane(formula);
-        scroll.setPreferredSize(new Dimension(120, 4 * formula.getFontMetrics(formula.getFont()).getHeight() + 8));
+        scroll.setPreferredSize(
+                new Dimension(120, 4 * formula.getFontMetrics(formula.getFont()).getHeight() + 8));
         form.wide(new JLabel(Bundle.LBL_TermFormula())).setLabelFor(formula);
         form.wide(scroll);
         missing = form.wide(new JButton());
@@ -178,9 +188,10 @@ final class TermForm {
         channels.show(ChannelText.text(term.frame().channels()));
         operator.setSelectedIndex(term.frame().angular().ordinal());
         if (term instanceof FamilyTerm family) {
-            arguments.forEach((parameter, field) -> field.show(Optional.ofNullable(family.arguments().get(parameter))
-                    .map(ArgumentText::text)
-                    .orElse("")));
+            arguments.forEach((parameter, field) ->
+                    field.show(Optional.ofNullable(family.arguments().get(parameter))
+                            .map(ArgumentText::text)
+                            .orElse("")));
         } else if (term instanceof FormulaTerm written) {
             formula.show(written.text());
             List<String> names = ModelsController.missing(document, path);

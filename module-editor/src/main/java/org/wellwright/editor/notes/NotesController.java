@@ -28,12 +28,19 @@ final class NotesController {
         session.endGesture();
     }
 
-    /** Other units to show results in. Plain numbers in formulas then mean these; parameters and data keep their own units. */
+    /**
+     * Other units to show results in. Plain numbers in formulas then mean these; parameters and data keep their own
+     * units.
+     */
     void setUnits(UnitSystem units) {
-        session.edit("Change the units", project -> project.withDocument(project.document().withUnits(units.id())));
+        session.edit(
+                "Change the units",
+                project -> project.withDocument(project.document().withUnits(units.id())));
     }
 
     void setLabels(LabelConvention labels) {
-        session.edit("Change the names of levels", project -> project.withDocument(project.document().withLabels(labels)));
+        session.edit(
+                "Change the names of levels",
+                project -> project.withDocument(project.document().withLabels(labels)));
     }
 }

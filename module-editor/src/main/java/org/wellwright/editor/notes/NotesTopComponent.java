@@ -137,7 +137,8 @@ public final class NotesTopComponent extends SessionWindow {
             notes.setText(project.notes());
             notes.setCaretPosition(0);
         }
-        editions.setText("<html><div style='width:220px'>" + Bundle.LBL_NotesEditions(document.constantsEdition(), document.massTable()));
+        editions.setText("<html><div style='width:220px'>"
+                + Bundle.LBL_NotesEditions(document.constantsEdition(), document.massTable()));
         filling = false;
     }
 

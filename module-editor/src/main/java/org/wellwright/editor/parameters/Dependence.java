@@ -53,10 +53,18 @@ enum Dependence {
     /** What the list field of a shape holds: "0, 1, 2", "1 1/2, 1 3/2", or "system exponent". */
     static String places(ParameterShape shape, ModelDocument document) {
         if (shape instanceof ParameterShape.ByOrbital by) {
-            return String.join(", ", by.entries().stream().map(e -> Integer.toString(e.orbital())).toList());
+            return String.join(
+                    ", ",
+                    by.entries().stream()
+                            .map(e -> Integer.toString(e.orbital()))
+                            .toList());
         }
         if (shape instanceof ParameterShape.ByTotal by) {
-            return String.join(", ", by.entries().stream().map(e -> e.orbital() + " " + e.twiceTotal() + "/2").toList());
+            return String.join(
+                    ", ",
+                    by.entries().stream()
+                            .map(e -> e.orbital() + " " + e.twiceTotal() + "/2")
+                            .toList());
         }
         if (shape instanceof ParameterShape.MassScaled scaled) {
             return scaled.reference() + " " + ExactNumber.of(scaled.exponent());
@@ -70,7 +78,8 @@ enum Dependence {
             case NOTHING, SYSTEM -> "";
             case ORBITAL -> "0, 1, 2";
             case TOTAL -> "0 1/2, 1 1/2, 1 3/2";
-            case MASS -> document.systems().isEmpty() ? "" : document.systems().get(0).id() + " -1";
+            case MASS ->
+                document.systems().isEmpty() ? "" : document.systems().get(0).id() + " -1";
         };
     }
 
@@ -110,7 +119,8 @@ enum Dependence {
                 for (String pair : places.split(",")) {
                     String[] parts = pair.strip().split("[\\s;/]+");
                     if (!pair.strip().matches("\\d{1,3}\\s+\\d{1,3}/2")) {
-                        throw new InvalidModelException("'%s' is not a pair of l and j".formatted(pair.strip()), "", "write it like 1 3/2");
+                        throw new InvalidModelException(
+                                "'%s' is not a pair of l and j".formatted(pair.strip()), "", "write it like 1 3/2");
                     }
                     int orbital = Integer.parseInt(parts[0]);
                     entries.add(new ParameterShape.ByTotal.Entry(
@@ -127,12 +137,16 @@ enum Dependence {
             }
             case MASS -> {
                 int blank = places.strip().lastIndexOf(' ');
-                String reference = blank < 0 ? "" : places.strip().substring(0, blank).strip();
+                String reference =
+                        blank < 0 ? "" : places.strip().substring(0, blank).strip();
                 if (document.systems().stream().noneMatch(system -> system.id().equals(reference))) {
                     throw new InvalidModelException(
-                            "'%s' names no system and exponent".formatted(places.strip()), "", "write a system's id and a power, as 'HD -1'");
+                            "'%s' names no system and exponent".formatted(places.strip()),
+                            "",
+                            "write a system's id and a power, as 'HD -1'");
                 }
-                double exponent = QuantityText.parse(places.strip().substring(blank + 1), "", UnitSystem.named(document.units()))
+                double exponent = QuantityText.parse(
+                                places.strip().substring(blank + 1), "", UnitSystem.named(document.units()))
                         .value();
                 yield new ParameterShape.MassScaled(first, reference, exponent);
             }
@@ -167,7 +181,8 @@ enum Dependence {
         for (String part : text.split("[,\\s]+")) {
             if (!part.isEmpty()) {
                 if (!part.matches("\\d{1,3}")) {
-                    throw new InvalidModelException("'%s' is not an l".formatted(part), "", "write whole numbers from 0, as 0, 1, 2");
+                    throw new InvalidModelException(
+                            "'%s' is not an l".formatted(part), "", "write whole numbers from 0, as 0, 1, 2");
                 }
                 numbers.add(Integer.parseInt(part));
             }

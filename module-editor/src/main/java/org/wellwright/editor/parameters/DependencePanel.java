@@ -58,7 +58,8 @@ final class DependencePanel {
         DialogDescriptor dialog = new DialogDescriptor(form(form), Bundle.TTL_Dependence(name));
         NotificationLineSupport line = dialog.createNotificationLineSupport();
         kind.addActionListener(event -> {
-            places.setText(chosen() == Dependence.of(old) ? Dependence.places(old, document) : chosen().suggestion(document));
+            places.setText(
+                    chosen() == Dependence.of(old) ? Dependence.places(old, document) : chosen().suggestion(document));
             check(dialog, line);
         });
         others.addActionListener(event -> check(dialog, line));
@@ -81,9 +82,10 @@ final class DependencePanel {
         boolean listed = !chosen().question().isEmpty();
         question.setText(listed ? chosen().question() : " ");
         places.setEnabled(listed);
-        others.setEnabled(chosen() == Dependence.ORBITAL || chosen() == Dependence.TOTAL || chosen() == Dependence.SYSTEM);
-        java.util.Optional<Problem> problem =
-                Entry.attempt(() -> shape = chosen().shape(old, places.getText(), others.isSelected() && others.isEnabled(), document));
+        others.setEnabled(
+                chosen() == Dependence.ORBITAL || chosen() == Dependence.TOTAL || chosen() == Dependence.SYSTEM);
+        java.util.Optional<Problem> problem = Entry.attempt(() ->
+                shape = chosen().shape(old, places.getText(), others.isSelected() && others.isEnabled(), document));
         dialog.setValid(problem.isEmpty());
         if (problem.isPresent()) {
             line.setErrorMessage(problem.get().sentence());

@@ -45,7 +45,8 @@ final class ParametersController {
             Parameter parameter = document.parameters().get(row.parameter());
             ExactNumber value = QuantityText.parse(plain, parameter.unit(), units(document));
             if (row.tied()) {
-                return ParameterEdits.withShape(document, row.parameter(), new ParameterShape.Scalar(Setting.fixed(value)));
+                return ParameterEdits.withShape(
+                        document, row.parameter(), new ParameterShape.Scalar(Setting.fixed(value)));
             }
             requireWithin(ParameterEdits.setting(parameter, row.entry()), value);
             return ParameterEdits.withSetting(document, row.parameter(), row.entry(), s -> s.withValue(value));
@@ -63,14 +64,17 @@ final class ParametersController {
     }
 
     Optional<Problem> setUnit(ParametersViewModel.Row row, String text) {
-        return edit("Change the unit of " + row.name(), document -> ParameterEdits.withUnit(document, row.parameter(), text));
+        return edit(
+                "Change the unit of " + row.name(),
+                document -> ParameterEdits.withUnit(document, row.parameter(), text));
     }
 
     Optional<Problem> setStatus(ParametersViewModel.Row row, String status) {
         if (status.equals(ParametersViewModel.TIED)) {
             return row.tied()
                     ? Optional.empty()
-                    : Optional.of(new Problem("a tied parameter needs its formula", "", "type it as the value, as '= 2 * a'"));
+                    : Optional.of(new Problem(
+                            "a tied parameter needs its formula", "", "type it as the value, as '= 2 * a'"));
         }
         boolean free = status.equals(ParametersViewModel.FREE);
         return edit((free ? "Free " : "Fix ") + row.name(), document -> {
@@ -111,7 +115,8 @@ final class ParametersController {
     private static Prior prior(String text, String unit, UnitSystem units) {
         MeasuredText measured = MeasuredText.parse(text);
         if (measured.sigmaPlus() == null || !measured.sigmaPlus().equals(measured.sigmaMinus())) {
-            throw new InvalidModelException("a value known from elsewhere needs one uncertainty", "", "write 0.52(2) or 0.52 ± 0.02");
+            throw new InvalidModelException(
+                    "a value known from elsewhere needs one uncertainty", "", "write 0.52(2) or 0.52 ± 0.02");
         }
         String typed = measured.unit();
         if (typed.isEmpty() || typed.equals(unit)) {
@@ -119,7 +124,8 @@ final class ParametersController {
         }
         double factor = QuantityText.factor(typed, unit, units);
         return new Prior(
-                ExactNumber.of(measured.value().value() * factor), ExactNumber.of(measured.sigmaPlus().value() * factor));
+                ExactNumber.of(measured.value().value() * factor),
+                ExactNumber.of(measured.sigmaPlus().value() * factor));
     }
 
     Optional<Problem> setConvention(ParametersViewModel.Row row, String text) {
@@ -130,13 +136,16 @@ final class ParametersController {
 
     /** Another dependence on where it is used; the first number is taken over. */
     Optional<Problem> setShape(int parameter, ParameterShape shape) {
-        return edit("Change what a parameter depends on", document -> ParameterEdits.withShape(document, parameter, shape));
+        return edit(
+                "Change what a parameter depends on", document -> ParameterEdits.withShape(document, parameter, shape));
     }
 
     /** A new parameter behind the selected one; tells its row. */
     int add(int afterRow) {
         List<ParametersViewModel.Row> rows = rows();
-        int index = afterRow < 0 || afterRow >= rows.size() ? document().parameters().size() : rows.get(afterRow).parameter() + 1;
+        int index = afterRow < 0 || afterRow >= rows.size()
+                ? document().parameters().size()
+                : rows.get(afterRow).parameter() + 1;
         edit("Add a parameter", document -> ParameterEdits.add(document, index));
         return rowOf(index);
     }
@@ -178,7 +187,10 @@ final class ParametersController {
                 "Change " + name,
                 List.of("slide", parameter, entry),
                 project -> project.withDocument(ParameterEdits.withSetting(
-                        project.document(), parameter, entry, setting -> setting.withValue(clamped(rounded, setting)))));
+                        project.document(),
+                        parameter,
+                        entry,
+                        setting -> setting.withValue(clamped(rounded, setting)))));
     }
 
     void endSlide() {
@@ -193,11 +205,18 @@ final class ParametersController {
     }
 
     private static void requireWithin(Setting setting, ExactNumber value) {
-        boolean below = setting.lower() != null && value.value() < setting.lower().value();
-        boolean above = setting.upper() != null && value.value() > setting.upper().value();
+        boolean below =
+                setting.lower() != null && value.value() < setting.lower().value();
+        boolean above =
+                setting.upper() != null && value.value() > setting.upper().value();
         if (below || above) {
             throw new InvalidModelException(
-                    "%s lies %s".formatted(value, below ? "below the lower bound " + setting.lower() : "above the upper bound " + setting.upper()),
+                    "%s lies %s"
+                            .formatted(
+                                    value,
+                                    below
+                                            ? "below the lower bound " + setting.lower()
+                                            : "above the upper bound " + setting.upper()),
                     "",
                     "change the bound first");
         }

@@ -30,9 +30,7 @@ import org.wellwright.solver.model.Setting;
 import org.wellwright.solver.units.UnitSystem;
 
 /** All numbers of the pool in a table, with a slider on the selected one. */
-@TopComponent.Description(
-        preferredID = ParametersTopComponent.ID,
-        persistenceType = TopComponent.PERSISTENCE_ALWAYS)
+@TopComponent.Description(preferredID = ParametersTopComponent.ID, persistenceType = TopComponent.PERSISTENCE_ALWAYS)
 @TopComponent.Registration(mode = "wellwright-tables", openAtStartup = true, position = 100)
 @TopComponent.OpenActionRegistration(displayName = "#CTL_ParametersWindow", preferredID = ParametersTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.editor.parameters.ParametersTopComponent")
@@ -80,7 +78,11 @@ public final class ParametersTopComponent extends SessionWindow {
         down = tools.icon("down", Glyph.DOWN, Bundle.LBL_ParameterDown(), () -> move(1));
         tools.addSeparator();
         dependence = tools.text(
-                "dependence", null, Bundle.LBL_ParameterDependence(), Bundle.HINT_ParameterDependence(), this::dependence);
+                "dependence",
+                null,
+                Bundle.LBL_ParameterDependence(),
+                Bundle.HINT_ParameterDependence(),
+                this::dependence);
         grid.onMenu(Bundle.LBL_ParameterAdd(), "INSERT", this::add);
         grid.onMenu(Bundle.LBL_ParameterRemove(), "DELETE", this::remove);
         grid.getSelectionModel().addListSelectionListener(event -> followSelection());
@@ -99,22 +101,74 @@ public final class ParametersTopComponent extends SessionWindow {
     private List<GridColumn<ParametersViewModel.Row>> columns() {
         return List.of(
                 GridColumn.<ParametersViewModel.Row>typed(
-                                "Name", "Its name in terms and formulas", Kind.TEXT, "potential_depth", ParametersViewModel.Row::name, (row, text) -> controller.rename(row, text))
+                                "Name",
+                                "Its name in terms and formulas",
+                                Kind.TEXT,
+                                "potential_depth",
+                                ParametersViewModel.Row::name,
+                                (row, text) -> controller.rename(row, text))
                         .withProblem(ParametersViewModel.Row::problem),
-                GridColumn.shown("For", "The place that the number belongs to", Kind.TEXT, "l = 1, j = 3/2", ParametersViewModel.Row::place),
-                typed("Value", "A number, a number with a unit, or '= formula' to tie it to others", Kind.NUMBER, "0.12345678901", ParametersViewModel.Row::value, (row, text) -> controller.setValue(row, text)),
-                typed("Unit", "The unit of all its numbers; another one converts them", Kind.TEXT, "cm^-1 angstrom", ParametersViewModel.Row::unit, (row, text) -> controller.setUnit(row, text)),
-                typed("Fit", "Whether a fit may change it", Kind.CHOICE, "fixed ▾", ParametersViewModel.Row::status, (row, text) -> controller.setStatus(row, text))
+                GridColumn.shown(
+                        "For",
+                        "The place that the number belongs to",
+                        Kind.TEXT,
+                        "l = 1, j = 3/2",
+                        ParametersViewModel.Row::place),
+                typed(
+                        "Value",
+                        "A number, a number with a unit, or '= formula' to tie it to others",
+                        Kind.NUMBER,
+                        "0.12345678901",
+                        ParametersViewModel.Row::value,
+                        (row, text) -> controller.setValue(row, text)),
+                typed(
+                        "Unit",
+                        "The unit of all its numbers; another one converts them",
+                        Kind.TEXT,
+                        "cm^-1 angstrom",
+                        ParametersViewModel.Row::unit,
+                        (row, text) -> controller.setUnit(row, text)),
+                typed(
+                                "Fit",
+                                "Whether a fit may change it",
+                                Kind.CHOICE,
+                                "fixed ▾",
+                                ParametersViewModel.Row::status,
+                                (row, text) -> controller.setStatus(row, text))
                         .withChoices(row -> row.tied()
                                 ? List.of(ParametersViewModel.TIED, ParametersViewModel.FREE, ParametersViewModel.FIXED)
                                 : List.of(ParametersViewModel.FREE, ParametersViewModel.FIXED)),
-                typed("Lower", "Lower bound; empty for none", Kind.NUMBER, "0.1234567", ParametersViewModel.Row::lower, (row, text) -> controller.setLower(row, text))
+                typed(
+                                "Lower",
+                                "Lower bound; empty for none",
+                                Kind.NUMBER,
+                                "0.1234567",
+                                ParametersViewModel.Row::lower,
+                                (row, text) -> controller.setLower(row, text))
                         .where(row -> !row.tied()),
-                typed("Upper", "Upper bound; empty for none", Kind.NUMBER, "0.1234567", ParametersViewModel.Row::upper, (row, text) -> controller.setUpper(row, text))
+                typed(
+                                "Upper",
+                                "Upper bound; empty for none",
+                                Kind.NUMBER,
+                                "0.1234567",
+                                ParametersViewModel.Row::upper,
+                                (row, text) -> controller.setUpper(row, text))
                         .where(row -> !row.tied()),
-                typed("Known", "What is known of it from elsewhere, as 0.52(2); counts as one datum of a fit", Kind.NUMBER, "0.1234567(89)", ParametersViewModel.Row::prior, (row, text) -> controller.setPrior(row, text))
+                typed(
+                                "Known",
+                                "What is known of it from elsewhere, as 0.52(2); counts as one datum of a fit",
+                                Kind.NUMBER,
+                                "0.1234567(89)",
+                                ParametersViewModel.Row::prior,
+                                (row, text) -> controller.setPrior(row, text))
                         .where(row -> !row.tied()),
-                typed("Meaning", "What exactly the number is where there is a choice", Kind.TEXT, "a, not 4 alpha_s/3 or the like", ParametersViewModel.Row::convention, (row, text) -> controller.setConvention(row, text)));
+                typed(
+                        "Meaning",
+                        "What exactly the number is where there is a choice",
+                        Kind.TEXT,
+                        "a, not 4 alpha_s/3 or the like",
+                        ParametersViewModel.Row::convention,
+                        (row, text) -> controller.setConvention(row, text)));
     }
 
     private static GridColumn<ParametersViewModel.Row> typed(

@@ -77,7 +77,19 @@ record ParametersViewModel(List<Row> rows, String summary) {
     private static void rows(Parameter parameter, int index, String problem, List<Row> into) {
         if (parameter.shape() instanceof ParameterShape.Tied tied) {
             into.add(new Row(
-                    index, 0, false, parameter.name(), "", "= " + tied.formula(), parameter.unit(), TIED, "", "", "", parameter.convention(), problem));
+                    index,
+                    0,
+                    false,
+                    parameter.name(),
+                    "",
+                    "= " + tied.formula(),
+                    parameter.unit(),
+                    TIED,
+                    "",
+                    "",
+                    "",
+                    parameter.convention(),
+                    problem));
             return;
         }
         List<String> places = places(parameter.shape());
@@ -98,7 +110,10 @@ record ParametersViewModel(List<Row> rows, String summary) {
                     setting.prior() == null
                             ? ""
                             : MeasuredText.format(
-                                    setting.prior().value(), setting.prior().sigma(), setting.prior().sigma(), Datum.Limit.NONE),
+                                    setting.prior().value(),
+                                    setting.prior().sigma(),
+                                    setting.prior().sigma(),
+                                    Datum.Limit.NONE),
                     parameter.convention(),
                     problem));
         }
@@ -111,7 +126,9 @@ record ParametersViewModel(List<Row> rows, String summary) {
             by.entries().forEach(entry -> places.add("l = " + entry.orbital()));
             others = by.others();
         } else if (shape instanceof ParameterShape.ByTotal by) {
-            by.entries().forEach(entry -> places.add("l = %d, j = %s".formatted(entry.orbital(), half(entry.twiceTotal()))));
+            by.entries()
+                    .forEach(
+                            entry -> places.add("l = %d, j = %s".formatted(entry.orbital(), half(entry.twiceTotal()))));
             others = by.others();
         } else if (shape instanceof ParameterShape.BySystem by) {
             by.entries().forEach(entry -> places.add(entry.system()));

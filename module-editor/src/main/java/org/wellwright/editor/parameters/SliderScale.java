@@ -16,11 +16,15 @@ record SliderScale(double low, double high) {
 
     SliderScale {
         if (!(low < high) || Double.isInfinite(high - low)) {
-            throw new IllegalArgumentException("a slider needs a left end below its right end, got %s, %s".formatted(low, high));
+            throw new IllegalArgumentException(
+                    "a slider needs a left end below its right end, got %s, %s".formatted(low, high));
         }
     }
 
-    /** Between the bounds where there are any; where there are none, half the value to either side, or one where it is 0. */
+    /**
+     * Between the bounds where there are any; where there are none, half the value to either side, or one where it is
+     * 0.
+     */
     static SliderScale around(Setting setting) {
         double value = setting.value().value();
         double reach = value == 0 ? 1 : Math.abs(value) / 2;
@@ -48,9 +52,12 @@ record SliderScale(double low, double high) {
     /** A value with no more digits than the step is worth. */
     static ExactNumber rounded(double value, double step) {
         int decimals = (int) Math.ceil(-Math.log10(step)) + 1;
-        BigDecimal decimal = new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN).stripTrailingZeros();
-        return new ExactNumber(decimal.scale() < 0 && decimal.precision() - decimal.scale() <= 15 || decimal.scale() >= 0 && decimal.scale() < 12
-                ? decimal.toPlainString()
-                : decimal.toString());
+        BigDecimal decimal =
+                new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN).stripTrailingZeros();
+        return new ExactNumber(
+                decimal.scale() < 0 && decimal.precision() - decimal.scale() <= 15
+                                || decimal.scale() >= 0 && decimal.scale() < 12
+                        ? decimal.toPlainString()
+                        : decimal.toString());
     }
 }

@@ -96,7 +96,8 @@ final class ValueSlider extends JPanel {
         slider.setVisible(true);
         String name = row.place().isEmpty() ? row.name() : row.name() + " (" + row.place() + ")";
         title.setText(name + " = " + setting.value() + (row.unit().isEmpty() ? "" : " " + row.unit()));
-        title.setPreferredSize(new Dimension(Math.max(170, title.getMinimumSize().width), title.getMinimumSize().height));
+        title.setPreferredSize(
+                new Dimension(Math.max(170, title.getMinimumSize().width), title.getMinimumSize().height));
         slider.getAccessibleContext().setAccessibleName(Bundle.ACSN_Slider(name));
         double value = setting.value().value();
         SliderScale scale = scale();

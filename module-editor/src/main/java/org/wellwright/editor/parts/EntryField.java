@@ -10,8 +10,9 @@ import javax.swing.KeyStroke;
 import org.wellwright.solver.Problem;
 
 /**
- * A text field that takes up its text when Enter is pressed or it is left. A text that cannot be used stays, marked, with the reason in its line; Escape
- * brings the last good one back, and so does Ctrl+Z while the text is not taken up yet.
+ * A text field that takes up its text when Enter is pressed or it is left. A text that cannot be used stays, marked,
+ * with the reason in its line; Escape brings the last good one back, and so does Ctrl+Z while the text is not taken up
+ * yet.
  */
 public final class EntryField extends JTextField {
     private static final long serialVersionUID = 1L;

@@ -25,7 +25,10 @@ import org.wellwright.solver.potential.FormulaText;
 import org.wellwright.solver.potential.FormulaToken;
 import org.wellwright.solver.potential.FormulaWord;
 
-/** A field for a formula: coloured as it is typed, the first fault underlined and told with its column, names offered with Ctrl+Space. */
+/**
+ * A field for a formula: coloured as it is typed, the first fault underlined and told with its column, names offered
+ * with Ctrl+Space.
+ */
 public final class FormulaPane extends JTextPane {
     private static final long serialVersionUID = 1L;
 
@@ -43,7 +46,8 @@ public final class FormulaPane extends JTextPane {
      * @param typed called with the text after every change by the user
      * @param left called when the field is left
      */
-    public FormulaPane(String name, ProblemLine line, Supplier<List<String>> parameters, Consumer<String> typed, Runnable left) {
+    public FormulaPane(
+            String name, ProblemLine line, Supplier<List<String>> parameters, Consumer<String> typed, Runnable left) {
         this.line = line;
         this.parameters = parameters;
         this.typed = typed;
@@ -109,14 +113,17 @@ public final class FormulaPane extends JTextPane {
         String text = text();
         StyledDocument document = getStyledDocument();
         filling = true;
-        document.setCharacterAttributes(0, text.length() + 1, style(UIManager.getColor("TextPane.foreground"), false), true);
+        document.setCharacterAttributes(
+                0, text.length() + 1, style(UIManager.getColor("TextPane.foreground"), false), true);
         for (FormulaToken token : FormulaText.tokens(text)) {
-            document.setCharacterAttributes(token.start(), token.end() - token.start(), style(colour(token.kind()), false), true);
+            document.setCharacterAttributes(
+                    token.start(), token.end() - token.start(), style(colour(token.kind()), false), true);
         }
         Optional<FormulaFault> fault = FormulaText.fault(text);
         fault.ifPresent(found -> {
             int start = Math.min(found.start(), Math.max(0, text.length() - 1));
-            document.setCharacterAttributes(start, Math.max(1, found.end() - start), style(Tones.problem(), true), true);
+            document.setCharacterAttributes(
+                    start, Math.max(1, found.end() - start), style(Tones.problem(), true), true);
         });
         filling = false;
         line.say(fault.map(FormulaFault::problem));

@@ -31,8 +31,8 @@ import javax.swing.text.DefaultEditorKit;
 import org.wellwright.solver.Problem;
 
 /**
- * A table of rows whose cells check what is typed into them: what cannot be used stays in the cell, marked, with the reason in the problem line.
- * Whole rows are selected, copied to a spreadsheet and pasted from one.
+ * A table of rows whose cells check what is typed into them: what cannot be used stays in the cell, marked, with the
+ * reason in the problem line. Whole rows are selected, copied to a spreadsheet and pasted from one.
  *
  * @param <R> a row as it is shown
  */
@@ -73,8 +73,10 @@ public final class Grid<R> extends JTable {
         setTransferHandler(new Rows());
         getActionMap().put(DefaultEditorKit.copyAction, ToolStrip.action("Copy", () -> copy(false)));
         getActionMap().put(DefaultEditorKit.pasteAction, ToolStrip.action("Paste", this::pasteFromClipboard));
-        getInputMap(WHEN_ANCESTOR_OF_FOCUSED_COMPONENT).put(KeyStroke.getKeyStroke("ctrl C"), DefaultEditorKit.copyAction);
-        getInputMap(WHEN_ANCESTOR_OF_FOCUSED_COMPONENT).put(KeyStroke.getKeyStroke("ctrl V"), DefaultEditorKit.pasteAction);
+        getInputMap(WHEN_ANCESTOR_OF_FOCUSED_COMPONENT)
+                .put(KeyStroke.getKeyStroke("ctrl C"), DefaultEditorKit.copyAction);
+        getInputMap(WHEN_ANCESTOR_OF_FOCUSED_COMPONENT)
+                .put(KeyStroke.getKeyStroke("ctrl V"), DefaultEditorKit.pasteAction);
         menu.add(ToolStrip.action("Copy", () -> copy(false))).setName(name + ".copy");
         menu.add(ToolStrip.action("Copy with headings", () -> copy(true))).setName(name + ".copyWithHeadings");
         addMouseListener(new MouseAdapter() {
@@ -135,7 +137,10 @@ public final class Grid<R> extends JTable {
 
     /** The selected rows' indices, ascending. */
     public List<Integer> selection() {
-        return IntStream.of(getSelectedRows()).filter(row -> row < rows.size()).boxed().toList();
+        return IntStream.of(getSelectedRows())
+                .filter(row -> row < rows.size())
+                .boxed()
+                .toList();
     }
 
     /** Selects one row and brings it into sight. */
@@ -156,7 +161,8 @@ public final class Grid<R> extends JTable {
 
     /** The selected rows, or all if none is, as text with tabs. */
     public String text(boolean headings) {
-        List<Integer> wanted = selection().isEmpty() ? IntStream.range(0, rows.size()).boxed().toList() : selection();
+        List<Integer> wanted =
+                selection().isEmpty() ? IntStream.range(0, rows.size()).boxed().toList() : selection();
         List<String> lines = new ArrayList<>();
         if (headings) {
             lines.add(columns.stream().map(GridColumn::title).collect(Collectors.joining("\t")));

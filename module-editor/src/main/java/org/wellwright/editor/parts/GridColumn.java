@@ -18,7 +18,8 @@ import org.wellwright.solver.Problem;
  * @param problem what is wrong with a row's cell; empty if nothing
  * @param editable whether a row's cell can be changed
  * @param take takes up what was typed into a row's cell; null for a column that is only shown
- * @param choices the texts to choose from in a {@link Kind#CHOICE}; offered and not binding in an {@link Kind#OPEN_CHOICE}
+ * @param choices the texts to choose from in a {@link Kind#CHOICE}; offered and not binding in an
+ *     {@link Kind#OPEN_CHOICE}
  */
 public record GridColumn<R>(
         String title,
@@ -46,7 +47,8 @@ public record GridColumn<R>(
     }
 
     /** A column that is only shown. */
-    public static <R> GridColumn<R> shown(String title, String hint, Kind kind, String sample, Function<R, String> text) {
+    public static <R> GridColumn<R> shown(
+            String title, String hint, Kind kind, String sample, Function<R, String> text) {
         return new GridColumn<>(title, hint, kind, sample, text, row -> "", row -> false, null, row -> List.of());
     }
 

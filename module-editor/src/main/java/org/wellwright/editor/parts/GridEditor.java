@@ -51,7 +51,8 @@ abstract class GridEditor extends AbstractCellEditor implements TableCellEditor 
     }
 
     @Override
-    public Component getTableCellEditorComponent(JTable table, Object value, boolean selected, int atRow, int atColumn) {
+    public Component getTableCellEditorComponent(
+            JTable table, Object value, boolean selected, int atRow, int atColumn) {
         row = atRow;
         column = atColumn;
         mark(false);
@@ -89,7 +90,9 @@ abstract class GridEditor extends AbstractCellEditor implements TableCellEditor 
             @Override
             public void focusLost(FocusEvent event) {
                 boolean inside = event.getOppositeComponent() != null
-                        && SwingUtilities.isDescendingFrom(event.getOppositeComponent(), component.getParent() == grid ? component : component.getParent());
+                        && SwingUtilities.isDescendingFrom(
+                                event.getOppositeComponent(),
+                                component.getParent() == grid ? component : component.getParent());
                 if (!event.isTemporary() && !inside && grid.getCellEditor() == GridEditor.this) {
                     stopCellEditing();
                 }

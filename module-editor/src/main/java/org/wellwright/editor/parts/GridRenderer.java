@@ -21,7 +21,8 @@ final class GridRenderer<R> extends DefaultTableCellRenderer {
     GridRenderer(GridColumn<R> column, Grid<R> grid) {
         this.column = column;
         this.grid = grid;
-        setHorizontalAlignment(column.kind() == GridColumn.Kind.NUMBER ? SwingConstants.TRAILING : SwingConstants.LEADING);
+        setHorizontalAlignment(
+                column.kind() == GridColumn.Kind.NUMBER ? SwingConstants.TRAILING : SwingConstants.LEADING);
         box.setHorizontalAlignment(SwingConstants.CENTER);
         box.setOpaque(true);
     }

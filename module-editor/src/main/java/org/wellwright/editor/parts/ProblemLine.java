@@ -37,6 +37,7 @@ public final class ProblemLine extends JLabel {
     @Override
     public void updateUI() {
         super.updateUI();
-        setForeground(hint != null && !getText().equals(hint) && getToolTipText() != null ? Tones.problem() : Tones.faint());
+        setForeground(
+                hint != null && !getText().equals(hint) && getToolTipText() != null ? Tones.problem() : Tones.faint());
     }
 }

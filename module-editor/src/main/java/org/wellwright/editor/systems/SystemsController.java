@@ -51,9 +51,7 @@ final class SystemsController {
         if (to < 0 || to >= document().systems().size()) {
             return index;
         }
-        edit(
-                "Move a pair system",
-                document -> document.withSystems(Lists.moved(document.systems(), index, to)));
+        edit("Move a pair system", document -> document.withSystems(Lists.moved(document.systems(), index, to)));
         return to;
     }
 
@@ -76,7 +74,9 @@ final class SystemsController {
                     body = ParticleCatalogue.STANDARD.body(listed.particle());
                 }
                 PairSystem next = first ? system.withFirst(body) : system.withSecond(body);
-                return mass instanceof BodyMass.FromParameter ? next.withMassConvention(MassConvention.MODEL_PARAMETER) : next;
+                return mass instanceof BodyMass.FromParameter
+                        ? next.withMassConvention(MassConvention.MODEL_PARAMETER)
+                        : next;
             });
         });
     }
@@ -86,8 +86,12 @@ final class SystemsController {
     }
 
     Optional<Problem> setCharge(int index, boolean first, String text) {
-        return body(index, first, "a charge", (body, document) ->
-                body.withCharge(QuantityText.parse(text.replaceFirst("\\s*e\\s*$", ""), "", UnitSystem.ATOMIC)));
+        return body(
+                index,
+                first,
+                "a charge",
+                (body, document) -> body.withCharge(
+                        QuantityText.parse(text.replaceFirst("\\s*e\\s*$", ""), "", UnitSystem.ATOMIC)));
     }
 
     /** A spin as 1/2, 1, ...; nothing where it plays no role. */
@@ -95,11 +99,16 @@ final class SystemsController {
         return body(index, first, "a spin", (body, document) -> {
             String plain = text.strip();
             if (!plain.matches("(\\d{1,3}(/2)?)?")) {
-                throw new InvalidModelException("'%s' is not a spin".formatted(plain), "", "write 0, 1/2, 1, ... or nothing where it plays no role");
+                throw new InvalidModelException(
+                        "'%s' is not a spin".formatted(plain),
+                        "",
+                        "write 0, 1/2, 1, ... or nothing where it plays no role");
             }
             int twice = plain.isEmpty()
                     ? -1
-                    : plain.endsWith("/2") ? Integer.parseInt(plain.substring(0, plain.length() - 2)) : 2 * Integer.parseInt(plain);
+                    : plain.endsWith("/2")
+                            ? Integer.parseInt(plain.substring(0, plain.length() - 2))
+                            : 2 * Integer.parseInt(plain);
             return body.withTwiceSpin(twice);
         });
     }
@@ -128,7 +137,8 @@ final class SystemsController {
             }
             if (plain.endsWith("%")) {
                 ExactNumber percent = QuantityText.parse(plain.substring(0, plain.length() - 1), "", UnitSystem.ATOMIC);
-                return system.withAbundance(new ExactNumber(percent.decimal().movePointLeft(2).toString()));
+                return system.withAbundance(
+                        new ExactNumber(percent.decimal().movePointLeft(2).toString()));
             }
             return system.withAbundance(QuantityText.parse(plain, "", UnitSystem.ATOMIC));
         });

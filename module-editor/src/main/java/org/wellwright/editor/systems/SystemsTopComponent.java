@@ -28,8 +28,8 @@ import org.wellwright.editor.parts.EntryField;
 import org.wellwright.editor.parts.Form;
 import org.wellwright.editor.parts.Glyph;
 import org.wellwright.editor.parts.ProblemLine;
-import org.wellwright.editor.parts.ToolStrip;
 import org.wellwright.editor.parts.Tones;
+import org.wellwright.editor.parts.ToolStrip;
 import org.wellwright.project.ProjectSession;
 import org.wellwright.project.window.session.SessionWindow;
 import org.wellwright.solver.Problem;
@@ -80,7 +80,11 @@ public final class SystemsTopComponent extends SessionWindow {
     static final String ID = "SystemsTopComponent";
     private static final long serialVersionUID = 1L;
     private static final String[] CONVENTIONS = {
-        "those of neutral atoms", "those of bare nuclei", "those of ions of the charge above", "effective masses", "parameters of the model"
+        "those of neutral atoms",
+        "those of bare nuclei",
+        "those of ions of the charge above",
+        "effective masses",
+        "parameters of the model"
     };
     private static final String[] EXCHANGES = {
         "differ", "are identical bosons", "are identical fermions", "are a particle and its antiparticle"
@@ -114,7 +118,8 @@ public final class SystemsTopComponent extends SessionWindow {
         setToolTipText(Bundle.HINT_SystemsWindow());
         ToolStrip tools = new ToolStrip("systems");
         tools.icon("add", Glyph.ADD, Bundle.LBL_SystemAdd(), () -> go(controller.add()));
-        duplicate = tools.icon("duplicate", Glyph.DUPLICATE, Bundle.LBL_SystemDuplicate(), () -> go(controller.duplicate(index())));
+        duplicate = tools.icon(
+                "duplicate", Glyph.DUPLICATE, Bundle.LBL_SystemDuplicate(), () -> go(controller.duplicate(index())));
         remove = tools.icon("remove", Glyph.REMOVE, Bundle.LBL_SystemRemove(), this::remove);
         up = tools.icon("up", Glyph.UP, Bundle.LBL_SystemUp(), () -> go(controller.move(index(), -1)));
         down = tools.icon("down", Glyph.DOWN, Bundle.LBL_SystemDown(), () -> go(controller.move(index(), 1)));
@@ -127,19 +132,34 @@ public final class SystemsTopComponent extends SessionWindow {
                 showForm();
             }
         });
-        id = field("systems.id", Bundle.LBL_SystemId(), Bundle.HINT_SystemId(), text -> controller.rename(index(), text));
+        id = field(
+                "systems.id", Bundle.LBL_SystemId(), Bundle.HINT_SystemId(), text -> controller.rename(index(), text));
         title = field("systems.title", Bundle.LBL_SystemTitle(), null, text -> controller.setTitle(index(), text));
         form.heading(Bundle.HEAD_FirstBody());
         first = new BodyFields(true);
         form.heading(Bundle.HEAD_SecondBody());
         second = new BodyFields(false);
         form.heading(Bundle.HEAD_Pair());
-        choice("systems.convention", Bundle.LBL_Convention(), convention, () ->
-                controller.setConvention(index(), MassConvention.values()[convention.getSelectedIndex()]));
-        choice("systems.exchange", Bundle.LBL_Exchange(), exchange, () ->
-                controller.setExchange(index(), ExchangeSymmetry.values()[exchange.getSelectedIndex()]));
-        permittivity = field("systems.permittivity", Bundle.LBL_Permittivity(), Bundle.HINT_Permittivity(), text -> controller.setPermittivity(index(), text));
-        abundance = field("systems.abundance", Bundle.LBL_Abundance(), Bundle.HINT_Abundance(), text -> controller.setAbundance(index(), text));
+        choice(
+                "systems.convention",
+                Bundle.LBL_Convention(),
+                convention,
+                () -> controller.setConvention(index(), MassConvention.values()[convention.getSelectedIndex()]));
+        choice(
+                "systems.exchange",
+                Bundle.LBL_Exchange(),
+                exchange,
+                () -> controller.setExchange(index(), ExchangeSymmetry.values()[exchange.getSelectedIndex()]));
+        permittivity = field(
+                "systems.permittivity",
+                Bundle.LBL_Permittivity(),
+                Bundle.HINT_Permittivity(),
+                text -> controller.setPermittivity(index(), text));
+        abundance = field(
+                "systems.abundance",
+                Bundle.LBL_Abundance(),
+                Bundle.HINT_Abundance(),
+                text -> controller.setAbundance(index(), text));
         derived.setName("systems.derived");
         form.wide(derived);
         form.end();
@@ -171,21 +191,28 @@ public final class SystemsTopComponent extends SessionWindow {
             mass.setName(prefix + "mass");
             mass.setToolTipText(Bundle.HINT_Mass());
             ((JComponent) mass.getEditor().getEditorComponent()).setName(prefix + "mass.text");
-            List<String> particles =
-                    ParticleCatalogue.STANDARD.particles().stream().map(particle -> particle.id()).toList();
+            List<String> particles = ParticleCatalogue.STANDARD.particles().stream()
+                    .map(particle -> particle.id())
+                    .toList();
             particles.forEach(mass::addItem);
             mass.addActionListener(event -> {
                 if (!filling && index() >= 0) {
-                    Optional<Problem> problem =
-                            controller.setMass(index(), one, String.valueOf(mass.getEditor().getItem()));
+                    Optional<Problem> problem = controller.setMass(
+                            index(), one, String.valueOf(mass.getEditor().getItem()));
                     mass.putClientProperty("JComponent.outline", problem.isPresent() ? "error" : null);
                     line.say(problem);
                 }
             });
             form.field(Bundle.LBL_Mass(), mass);
-            label = field(prefix + "label", Bundle.LBL_BodyName(), null, text -> controller.setLabel(index(), one, text));
-            charge = field(prefix + "charge", Bundle.LBL_Charge(), null, text -> controller.setCharge(index(), one, text));
-            spin = field(prefix + "spin", Bundle.LBL_Spin(), Bundle.HINT_Spin(), text -> controller.setSpin(index(), one, text));
+            label = field(
+                    prefix + "label", Bundle.LBL_BodyName(), null, text -> controller.setLabel(index(), one, text));
+            charge = field(
+                    prefix + "charge", Bundle.LBL_Charge(), null, text -> controller.setCharge(index(), one, text));
+            spin = field(
+                    prefix + "spin",
+                    Bundle.LBL_Spin(),
+                    Bundle.HINT_Spin(),
+                    text -> controller.setSpin(index(), one, text));
         }
 
         void show(Body body) {
@@ -206,8 +233,7 @@ public final class SystemsTopComponent extends SessionWindow {
         return field;
     }
 
-    private void choice(
-            String name, String label, JComboBox<String> box, Supplier<Optional<Problem>> set) {
+    private void choice(String name, String label, JComboBox<String> box, Supplier<Optional<Problem>> set) {
         box.setName(name);
         box.addActionListener(event -> {
             if (!filling) {

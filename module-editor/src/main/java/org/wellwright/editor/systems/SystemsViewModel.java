@@ -60,7 +60,12 @@ record SystemsViewModel(List<Row> systems) {
             double mass = pool.reducedMass(system.id(), pool.typedValues()).value();
             double kinetic = pool.kinetic(system.id(), pool.typedValues()).value();
             return "reduced mass %.10g %s, ħ²/2μ = %.10g %s %s²"
-                    .formatted(mass, units.mass().printed(), kinetic, units.energy().printed(), units.length().printed());
+                    .formatted(
+                            mass,
+                            units.mass().printed(),
+                            kinetic,
+                            units.energy().printed(),
+                            units.length().printed());
         } catch (InvalidModelException e) {
             return "no reduced mass: " + e.problem().sentence();
         }
@@ -68,10 +73,12 @@ record SystemsViewModel(List<Row> systems) {
 
     /** What the table says of a body, for a hint; empty for one that is not from the table. */
     static String origin(Body body) {
-        if (!(body.mass() instanceof BodyMass.Catalogued listed) || !ParticleCatalogue.STANDARD.contains(listed.particle())) {
+        if (!(body.mass() instanceof BodyMass.Catalogued listed)
+                || !ParticleCatalogue.STANDARD.contains(listed.particle())) {
             return "";
         }
         var particle = ParticleCatalogue.STANDARD.find(listed.particle());
-        return "%s: %s(%s) %s; %s".formatted(particle.title(), particle.mass(), particle.sigma(), particle.unit(), particle.source());
+        return "%s: %s(%s) %s; %s"
+                .formatted(particle.title(), particle.mass(), particle.sigma(), particle.unit(), particle.source());
     }
 }

@@ -19,12 +19,14 @@ import org.openide.windows.ExternalDropHandler;
 public final class DroppedFiles extends ExternalDropHandler {
     @Override
     public boolean canDrop(DropTargetDragEvent event) {
-        return event.isDataFlavorSupported(DataFlavor.javaFileListFlavor) || event.isDataFlavorSupported(DataFlavor.stringFlavor);
+        return event.isDataFlavorSupported(DataFlavor.javaFileListFlavor)
+                || event.isDataFlavorSupported(DataFlavor.stringFlavor);
     }
 
     @Override
     public boolean canDrop(DropTargetDropEvent event) {
-        return event.isDataFlavorSupported(DataFlavor.javaFileListFlavor) || event.isDataFlavorSupported(DataFlavor.stringFlavor);
+        return event.isDataFlavorSupported(DataFlavor.javaFileListFlavor)
+                || event.isDataFlavorSupported(DataFlavor.stringFlavor);
     }
 
     @Override
@@ -43,7 +45,9 @@ public final class DroppedFiles extends ExternalDropHandler {
                     files.add(((File) file).toPath());
                 }
             } else if (content.isDataFlavorSupported(DataFlavor.stringFlavor)) {
-                for (String line : content.getTransferData(DataFlavor.stringFlavor).toString().split("\\R")) {
+                for (String line : content.getTransferData(DataFlavor.stringFlavor)
+                        .toString()
+                        .split("\\R")) {
                     if (line.startsWith("file:")) {
                         files.add(Path.of(URI.create(line.strip())));
                     }

@@ -23,7 +23,11 @@ public final class NamedFiles implements ArgsProcessor {
     public void process(Env env) throws CommandException {
         List<Path> paths = new ArrayList<>();
         for (String file : files) {
-            paths.add(env.getCurrentDirectory().toPath().resolve(file).toAbsolutePath().normalize());
+            paths.add(env.getCurrentDirectory()
+                    .toPath()
+                    .resolve(file)
+                    .toAbsolutePath()
+                    .normalize());
         }
         WindowManager.getDefault().invokeWhenUIReady(() -> StartUp.openNamed(paths));
     }

@@ -44,9 +44,11 @@ final class NewProject {
     /** Asks; empty if the user thinks better of it. */
     static Optional<Project> ask() {
         JTextField title = new JTextField(24);
-        JComboBox<String> units = new JComboBox<>(UnitSystem.ALL.stream().map(UnitSystem::title).toArray(String[]::new));
-        List<String> particles =
-                ParticleCatalogue.STANDARD.particles().stream().map(particle -> particle.id()).toList();
+        JComboBox<String> units =
+                new JComboBox<>(UnitSystem.ALL.stream().map(UnitSystem::title).toArray(String[]::new));
+        List<String> particles = ParticleCatalogue.STANDARD.particles().stream()
+                .map(particle -> particle.id())
+                .toList();
         JComboBox<String> first = bodies(particles, "e-");
         JComboBox<String> second = bodies(particles, "p");
         JComboBox<String> labels = new JComboBox<>(LABELS);
@@ -126,7 +128,23 @@ final class NewProject {
         label.setLabelFor(field);
         field.getAccessibleContext().setAccessibleName(text);
         Insets insets = new Insets(3, 0, 3, 10);
-        panel.add(label, new GridBagConstraints(0, row, 1, 1, 0, 0, GridBagConstraints.LINE_START, GridBagConstraints.NONE, insets, 0, 0));
-        panel.add(field, new GridBagConstraints(1, row, 1, 1, 1, 0, GridBagConstraints.LINE_START, GridBagConstraints.HORIZONTAL, new Insets(3, 0, 3, 0), 0, 0));
+        panel.add(
+                label,
+                new GridBagConstraints(
+                        0, row, 1, 1, 0, 0, GridBagConstraints.LINE_START, GridBagConstraints.NONE, insets, 0, 0));
+        panel.add(
+                field,
+                new GridBagConstraints(
+                        1,
+                        row,
+                        1,
+                        1,
+                        1,
+                        0,
+                        GridBagConstraints.LINE_START,
+                        GridBagConstraints.HORIZONTAL,
+                        new Insets(3, 0, 3, 0),
+                        0,
+                        0));
     }
 }

@@ -38,8 +38,8 @@ import org.wellwright.project.file.ProjectLock;
 import org.wellwright.solver.WellwrightException;
 
 /**
- * What the File menu does: opens, saves and closes projects, asks before anything is lost, holds the locks of the files that are open. Event thread
- * only; files are read and written on a thread of its own.
+ * What the File menu does: opens, saves and closes projects, asks before anything is lost, holds the locks of the files
+ * that are open. Event thread only; files are read and written on a thread of its own.
  */
 @Messages({
     "# {0} - file",
@@ -155,8 +155,7 @@ final class ProjectDesk {
     static FileChooserBuilder chooser() {
         return new FileChooserBuilder(ProjectDesk.class)
                 .setFilesOnly(true)
-                .setFileFilter(new FileNameExtensionFilter(
-                        Bundle.LBL_ProjectFiles(), ProjectFile.ENDING.substring(1)));
+                .setFileFilter(new FileNameExtensionFilter(Bundle.LBL_ProjectFiles(), ProjectFile.ENDING.substring(1)));
     }
 
     /** What a crash left, without what this run has kept itself. */
@@ -285,8 +284,8 @@ final class ProjectDesk {
         Ask.Answer overwrite = new Ask.Answer("overwrite", Bundle.BTN_Overwrite());
         Ask.Answer again = new Ask.Answer("again", Bundle.BTN_ReadAgain());
         Ask.Answer cancel = new Ask.Answer("cancel", Bundle.BTN_Cancel());
-        Ask.Answer answer =
-                Ask.one(Bundle.TTL_Outside(), Bundle.MSG_OutsideSave(file), List.of(), elsewhere, overwrite, again, cancel);
+        Ask.Answer answer = Ask.one(
+                Bundle.TTL_Outside(), Bundle.MSG_OutsideSave(file), List.of(), elsewhere, overwrite, again, cancel);
         if (answer == elsewhere) {
             askAndSave(session, then);
         } else if (answer == overwrite) {
@@ -323,7 +322,8 @@ final class ProjectDesk {
         if (Files.exists(wanted) && !own) {
             Ask.Answer overwrite = new Ask.Answer("overwrite", Bundle.BTN_Overwrite());
             Ask.Answer cancel = new Ask.Answer("cancel", Bundle.BTN_Cancel());
-            if (Ask.one(Bundle.TTL_Exists(), Bundle.MSG_Exists(wanted.getFileName()), List.of(), cancel, overwrite) != overwrite) {
+            if (Ask.one(Bundle.TTL_Exists(), Bundle.MSG_Exists(wanted.getFileName()), List.of(), cancel, overwrite)
+                    != overwrite) {
                 then.accept(false);
                 return;
             }
@@ -422,8 +422,11 @@ final class ProjectDesk {
         Ask.Answer discard = new Ask.Answer("discard", Bundle.BTN_Discard());
         Ask.Answer cancel = new Ask.Answer("cancel", Bundle.BTN_Cancel());
         boolean one = unsaved.size() == 1;
-        String question = one ? Bundle.MSG_UnsavedOne(unsaved.get(0).displayName()) : Bundle.MSG_UnsavedMany(unsaved.size());
-        List<String> names = one ? List.of() : unsaved.stream().map(ProjectSession::displayName).toList();
+        String question =
+                one ? Bundle.MSG_UnsavedOne(unsaved.get(0).displayName()) : Bundle.MSG_UnsavedMany(unsaved.size());
+        List<String> names = one
+                ? List.of()
+                : unsaved.stream().map(ProjectSession::displayName).toList();
         Ask.Answer answer = Ask.one(Bundle.TTL_Unsaved(), question, names, save, discard, cancel);
         if (answer == save) {
             saveAll(then);
@@ -485,7 +488,8 @@ final class ProjectDesk {
 
     /** Takes up what is still being typed, as the Enter key would. */
     static void commitTyping() {
-        Component focused = KeyboardFocusManager.getCurrentKeyboardFocusManager().getFocusOwner();
+        Component focused =
+                KeyboardFocusManager.getCurrentKeyboardFocusManager().getFocusOwner();
         if (focused == null) {
             return;
         }
@@ -498,7 +502,8 @@ final class ProjectDesk {
     }
 
     private static void collectViews(ProjectSession session) {
-        Map<String, Map<String, String>> views = new LinkedHashMap<>(session.project().views());
+        Map<String, Map<String, String>> views =
+                new LinkedHashMap<>(session.project().views());
         for (ViewStateProvider provider : Lookup.getDefault().lookupAll(ViewStateProvider.class)) {
             Map<String, String> state = provider.state(session);
             if (state.isEmpty()) {

@@ -17,10 +17,10 @@ import javax.swing.ListSelectionModel;
 import javax.swing.SwingUtilities;
 import org.openide.awt.ActionID;
 import org.openide.awt.ActionReference;
+import org.openide.awt.UndoRedo;
 import org.openide.util.NbBundle.Messages;
 import org.openide.util.lookup.Lookups;
 import org.openide.util.lookup.ProxyLookup;
-import org.openide.awt.UndoRedo;
 import org.openide.windows.TopComponent;
 import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
@@ -160,12 +160,14 @@ public final class ProjectsTopComponent extends TopComponent {
             ProjectSession session = (ProjectSession) value;
             ModelDocument document = session.project().document();
             String mark = session.modified() ? " *" : "";
-            String place = session.file().map(file -> file.getFileName().toString()).orElse(Bundle.TXT_NotSaved());
+            String place =
+                    session.file().map(file -> file.getFileName().toString()).orElse(Bundle.TXT_NotSaved());
             if (ProjectDesk.get().inUseElsewhere(session)) {
                 place += " — " + Bundle.TXT_InUse();
             }
             String counts = Bundle.TXT_ProjectCounts(
-                    counted(document.models().size(), "model"), counted(document.data().size(), "value"));
+                    counted(document.models().size(), "model"),
+                    counted(document.data().size(), "value"));
             String text = "<html><b>%s%s</b><br><span style='font-size:90%%'>%s<br>%s</span>"
                     .formatted(Ask.html(session.displayName()), mark, Ask.html(place), counts);
             super.getListCellRendererComponent(list, text, index, selected, focused);

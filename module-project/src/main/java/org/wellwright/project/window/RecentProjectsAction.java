@@ -19,11 +19,7 @@ import org.openide.util.actions.Presenter;
 @ActionID(category = "File", id = "org.wellwright.project.window.RecentProjectsAction")
 @ActionRegistration(displayName = "#CTL_RecentProjects", lazy = false)
 @ActionReference(path = "Menu/File", position = 120)
-@Messages({
-    "CTL_RecentProjects=Open &Recent",
-    "CTL_NoRecent=No recent projects",
-    "CTL_ForgetRecent=Clear this list"
-})
+@Messages({"CTL_RecentProjects=Open &Recent", "CTL_NoRecent=No recent projects", "CTL_ForgetRecent=Clear this list"})
 public final class RecentProjectsAction extends AbstractAction implements Presenter.Menu {
     private static final long serialVersionUID = 1L;
 

@@ -14,7 +14,9 @@ import org.wellwright.project.Project;
 import org.wellwright.project.ProjectSession;
 import org.wellwright.solver.WellwrightException;
 
-/** Keeps unsaved changes of open projects a moment after each edit, and forgets them when they are saved or given up. */
+/**
+ * Keeps unsaved changes of open projects a moment after each edit, and forgets them when they are saved or given up.
+ */
 final class Recovery {
     /** Long enough not to write during a drag, short enough to lose little. */
     private static final int DELAY_MILLIS = 1000;

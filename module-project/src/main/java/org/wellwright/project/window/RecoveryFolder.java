@@ -22,8 +22,9 @@ import org.wellwright.solver.Problem;
 import org.wellwright.solver.WellwrightException;
 
 /**
- * Unsaved changes of open projects, kept in a folder of the user so that a crash costs at most the last seconds. Each project has two files there: its
- * text, and what it belongs to. An entry is removed when its project is saved or closed; what is left at a start is what a crash left.
+ * Unsaved changes of open projects, kept in a folder of the user so that a crash costs at most the last seconds. Each
+ * project has two files there: its text, and what it belongs to. An entry is removed when its project is saved or
+ * closed; what is left at a start is what a crash left.
  */
 final class RecoveryFolder {
     private static final String ABOUT = ".about";
@@ -58,11 +59,18 @@ final class RecoveryFolder {
             file.ifPresent(path -> about.setProperty("file", path.toString()));
             StringWriter text = new StringWriter();
             about.store(text, null);
-            SafeFile.replace(folder.resolve(id + ProjectFile.ENDING), ProjectFile.text(project).getBytes(StandardCharsets.UTF_8), false);
+            SafeFile.replace(
+                    folder.resolve(id + ProjectFile.ENDING),
+                    ProjectFile.text(project).getBytes(StandardCharsets.UTF_8),
+                    false);
             SafeFile.replace(folder.resolve(id + ABOUT), text.toString().getBytes(StandardCharsets.UTF_8), false);
         } catch (IOException e) {
             throw new WellwrightException(
-                    new Problem("unsaved changes cannot be kept: " + SafeFile.reason(e), folder.toString(), "save the project"), e);
+                    new Problem(
+                            "unsaved changes cannot be kept: " + SafeFile.reason(e),
+                            folder.toString(),
+                            "save the project"),
+                    e);
         }
     }
 

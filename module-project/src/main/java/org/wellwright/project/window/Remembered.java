@@ -80,7 +80,8 @@ final class Remembered {
     }
 
     private void write(String key, List<Path> paths) {
-        preferences.put(key, String.join("\n", paths.stream().map(Path::toString).toList()));
+        preferences.put(
+                key, String.join("\n", paths.stream().map(Path::toString).toList()));
         try {
             preferences.flush();
         } catch (BackingStoreException e) {

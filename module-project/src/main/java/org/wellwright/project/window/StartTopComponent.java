@@ -77,7 +77,8 @@ public final class StartTopComponent extends TopComponent {
         column.add(Box.createVerticalStrut(14));
         Box buttons = Box.createHorizontalBox();
         buttons.setAlignmentX(Component.LEFT_ALIGNMENT);
-        buttons.add(button("start.new", Bundle.BTN_StartNew(), () -> NewProject.ask().ifPresent(ProjectDesk.get()::create)));
+        buttons.add(button(
+                "start.new", Bundle.BTN_StartNew(), () -> NewProject.ask().ifPresent(ProjectDesk.get()::create)));
         buttons.add(Box.createHorizontalStrut(8));
         buttons.add(button("start.open", Bundle.BTN_StartOpen(), ProjectDesk.get()::askAndOpen));
         column.add(buttons);
@@ -97,7 +98,11 @@ public final class StartTopComponent extends TopComponent {
         }
         for (int i = 0; i < recent.size(); i++) {
             Path file = recent.get(i);
-            column.add(link("start.recent." + (i + 1), file.getFileName().toString(), file.getParent().toString(), () -> ProjectDesk.get().open(file, session -> {})));
+            column.add(link(
+                    "start.recent." + (i + 1),
+                    file.getFileName().toString(),
+                    file.getParent().toString(),
+                    () -> ProjectDesk.get().open(file, session -> {})));
         }
         column.revalidate();
     }

@@ -20,8 +20,9 @@ import org.wellwright.project.ProjectSession;
 import org.wellwright.solver.WellwrightException;
 
 /**
- * What happens when the window comes up: the projects of the last time are opened again, unsaved changes that a crash left are offered back, files named
- * on the command line are opened, and the start page is shown if nothing is open then.
+ * What happens when the window comes up: the projects of the last time are opened again, unsaved changes that a crash
+ * left are offered back, files named on the command line are opened, and the start page is shown if nothing is open
+ * then.
  */
 @OnShowing
 @Messages({
@@ -96,7 +97,8 @@ public final class StartUp implements Runnable {
             finish(desk);
             return;
         }
-        DateTimeFormatter times = DateTimeFormatter.ofLocalizedDateTime(FormatStyle.SHORT).withZone(ZoneId.systemDefault());
+        DateTimeFormatter times =
+                DateTimeFormatter.ofLocalizedDateTime(FormatStyle.SHORT).withZone(ZoneId.systemDefault());
         List<String> names = entries.stream()
                 .map(entry -> Bundle.TXT_Recovered(entry.title(), times.format(entry.time())))
                 .toList();
@@ -148,7 +150,8 @@ public final class StartUp implements Runnable {
 
     /** In no file: an empty project that the kept one replaces, so that it counts as not saved. */
     private static void takeAsNew(ProjectDesk desk, Project kept) {
-        Project empty = Project.of("", kept.document().withModels(List.of()).withData(List.of()).withParameters(List.of()));
+        Project empty = Project.of(
+                "", kept.document().withModels(List.of()).withData(List.of()).withParameters(List.of()));
         take(desk.create(empty), kept);
     }
 

@@ -10,11 +10,7 @@ import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 
 /** The title of the main window: the selected project, a star if it has unsaved changes, and the application's name. */
-@Messages({
-    "TTL_Application=Wellwright",
-    "# {0} - project",
-    "TTL_WithProject={0} – Wellwright"
-})
+@Messages({"TTL_Application=Wellwright", "# {0} - project", "TTL_WithProject={0} – Wellwright"})
 final class WindowTitle {
     private final OpenProjects open;
     private final Runnable changed = () -> SwingUtilities.invokeLater(this::show);
@@ -50,7 +46,9 @@ final class WindowTitle {
         if (frame instanceof JFrame window) {
             JRootPane root = window.getRootPane();
             root.putClientProperty("Window.documentModified", followed.modified());
-            root.putClientProperty("Window.documentFile", followed.file().map(file -> file.toFile()).orElse(null));
+            root.putClientProperty(
+                    "Window.documentFile",
+                    followed.file().map(file -> file.toFile()).orElse(null));
         }
     }
 }

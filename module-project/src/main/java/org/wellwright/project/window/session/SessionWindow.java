@@ -19,8 +19,9 @@ import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 
 /**
- * A window that follows the selected project: it is told of every change while it is in sight, shows something else while no project is open, undoes in
- * the project, and its lookup holds its own content beside that of {@link OpenProjects}. Event thread only.
+ * A window that follows the selected project: it is told of every change while it is in sight, shows something else
+ * while no project is open, undoes in the project, and its lookup holds its own content beside that of
+ * {@link OpenProjects}. Event thread only.
  */
 public abstract class SessionWindow extends TopComponent {
     private static final long serialVersionUID = 1L;
@@ -29,8 +30,10 @@ public abstract class SessionWindow extends TopComponent {
 
     private final transient InstanceContent own = new InstanceContent();
     private final transient OpenProjects open = Lookup.getDefault().lookup(OpenProjects.class);
-    private final transient Lookup.Result<ProjectSession> result = open.getLookup().lookupResult(ProjectSession.class);
-    private final transient Lookup.Result<FigureSelection> picks = open.getLookup().lookupResult(FigureSelection.class);
+    private final transient Lookup.Result<ProjectSession> result =
+            open.getLookup().lookupResult(ProjectSession.class);
+    private final transient Lookup.Result<FigureSelection> picks =
+            open.getLookup().lookupResult(FigureSelection.class);
     private final transient AtomicBoolean due = new AtomicBoolean();
     private final transient Runnable changed = this::later;
     private final CardLayout cards = new CardLayout();
