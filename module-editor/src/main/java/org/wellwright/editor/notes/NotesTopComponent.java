@@ -35,7 +35,7 @@ import org.wellwright.solver.units.UnitSystem;
 @ActionID(category = "Window", id = "org.wellwright.editor.notes.NotesTopComponent")
 @ActionReference(path = "Menu/Window", position = 102)
 @Messages({
-    "CTL_NotesWindow=About it",
+    "CTL_NotesWindow=Notes",
     "HINT_NotesWindow=Title, units and notes of the selected project",
     "MSG_NotesMissing=No project is open",
     "MSG_NotesRemedy=Open or create a project from the File menu; its title, units and notes are edited here.",

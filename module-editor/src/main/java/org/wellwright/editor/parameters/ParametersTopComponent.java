@@ -118,14 +118,14 @@ public final class ParametersTopComponent extends SessionWindow {
                         "Value",
                         "A number, a number with a unit, or '= formula' to tie it to others",
                         Kind.NUMBER,
-                        "0.12345678901",
+                        "0.08746335115566405",
                         ParametersViewModel.Row::value,
                         (row, text) -> controller.setValue(row, text)),
                 typed(
                         "Unit",
                         "The unit of all its numbers; another one converts them",
                         Kind.TEXT,
-                        "cm^-1 angstrom",
+                        "cm^-1 angst",
                         ParametersViewModel.Row::unit,
                         (row, text) -> controller.setUnit(row, text)),
                 typed(
