@@ -9,7 +9,8 @@ import java.util.Objects;
  *     "a[l=1,j=3/2]", "m[HD]")
  * @param parameter the parameter's name
  * @param value its value in the parameter's unit
- * @param sigma its standard uncertainty in that unit; 0 if it is fixed, NaN if it could not be found
+ * @param sigma its standard uncertainty in that unit; 0 if it is fixed, NaN at a bound or if it could not be
+ *     found
  * @param unit the parameter's unit
  * @param free whether the fit could change it
  * @param bound which bound holds it
@@ -21,9 +22,9 @@ public record FittedParameter(
     public enum Bound {
         /** None: it lies between its bounds. */
         NONE,
-        /** The lower one; its sigma is that of the others held, and has no meaning for it. */
+        /** The lower one; its sigma is NaN. */
         LOWER,
-        /** The upper one. */
+        /** The upper one; its sigma is NaN. */
         UPPER
     }
 
