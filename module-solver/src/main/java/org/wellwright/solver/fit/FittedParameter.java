@@ -9,8 +9,7 @@ import java.util.Objects;
  *     "a[l=1,j=3/2]", "m[HD]")
  * @param parameter the parameter's name
  * @param value its value in the parameter's unit
- * @param sigma its standard uncertainty in that unit; 0 if it is fixed, NaN at a bound or if it could not be
- *     found
+ * @param sigma its standard uncertainty in that unit; 0 if it is fixed, NaN at a bound or if it could not be found
  * @param unit the parameter's unit
  * @param free whether the fit could change it
  * @param bound which bound holds it

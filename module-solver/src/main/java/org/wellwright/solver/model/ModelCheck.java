@@ -24,6 +24,7 @@ import org.wellwright.solver.potential.FormulaFault;
 import org.wellwright.solver.potential.FormulaTerm;
 import org.wellwright.solver.potential.FormulaText;
 import org.wellwright.solver.potential.FormulaToken;
+import org.wellwright.solver.potential.InnerContinuation;
 import org.wellwright.solver.potential.PotentialFamily;
 import org.wellwright.solver.potential.TableKnot;
 import org.wellwright.solver.potential.TableTerm;
@@ -289,6 +290,14 @@ public final class ModelCheck {
         List<TableKnot> knots = term.knots();
         for (int i = 0; i < knots.size(); i++) {
             argument(at + "/knots/" + i, knots.get(i).value(), Dimension.ENERGY, pool);
+        }
+        boolean exponential = term.inner().kind() == InnerContinuation.Kind.EXPONENTIAL;
+        Dimension steepness = exponential ? Dimension.LENGTH.power(-1) : Dimension.NONE;
+        argument(at + "/inner/steepness", term.inner().steepness(), steepness, pool);
+        argument(at + "/outer/limit", term.outer().limit(), Dimension.ENERGY, pool);
+        argument(at + "/outer/exponent", term.outer().exponent(), Dimension.NONE, pool);
+        if (term.outer().coefficient() instanceof Argument.Named named) {
+            requireName(at + "/outer/coefficient", named.parameter(), pool);
         }
     }
 

@@ -85,7 +85,8 @@ final class TermBinder {
                 literal.value() * UnitExpression.parse(literal.unit()).factorTo(pool.units(), expected));
     }
 
-    private boolean dependsOnChannel(Argument argument) {
+    /** Whether an argument differs from channel to channel. */
+    boolean dependsOnChannel(Argument argument) {
         return argument instanceof Argument.Named named && pool.dependsOnChannel(named.parameter());
     }
 
@@ -96,7 +97,7 @@ final class TermBinder {
         if (term instanceof FormulaTerm formula) {
             return formula(formula, place, facts, values);
         }
-        return table((TableTerm) term, place, values);
+        return new TableBinding(this, pool.units(), (TableTerm) term, place, values).bind();
     }
 
     private BoundTerm family(FamilyTerm term, Place place, ChannelFacts facts, double[] values) {
@@ -136,10 +137,6 @@ final class TermBinder {
         Argument.Literal literal = (Argument.Literal) argument;
         UnitExpression unit = UnitExpression.parse(literal.unit());
         return PoolValue.constant(literal.value() * unit.factorTo(pool.units(), unit.dimension()));
-    }
-
-    private BoundTerm table(TableTerm term, Place place, double[] values) {
-        throw new InvalidModelException("tables cannot be solved yet", "", "use a family or a formula");
     }
 
     private static double[] numbers(List<PoolValue> parameters) {

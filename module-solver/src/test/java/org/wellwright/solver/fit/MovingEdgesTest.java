@@ -22,6 +22,11 @@ import org.wellwright.solver.pair.PairSystem;
 import org.wellwright.solver.potential.Argument;
 import org.wellwright.solver.potential.FamilyTerm;
 import org.wellwright.solver.potential.FormulaTerm;
+import org.wellwright.solver.potential.InnerContinuation;
+import org.wellwright.solver.potential.OuterContinuation;
+import org.wellwright.solver.potential.TableInterpolation;
+import org.wellwright.solver.potential.TableKnot;
+import org.wellwright.solver.potential.TableTerm;
 import org.wellwright.solver.potential.Term;
 import org.wellwright.solver.potential.TermFrame;
 import org.wellwright.solver.units.ExactNumber;
@@ -91,6 +96,54 @@ class MovingEdgesTest {
                 .withInnerWall(Argument.named("inner"))
                 .withOuterWall(Argument.named("outer"));
         assertThat(compare(of(pool, curve))).isEqualTo(9);
+    }
+
+    @Test
+    void tableWithItsValuesAndTailInThePool() {
+        List<Parameter> pool = List.of(
+                fixed("v2", "eV", "-60"),
+                fixed("C", "eV angstrom^2", "-30"),
+                fixed("n", "", "2"),
+                fixed("c", "1/angstrom", "2.2"));
+        List<TableKnot> knots = List.of(
+                new TableKnot(0.3, Argument.of(90)),
+                new TableKnot(0.6, Argument.of(-30)),
+                new TableKnot(1.0, Argument.named("v2")),
+                new TableKnot(1.6, Argument.of(-40)),
+                new TableKnot(2.4, Argument.of(-15)),
+                new TableKnot(3.6, Argument.of(-4)));
+        TableTerm table = new TableTerm(
+                TermFrame.named("table"),
+                "angstrom",
+                "eV",
+                knots,
+                TableInterpolation.STANDARD,
+                new InnerContinuation(InnerContinuation.Kind.EXPONENTIAL, Argument.named("c")),
+                OuterContinuation.power(Argument.ZERO, Argument.named("C"), 2));
+        assertThat(compare(of(pool.subList(0, 2), Curve.of("ground", List.of(steep(table, Argument.of(2.2)))))))
+                .isEqualTo(6);
+        TableTerm moving = new TableTerm(
+                TermFrame.named("table"),
+                "angstrom",
+                "eV",
+                knots,
+                TableInterpolation.STANDARD,
+                table.inner(),
+                new OuterContinuation(
+                        OuterContinuation.Kind.JOINED_POWER, Argument.ZERO, Argument.of(-30), Argument.named("n")));
+        List<Parameter> others = List.of(pool.get(0), pool.get(2), pool.get(3));
+        assertThat(compare(of(others, Curve.of("ground", List.of(moving))))).isEqualTo(9);
+    }
+
+    private static TableTerm steep(TableTerm table, Argument steepness) {
+        return new TableTerm(
+                table.frame(),
+                table.radiusUnit(),
+                table.valueUnit(),
+                table.knots(),
+                table.interpolation(),
+                new InnerContinuation(InnerContinuation.Kind.EXPONENTIAL, steepness),
+                table.outer());
     }
 
     @Test

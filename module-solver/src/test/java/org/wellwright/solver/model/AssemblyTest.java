@@ -8,6 +8,7 @@ import static org.wellwright.solver.fit.Documents.fixed;
 import static org.wellwright.solver.fit.Documents.hydrogens;
 import static org.wellwright.solver.fit.Documents.number;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
@@ -23,6 +24,11 @@ import org.wellwright.solver.potential.Argument;
 import org.wellwright.solver.potential.ChannelFilter;
 import org.wellwright.solver.potential.FamilyTerm;
 import org.wellwright.solver.potential.FormulaTerm;
+import org.wellwright.solver.potential.InnerContinuation;
+import org.wellwright.solver.potential.OuterContinuation;
+import org.wellwright.solver.potential.TableInterpolation;
+import org.wellwright.solver.potential.TableKnot;
+import org.wellwright.solver.potential.TableTerm;
 import org.wellwright.solver.potential.Term;
 import org.wellwright.solver.potential.TermFrame;
 import org.wellwright.solver.radial.RadialProblem;
@@ -272,5 +278,28 @@ class AssemblyTest {
         double strength = -problem.common().value(1);
         // Rydberg constant of sodium with the ion's mass, 109734.697139 cm^-1, recomputed from AME masses.
         assertThat(strength * strength / (4 * problem.kinetic())).isCloseTo(109734.697139, within(2e-5));
+    }
+
+    @Test
+    void tableIsReadInItsOwnUnits() {
+        List<TableKnot> knots = new ArrayList<>();
+        for (int i = 1; i <= 40; i++) {
+            double r = 0.1 * i;
+            knots.add(new TableKnot(r, Argument.of(-14.399645468683608 / r)));
+        }
+        Term table = new TableTerm(
+                TermFrame.named("t"),
+                "angstrom",
+                "eV",
+                knots,
+                TableInterpolation.STANDARD,
+                InnerContinuation.power(1),
+                OuterContinuation.power(Argument.ZERO, Argument.of(-14.399645468683608), 1));
+        RadialProblem problem = spinless(assembly("atomic", List.of(), Curve.of("ground", List.of(table))), 0)
+                .problem();
+        // -e^2/(4 pi eps0 r) is -1/r in atomic units: exactly at the knots and in the tail.
+        double bohr = 1 / 0.529177210544;
+        assertThat(problem.common().value(2.5 * bohr)).isCloseTo(-1 / (2.5 * bohr), within(1e-12));
+        assertThat(problem.common().value(50)).isCloseTo(-0.02, within(1e-14));
     }
 }
