@@ -20,7 +20,7 @@ import java.util.concurrent.ConcurrentHashMap;
  */
 public final class ElementBasis {
     /** Bubbles beyond the trial space that measure and mend the truncation. */
-    public static final int EXTRA = 4;
+    public static final int EXTRA = 8;
 
     private static final Map<Integer, ElementBasis> ORDINARY = new ConcurrentHashMap<>();
     private static final Map<OriginKey, ElementBasis> ORIGIN = new ConcurrentHashMap<>();

@@ -52,7 +52,8 @@ final class RoundingPass {
             case MIN, MAX -> Math.max(ea, eb);
             case POWER -> power(size, a, ea, b, eb);
             case EXP -> library(Math.max(size, Double.MIN_VALUE) * Math.expm1(ea) * (1 + 4 * U), size);
-            case EXPM1 -> library((size + 1) * Math.expm1(ea) * (1 + 4 * U), size);
+            // The slope e^a is v + 1, next to nothing for large negative a.
+            case EXPM1 -> library((v + 1 + 4 * U) * Math.expm1(ea) * (1 + 4 * U), size);
             case LN -> logarithm(a, ea, size);
             case LOG1P -> logarithm(1 + a, ea * (1 + 2 * U), size);
             case SQRT -> U * size + (a > 2 * ea ? ea / Math.sqrt(a - ea) : Math.sqrt(ea) * (1 + 4 * U));

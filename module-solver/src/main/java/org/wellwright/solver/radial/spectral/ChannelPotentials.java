@@ -318,6 +318,15 @@ final class ChannelPotentials {
         return into;
     }
 
+    /** Bound of V's own rounding in all terms at a radius. */
+    double roundingBound(double r) {
+        double sum = problem.common().roundingBound(r);
+        for (ChannelTerm term : problem.rest()) {
+            sum += term.potential().roundingBound(r);
+        }
+        return sum;
+    }
+
     private double[] collectBreaks() {
         TreeSet<Double> radii = new TreeSet<>();
         List<TermEvaluator> all = new ArrayList<>();

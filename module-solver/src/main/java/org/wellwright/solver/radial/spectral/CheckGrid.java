@@ -3,8 +3,6 @@ package org.wellwright.solver.radial.spectral;
 import java.util.List;
 import org.wellwright.solver.numerics.Element;
 import org.wellwright.solver.numerics.ElementBasis;
-import org.wellwright.solver.potential.TermEvaluator;
-import org.wellwright.solver.radial.ChannelTerm;
 
 /**
  * V at the nodes of the second Gauss rule of every element, on which energies and residuals are evaluated, and at those
@@ -88,13 +86,8 @@ final class CheckGrid {
 
     private static double[] roundingBounds(ChannelPotentials potentials, double[] radius) {
         double[] bound = new double[radius.length];
-        TermEvaluator common = potentials.problem().common();
         for (int g = 0; g < radius.length; g++) {
-            double sum = common.roundingBound(radius[g]);
-            for (ChannelTerm term : potentials.problem().rest()) {
-                sum += term.potential().roundingBound(radius[g]);
-            }
-            bound[g] = sum;
+            bound[g] = potentials.roundingBound(radius[g]);
         }
         return bound;
     }

@@ -1,7 +1,6 @@
 package org.wellwright.solver.radial.spectral;
 
 import java.util.function.DoubleUnaryOperator;
-import org.wellwright.solver.numerics.CondensedPencil;
 import org.wellwright.solver.radial.EnergyGradient;
 import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.radial.RadialProblem;
@@ -11,33 +10,34 @@ import org.wellwright.solver.radial.RadialState;
 final class ElementState implements RadialState {
     private final RadialProblem problem;
     private final Level level;
-    private final Trial trial;
-    private final CondensedPencil pencil;
-    private final double shift;
+    private final Trial variational;
+    private final MeshData mesh;
+    private volatile Trial fine;
 
-    /**
-     * A state.
-     *
-     * @param shift the energy at which the pencil is nearly singular
-     */
-    ElementState(RadialProblem problem, Level level, Trial trial, CondensedPencil pencil, double shift) {
+    /** A state from its variational solution; values and slopes are refined when first asked for. */
+    ElementState(RadialProblem problem, Level level, Trial variational, MeshData mesh) {
         this.problem = problem;
         this.level = level;
-        this.trial = trial;
-        this.pencil = pencil;
-        this.shift = shift;
+        this.variational = variational;
+        this.mesh = mesh;
     }
 
-    Trial trial() {
-        return trial;
+    private ElementState(ElementState of, Trial response) {
+        problem = of.problem;
+        level = of.level;
+        mesh = of.mesh;
+        variational = response;
+        fine = response;
     }
 
-    CondensedPencil pencil() {
-        return pencil;
-    }
-
-    double shift() {
-        return shift;
+    /** The function that values and integrals are taken of. Computed twice at worst, to the same bits. */
+    private Trial trial() {
+        Trial known = fine;
+        if (known == null) {
+            known = StateRefinement.refine(mesh, variational);
+            fine = known;
+        }
+        return known;
     }
 
     @Override
@@ -52,71 +52,68 @@ final class ElementState implements RadialState {
 
     @Override
     public double value(int channel, double r) {
-        return trial.value(channel, r);
+        return trial().value(channel, r);
     }
 
     @Override
     public double slope(int channel, double r) {
-        return trial.slope(channel, r);
+        return trial().slope(channel, r);
     }
 
     @Override
     public double innerRadius() {
-        return trial.edges()[0];
+        return variational.edges()[0];
     }
 
     @Override
     public double outerRadius() {
-        double[] edges = trial.edges();
+        double[] edges = variational.edges();
         return edges[edges.length - 1];
     }
 
     @Override
     public double[] elementEdges() {
-        return trial.edges().clone();
+        return variational.edges().clone();
     }
 
     @Override
     public double expectation(DoubleUnaryOperator weight) {
-        return StateIntegral.integrate(trial.edges(), exponentAtOrigin(), r -> {
+        Trial u = trial();
+        return StateIntegral.integrate(u.edges(), r -> {
             double sum = 0;
-            for (int c = 0; c < trial.channels(); c++) {
-                double u = trial.value(c, r);
-                sum += u * u;
+            for (int c = 0; c < u.channels(); c++) {
+                double value = u.value(c, r);
+                sum += value * value;
             }
             return sum == 0 ? 0 : sum * weight.applyAsDouble(r);
         });
     }
 
-    private double exponentAtOrigin() {
-        return trial.elements()[0].basis[0].atOrigin() ? trial.elements()[0].basis[0].exponent : Double.NaN;
-    }
-
     @Override
     public double overlap(int channel, RadialState other, int otherChannel, DoubleUnaryOperator weight) {
-        double[] edges = StateIntegral.common(trial.edges(), other.elementEdges());
+        Trial u = trial();
+        double[] edges = StateIntegral.common(u.edges(), other.elementEdges());
         if (edges.length < 2) {
             return 0;
         }
-        return StateIntegral.integrate(edges, exponentAtOrigin(), r -> {
-            double product = trial.value(channel, r) * other.value(otherChannel, r);
+        return StateIntegral.integrate(edges, r -> {
+            double product = u.value(channel, r) * other.value(otherChannel, r);
             return product == 0 ? 0 : product * weight.applyAsDouble(r);
         });
     }
 
     @Override
     public double kineticEnergy() {
-        return StateGradient.kineticEnergy(problem, trial);
+        return StateGradient.kineticEnergy(problem, variational);
     }
 
     @Override
     public EnergyGradient gradient() {
-        return StateGradient.of(problem, trial);
+        return StateGradient.of(problem, variational);
     }
 
     @Override
     public RadialState response(SourceFunction source) {
-        Trial w = Response.solve(this, source);
-        return new ElementState(problem, level, w, pencil, shift);
+        return new ElementState(this, Response.solve(mesh, trial(), source));
     }
 }

@@ -14,15 +14,15 @@ final class Enclosure {
     private static final int LARGEST_CLUSTER = 6;
 
     private final List<Solution> levels;
-    private final CheckGrid grid;
+    private final MeshData mesh;
     private final double above;
     private final double[] lower;
     private final double[] upper;
     private final double[] gap;
 
-    private Enclosure(List<Solution> levels, CheckGrid grid, double above) {
+    private Enclosure(List<Solution> levels, MeshData mesh, double above) {
         this.levels = levels;
-        this.grid = grid;
+        this.mesh = mesh;
         this.above = above;
         lower = new double[levels.size()];
         upper = new double[levels.size()];
@@ -34,8 +34,8 @@ final class Enclosure {
      *
      * @param above an energy with no further level between the last one and it
      */
-    static Enclosure of(List<Solution> levels, CheckGrid grid, double above) {
-        Enclosure result = new Enclosure(levels, grid, above);
+    static Enclosure of(List<Solution> levels, MeshData mesh, double above) {
+        Enclosure result = new Enclosure(levels, mesh, above);
         int n = levels.size();
         for (int i = 0; i < n; ) {
             int end = i + 1;
@@ -94,17 +94,18 @@ final class Enclosure {
     }
 
     private void together(int from, int to) {
+        Quotient quotient = mesh.quotient();
         List<Trial> trials = new ArrayList<>();
         double rounding = 0;
         double reference = 0;
         double residual = 0;
         for (int i = from; i < to; i++) {
-            trials.add(levels.get(i).trial());
+            trials.add(smooth(quotient, levels.get(i).trial()));
             rounding = Math.max(rounding, levels.get(i).rounding());
             residual = Math.max(residual, levels.get(i).residual());
             reference += levels.get(i).smoothEnergy() / (to - from);
         }
-        Cluster cluster = ClusterMatrices.of(grid, trials, reference);
+        Cluster cluster = ClusterMatrices.of(mesh.grid(), trials, reference);
         double next = floorOf(to);
         double[] low = cluster.bounds(next);
         double[] high = from == 0 ? cluster.ritz() : cluster.bounds(ceilingOf(from - 1));
@@ -118,6 +119,12 @@ final class Enclosure {
                 gap[i] = Math.min(gap[i], rho - ceilingOf(from - 1));
             }
         }
+    }
+
+    private static Trial smooth(Quotient quotient, Trial trial) {
+        quotient.evaluate(trial);
+        quotient.smooth(trial);
+        return trial.with(quotient.smoothCoefficients());
     }
 
     double lower(int i) {

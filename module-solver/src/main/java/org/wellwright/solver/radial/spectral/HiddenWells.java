@@ -54,7 +54,7 @@ final class HiddenWells {
                 continue;
             }
             double value = potentials.roughEnvelope(new double[] {middle})[0];
-            if (value < level) {
+            if (value + potentials.roundingBound(middle) < level) {
                 found[count++] = middle;
                 continue;
             }

@@ -87,6 +87,7 @@ final class Quotient {
         }
     }
 
+    private double squaredNorm;
     private final Sum norm = new Sum();
     private final Sum energySum = new Sum();
     private final Sum absolute = new Sum();
@@ -140,6 +141,7 @@ final class Quotient {
             difference += element.unit * (other - energyOn);
         }
         double n = norm.value();
+        squaredNorm = n;
         energy = energySum.value() / n;
         scale = Math.max(absolute.value() / n, Math.abs(energy));
         kinetic = kineticSum / n;
@@ -150,6 +152,11 @@ final class Quotient {
         }
         enrich(trial, n);
         cut = cutError(trial) / n;
+    }
+
+    /** ∫u² of the last function of {@link #evaluate}. */
+    double norm() {
+        return squaredNorm;
     }
 
     private double kineticOn(Trial trial, double[] coefficient, int e) {

@@ -13,8 +13,7 @@ import org.wellwright.solver.radial.RadialState.SourceFunction;
 final class Response {
     private Response() {}
 
-    static Trial solve(ElementState state, SourceFunction source) {
-        Trial u = state.trial();
+    static Trial solve(MeshData mesh, Trial u, SourceFunction source) {
         Element[] elements = u.elements();
         int channels = u.channels();
         int modes = elements[0].modes;
@@ -30,15 +29,15 @@ final class Response {
                 }
             }
         }
-        CondensedPencil.Work work = state.pencil().work();
-        work.solve(state.shift(), null);
+        CondensedPencil.Work work = mesh.pencil().work();
+        work.solve(u.shift(), null);
         for (int e = 0; e < elements.length; e++) {
             load(u, e, f[e], overlap, vertexLoad, modeLoad, work);
         }
         double[] inner = new double[(elements.length - 1) * channels];
         System.arraycopy(vertexLoad, channels, inner, 0, inner.length);
         work.respond(inner, modeLoad);
-        Trial w = Trial.raw(elements, u.edges(), work, state.shift());
+        Trial w = Trial.raw(elements, u.edges(), work, u.shift());
         return w.orthogonalTo(List.of(u));
     }
 

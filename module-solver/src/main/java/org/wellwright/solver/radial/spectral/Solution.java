@@ -3,12 +3,13 @@ package org.wellwright.solver.radial.spectral;
 /**
  * What was computed for one level before its bounds are put together.
  *
- * @param trial the smoothed, normalised state
+ * @param trial the normalised state of the pencil
  * @param energy Rayleigh quotient of the state of the pencil
  * @param smoothEnergy Rayleigh quotient of the smoothed state
  * @param residual ‖Hu − ρu‖ of the smoothed state
  * @param estimate estimated error of {@code energy}
  * @param rounding bound of rounding and quadrature in a Rayleigh quotient
+ * @param quadrature the part of {@code rounding} that a finer mesh would remove
  * @param scale ⟨T⟩ + ⟨|V|⟩
  * @param shares what each element contributes to the errors
  */
@@ -19,6 +20,7 @@ record Solution(
         double residual,
         double estimate,
         double rounding,
+        double quadrature,
         double scale,
         Shares shares) {
 

@@ -63,11 +63,12 @@ final class SpectralRun {
                     : finder.above(trials.get(wanted - 1).shift());
             counts += finder.counts();
             CheckGrid grid = CheckGrid.of(potentials, mesh.layout().leaves());
-            List<Solution> solutions = evaluate(trials, grid);
-            Enclosure enclosure = Enclosure.of(solutions, grid, above);
+            MeshData data = data(grid);
+            List<Solution> solutions = evaluate(trials, data);
+            Enclosure enclosure = Enclosure.of(solutions, data, above);
             boolean[] marked = pass < PASSES ? mark(solutions, enclosure) : null;
             if (marked == null) {
-                return result(solutions, enclosure, above);
+                return result(solutions, enclosure, data, above);
             }
             mesh.layout().cut(marked);
             mesh.assemble(mesh.layout().elements());
@@ -76,11 +77,15 @@ final class SpectralRun {
         }
     }
 
-    private List<Solution> evaluate(List<Trial> trials, CheckGrid grid) {
+    private MeshData data(CheckGrid grid) {
         double[] edges = mesh.edges();
         boolean innerWall = problem.innerWall() > 0 && edges[0] == problem.innerWall();
         boolean outerWall = edges[edges.length - 1] == problem.outerWall();
-        Quotient quotient = new Quotient(mesh.pencil().elements(), edges, grid, innerWall, outerWall);
+        return new MeshData(edges, mesh.pencil(), grid, innerWall, outerWall);
+    }
+
+    private List<Solution> evaluate(List<Trial> trials, MeshData data) {
+        Quotient quotient = data.quotient();
         List<Solution> solutions = new ArrayList<>(trials.size());
         for (Trial trial : trials) {
             if (monitor.cancelled()) {
@@ -98,11 +103,12 @@ final class SpectralRun {
         double quadrature = trusted(quotient.quadrature, scale);
         double rounding = QUOTIENT_ROUNDING * scale + quotient.rounding + quadrature + quotient.cut;
         double estimate = quotient.truncation + quadrature + quotient.cut + 0.5 * Math.ulp(1.0) * scale;
+        Trial normalised = trial.times(1 / Math.sqrt(quotient.norm()));
         quotient.smooth(trial);
-        Trial smooth = trial.with(quotient.smoothCoefficients());
-        smooth = smooth.times(1 / Math.sqrt(smooth.norm()));
         return new Solution(
-                smooth, energy, quotient.smoothEnergy, quotient.residual, estimate, rounding, scale, quotient.shares());
+                normalised, energy, quotient.smoothEnergy, quotient.residual, estimate, rounding,
+                quadrature + quotient.cut,
+                scale, quotient.shares());
     }
 
     /**
@@ -125,7 +131,7 @@ final class SpectralRun {
             double square = level.residual() * level.residual();
             double gap = Math.max(enclosure.gap(i), 1e-12 * level.scale());
             boolean wide = potentials.residualExists() && square > 0.5 * target * gap;
-            boolean coarse = level.rounding() > 2 * target + 2 * QUOTIENT_ROUNDING * level.scale();
+            boolean coarse = level.quadrature() > 0.5 * target;
             if (!wide && !coarse && (potentials.residualExists() || level.estimate() < 4 * target)) {
                 continue;
             }
@@ -154,7 +160,7 @@ final class SpectralRun {
                 new Spectrum.Effort(0, potentials.evaluations(), mesh.counts()));
     }
 
-    private Spectrum result(List<Solution> solutions, Enclosure enclosure, double above) {
+    private Spectrum result(List<Solution> solutions, Enclosure enclosure, MeshData data, double above) {
         List<LevelOutcome> outcomes = new ArrayList<>(solutions.size());
         List<RadialState> states = new ArrayList<>(solutions.size());
         for (int i = 0; i < solutions.size(); i++) {
@@ -179,7 +185,7 @@ final class SpectralRun {
                     mesh.threshold());
             outcomes.add(level);
             Trial u = s.trial().startsNegative() ? s.trial().times(-1) : s.trial();
-            states.add(new ElementState(problem, level, u, mesh.pencil(), u.shift()));
+            states.add(new ElementState(problem, level, u, data));
         }
         return new Spectrum(
                 problem,

@@ -14,7 +14,7 @@ final class StateIntegral {
      * ∫ f dr over all elements. On an element that starts at 0 the intervals shrink in ratio ½ until the rest follows a
      * power, which is summed as a geometric series.
      */
-    static double integrate(double[] edges, double exponent, DoubleUnaryOperator f) {
+    static double integrate(double[] edges, DoubleUnaryOperator f) {
         double sum = 0;
         int first = 0;
         if (edges[0] == 0 && edges.length > 1) {

@@ -54,12 +54,23 @@ final class Survey {
         return survey;
     }
 
+    /**
+     * The lowest sample that is not made of rounding: where V's own rounding exceeds the envelope (a difference of nearly
+     * equal numbers over a power of r), the sample is raised by it.
+     */
     private void findLowest() {
-        lowest = 0;
-        for (int i = 0; i < radius.length; i++) {
-            if (envelope[i] < envelope[lowest]) {
-                lowest = i;
+        for (int round = 0; round <= radius.length; round++) {
+            lowest = 0;
+            for (int i = 0; i < radius.length; i++) {
+                if (envelope[i] < envelope[lowest]) {
+                    lowest = i;
+                }
             }
+            double bound = potentials.roundingBound(radius[lowest]);
+            if (!(bound > 1e-3 * Math.abs(envelope[lowest]))) {
+                return;
+            }
+            envelope[lowest] = Math.abs(envelope[lowest]) + 2 * bound;
         }
     }
 

@@ -243,20 +243,31 @@ final class Trial {
         return sum;
     }
 
+    Trial plus(Trial other) {
+        return combined(other, 1);
+    }
+
+    Trial minus(Trial other) {
+        return combined(other, -1);
+    }
+
+    private Trial combined(Trial other, double factor) {
+        double[] v = vertex.clone();
+        double[] c = coefficient.clone();
+        for (int i = 0; i < v.length; i++) {
+            v[i] += factor * other.vertex[i];
+        }
+        for (int i = 0; i < c.length; i++) {
+            c[i] += factor * other.coefficient[i];
+        }
+        return new Trial(elements, edges, v, c, shift);
+    }
+
     /** This function without its components along others. */
     Trial orthogonalTo(List<Trial> others) {
         Trial result = this;
         for (Trial other : others) {
-            double factor = result.overlap(other) / other.norm();
-            double[] v = result.vertex.clone();
-            double[] c = result.coefficient.clone();
-            for (int i = 0; i < v.length; i++) {
-                v[i] -= factor * other.vertex[i];
-            }
-            for (int i = 0; i < c.length; i++) {
-                c[i] -= factor * other.coefficient[i];
-            }
-            result = new Trial(elements, edges, v, c, shift);
+            result = result.combined(other, -result.overlap(other) / other.norm());
         }
         return result;
     }
