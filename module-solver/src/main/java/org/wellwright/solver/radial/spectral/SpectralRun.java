@@ -106,9 +106,15 @@ final class SpectralRun {
         Trial normalised = trial.times(1 / Math.sqrt(quotient.norm()));
         quotient.smooth(trial);
         return new Solution(
-                normalised, energy, quotient.smoothEnergy, quotient.residual, estimate, rounding,
+                normalised,
+                energy,
+                quotient.smoothEnergy,
+                quotient.residual,
+                estimate,
+                rounding,
                 quadrature + quotient.cut,
-                scale, quotient.shares());
+                scale,
+                quotient.shares());
     }
 
     /**

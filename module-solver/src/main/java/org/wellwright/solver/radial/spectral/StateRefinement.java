@@ -6,8 +6,8 @@ import org.wellwright.solver.numerics.Element;
 import org.wellwright.solver.numerics.ElementBasis;
 
 /**
- * Carries a state from the trial space to the space with the extra bubbles: the energy needs only the square of what the
- * trial space leaves out, values and slopes need all of it.
+ * Carries a state from the trial space to the space with the extra bubbles: the energy needs only the square of what
+ * the trial space leaves out, values and slopes need all of it.
  *
  * <p>Residuals are removed in turn on the trial space, by the condensed factorisation orthogonally to the state, and on
  * each extra bubble by its own diagonal (a two-level Gauss–Seidel iteration; each round gains a digit or two).

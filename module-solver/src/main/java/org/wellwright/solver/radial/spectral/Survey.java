@@ -55,8 +55,8 @@ final class Survey {
     }
 
     /**
-     * The lowest sample that is not made of rounding: where V's own rounding exceeds the envelope (a difference of nearly
-     * equal numbers over a power of r), the sample is raised by it.
+     * The lowest sample that is not made of rounding: where V's own rounding exceeds the envelope (a difference of
+     * nearly equal numbers over a power of r), the sample is raised by it.
      */
     private void findLowest() {
         for (int round = 0; round <= radius.length; round++) {

@@ -23,9 +23,9 @@ import org.wellwright.solver.service.SolveRequest;
 import org.wellwright.solver.service.SolverService;
 
 /**
- * Levels and expectation values from outside the project, through the service that clients look up. Each row of {@code
- * published-levels.csv} names its source; {@code tolerance} is relative to max(|E|, ⟨T⟩ + ⟨|V|⟩), or to the value for
- * expectations, and covers what rounding the formula's own numbers to double does to the problem.
+ * Levels and expectation values from outside the project, through the service that clients look up. Each row of
+ * {@code published-levels.csv} names its source; {@code tolerance} is relative to max(|E|, ⟨T⟩ + ⟨|V|⟩), or to the
+ * value for expectations, and covers what rounding the formula's own numbers to double does to the problem.
  */
 class PublishedLevelsTest {
     private static final SolverService SERVICE = Lookup.getDefault().lookup(SolverService.class);
@@ -73,20 +73,23 @@ class PublishedLevelsTest {
                 List.of(),
                 number(innerWall, 0),
                 number(outerWall, Double.POSITIVE_INFINITY));
-        Spectrum spectrum =
-                SERVICE.solve(SolveRequest.of(problem, LevelSearch.first(nodes + 1)), SolveMonitor.NONE);
+        Spectrum spectrum = SERVICE.solve(SolveRequest.of(problem, LevelSearch.first(nodes + 1)), SolveMonitor.NONE);
         assertThat(spectrum.completeness()).as(spectrum.message()).isEqualTo(Completeness.COUNTED);
         Level level = spectrum.levels().get(nodes);
         double known = Math.pow(10, 1 - digits) * Math.abs(value);
         if (observable.equals("energy")) {
             double scale = Math.max(Math.abs(value), level.scale());
-            assertThat(Math.abs(level.energy() - value)).as("energy %s", level.energy()).isLessThan(tolerance * scale + known);
+            assertThat(Math.abs(level.energy() - value))
+                    .as("energy %s", level.energy())
+                    .isLessThan(tolerance * scale + known);
             assertThat(level.lower() - known - tolerance * scale).isLessThanOrEqualTo(value);
             assertThat(level.upper() + known + tolerance * scale).isGreaterThanOrEqualTo(value);
             assertThat(level.upper() - level.lower()).isLessThan(2 * tolerance * scale);
         } else {
             double computed = observed(spectrum.state(nodes), observable);
-            assertThat(Math.abs(computed - value)).as("%s = %s", observable, computed).isLessThan(tolerance * Math.abs(value) + known);
+            assertThat(Math.abs(computed - value))
+                    .as("%s = %s", observable, computed)
+                    .isLessThan(tolerance * Math.abs(value) + known);
         }
     }
 
