@@ -40,8 +40,7 @@ public final class PerturbedStepSolver implements RadialSolver {
         double above;
         int found;
         if (!all) {
-            above = finder.energyAbove(
-                    search.count(), setting.endlessBelow(ceiling) ? setting.reachable(ceiling) : ceiling);
+            above = finder.energyAbove(search.count(), ceiling);
             found = Math.min(search.count(), finder.count(above));
         } else {
             above = ceiling;
@@ -121,11 +120,6 @@ public final class PerturbedStepSolver implements RadialSolver {
 
         boolean endlessBelow(double ceiling) {
             return endlessSeries && ceiling >= threshold;
-        }
-
-        /** The highest energy worth asking when levels crowd below the threshold. */
-        double reachable(double ceiling) {
-            return ceiling;
         }
 
         InvalidModelException endless() {

@@ -43,7 +43,11 @@ final class ScalarPotential {
             start = start.plus(term.origin());
             end = end.plus(term.tail());
         }
-        breaks = radii.stream().mapToDouble(Double::doubleValue).toArray();
+        breaks = new double[radii.size()];
+        int n = 0;
+        for (double radius : radii) {
+            breaks[n++] = radius;
+        }
         origin = start;
         tail = end;
     }

@@ -67,6 +67,12 @@ final class StepMesh {
     private final double[] powers = new double[StepQuadrature.POINTS];
     private final StepSeries builder = new StepSeries();
     private double suggestion;
+    /** Range of e = E/κ that the steps are made for. */
+    private final double lowest;
+
+    private final double anchor;
+
+    private double highest;
 
     /**
      * An empty mesh.
@@ -97,6 +103,18 @@ final class StepMesh {
         inverseSquare = origin.inverseSquare() / kinetic;
         originPower = origin.power();
         exponent = 0.5 + Math.sqrt(Math.max(0, 0.25 + centrifugal + inverseSquare));
+        lowest = scan.hardyBound() / kinetic;
+        double edge = potential.breakAbove(scan.anchor());
+        anchor = edge < 1.001 * scan.anchor() && edge < outerWall ? edge : scan.anchor();
+        highest = Double.isInfinite(threshold) ? Double.NEGATIVE_INFINITY : threshold / kinetic;
+        clear();
+    }
+
+    private void clear() {
+        outerCount = 0;
+        innerCount = 0;
+        series = null;
+        seriesTrials = 0;
         outwards = 0.25 * scan.anchor();
         inwards = 0.25 * scan.anchor();
     }
@@ -114,11 +132,11 @@ final class StepMesh {
     }
 
     private double innerEdge() {
-        return innerCount == 0 ? scan.anchor() : inner[innerCount - 1].left;
+        return innerCount == 0 ? anchor : inner[innerCount - 1].left;
     }
 
     private double outerEdge() {
-        return outerCount == 0 ? scan.anchor() : outer[outerCount - 1].right();
+        return outerCount == 0 ? anchor : outer[outerCount - 1].right();
     }
 
     /** Index of the step that holds r, clipped to the steps there are. */
@@ -142,6 +160,10 @@ final class StepMesh {
      */
     int start(double energy) {
         double e = energy / kinetic;
+        if (e > highest) {
+            highest = e + 3 * (e - lowest);
+            clear();
+        }
         double allowed = scan.firstAllowed(energy);
         while (outerCount == 0 || outerEdge() < Math.min(allowed, outerWall)) {
             extendOutwards();
@@ -313,12 +335,15 @@ final class StepMesh {
         double to = Math.min(Math.min(potential.breakAbove(from), outerWall), from * 4);
         double width = Math.min(outwards, to - from);
         PropagationStep step = null;
+        boolean first = false;
         while (step == null) {
+            first = !first && width == to - from;
             double right = width >= to - from ? to : from + Math.min(width, 0.5 * (to - from));
             step = build(from, right);
             width = (right - from) * suggestion;
         }
-        outwards = width;
+        // A step cut short by an edge says nothing about the next one.
+        outwards = first ? Math.max(outwards, width) : width;
         if (outerCount == outer.length) {
             outer = Arrays.copyOf(outer, 2 * outerCount);
         }
@@ -330,12 +355,14 @@ final class StepMesh {
         double from = Math.max(Math.max(potential.breakBelow(to), innerWall), 0.3 * to);
         double width = Math.min(inwards, to - from);
         PropagationStep step = null;
+        boolean first = false;
         while (step == null) {
+            first = !first && width == to - from;
             double left = width >= to - from ? from : to - Math.min(width, 0.5 * (to - from));
             step = build(left, to);
             width = (to - left) * suggestion;
         }
-        inwards = width;
+        inwards = first ? Math.max(inwards, width) : width;
         if (innerCount == inner.length) {
             inner = Arrays.copyOf(inner, 2 * innerCount);
         }
@@ -359,6 +386,7 @@ final class StepMesh {
         StepQuadrature.radii(from, width, radii);
         potential.values(radii, samples, StepQuadrature.POINTS);
         double smallest = Double.POSITIVE_INFINITY;
+        double greatest = Double.NEGATIVE_INFINITY;
         double largest = 0;
         for (int i = 0; i < StepQuadrature.POINTS; i++) {
             double q = samples[i] / kinetic + centrifugal / (radii[i] * radii[i]);
@@ -375,6 +403,7 @@ final class StepMesh {
             }
             samples[i] = q;
             smallest = Math.min(smallest, q);
+            greatest = Math.max(greatest, q);
             largest = Math.max(largest, Math.abs(q));
         }
         // Projected without the bulk of Q, so that rounding stays that of Q itself.
@@ -395,10 +424,11 @@ final class StepMesh {
         // Coefficients that do not fall belong to a jump or a kink: there the mean itself is in doubt, over the local
         // wavelength and not over the step.
         boolean rough = tail > 1e-5 * amplitude;
-        double fit = rough ? FIT * Math.min(1, width * Math.sqrt(largest)) : FIT;
+        double seen = rough ? 1 : harmonic(square, smallest, greatest);
+        double fit = rough ? FIT * Math.min(1, width * Math.sqrt(largest)) : FIT / seen;
         double allowed = Math.max(fit, noise);
         int degree = StepQuadrature.DEGREE;
-        while (degree > 0 && Math.abs(legendre[degree]) * square <= 0.05 * allowed) {
+        while (degree > 0 && Math.abs(legendre[degree]) * square <= 0.05 * Math.max(Math.min(fit, FIT), noise)) {
             degree--;
         }
         double byFit = 0.9 * Math.pow(allowed / Math.max(tail - 0.7 * noise, 1e-300), 1.0 / StepQuadrature.POINTS);
@@ -411,7 +441,7 @@ final class StepMesh {
         Arrays.fill(powers, 0);
         StepQuadrature.addPowers(legendre, 1, degree, square, powers);
         boolean converged = builder.compute(powers, degree);
-        if (!narrow && !(converged && fits(from, to, square, noise))) {
+        if (!narrow && !(converged && fits(from, to, square, allowed + noise))) {
             suggestion = 0.5;
             return null;
         }
@@ -427,16 +457,26 @@ final class StepMesh {
             left += n % 2 == 0 ? legendre[n] : -legendre[n];
             right += legendre[n];
         }
-        double residue = (rough && tail > noise ? amplitude : tail) / square;
+        double residue = (rough && tail > noise ? amplitude : tail) * seen / square;
         return new PropagationStep(from, width, legendre[0], smallest, left, right, residue, builder);
+    }
+
+    /**
+     * How much of u² is seen by the first Legendre polynomial left out, j_N(ω) ≤ ω^N/(2N+1)!! for a wave of phase ω across the step: what is left out of Q
+     * is orthogonal to the rest.
+     */
+    private double harmonic(double square, double smallest, double greatest) {
+        double omegaSquare = square * Math.max(greatest - lowest, highest - smallest);
+        double ratio = Math.pow(omegaSquare, 0.5 * (StepQuadrature.DEGREE + 1)) * EtaFunctions.atZero(StepQuadrature.DEGREE + 1);
+        return Math.max(1e-6, Math.min(1, ratio));
     }
 
     /**
      * Whether V just inside both ends and the scan's own samples lie on the step's polynomial, so that nothing hides
      * between the Gauss points.
      */
-    private boolean fits(double from, double to, double square, double noise) {
-        double tolerance = (1e-11 + 64 * noise) / square;
+    private boolean fits(double from, double to, double square, double allowed) {
+        double tolerance = (1e-11 + 64 * allowed) / square;
         double left = Math.nextUp(from);
         double right = Math.nextDown(to);
         if (!lies(left, potential.value(left), from, to, square, tolerance)

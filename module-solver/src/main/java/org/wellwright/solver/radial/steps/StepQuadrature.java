@@ -8,7 +8,7 @@ package org.wellwright.solver.radial.steps;
  */
 final class StepQuadrature {
     /** Number of points. */
-    static final int POINTS = 14;
+    static final int POINTS = 12;
     /** Highest degree of the polynomials that are kept; the two above it measure what is left out. */
     static final int DEGREE = POINTS - 3;
 

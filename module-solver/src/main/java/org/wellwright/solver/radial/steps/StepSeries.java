@@ -76,7 +76,7 @@ final class StepSeries {
                 }
                 c[k] = 0.5 * sum / (k + m + 1);
             }
-            double trim = 1e-22 / EtaFunctions.atZero(m + 1);
+            double trim = 1e-19 / EtaFunctions.atZero(m + 1);
             top = wanted;
             while (top >= 0 && Math.abs(c[top]) < trim) {
                 top--;
