@@ -83,8 +83,10 @@ record Scaled(double mantissa, long exponent) {
         return of(mantissa * other.mantissa, exponent + other.exponent);
     }
 
+    /** Two numbers that are both beyond 2^(2^56) have no known quotient. */
     Scaled over(Scaled other) {
-        return other.isZero() ? NAN : of(mantissa / other.mantissa, exponent - other.exponent);
+        boolean unknown = exponent >= LIMIT && other.exponent >= LIMIT;
+        return unknown || other.isZero() ? NAN : of(mantissa / other.mantissa, exponent - other.exponent);
     }
 
     Scaled times(double factor) {

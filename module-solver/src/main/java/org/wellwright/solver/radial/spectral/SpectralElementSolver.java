@@ -49,7 +49,7 @@ public final class SpectralElementSolver implements RadialSolver {
 
     @Override
     public int countBelow(RadialProblem problem, double energy) {
-        LevelSearch search = new LevelSearch(LevelSearch.ALL, energy, 1e-10);
+        LevelSearch search = new LevelSearch(LevelSearch.ALL, energy, LevelSearch.FULL);
         return new SpectralRun(problem, cacheFor(problem), search, SolveMonitor.NONE).count();
     }
 }

@@ -48,6 +48,7 @@ final class StepMesh {
     private final SolveMonitor monitor;
     private final double inverseSquare;
     private final double originPower;
+    private final double originStrength;
     private final double exponent;
 
     private PropagationStep[] outer = new PropagationStep[64];
@@ -101,7 +102,8 @@ final class StepMesh {
         this.monitor = monitor;
         this.where = where;
         inverseSquare = origin.inverseSquare() / kinetic;
-        originPower = origin.power();
+        originPower = origin.power() < 0 ? origin.power() : 0;
+        originStrength = origin.power() < 0 ? origin.coefficient() / kinetic : 0;
         exponent = 0.5 + Math.sqrt(Math.max(0, 0.25 + centrifugal + inverseSquare));
         lowest = scan.hardyBound() / kinetic;
         double edge = potential.breakAbove(scan.anchor());
@@ -278,15 +280,18 @@ final class StepMesh {
                 return true;
             }
         }
-        double suppression = Math.pow(r / scan.anchor(), 2 * exponent - 1);
+        // The first-order correction is exact for the declared power and rough for the rest; what is wrong with it dies
+        // out as the irregular solution does.
+        double rest = Math.abs(w - originStrength * Math.pow(r, originPower + 2));
+        double error = (w0 * w0 + rest) * Math.pow(r / scan.anchor(), 2 * exponent - 1);
         startKind = End.POWER;
-        return w0 * w0 * suppression < 1e-18 && w0 < 1e-3 && potential.breakBelow(r) == 0;
+        return error < 1e-18 && w0 < 1e-3 && potential.breakBelow(r) == 0;
     }
 
     /** u = r^s (1 + w r^q …): r u′/u = s + w/(q + 2s − 1) to first order in w = r²Q − s(s−1), apart for V and for e. */
     private void power(double r, double e, double[] into) {
         double w = r * r * potential.value(r) / kinetic - inverseSquare;
-        double order = 2 + (originPower < 0 ? originPower : 0);
+        double order = 2 + originPower;
         into[0] = 1;
         into[1] = (exponent + w / (order + 2 * exponent - 1) - e * r * r / (1 + 2 * exponent)) / r;
         into[3] = -r / (1 + 2 * exponent);
@@ -300,7 +305,8 @@ final class StepMesh {
             return false;
         }
         double limit = farInverseSquare();
-        if (!(Math.abs(r * r * (potential.value(r) - threshold) / kinetic - limit) < 1e-7)) {
+        double negligible = followsPower() ? 1e-7 : 1e-15;
+        if (!(Math.abs(r * r * (potential.value(r) - threshold) / kinetic - limit) < negligible)) {
             return false;
         }
         for (int i = scan.firstAbove(r); i < scan.size(); i++) {
@@ -310,6 +316,11 @@ final class StepMesh {
             }
         }
         return true;
+    }
+
+    /** Whether V's approach to its limit is a known power of r, so that its first-order effect is known too. */
+    private boolean followsPower() {
+        return potential.tail().known() && potential.tail().power() > -30;
     }
 
     private double farInverseSquare() {

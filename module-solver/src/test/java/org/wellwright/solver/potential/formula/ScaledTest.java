@@ -55,6 +55,8 @@ class ScaledTest {
         assertThat(Scaled.ONE.over(Scaled.ZERO).toDouble()).isNaN();
         assertThat(Scaled.of(-1).ln().toDouble()).isNaN();
         assertThat(Scaled.of(-2).power(Scaled.of(0.5)).toDouble()).isNaN();
+        Scaled beyond = Scaled.of(1e18).exp();
+        assertThat(beyond.over(beyond.times(beyond)).toDouble()).isNaN();
         assertThat(Scaled.of(1e300).exp().over(Scaled.of(1e300)).toDouble()).isEqualTo(Double.POSITIVE_INFINITY);
     }
 }
