@@ -473,12 +473,13 @@ final class StepMesh {
     }
 
     /**
-     * How much of u² is seen by the first Legendre polynomial left out, j_N(ω) ≤ ω^N/(2N+1)!! for a wave of phase ω across the step: what is left out of Q
-     * is orthogonal to the rest.
+     * How much of u² is seen by the first Legendre polynomial left out, j_N(ω) ≤ ω^N/(2N+1)!! for a wave of phase ω
+     * across the step: what is left out of Q is orthogonal to the rest.
      */
     private double harmonic(double square, double smallest, double greatest) {
         double omegaSquare = square * Math.max(greatest - lowest, highest - smallest);
-        double ratio = Math.pow(omegaSquare, 0.5 * (StepQuadrature.DEGREE + 1)) * EtaFunctions.atZero(StepQuadrature.DEGREE + 1);
+        double ratio = Math.pow(omegaSquare, 0.5 * (StepQuadrature.DEGREE + 1))
+                * EtaFunctions.atZero(StepQuadrature.DEGREE + 1);
         return Math.max(1e-6, Math.min(1, ratio));
     }
 

@@ -56,7 +56,8 @@ class AgreementTest {
     void levelsAndCountsAgree(String formula, double kinetic, int l, int count) {
         RadialProblem problem = Problems.formula(formula, kinetic, l);
         Spectrum primary = SPECTRAL.solve(problem, LevelSearch.first(count), SolveMonitor.NONE);
-        List<Level> levels = STEPS.solve(problem, LevelSearch.first(count), SolveMonitor.NONE).levels();
+        List<Level> levels = STEPS.solve(problem, LevelSearch.first(count), SolveMonitor.NONE)
+                .levels();
         assertThat(levels).hasSameSizeAs(primary.levels()).isNotEmpty();
         for (int i = 0; i < levels.size(); i++) {
             Level bound = primary.levels().get(i);
@@ -74,9 +75,14 @@ class AgreementTest {
             if (levels.stream().anyMatch(level -> Math.abs(level.energy() - energy) <= 1e-13 * level.scale())) {
                 continue;
             }
-            long expected = levels.stream().filter(level -> level.energy() < energy).count();
-            assertThat(STEPS.countBelow(problem, energy)).as("second method at %s", energy).isEqualTo((int) expected);
-            assertThat(SPECTRAL.countBelow(problem, energy)).as("first method at %s", energy).isEqualTo((int) expected);
+            long expected =
+                    levels.stream().filter(level -> level.energy() < energy).count();
+            assertThat(STEPS.countBelow(problem, energy))
+                    .as("second method at %s", energy)
+                    .isEqualTo((int) expected);
+            assertThat(SPECTRAL.countBelow(problem, energy))
+                    .as("first method at %s", energy)
+                    .isEqualTo((int) expected);
             asked++;
         }
         assertThat(asked).isGreaterThan(ENERGIES / 40);

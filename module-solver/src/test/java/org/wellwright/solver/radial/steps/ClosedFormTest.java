@@ -79,7 +79,10 @@ class ClosedFormTest {
     @ParameterizedTest
     @ValueSource(ints = {0, 1, 5, 40})
     void kratzer(int l) {
-        check(Problems.formula("-20*(1.5/r - 1.125/r^2)", 0.5, l), 12, n -> -450 / square(n + 0.5 + Math.sqrt(square(l + 0.5) + 45)));
+        check(
+                Problems.formula("-20*(1.5/r - 1.125/r^2)", 0.5, l),
+                12,
+                n -> -450 / square(n + 0.5 + Math.sqrt(square(l + 0.5) + 45)));
     }
 
     /** s − ½ = √(¼ + λ + c/κ), from just above 0 to 60; no level of c/r² − 1/r depends on l and c apart. */
@@ -94,8 +97,7 @@ class ClosedFormTest {
         for (Level level : spectrum.levels()) {
             double n = level.index() + given;
             double rounding = 2 * EPSILON * (0.25 + Math.abs(s * (s - 1))) / (2 * s - 1) * 0.5 / (n * n * n);
-            assertThat(level.energy())
-                    .isCloseTo(-0.25 / (n * n), within(4 * EPSILON * level.scale() + rounding));
+            assertThat(level.energy()).isCloseTo(-0.25 / (n * n), within(4 * EPSILON * level.scale() + rounding));
         }
     }
 
@@ -119,7 +121,9 @@ class ClosedFormTest {
     })
     void sphericalBox(int l, int index, double zero) {
         RadialProblem box = Problems.walled(Problems.shell(0, 0, 1), 2, l, 0, 2.5);
-        Level level = SOLVER.solve(box, LevelSearch.first(index + 1), SolveMonitor.NONE).levels().get(index);
+        Level level = SOLVER.solve(box, LevelSearch.first(index + 1), SolveMonitor.NONE)
+                .levels()
+                .get(index);
         double expected = 2 * square(zero / 2.5);
         assertThat(level.energy()).isCloseTo(expected, within(4 * EPSILON * level.scale()));
     }
@@ -141,7 +145,9 @@ class ClosedFormTest {
     })
     void squareWell(double depth, int l, int index, double expected) {
         RadialProblem well = RadialProblem.single(1, l, Problems.shell(-depth, 0, 1));
-        Level level = SOLVER.solve(well, LevelSearch.first(index + 1), SolveMonitor.NONE).levels().get(index);
+        Level level = SOLVER.solve(well, LevelSearch.first(index + 1), SolveMonitor.NONE)
+                .levels()
+                .get(index);
         assertThat(level.energy()).isCloseTo(expected, within(4 * EPSILON * depth));
     }
 
@@ -149,7 +155,9 @@ class ClosedFormTest {
     @Test
     void squareWellWithAHiddenEdge() {
         RadialProblem well = RadialProblem.single(1, 3, Problems.unknown(r -> r < 1 ? -100 : 0));
-        Level level = SOLVER.solve(well, LevelSearch.first(1), SolveMonitor.NONE).levels().get(0);
+        Level level = SOLVER.solve(well, LevelSearch.first(1), SolveMonitor.NONE)
+                .levels()
+                .get(0);
         double error = Math.abs(level.energy() + 60.07041653892492718628);
         assertThat(error).isLessThan(1e-8).isLessThanOrEqualTo(level.errorEstimate());
     }

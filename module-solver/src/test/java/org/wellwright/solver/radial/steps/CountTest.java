@@ -86,7 +86,8 @@ class CountTest {
             double upper = spectrum.levels().get(2 * pair + 1).energy();
             assertThat(Math.abs(upper - lower)).isLessThan(1e-11 * upper);
         }
-        double between = 0.5 * (spectrum.levels().get(1).energy() + spectrum.levels().get(2).energy());
+        double between = 0.5
+                * (spectrum.levels().get(1).energy() + spectrum.levels().get(2).energy());
         assertThat(SOLVER.countBelow(problem, between)).isEqualTo(2);
     }
 
@@ -101,7 +102,8 @@ class CountTest {
     void emptyWellsHaveNoLevel() {
         assertThat(SOLVER.countBelow(Problems.formula("-exp(-r)", 1, 0), 0)).isZero();
         assertThat(SOLVER.countBelow(Problems.formula("exp(-r)", 1, 0), 0)).isZero();
-        assertThat(SOLVER.solve(Problems.formula("exp(-r)", 1, 0), LevelSearch.all(), SolveMonitor.NONE).levels())
+        assertThat(SOLVER.solve(Problems.formula("exp(-r)", 1, 0), LevelSearch.all(), SolveMonitor.NONE)
+                        .levels())
                 .isEmpty();
     }
 }

@@ -15,8 +15,8 @@ class PublishedLevelsTest {
     private static final PerturbedStepSolver SOLVER = new PerturbedStepSolver();
 
     /**
-     * κ may be a quotient. The tolerance is the table's own last trusted digit or our arithmetic, whichever is larger: 4 eps of
-     * ⟨T⟩ + ⟨|V|⟩, and for κ that is no binary fraction the change of E with κ's rounding.
+     * κ may be a quotient. The tolerance is the table's own last trusted digit or our arithmetic, whichever is larger:
+     * 4 eps of ⟨T⟩ + ⟨|V|⟩, and for κ that is no binary fraction the change of E with κ's rounding.
      */
     @ParameterizedTest(name = "{0}")
     @CsvFileSource(resources = "levels.csv", numLinesToSkip = 1)
