@@ -32,8 +32,8 @@ import org.wellwright.solver.units.ExactNumber;
 /**
  * Makes the example projects: the values of a truth that is not among the candidates, with noise.
  *
- * <p>NAME.truth.wellwright holds the truth, NAME.template.wellwright the project with its data still without values. Run it with the folder of the
- * examples as its argument.
+ * <p>NAME.truth.wellwright holds the truth, NAME.template.wellwright the project with its data still without values.
+ * Run it with the folder of the examples as its argument.
  */
 public final class ExampleGenerator {
     /** Examples by name, with their seeds. */
@@ -71,7 +71,8 @@ public final class ExampleGenerator {
                 truth.models(),
                 template.data(),
                 template.groups());
-        List<ResidualRow> rows = fits.compare(complete, SolveMonitor.NONE).models().get(0).rows();
+        List<ResidualRow> rows =
+                fits.compare(complete, SolveMonitor.NONE).models().get(0).rows();
         Random random = new Random(seed);
         Map<String, Double> shifts = new HashMap<>();
         for (DataGroup group : template.groups()) {
@@ -115,12 +116,14 @@ public final class ExampleGenerator {
             return parameter.withShape(new ParameterShape.Scalar(started(scalar.setting(), digits)));
         }
         if (shape instanceof ParameterShape.MassScaled scaled) {
-            return parameter.withShape(new ParameterShape.MassScaled(started(scaled.setting(), digits), scaled.reference(), scaled.exponent()));
+            return parameter.withShape(new ParameterShape.MassScaled(
+                    started(scaled.setting(), digits), scaled.reference(), scaled.exponent()));
         }
         if (shape instanceof ParameterShape.ByOrbital by) {
             return parameter.withShape(new ParameterShape.ByOrbital(
                     by.entries().stream()
-                            .map(entry -> new ParameterShape.ByOrbital.Entry(entry.orbital(), started(entry.setting(), digits)))
+                            .map(entry -> new ParameterShape.ByOrbital.Entry(
+                                    entry.orbital(), started(entry.setting(), digits)))
                             .toList(),
                     by.others()));
         }
@@ -142,7 +145,8 @@ public final class ExampleGenerator {
     private static ExactNumber rounded(double value, double sigma) {
         BigDecimal two = new BigDecimal(sigma).round(new MathContext(2));
         int decimals = two.scale();
-        return new ExactNumber(new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN).toPlainString());
+        return new ExactNumber(
+                new BigDecimal(value).setScale(decimals, RoundingMode.HALF_EVEN).toPlainString());
     }
 
     private static Project read(String resource) throws IOException {

@@ -104,9 +104,11 @@ public final class UnitExpression {
                 && unit.frequency();
     }
 
-    /** Its dimension with "cm^-1" read as an energy where it stands alone. */
+    /**
+     * Its dimension, with "cm^-1" read as an energy unless another factor is one: "cm^-1/angstrom^2", but "eV cm^-1".
+     */
     public Dimension dimension() {
-        return dimension(merged(factors, factors.size() == 1));
+        return dimension(merged(factors, factors.stream().noneMatch(factor -> factor.unit() instanceof EnergyUnit)));
     }
 
     /**

@@ -35,6 +35,13 @@ class UnitExpressionTest {
     }
 
     @Test
+    void wavenumbersInACompoundAreEnergiesUnlessItHasOne() {
+        assertThat(UnitExpression.parse("cm^-1/angstrom^2").dimension()).isEqualTo(new Dimension(1, -2, 0));
+        assertThat(UnitExpression.parse("cm^-1 angstrom^6").dimension()).isEqualTo(new Dimension(1, 6, 0));
+        assertThat(UnitExpression.parse("eV cm^-1").dimension()).isEqualTo(new Dimension(1, -1, 0));
+    }
+
+    @Test
     void readsWavenumberAsEnergyOrInverseLengthWhicheverFits() {
         UnitExpression unit = UnitExpression.parse("cm^-1");
         assertThat(unit.factorTo(UnitSystem.SPECTROSCOPIC, Dimension.ENERGY)).isEqualTo(1);
