@@ -41,7 +41,9 @@ class PackageTest {
         try (ZipFile content = new ZipFile(zip.toFile())) {
             List<String> names = content.stream().map(entry -> entry.getName()).toList();
             assertThat(names).contains("wellwright/bin/wellwright", "wellwright/bin/wellwright-batch");
-            assertThat(names).noneMatch(name -> name.contains("driver") || name.contains("example-family"));
+            assertThat(names)
+                    .noneMatch(name ->
+                            name.contains("driver") || name.contains("example-family") || name.endsWith(".jsa"));
         }
     }
 

@@ -30,7 +30,7 @@ class ArchitectureTest {
             .resideOutsideOfPackage("org.wellwright.project.command..")
             .should()
             .dependOnClassesThat()
-            .resideInAPackage("picocli..");
+            .resideInAPackage("org.apache.commons.cli..");
 
     @ArchTest
     static final ArchRule vectorWritersStayInTheReport = noClasses()
