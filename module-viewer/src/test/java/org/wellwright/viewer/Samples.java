@@ -53,7 +53,7 @@ public final class Samples {
     public static FigureInput atom(String title, List<String> names, int n, int largest) {
         List<SolvedModel> models = new ArrayList<>();
         for (int i = 0; i < names.size(); i++) {
-            models.add(model(names.get(i), 0.35 - 0.17 * i, n, largest));
+            models.add(model(names.get(i), 0.17 * (2 - i), n, largest));
         }
         List<MeasuredLevel> measured = new ArrayList<>();
         List<Datum> data = new ArrayList<>();

@@ -43,16 +43,11 @@ public final class FigureExport implements FigureWriter {
         if (missing.isPresent()) {
             throw new InvalidModelException(missing.get());
         }
-        FigureFacts facts = FigureFacts.of(figure, dressed, version());
+        FigureFacts facts = FigureFacts.of(figure, dressed, Version.text());
         return switch (sheet.format()) {
             case PNG -> PngFigure.bytes(figure, dressed, sheet, facts);
             case SVG -> SvgFigure.bytes(figure, dressed, sheet, facts);
             case PDF -> PdfFigure.bytes(figure, dressed, sheet, facts);
         };
-    }
-
-    private static String version() {
-        String version = FigureExport.class.getPackage().getImplementationVersion();
-        return version == null ? "development" : version;
     }
 }
