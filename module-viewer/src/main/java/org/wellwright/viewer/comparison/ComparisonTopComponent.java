@@ -51,7 +51,8 @@ public final class ComparisonTopComponent extends FigureWindow {
         data = new TextTable("comparison.data", Bundle.LBL_Comparisons(), this::pickDatum);
         JPanel tables = new JPanel(new BorderLayout(0, 4));
         JScrollPane head = new JScrollPane(ranking);
-        int height = ranking.getRowHeight() * ROWS_OF_RANKING + ranking.getTableHeader().getPreferredSize().height;
+        int height = ranking.getRowHeight() * ROWS_OF_RANKING
+                + ranking.getTableHeader().getPreferredSize().height;
         head.setPreferredSize(new Dimension(100, height));
         tables.add(head, BorderLayout.NORTH);
         tables.add(new JScrollPane(data), BorderLayout.CENTER);
@@ -81,7 +82,8 @@ public final class ComparisonTopComponent extends FigureWindow {
 
     private void pickDatum(int row) {
         if (shown != null && row < shown.levels().size()) {
-            select(new FigureSelection(selection().model(), List.copyOf(shown.levels().get(row)), 0));
+            select(new FigureSelection(
+                    selection().model(), List.copyOf(shown.levels().get(row)), 0));
         }
     }
 

@@ -30,7 +30,8 @@ record ComparisonViewModel(TableText ranking, List<String> ranked, TableText dat
     }
 
     static ComparisonViewModel of(FigureInput input) {
-        List<ModelComparison> models = input.comparison() == null ? List.of() : input.comparison().models();
+        List<ModelComparison> models =
+                input.comparison() == null ? List.of() : input.comparison().models();
         return new ComparisonViewModel(
                 ranking(models),
                 models.stream().map(ModelComparison::model).toList(),
@@ -46,7 +47,8 @@ record ComparisonViewModel(TableText ranking, List<String> ranked, TableText dat
         List<List<Cell>> rows = new ArrayList<>();
         for (ModelComparison model : models) {
             double reduced = model.quality().reducedChiSquare();
-            String problem = model.problems().isEmpty() ? "" : model.problems().get(0).sentence();
+            String problem =
+                    model.problems().isEmpty() ? "" : model.problems().get(0).sentence();
             rows.add(List.of(
                     Cell.of(Integer.toString(model.rank())),
                     Cell.of(model.model()),
@@ -114,7 +116,9 @@ record ComparisonViewModel(TableText ranking, List<String> ranked, TableText dat
                     row.add(Cell.of(residual.predicted() + residual.groupShift(), residual.sigma()));
                     row.add(
                             Double.isFinite(residual.residual())
-                                    ? new Cell(Ticks.label(residual.residual(), 0.01), Double.toString(residual.residual()))
+                                    ? new Cell(
+                                            Ticks.label(residual.residual(), 0.01),
+                                            Double.toString(residual.residual()))
                                     : Cell.of("–"));
                 }
                 return;

@@ -12,10 +12,7 @@ import org.wellwright.viewer.picture.FigureWindow;
 @TopComponent.OpenActionRegistration(displayName = "#CTL_DensityWindow", preferredID = DensityTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.viewer.density.DensityTopComponent")
 @ActionReference(path = "Menu/Window", position = 240)
-@Messages({
-    "CTL_DensityWindow=Density",
-    "HINT_DensityWindow=The density of the selected state in a plane"
-})
+@Messages({"CTL_DensityWindow=Density", "HINT_DensityWindow=The density of the selected state in a plane"})
 public final class DensityTopComponent extends FigureWindow {
     static final String ID = "DensityTopComponent";
     private static final long serialVersionUID = 1L;

@@ -12,10 +12,7 @@ import org.wellwright.viewer.picture.FigureWindow;
 @TopComponent.OpenActionRegistration(displayName = "#CTL_LevelsWindow", preferredID = LevelsTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.viewer.levels.LevelsTopComponent")
 @ActionReference(path = "Menu/Window", position = 210)
-@Messages({
-    "CTL_LevelsWindow=Level diagram",
-    "HINT_LevelsWindow=Calculated levels beside measured ones"
-})
+@Messages({"CTL_LevelsWindow=Level diagram", "HINT_LevelsWindow=Calculated levels beside measured ones"})
 public final class LevelsTopComponent extends FigureWindow {
     static final String ID = "LevelsTopComponent";
     private static final long serialVersionUID = 1L;

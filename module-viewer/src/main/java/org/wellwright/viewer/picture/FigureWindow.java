@@ -38,8 +38,8 @@ import org.wellwright.viewer.plot.Picture;
 import org.wellwright.viewer.plot.Viewport;
 
 /**
- * The window of one figure of the selected project. It shows what the session's solution gives and the selection asks for, and changes nothing but the selection.
- * Event thread only.
+ * The window of one figure of the selected project. It shows what the session's solution gives and the selection asks
+ * for, and changes nothing but the selection. Event thread only.
  */
 @Messages({
     "MSG_FigureSolving=Solving the project…",
@@ -88,7 +88,8 @@ public abstract class FigureWindow extends SessionWindow {
      * @param figure the figure
      * @param pictures makes the picture of a request that the figure does not find missing
      */
-    protected FigureWindow(String prefix, FigureProvider figure, Function<FigureRequest, Picture> pictures, Parts parts) {
+    protected FigureWindow(
+            String prefix, FigureProvider figure, Function<FigureRequest, Picture> pictures, Parts parts) {
         this.figure = figure;
         this.prefix = prefix;
         this.canvas = new FigureCanvas(WORK, SwingUtilities::invokeLater);
@@ -110,7 +111,10 @@ public abstract class FigureWindow extends SessionWindow {
         install(content, new EmptyState(Bundle.MSG_FigureNone(), Bundle.MSG_FigureNoneRemedy()));
     }
 
-    /** Puts the picture and whatever else there is together; the picture alone if not overridden. Called once, while the window is made. */
+    /**
+     * Puts the picture and whatever else there is together; the picture alone if not overridden. Called once, while the
+     * window is made.
+     */
     protected JComponent content(JComponent picture) {
         return picture;
     }
@@ -293,7 +297,8 @@ public abstract class FigureWindow extends SessionWindow {
             }
         }
         try {
-            canvas.setView(new Viewport(number(state, "left"), number(state, "right"), number(state, "bottom"), number(state, "top")));
+            canvas.setView(new Viewport(
+                    number(state, "left"), number(state, "right"), number(state, "bottom"), number(state, "top")));
         } catch (NumberFormatException e) {
             canvas.showAll();
         }

@@ -91,14 +91,19 @@ final class SaveFigure {
         int width = Math.max(320, size.width);
         int height = Math.max(200, size.height);
         FigureRequest now = shown.request();
-        FigureRequest request = new FigureRequest(now.input(), now.selection(), now.variant(), FigureRequest.Ground.LIGHT, now.font());
+        FigureRequest request =
+                new FigureRequest(now.input(), now.selection(), now.variant(), FigureRequest.Ground.LIGHT, now.font());
         try {
             writer.write(
-                    new AsShown(figure, shown, view), request, new FigureWriter.Sheet(format, width, height, PRINT_DPI), file);
+                    new AsShown(figure, shown, view),
+                    request,
+                    new FigureWriter.Sheet(format, width, height, PRINT_DPI),
+                    file);
             StatusDisplayer.getDefault().setStatusText(Bundle.MSG_FigureSaved(file));
         } catch (IOException | WellwrightException e) {
             String text = Bundle.MSG_FigureNotSaved(file, e.getMessage());
-            DialogDisplayer.getDefault().notifyLater(new NotifyDescriptor.Message(text, NotifyDescriptor.ERROR_MESSAGE));
+            DialogDisplayer.getDefault()
+                    .notifyLater(new NotifyDescriptor.Message(text, NotifyDescriptor.ERROR_MESSAGE));
         }
     }
 

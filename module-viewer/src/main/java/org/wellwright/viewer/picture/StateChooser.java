@@ -20,7 +20,9 @@ import org.wellwright.solver.model.LevelKey;
 import org.wellwright.viewer.plot.LevelText;
 import org.wellwright.viewer.plot.Picks;
 
-/** Choosers of the model and the level in front, and of m; they follow the selection and change it. Event thread only. */
+/**
+ * Choosers of the model and the level in front, and of m; they follow the selection and change it. Event thread only.
+ */
 @Messages({
     "LBL_ChooseModel=Model",
     "LBL_ChooseLevel=Level",

@@ -36,7 +36,10 @@ public record TableText(List<Column> columns, List<List<Cell>> rows) {
             return new Cell(text, "");
         }
 
-        /** A number rounded to the second digit of its uncertainty, or to eight digits without one; all digits in the hint. */
+        /**
+         * A number rounded to the second digit of its uncertainty, or to eight digits without one; all digits in the
+         * hint.
+         */
         public static Cell of(double value, double sigma) {
             if (!Double.isFinite(value)) {
                 return of("–");
@@ -54,7 +57,8 @@ public record TableText(List<Column> columns, List<List<Cell>> rows) {
         rows = rows.stream().map(List::copyOf).toList();
         for (List<Cell> row : rows) {
             if (row.size() != columns.size()) {
-                throw new IllegalArgumentException("a row has %d cells for %d columns".formatted(row.size(), columns.size()));
+                throw new IllegalArgumentException(
+                        "a row has %d cells for %d columns".formatted(row.size(), columns.size()));
             }
         }
     }

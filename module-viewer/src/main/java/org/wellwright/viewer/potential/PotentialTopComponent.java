@@ -12,9 +12,7 @@ import org.wellwright.viewer.picture.FigureWindow;
 @TopComponent.OpenActionRegistration(displayName = "#CTL_PotentialWindow", preferredID = PotentialTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.viewer.potential.PotentialTopComponent")
 @ActionReference(path = "Menu/Window", position = 220)
-@Messages({
-    "CTL_PotentialWindow=Potentials",
-    "HINT_PotentialWindow=Potentials with levels between their turning points"
+@Messages({"CTL_PotentialWindow=Potentials", "HINT_PotentialWindow=Potentials with levels between their turning points"
 })
 public final class PotentialTopComponent extends FigureWindow {
     static final String ID = "PotentialTopComponent";

@@ -96,8 +96,12 @@ public final class PredictionsTopComponent extends SessionWindow {
 
     private void pick(int row) {
         OpenProjects projects = Lookup.getDefault().lookup(OpenProjects.class);
-        if (projects != null && session() != null && shown != null && row < shown.levels().size()) {
-            projects.select(new FigureSelection(selection().model(), List.of(shown.levels().get(row)), 0));
+        if (projects != null
+                && session() != null
+                && shown != null
+                && row < shown.levels().size()) {
+            projects.select(new FigureSelection(
+                    selection().model(), List.of(shown.levels().get(row)), 0));
         }
     }
 

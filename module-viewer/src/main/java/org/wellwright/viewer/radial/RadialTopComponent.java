@@ -12,10 +12,7 @@ import org.wellwright.viewer.picture.FigureWindow;
 @TopComponent.OpenActionRegistration(displayName = "#CTL_RadialWindow", preferredID = RadialTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.viewer.radial.RadialTopComponent")
 @ActionReference(path = "Menu/Window", position = 230)
-@Messages({
-    "CTL_RadialWindow=Radial functions",
-    "HINT_RadialWindow=Radial functions of the selected levels"
-})
+@Messages({"CTL_RadialWindow=Radial functions", "HINT_RadialWindow=Radial functions of the selected levels"})
 public final class RadialTopComponent extends FigureWindow {
     static final String ID = "RadialTopComponent";
     private static final long serialVersionUID = 1L;

@@ -12,10 +12,7 @@ import org.wellwright.viewer.picture.FigureWindow;
 @TopComponent.OpenActionRegistration(displayName = "#CTL_SpectrumWindow", preferredID = SpectrumTopComponent.ID)
 @ActionID(category = "Window", id = "org.wellwright.viewer.spectrum.SpectrumTopComponent")
 @ActionReference(path = "Menu/Window", position = 260)
-@Messages({
-    "CTL_SpectrumWindow=Lines",
-    "HINT_SpectrumWindow=Calculated lines beside measured ones"
-})
+@Messages({"CTL_SpectrumWindow=Lines", "HINT_SpectrumWindow=Calculated lines beside measured ones"})
 public final class SpectrumTopComponent extends FigureWindow {
     static final String ID = "SpectrumTopComponent";
     private static final long serialVersionUID = 1L;

@@ -16,14 +16,29 @@ class ComparisonViewModelTest {
         ComparisonViewModel model = ComparisonViewModel.of(input);
         assertThat(model.ranked()).containsExactly("screened core", "polarised core", "point charge");
         assertThat(texts(model.ranking().rows().get(0))).startsWith("1", "screened core");
-        assertThat(model.data().columns()).extracting(TableText.Column::title)
-                .containsExactly("Datum", "What", "Measured", "σ", "Unit", "screened core", "residual/σ", "polarised core", "residual/σ", "point charge", "residual/σ");
+        assertThat(model.data().columns())
+                .extracting(TableText.Column::title)
+                .containsExactly(
+                        "Datum",
+                        "What",
+                        "Measured",
+                        "σ",
+                        "Unit",
+                        "screened core",
+                        "residual/σ",
+                        "polarised core",
+                        "residual/σ",
+                        "point charge",
+                        "residual/σ");
         assertThat(model.data().rows()).hasSameSizeAs(input.document().data());
         List<String> first = texts(model.data().rows().get(0));
-        assertThat(first.subList(0, 5)).containsExactly("d0", "1s", input.document().data().get(0).value().text(), "0.0025", "hartree");
+        assertThat(first.subList(0, 5))
+                .containsExactly(
+                        "d0", "1s", input.document().data().get(0).value().text(), "0.0025", "hartree");
         // Rounded to the second digit of σ = 0.0025: the point charge's −0.5.
         assertThat(first.get(9)).isEqualTo("−0.5000");
-        assertThat(model.levels().get(0)).containsExactly(input.models().get(0).channels().get(0).key(0));
+        assertThat(model.levels().get(0))
+                .containsExactly(input.models().get(0).channels().get(0).key(0));
     }
 
     @Test
