@@ -2,6 +2,7 @@ package org.wellwright.solver.potential;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
 import java.util.function.DoubleUnaryOperator;
@@ -36,12 +37,15 @@ public final class EvaluatorLaws {
             }
             for (int i = 0; i < points; i++) {
                 double r = low * Math.pow(high / low, random.nextDouble());
+                if (r < v.walls().inner() || r > v.walls().outer()) {
+                    continue;
+                }
                 double room = Math.min(0.1 * r, 0.4 * distanceToBreak(v, r));
                 if (room < 1e-3 * r) {
                     continue;
                 }
                 exact[i] = j < 0 ? v.slope(r) : v.parameterDerivative(j, r);
-                difference[i] = j < 0 ? derivative(v::value, r, room) : parameterDifference(family, values, j, r, room);
+                difference[i] = j < 0 ? derivative(v::value, r, room, 7) : parameterDifference(family, values, j, r, room);
             }
             assertThat(largest).isFinite();
             for (int i = 0; i < points; i++) {
@@ -57,7 +61,7 @@ public final class EvaluatorLaws {
         double size = values[j] == 0 ? 1 : Math.abs(values[j]);
         // A moving break point must not reach r.
         double step = 0.05 * size;
-        for (BreakPoint point : family.apply(values).breakPoints()) {
+        for (BreakPoint point : edges(family.apply(values))) {
             double speed = point.radiusGradient().isEmpty()
                     ? 0
                     : Math.abs(point.radiusGradient().get(j));
@@ -70,12 +74,26 @@ public final class EvaluatorLaws {
                     return family.apply(changed).value(r);
                 },
                 values[j],
-                step);
+                step,
+                5);
+    }
+
+    /** Break points and walls. */
+    private static List<BreakPoint> edges(TermEvaluator v) {
+        List<BreakPoint> edges = new ArrayList<>(v.breakPoints());
+        HardWalls walls = v.walls();
+        if (walls.inner() > 0) {
+            edges.add(new BreakPoint(walls.inner(), BreakPoint.Kind.KNOT, 0, walls.innerGradient()));
+        }
+        if (walls.outer() < Double.POSITIVE_INFINITY) {
+            edges.add(new BreakPoint(walls.outer(), BreakPoint.Kind.KNOT, 0, walls.outerGradient()));
+        }
+        return edges;
     }
 
     private static double distanceToBreak(TermEvaluator v, double r) {
         double least = Double.POSITIVE_INFINITY;
-        for (BreakPoint point : v.breakPoints()) {
+        for (BreakPoint point : edges(v)) {
             least = Math.min(least, Math.abs(point.radius() - r));
         }
         return least;
@@ -84,8 +102,7 @@ public final class EvaluatorLaws {
     /**
      * Central differences with halved steps, extrapolated (Ridders 1982); the entry with the smallest change is taken.
      */
-    public static double derivative(DoubleUnaryOperator f, double x, double step) {
-        int n = 8;
+    public static double derivative(DoubleUnaryOperator f, double x, double step, int n) {
         double[][] table = new double[n][n];
         double best = Double.NaN;
         double error = Double.POSITIVE_INFINITY;

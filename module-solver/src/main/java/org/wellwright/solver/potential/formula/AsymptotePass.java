@@ -27,6 +27,9 @@ final class AsymptotePass {
                 lead = term;
             }
         }
+        if (lead != null && lead.order().power() > 2 + 1e-12) {
+            inverseSquare = 0; // what a stronger core hides
+        }
         boolean hidden = series.remainder().power() > 1e-12;
         if (lead == null) {
             return new OriginBehaviour(inverseSquare, 0, 0, !hidden);
@@ -132,6 +135,8 @@ final class AsymptotePass {
                         ? saturated(a, 2, 0)
                         : Asymptote.constant(1)
                                 .plus(a.compose(Taylor.erf(a.limit())).negate());
+            case DAMP -> damp(a, b);
+            case SPHERICAL_BESSEL -> sphericalBessel(a, b);
             case ABS -> a.sign() == null ? null : a.sign() < 0 ? a.negate() : a;
             case STEP -> a.sign() == null ? null : Asymptote.constant(a.sign() < 0 ? 0 : 1);
             case MIN -> larger(a, b) == null ? null : larger(a, b) > 0 ? b : a;
@@ -188,6 +193,22 @@ final class AsymptotePass {
         }
         return Asymptote.of(
                 PowerLogSeries.constant(a.sign() < 0 ? below : above).inexact());
+    }
+
+    private static Asymptote damp(Asymptote order, Asymptote x) {
+        int n = (int) order.limit();
+        if (Double.isNaN(x.limit())) {
+            return x.sign() == null || x.sign() < 0 ? null : saturated(x, Double.NaN, 1);
+        }
+        return x.limit() == 0 ? times(x.power(n + 1.0), x.compose(Taylor.damp(n))) : null;
+    }
+
+    private static Asymptote sphericalBessel(Asymptote order, Asymptote x) {
+        int n = (int) order.limit();
+        if (Double.isNaN(x.limit())) {
+            return times(Asymptote.BOUNDED, x.power(-1));
+        }
+        return x.limit() == 0 ? times(x.power(n), x.compose(Taylor.sphericalBessel(n))) : null;
     }
 
     private static Integer larger(Asymptote a, Asymptote b) {

@@ -57,12 +57,21 @@ final class BreakPointSearch {
             Crossing first = crossings.get(i);
             while (i < crossings.size()
                     && crossings.get(i).radius() - first.radius() <= 8 * Math.ulp(first.radius())
-                    && crossings.get(i).gradient().equals(first.gradient())) {
+                    && moveAlike(crossings.get(i).gradient(), first.gradient())) {
                 together.add(crossings.get(i++));
             }
             points.add(point(together));
         }
         return List.copyOf(points);
+    }
+
+    private static boolean moveAlike(List<Double> a, List<Double> b) {
+        for (int j = 0; j < a.size(); j++) {
+            if (Math.abs(a.get(j) - b.get(j)) > 1e-9 * (Math.abs(a.get(j)) + Math.abs(b.get(j)))) {
+                return false;
+            }
+        }
+        return true;
     }
 
     private BreakPoint point(List<Crossing> together) {

@@ -39,6 +39,11 @@ final class FormulaParser {
      * @throws FaultyFormula at the first fault
      */
     static Graph parse(String text) {
+        return parse(text, List.of());
+    }
+
+    /** The same with some parameters known beforehand, which come first. */
+    static Graph parse(String text, List<String> names) {
         if (text.length() > MAX_LENGTH) {
             throw new FaultyFormula(
                     MAX_LENGTH,
@@ -47,6 +52,9 @@ final class FormulaParser {
                     "shorten it, or split it into several terms");
         }
         FormulaParser parser = new FormulaParser(text);
+        for (String name : names) {
+            parser.graph.name(name, 0);
+        }
         return parser.graph.build(parser.program());
     }
 
@@ -271,6 +279,9 @@ final class FormulaParser {
         }
         close(")", open);
         depth--;
+        if (function.takesOrder()) {
+            return withOrder(word, open, function, arguments);
+        }
         boolean many = function == Operation.MIN || function == Operation.MAX;
         if (many ? arguments.size() < 2 : arguments.size() != 1) {
             throw fault(
@@ -287,6 +298,22 @@ final class FormulaParser {
             value = graph.binary(function, value, arguments.get(i));
         }
         return value;
+    }
+
+    private int withOrder(Lexeme word, Lexeme open, Operation function, List<Integer> arguments) {
+        if (arguments.size() != 2) {
+            throw fault(
+                    word, "%s takes two arguments, got %d".formatted(word.text(), arguments.size()), "write " + word.text() + "(n, x)");
+        }
+        int order = arguments.get(0);
+        if (!graph.isInteger(order) || graph.number(order) < 0 || graph.number(order) > SpecialFunctions.MAX_ORDER) {
+            throw fault(
+                    open.end(),
+                    open.end() + 1,
+                    "the order of %s must be a whole number from 0 to %d".formatted(word.text(), SpecialFunctions.MAX_ORDER),
+                    "");
+        }
+        return graph.binary(function, order, arguments.get(1));
     }
 
     /** sum(i, from, to, body): the body is read once for every value of i. */

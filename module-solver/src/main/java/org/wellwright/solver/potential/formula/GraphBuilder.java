@@ -49,13 +49,18 @@ final class GraphBuilder {
     }
 
     int parameter(String name, int start) {
+        return put(Operation.PARAMETER, name(name, start), -1, 0, false);
+    }
+
+    /** Index of a parameter, which is made if it is new. */
+    int name(String name, int start) {
         int index = names.indexOf(name);
         if (index < 0) {
             index = names.size();
             names.add(name);
             nameStarts.add(start);
         }
-        return put(Operation.PARAMETER, index, -1, 0, false);
+        return index;
     }
 
     private Operation operation(int node) {

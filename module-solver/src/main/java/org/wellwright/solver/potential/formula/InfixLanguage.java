@@ -22,8 +22,17 @@ public final class InfixLanguage implements FormulaLanguage {
 
     @Override
     public Formula parse(String text) {
+        return parse(text, List.of());
+    }
+
+    /**
+     * A formula whose names begin with the given ones, used or not, in that order.
+     *
+     * @throws InvalidModelException at the first fault
+     */
+    public Formula parse(String text, List<String> names) {
         try {
-            return new ParsedFormula(text, FormulaParser.parse(text));
+            return new ParsedFormula(text, FormulaParser.parse(text, names));
         } catch (FaultyFormula fault) {
             throw new InvalidModelException(fault.in(text).problem());
         }

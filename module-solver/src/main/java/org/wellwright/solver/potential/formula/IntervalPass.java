@@ -12,6 +12,9 @@ final class IntervalPass {
     private static final Interval TWO_OVER_ROOT_PI =
             new Interval(Math.nextDown(1.1283791670955126), Math.nextUp(1.1283791670955126));
 
+    private static final int MAX_SPLITS = 8;
+    private static final double NEAR = 1.01;
+
     private final Graph graph;
     private final Interval[] value;
     private final Interval[] slope;
@@ -53,26 +56,35 @@ final class IntervalPass {
     }
 
     static Interval enclose(BoundFormula formula, double from, double to) {
+        return enclose(formula, from, to, MAX_SPLITS);
+    }
+
+    /** Splits the range where V is not surely monotone, until the bounds are near values that V takes. */
+    private static Interval enclose(BoundFormula formula, double from, double to, int splits) {
         Program program = formula.program();
         IntervalPass pass = new IntervalPass(program, new Interval(from, to), program.root());
-        Interval natural = pass.value[pass.root];
+        Interval bounds = pass.value[pass.root];
         Interval slope = pass.slope[pass.root];
+        Interval first = at(formula, from);
         if (from == to) {
-            return natural.meet(at(formula, from));
+            return bounds.meet(first);
         }
+        boolean endless = to == Double.POSITIVE_INFINITY;
+        Interval ends = first.hull(endless ? atInfinity(formula.tail(), formula.value(from)) : at(formula, to));
         if (slope.lower() >= 0 || slope.upper() <= 0) {
-            return natural.meet(at(formula, from)
-                    .hull(
-                            to == Double.POSITIVE_INFINITY
-                                    ? atInfinity(formula.tail(), formula.value(from))
-                                    : at(formula, to)));
+            return bounds.meet(ends);
         }
-        if (slope.isBounded() && to < Double.POSITIVE_INFINITY) {
-            double middle = from + (to - from) / 2;
+        double middle = endless ? 2 * from : from + (to - from) / 2;
+        if (slope.isBounded() && !endless) {
             Interval away = new Interval(from, to).minus(Interval.of(middle));
-            return natural.meet(at(formula, middle).plus(slope.times(away)));
+            bounds = bounds.meet(at(formula, middle).plus(slope.times(away)));
         }
-        return natural;
+        boolean near = bounds.width() <= NEAR * ends.hull(at(formula, middle)).width();
+        if (splits == 0 || near || !(from < middle && middle < to)) {
+            return bounds;
+        }
+        Interval parts = enclose(formula, from, middle, splits - 1).hull(enclose(formula, middle, to, splits - 1));
+        return bounds.meet(parts);
     }
 
     private static Interval at(BoundFormula formula, double r) {
@@ -119,6 +131,8 @@ final class IntervalPass {
             case ERFC -> IntervalFunctions.erfc(a);
             case ABS -> a.abs();
             case STEP -> IntervalFunctions.step(a);
+            case DAMP -> SpecialFunctions.damp((int) a.lower(), b);
+            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBessel((int) a.lower(), b);
             case MIN -> a.min(b);
             case MAX -> a.max(b);
             default -> throw new IllegalArgumentException(operation + " has no operands");
@@ -144,6 +158,8 @@ final class IntervalPass {
                 Interval difference = operation == Operation.MIN ? a.minus(b) : b.minus(a);
                 yield difference.upper() < 0 ? da : difference.lower() > 0 ? db : da.hull(db);
             }
+            case DAMP -> SpecialFunctions.dampSlope((int) a.lower(), b).times(db);
+            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBesselSlope((int) a.lower(), b).times(db);
             case STEP -> a.contains(0) ? Interval.ENTIRE : Interval.ZERO;
             default -> da.lower() == 0 && da.upper() == 0 ? Interval.ZERO : da.times(partial(operation, a, v));
         };

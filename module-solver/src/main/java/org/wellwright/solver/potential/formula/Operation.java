@@ -35,6 +35,8 @@ enum Operation {
     ERFC(1, "complementary error function", "erfc"),
     ABS(1, "absolute value", "abs"),
     STEP(1, "1 for x > 0, 0 for x < 0; its edge is a break point", "step", "heaviside"),
+    DAMP(2, "damp(n, x): 1 - exp(-x) sum x^k/k!, k = 0..n, without cancellation", "damp"),
+    SPHERICAL_BESSEL(2, "sphj(n, x): spherical Bessel function of the first kind", "sphj"),
     MIN(2, "the smaller of two", "min"),
     MAX(2, "the larger of two", "max");
 
@@ -68,6 +70,11 @@ enum Operation {
     /** Whether V is not smooth where the argument (for min and max the difference of both) is zero. */
     boolean breaks() {
         return this == ABS || this == STEP || this == MIN || this == MAX;
+    }
+
+    /** Whether the first operand must be a whole number that the text states. */
+    boolean takesOrder() {
+        return this == DAMP || this == SPHERICAL_BESSEL;
     }
 
     static Optional<Operation> function(String name) {

@@ -37,6 +37,8 @@ final class Real {
             case ERFC -> Erfc.value(a);
             case ABS -> Math.abs(a);
             case STEP -> step(a);
+            case DAMP -> SpecialFunctions.damp((int) a, b);
+            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBessel((int) a, b);
             case MIN -> Math.min(a, b);
             case MAX -> Math.max(a, b);
             default -> throw new IllegalArgumentException(operation + " has no operands");
@@ -100,7 +102,7 @@ final class Real {
             case ERF -> 2 / Math.sqrt(Math.PI) * Math.exp(-a * a);
             case ERFC -> -2 / Math.sqrt(Math.PI) * Math.exp(-a * a);
             case ABS -> a < 0 ? -1 : 1;
-            case STEP -> 0;
+            case STEP, DAMP, SPHERICAL_BESSEL -> 0;
             case MIN -> a <= b ? 1 : 0;
             case MAX -> a >= b ? 1 : 0;
             default -> throw new IllegalArgumentException(operation + " has no operands");
@@ -115,6 +117,8 @@ final class Real {
             case MULTIPLY -> a;
             case DIVIDE -> -v / b;
             case POWER -> v == 0 ? 0 : v * Math.log(a);
+            case DAMP -> SpecialFunctions.dampSlope((int) a, b);
+            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBesselSlope((int) a, b);
             case MIN -> a <= b ? 0 : 1;
             case MAX -> a >= b ? 0 : 1;
             default -> throw new IllegalArgumentException(operation + " has no second operand");

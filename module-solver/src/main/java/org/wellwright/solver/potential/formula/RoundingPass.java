@@ -66,6 +66,8 @@ final class RoundingPass {
             case ERF -> 6 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
             case ERFC ->
                 16 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
+            case DAMP -> SpecialFunctions.DAMP_UNITS * U * size + eb * largestDampSlope((int) a, b, eb) + Double.MIN_VALUE;
+            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBesselError((int) a, b) + 0.5 * eb;
             case STEP -> Math.abs(a) > ea || a == 0 && ea == 0 ? 0 : 1;
             default -> 0;
         };
@@ -135,6 +137,12 @@ final class RoundingPass {
         return far < 1
                 ? library(ea / Math.sqrt((1 - far) * (1 + far)) * (1 + 8 * U), size)
                 : 2 * Math.sqrt(2 * ea) + library(0, size);
+    }
+
+    /** The slope xⁿe^(−x)/n! is largest at x = n. */
+    private static double largestDampSlope(int n, double x, double error) {
+        double nearest = x + error < n ? x + error : x - error > n ? x - error : n;
+        return SpecialFunctions.dampSlope(n, nearest) * 1.01;
     }
 
     private static double square(double x) {

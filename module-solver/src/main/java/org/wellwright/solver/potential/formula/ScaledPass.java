@@ -89,6 +89,7 @@ final class ScaledPass {
             case POWER ->
                 Real.isSmallInteger(b.toDouble()) ? Math.abs(b.toDouble()) + 1 : 8 + 1500 * Math.abs(b.toDouble());
             case ERFC -> 16;
+            case DAMP, SPHERICAL_BESSEL -> 1_000;
             default -> 8;
         };
     }
@@ -156,7 +157,7 @@ final class ScaledPass {
             case POWER -> v.isZero() ? Scaled.ZERO : v.times(a.ln());
             case MIN -> a.compare(b) <= 0 ? Scaled.ZERO : Scaled.ONE;
             case MAX -> a.compare(b) >= 0 ? Scaled.ZERO : Scaled.ONE;
-            default -> throw new IllegalArgumentException(operation + " has no second operand");
+            default -> Scaled.of(Real.rightPartial(operation, a.toDouble(), b.toDouble(), v.toDouble()));
         };
     }
 }

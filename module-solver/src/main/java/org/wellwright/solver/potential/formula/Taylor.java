@@ -56,6 +56,34 @@ final class Taylor {
         return integrated(Real.apply(Operation.ERF, c, 0), g);
     }
 
+    /** Coefficients of damp(n, x)/x^(n+1) = Σ (−x)^k/(n! k! (n + 1 + k)). */
+    static double[] damp(int n) {
+        double[] a = new double[N];
+        double factorial = 1;
+        for (int k = 2; k <= n; k++) {
+            factorial *= k;
+        }
+        for (int k = 0; k < N; k++) {
+            factorial *= k == 0 ? 1 : -k;
+            a[k] = 1 / (factorial * (n + 1 + k));
+        }
+        return a;
+    }
+
+    /** Coefficients of j_n(x)/xⁿ = Σ (−x²/2)^k/(k! (2n + 2k + 1)!!) (Abramowitz and Stegun 1964, 10.1.2). */
+    static double[] sphericalBessel(int n) {
+        double[] a = new double[N];
+        double term = 1;
+        for (int k = 1; k <= n; k++) {
+            term /= 2 * k + 1;
+        }
+        for (int k = 0; 2 * k < N; k++) {
+            term *= k == 0 ? 1 : -0.5 / (k * (2.0 * n + 2 * k + 1));
+            a[2 * k] = term;
+        }
+        return a;
+    }
+
     private static double[] integrated(double start, double[] derivative) {
         double[] a = new double[N];
         a[0] = start;
