@@ -44,12 +44,12 @@ public final class FermiNucleusFamily extends BuiltInFamily {
 
     private static final class FermiNucleus extends ClosedForm {
         private static final double PI2 = Math.PI * Math.PI;
+        private static final GaussIntegrator FROM_ZERO_TO_ONE = new GaussIntegratorFactory().legendre(20, 0, 1);
 
         private final double k;
         private final double c;
         private final double a;
         private final double w;
-        private final GaussIntegrator fromZeroToOne;
 
         FermiNucleus(double[] values) {
             super("nucleus-fermi", values);
@@ -57,7 +57,6 @@ public final class FermiNucleusFamily extends BuiltInFamily {
             this.c = values[1];
             this.a = values[2];
             this.w = c * c * c + PI2 * a * a * c - 6 * a * a * a * AlternatingSum.fermi(3, -c / a);
-            this.fromZeroToOne = new GaussIntegratorFactory().legendre(20, 0, 1);
         }
 
         private double bracket(double r) {
@@ -67,6 +66,9 @@ public final class FermiNucleusFamily extends BuiltInFamily {
 
         private double skin(double r) {
             double x = (c - r) / a;
+            if (x < -45) {
+                return 0; // below 1e-19 of 1
+            }
             return a * a * AlternatingSum.fermi(2, x) + 2 * a * a * a * AlternatingSum.fermi(3, x) / r;
         }
 
@@ -83,7 +85,7 @@ public final class FermiNucleusFamily extends BuiltInFamily {
         /** ∫ s² f ds from 0 to r. */
         private double enclosed(double r) {
             if (r < a) {
-                return r * r * r * fromZeroToOne.integrate(t -> t * t / (1 + Math.exp((t * r - c) / a)));
+                return r * r * r * FROM_ZERO_TO_ONE.integrate(t -> t * t / (1 + Math.exp((t * r - c) / a)));
             }
             if (r <= c) {
                 double y = (r - c) / a;

@@ -1,5 +1,7 @@
 package org.wellwright.solver.potential.formula;
 
+import java.util.ArrayList;
+import java.util.List;
 import org.wellwright.solver.potential.Interval;
 import org.wellwright.solver.potential.IntervalFunctions;
 import org.wellwright.solver.potential.TailBehaviour;
@@ -12,8 +14,8 @@ final class IntervalPass {
     private static final Interval TWO_OVER_ROOT_PI =
             new Interval(Math.nextDown(1.1283791670955126), Math.nextUp(1.1283791670955126));
 
-    private static final int MAX_SPLITS = 8;
-    private static final double NEAR = 1.01;
+    private static final int MAX_SPLITS = 40;
+    private static final double NEAR = 0.005;
 
     private final Graph graph;
     private final Interval[] value;
@@ -55,36 +57,71 @@ final class IntervalPass {
         return slope[node];
     }
 
+    /** A part of the range, what is known of V there, and whether splitting it could still help. */
+    private record Part(double from, double to, Interval bounds, boolean open) {}
+
+    /**
+     * Bounds of V over a range. The parts that decide the bounds are split until the bounds are near values that V takes, or the effort is spent.
+     */
     static Interval enclose(BoundFormula formula, double from, double to) {
-        return enclose(formula, from, to, MAX_SPLITS);
+        List<Part> parts = new ArrayList<>();
+        parts.add(part(formula, from, to));
+        Interval taken = taken(formula, from, to);
+        for (int split = 0; split < MAX_SPLITS; split++) {
+            int lowest = 0;
+            int highest = 0;
+            for (int i = 1; i < parts.size(); i++) {
+                lowest = parts.get(i).bounds.lower() < parts.get(lowest).bounds.lower() ? i : lowest;
+                highest = parts.get(i).bounds.upper() > parts.get(highest).bounds.upper() ? i : highest;
+            }
+            double allowed = NEAR * taken.width();
+            boolean lowOpen = parts.get(lowest).open && !(taken.lower() - parts.get(lowest).bounds.lower() <= allowed);
+            boolean highOpen = parts.get(highest).open && !(parts.get(highest).bounds.upper() - taken.upper() <= allowed);
+            if (!lowOpen && !highOpen) {
+                break;
+            }
+            Part worst = parts.remove(lowOpen ? lowest : highest);
+            double middle = middle(worst.from, worst.to);
+            parts.add(part(formula, worst.from, middle));
+            parts.add(part(formula, middle, worst.to));
+            taken = taken.hull(at(formula, middle));
+        }
+        Interval hull = parts.get(0).bounds;
+        for (Part part : parts) {
+            hull = hull.hull(part.bounds);
+        }
+        return hull;
     }
 
-    /** Splits the range where V is not surely monotone, until the bounds are near values that V takes. */
-    private static Interval enclose(BoundFormula formula, double from, double to, int splits) {
+    private static double middle(double from, double to) {
+        return to == Double.POSITIVE_INFINITY ? 2 * from : to > 4 * from ? Math.sqrt(from) * Math.sqrt(to) : from + (to - from) / 2;
+    }
+
+    private static Interval taken(BoundFormula formula, double from, double to) {
+        return at(formula, from).hull(at(formula, to == Double.POSITIVE_INFINITY ? 2 * from : to));
+    }
+
+    private static Part part(BoundFormula formula, double from, double to) {
         Program program = formula.program();
         IntervalPass pass = new IntervalPass(program, new Interval(from, to), program.root());
         Interval bounds = pass.value[pass.root];
         Interval slope = pass.slope[pass.root];
         Interval first = at(formula, from);
         if (from == to) {
-            return bounds.meet(first);
+            return new Part(from, to, bounds.meet(first), false);
         }
         boolean endless = to == Double.POSITIVE_INFINITY;
-        Interval ends = first.hull(endless ? atInfinity(formula.tail(), formula.value(from)) : at(formula, to));
         if (slope.lower() >= 0 || slope.upper() <= 0) {
-            return bounds.meet(ends);
+            Interval last = endless ? atInfinity(formula.tail(), formula.value(from)) : at(formula, to);
+            return new Part(from, to, bounds.meet(first.hull(last)), false);
         }
-        double middle = endless ? 2 * from : from + (to - from) / 2;
         if (slope.isBounded() && !endless) {
+            double middle = from + (to - from) / 2;
             Interval away = new Interval(from, to).minus(Interval.of(middle));
             bounds = bounds.meet(at(formula, middle).plus(slope.times(away)));
         }
-        boolean near = bounds.width() <= NEAR * ends.hull(at(formula, middle)).width();
-        if (splits == 0 || near || !(from < middle && middle < to)) {
-            return bounds;
-        }
-        Interval parts = enclose(formula, from, middle, splits - 1).hull(enclose(formula, middle, to, splits - 1));
-        return bounds.meet(parts);
+        double middle = middle(from, to);
+        return new Part(from, to, bounds, from < middle && middle < to);
     }
 
     private static Interval at(BoundFormula formula, double r) {
