@@ -45,7 +45,8 @@ public final class EvaluatorLaws {
                     continue;
                 }
                 exact[i] = j < 0 ? v.slope(r) : v.parameterDerivative(j, r);
-                difference[i] = j < 0 ? derivative(v::value, r, room, 7) : parameterDifference(family, values, j, r, room);
+                difference[i] =
+                        j < 0 ? derivative(v::value, r, room, 7) : parameterDifference(family, values, j, r, room);
             }
             assertThat(largest).isFinite();
             for (int i = 0; i < points; i++) {

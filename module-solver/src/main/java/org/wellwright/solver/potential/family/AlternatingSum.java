@@ -1,6 +1,9 @@
 package org.wellwright.solver.potential.family;
 
-/** Sums of alternating series, accelerated (Cohen, Rodriguez Villegas and Zagier 2000, algorithm 1): 24 terms are good to 1e-18 of the first. */
+/**
+ * Sums of alternating series, accelerated (Cohen, Rodriguez Villegas and Zagier 2000, algorithm 1): 24 terms are good
+ * to 1e-18 of the first.
+ */
 final class AlternatingSum {
     private static final int TERMS = 24;
     private static final double[] WEIGHTS = weights();

@@ -17,8 +17,14 @@ public final class CoulombLinearFamily extends FormulaFamily {
                         "-k/r+b*r+c",
                         "Heavy quark and antiquark: one-gluon exchange and confinement.",
                         "Eichten et al. 1978"),
-                new FamilyParameter("strength", "k", ENERGY_LENGTH, 0.5, "positive attracts; 4/3 of the strong coupling (times hbar c), not the coupling itself"),
-                new FamilyParameter("tension", "b", Dimension.ENERGY.times(Dimension.LENGTH.power(-1)), 0.2, "positive confines"),
+                new FamilyParameter(
+                        "strength",
+                        "k",
+                        ENERGY_LENGTH,
+                        0.5,
+                        "positive attracts; 4/3 of the strong coupling (times hbar c), not the coupling itself"),
+                new FamilyParameter(
+                        "tension", "b", Dimension.ENERGY.times(Dimension.LENGTH.power(-1)), 0.2, "positive confines"),
                 new FamilyParameter("offset", "c", Dimension.ENERGY, 0.1, "shifts every level"));
     }
 

@@ -17,9 +17,11 @@ public final class ExpandedMorseFamily extends FormulaFamily {
                         "y=(r^q-re^q)/(r^q+re^q); D*((1-exp(-(b0+b1*y+b2*y^2+b3*y^3)*(r-re)))^2-1)",
                         "A diatomic curve fitted to levels; exponential at long range.",
                         "Lee, Seto, Hirao, Bernath and Le Roy 1999"),
-                new FamilyParameter("depth", "D", Dimension.ENERGY, 0.1, "from the dissociation limit (V = 0) to the minimum"),
+                new FamilyParameter(
+                        "depth", "D", Dimension.ENERGY, 0.1, "from the dissociation limit (V = 0) to the minimum"),
                 new FamilyParameter("equilibrium", "re", Dimension.LENGTH, 2, "radius of the minimum, positive"),
-                new FamilyParameter("order", "q", Dimension.NONE, 3, "power of the expansion variable y, positive; fixed"),
+                new FamilyParameter(
+                        "order", "q", Dimension.NONE, 3, "power of the expansion variable y, positive; fixed"),
                 new FamilyParameter("b0", "b0", INVERSE_LENGTH, 1, "exponent at the minimum"),
                 new FamilyParameter("b1", "b1", INVERSE_LENGTH, 0.1, "coefficient of y"),
                 new FamilyParameter("b2", "b2", INVERSE_LENGTH, 0.05, "coefficient of y^2"),

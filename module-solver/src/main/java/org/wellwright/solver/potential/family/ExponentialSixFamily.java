@@ -105,7 +105,8 @@ public final class ExponentialSixFamily extends BuiltInFamily {
             double repulsion = 6 * Math.exp(p[2] * (1 - x)) * u * (p[2] * (x + 4 * Math.abs(1 - x)) + 6);
             double attraction = p[2] * sixth(x) * u * 16;
             double scale = Math.abs(p[0]) / (p[2] - 6);
-            double bound = (scale * (repulsion + attraction) + 4 * u * Math.abs(value(r))) * Rounding.SLACK + Double.MIN_NORMAL;
+            double bound = (scale * (repulsion + attraction) + 4 * u * Math.abs(value(r))) * Rounding.SLACK
+                    + Double.MIN_NORMAL;
             return bound <= Double.MAX_VALUE ? bound : Double.POSITIVE_INFINITY;
         }
 

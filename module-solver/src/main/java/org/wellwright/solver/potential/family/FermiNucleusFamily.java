@@ -15,9 +15,9 @@ import org.wellwright.solver.units.Dimension;
 /**
  * The field of a charge spread as f(r) = 1/(1 + e^((r − c)/a)).
  *
- * <p>With W = c³ + π²a²c − 6a³S₃(−c/a) and S_k(x) = Σ (−1)ⁿ e^(nx)/n^k, term-by-term integration of Poisson's equation gives V = −(3k/W) G,
- * G = c²/2 + π²a²/6 − r²/6 − a²S₂(y) + 2a³[S₃(y) − S₃(−c/a)]/r, y = (r − c)/a, for r ≤ c, and V = −k/r − (3k/W)[a²S₂(−y) + 2a³S₃(−y)/r] for r ≥ c
- * (after Parpia and Mohanty 1992).
+ * <p>With W = c³ + π²a²c − 6a³S₃(−c/a) and S_k(x) = Σ (−1)ⁿ e^(nx)/n^k, term-by-term integration of Poisson's equation
+ * gives V = −(3k/W) G, G = c²/2 + π²a²/6 − r²/6 − a²S₂(y) + 2a³[S₃(y) − S₃(−c/a)]/r, y = (r − c)/a, for r ≤ c, and V =
+ * −k/r − (3k/W)[a²S₂(−y) + 2a³S₃(−y)/r] for r ≥ c (after Parpia and Mohanty 1992).
  */
 @ServiceProvider(service = PotentialFamily.class)
 public final class FermiNucleusFamily extends BuiltInFamily {
@@ -30,8 +30,14 @@ public final class FermiNucleusFamily extends BuiltInFamily {
                         "field of the charge k spread as 1/(1+exp((r-c)/a))",
                         "A point charge in the field of a heavy nucleus; c above 2 a.",
                         "Parpia and Mohanty 1992"),
-                new FamilyParameter("strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
-                new FamilyParameter("halfRadius", "c", Dimension.LENGTH, 1, "where the density has half its central value, above 2 a"),
+                new FamilyParameter(
+                        "strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
+                new FamilyParameter(
+                        "halfRadius",
+                        "c",
+                        Dimension.LENGTH,
+                        1,
+                        "where the density has half its central value, above 2 a"),
                 new FamilyParameter("diffuseness", "a", Dimension.LENGTH, 0.1, "skin thickness over 4 ln 3, positive"));
     }
 
@@ -61,7 +67,11 @@ public final class FermiNucleusFamily extends BuiltInFamily {
 
         private double bracket(double r) {
             double y = (r - c) / a;
-            return c * c / 2 + PI2 * a * a / 6 - r * r / 6 - a * a * AlternatingSum.fermi(2, y) + 2 * a * a * a * AlternatingSum.fermiDifference(3, y, r / a) / r;
+            return c * c / 2
+                    + PI2 * a * a / 6
+                    - r * r / 6
+                    - a * a * AlternatingSum.fermi(2, y)
+                    + 2 * a * a * a * AlternatingSum.fermiDifference(3, y, r / a) / r;
         }
 
         private double skin(double r) {
@@ -95,7 +105,10 @@ public final class FermiNucleusFamily extends BuiltInFamily {
                         + 2 * a * a * a * AlternatingSum.fermiDifference(3, y, r / a);
             }
             double x = (c - r) / a;
-            return w / 3 + r * r * a * AlternatingSum.fermi(1, x) + 2 * r * a * a * AlternatingSum.fermi(2, x) + 2 * a * a * a * AlternatingSum.fermi(3, x);
+            return w / 3
+                    + r * r * a * AlternatingSum.fermi(1, x)
+                    + 2 * r * a * a * AlternatingSum.fermi(2, x)
+                    + 2 * a * a * a * AlternatingSum.fermi(3, x);
         }
 
         @Override
@@ -112,7 +125,9 @@ public final class FermiNucleusFamily extends BuiltInFamily {
             double wByC = 3 * c * c + PI2 * a * a + 6 * a * a * AlternatingSum.fermi(2, -c / a);
             if (r <= c) {
                 double y = (r - c) / a;
-                double bracketByC = c + a * AlternatingSum.fermi(1, y) - 2 * a * a * AlternatingSum.fermiDifference(2, y, r / a) / r;
+                double bracketByC = c
+                        + a * AlternatingSum.fermi(1, y)
+                        - 2 * a * a * AlternatingSum.fermiDifference(2, y, r / a) / r;
                 return -3 * k * (bracketByC * w - bracket(r) * wByC) / (w * w);
             }
             double x = (c - r) / a;

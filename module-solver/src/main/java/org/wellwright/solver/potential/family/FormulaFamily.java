@@ -8,8 +8,8 @@ import org.wellwright.solver.potential.TermEvaluator;
 import org.wellwright.solver.potential.formula.InfixLanguage;
 
 /**
- * A family that is computed by its own formula, in the symbols of its parameters. Derivatives, bounds, behaviour at both ends and break points come from
- * the formula.
+ * A family that is computed by its own formula, in the symbols of its parameters. Derivatives, bounds, behaviour at
+ * both ends and break points come from the formula.
  */
 abstract class FormulaFamily extends BuiltInFamily {
     private volatile Formula parsed;
@@ -34,10 +34,12 @@ abstract class FormulaFamily extends BuiltInFamily {
 
     private Formula parsed() {
         if (parsed == null) {
-            List<String> symbols = parameters().stream().map(FamilyParameter::symbol).toList();
+            List<String> symbols =
+                    parameters().stream().map(FamilyParameter::symbol).toList();
             Formula formula = new InfixLanguage().parse(formula(), symbols);
             if (!formula.names().equals(symbols)) {
-                throw new IllegalStateException("the formula of %s has the names %s, not %s".formatted(id(), formula.names(), symbols));
+                throw new IllegalStateException(
+                        "the formula of %s has the names %s, not %s".formatted(id(), formula.names(), symbols));
             }
             parsed = formula;
         }

@@ -17,7 +17,8 @@ public final class GaussianNucleusFamily extends FormulaFamily {
                         "-k*erf(sqrt(1.5)*r/R)/r",
                         "A point charge in the field of a Gaussian charge distribution.",
                         "Visscher and Dyall 1997"),
-                new FamilyParameter("strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
+                new FamilyParameter(
+                        "strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
                 new FamilyParameter("radius", "R", Dimension.LENGTH, 1, "rms charge radius, positive"));
     }
 

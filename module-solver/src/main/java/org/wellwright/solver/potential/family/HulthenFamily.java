@@ -16,7 +16,8 @@ public final class HulthenFamily extends FormulaFamily {
                         "-k*alpha/expm1(alpha*r)",
                         "Screened Coulomb attraction whose s levels are known in closed form.",
                         "Hulthen 1942"),
-                new FamilyParameter("strength", "k", ENERGY_LENGTH, 1, "positive attracts; V tends to -k/r at the origin"),
+                new FamilyParameter(
+                        "strength", "k", ENERGY_LENGTH, 1, "positive attracts; V tends to -k/r at the origin"),
                 new FamilyParameter("screening", "alpha", INVERSE_LENGTH, 0.2, "positive"));
     }
 

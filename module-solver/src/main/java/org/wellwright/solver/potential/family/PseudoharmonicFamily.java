@@ -18,7 +18,8 @@ public final class PseudoharmonicFamily extends FormulaFamily {
                         "A rotating oscillator with equal level distances.",
                         "Davidson 1932"),
                 new FamilyParameter("depth", "D", Dimension.ENERGY, 0.2, "stiffness 8 D/re^2 at the minimum; positive"),
-                new FamilyParameter("equilibrium", "re", Dimension.LENGTH, 2, "radius of the minimum (V = 0), positive"));
+                new FamilyParameter(
+                        "equilibrium", "re", Dimension.LENGTH, 2, "radius of the minimum (V = 0), positive"));
     }
 
     @Override

@@ -18,10 +18,26 @@ public final class TangToenniesFamily extends FormulaFamily {
                         "Two closed-shell atoms: exponential repulsion and damped dispersion.",
                         "Tang and Toennies 1984"),
                 new FamilyParameter("repulsion", "A", Dimension.ENERGY, 40, "positive"),
-                new FamilyParameter("steepness", "b", INVERSE_LENGTH, 2, "of the repulsion and of the damping, positive"),
-                new FamilyParameter("dispersion6", "C6", Dimension.ENERGY.times(Dimension.LENGTH.power(6)), 6.5, "positive attracts"),
-                new FamilyParameter("dispersion8", "C8", Dimension.ENERGY.times(Dimension.LENGTH.power(8)), 120, "positive attracts"),
-                new FamilyParameter("dispersion10", "C10", Dimension.ENERGY.times(Dimension.LENGTH.power(10)), 3000, "positive attracts"));
+                new FamilyParameter(
+                        "steepness", "b", INVERSE_LENGTH, 2, "of the repulsion and of the damping, positive"),
+                new FamilyParameter(
+                        "dispersion6",
+                        "C6",
+                        Dimension.ENERGY.times(Dimension.LENGTH.power(6)),
+                        6.5,
+                        "positive attracts"),
+                new FamilyParameter(
+                        "dispersion8",
+                        "C8",
+                        Dimension.ENERGY.times(Dimension.LENGTH.power(8)),
+                        120,
+                        "positive attracts"),
+                new FamilyParameter(
+                        "dispersion10",
+                        "C10",
+                        Dimension.ENERGY.times(Dimension.LENGTH.power(10)),
+                        3000,
+                        "positive attracts"));
     }
 
     @Override

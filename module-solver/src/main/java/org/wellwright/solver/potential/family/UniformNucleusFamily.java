@@ -17,8 +17,14 @@ public final class UniformNucleusFamily extends FormulaFamily {
                         "-k/max(r,R)*(3-(min(r,R)/R)^2)/2",
                         "A point charge in the field of a uniformly charged sphere.",
                         "Bethe and Salpeter 1957, electrostatics of a sphere"),
-                new FamilyParameter("strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
-                new FamilyParameter("radius", "R", Dimension.LENGTH, 1, "sharp radius, sqrt(5/3) of the rms charge radius; positive"));
+                new FamilyParameter(
+                        "strength", "k", ENERGY_LENGTH, 1, "positive attracts; the charge seen from outside"),
+                new FamilyParameter(
+                        "radius",
+                        "R",
+                        Dimension.LENGTH,
+                        1,
+                        "sharp radius, sqrt(5/3) of the rms charge radius; positive"));
     }
 
     @Override

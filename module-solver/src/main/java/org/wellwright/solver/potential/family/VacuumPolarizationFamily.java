@@ -13,8 +13,8 @@ import org.wellwright.solver.units.Dimension;
 /**
  * V = −(k/r)(2α/3π) K(2r/λ), K(x) = ∫₁^∞ e^(−xt)(1 + 1/2t²)√(t² − 1)/t² dt.
  *
- * <p>With t = cosh u the integrand is even and analytic in |Im u| < π/2, so that the trapezoidal rule of step h errs by e^(−π²/h) (Goodwin 1949): below
- * 1e-17 for h = ¼.
+ * <p>With t = cosh u the integrand is even and analytic in |Im u| < π/2, so that the trapezoidal rule of step h errs by
+ * e^(−π²/h) (Goodwin 1949): below 1e-17 for h = ¼.
  */
 @ServiceProvider(service = PotentialFamily.class)
 public final class VacuumPolarizationFamily extends BuiltInFamily {
@@ -28,8 +28,18 @@ public final class VacuumPolarizationFamily extends BuiltInFamily {
                         "Correction to the Coulomb field of a point charge by virtual electron pairs; largest in muonic atoms.",
                         "Uehling 1935"),
                 new FamilyParameter("strength", "k", ENERGY_LENGTH, 1, "that of the Coulomb term, positive attracts"),
-                new FamilyParameter("coupling", "alpha", Dimension.NONE, 0.0072973525643, "fine-structure constant (CODATA 2022); fixed"),
-                new FamilyParameter("wavelength", "lambda", Dimension.LENGTH, 0.0072973525643, "reduced Compton wavelength of the electron, positive"));
+                new FamilyParameter(
+                        "coupling",
+                        "alpha",
+                        Dimension.NONE,
+                        0.0072973525643,
+                        "fine-structure constant (CODATA 2022); fixed"),
+                new FamilyParameter(
+                        "wavelength",
+                        "lambda",
+                        Dimension.LENGTH,
+                        0.0072973525643,
+                        "reduced Compton wavelength of the electron, positive"));
     }
 
     @Override
@@ -49,7 +59,10 @@ public final class VacuumPolarizationFamily extends BuiltInFamily {
                 double c = Math.cosh(i * STEP);
                 double t = Math.tanh(i * STEP);
                 COSH[i] = c;
-                WEIGHT[i] = STEP * t * t * (1 + 1 / (2 * c * c)); // t² from √(t² − 1) dt/t² = sinh² u/cosh² u du; zero at u = 0
+                WEIGHT[i] = STEP
+                        * t
+                        * t
+                        * (1 + 1 / (2 * c * c)); // t² from √(t² − 1) dt/t² = sinh² u/cosh² u du; zero at u = 0
             }
         }
 
@@ -103,7 +116,8 @@ public final class VacuumPolarizationFamily extends BuiltInFamily {
         @Override
         public double roundingBound(double r) {
             double x = argument(r);
-            double inside = x * integral(x, 1) * 5 + integral(x, 0) * 200; // the exponents carry 4 units of x t each, the sum its terms
+            double inside = x * integral(x, 1) * 5
+                    + integral(x, 0) * 200; // the exponents carry 4 units of x t each, the sum its terms
             return Rounding.relative(factor() / r * inside, 1) + Math.abs(factor() / r) * Double.MIN_NORMAL;
         }
 

@@ -303,14 +303,17 @@ final class FormulaParser {
     private int withOrder(Lexeme word, Lexeme open, Operation function, List<Integer> arguments) {
         if (arguments.size() != 2) {
             throw fault(
-                    word, "%s takes two arguments, got %d".formatted(word.text(), arguments.size()), "write " + word.text() + "(n, x)");
+                    word,
+                    "%s takes two arguments, got %d".formatted(word.text(), arguments.size()),
+                    "write " + word.text() + "(n, x)");
         }
         int order = arguments.get(0);
         if (!graph.isInteger(order) || graph.number(order) < 0 || graph.number(order) > SpecialFunctions.MAX_ORDER) {
             throw fault(
                     open.end(),
                     open.end() + 1,
-                    "the order of %s must be a whole number from 0 to %d".formatted(word.text(), SpecialFunctions.MAX_ORDER),
+                    "the order of %s must be a whole number from 0 to %d"
+                            .formatted(word.text(), SpecialFunctions.MAX_ORDER),
                     "");
         }
         return graph.binary(function, order, arguments.get(1));

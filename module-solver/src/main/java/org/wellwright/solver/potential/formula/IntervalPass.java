@@ -61,7 +61,8 @@ final class IntervalPass {
     private record Part(double from, double to, Interval bounds, boolean open) {}
 
     /**
-     * Bounds of V over a range. The parts that decide the bounds are split until the bounds are near values that V takes, or the effort is spent.
+     * Bounds of V over a range. The parts that decide the bounds are split until the bounds are near values that V
+     * takes, or the effort is spent.
      */
     static Interval enclose(BoundFormula formula, double from, double to) {
         List<Part> parts = new ArrayList<>();
@@ -72,11 +73,14 @@ final class IntervalPass {
             int highest = 0;
             for (int i = 1; i < parts.size(); i++) {
                 lowest = parts.get(i).bounds.lower() < parts.get(lowest).bounds.lower() ? i : lowest;
-                highest = parts.get(i).bounds.upper() > parts.get(highest).bounds.upper() ? i : highest;
+                highest =
+                        parts.get(i).bounds.upper() > parts.get(highest).bounds.upper() ? i : highest;
             }
             double allowed = NEAR * taken.width();
-            boolean lowOpen = parts.get(lowest).open && !(taken.lower() - parts.get(lowest).bounds.lower() <= allowed);
-            boolean highOpen = parts.get(highest).open && !(parts.get(highest).bounds.upper() - taken.upper() <= allowed);
+            boolean lowOpen = parts.get(lowest).open
+                    && !(taken.lower() - parts.get(lowest).bounds.lower() <= allowed);
+            boolean highOpen =
+                    parts.get(highest).open && !(parts.get(highest).bounds.upper() - taken.upper() <= allowed);
             if (!lowOpen && !highOpen) {
                 break;
             }
@@ -94,7 +98,9 @@ final class IntervalPass {
     }
 
     private static double middle(double from, double to) {
-        return to == Double.POSITIVE_INFINITY ? 2 * from : to > 4 * from ? Math.sqrt(from) * Math.sqrt(to) : from + (to - from) / 2;
+        return to == Double.POSITIVE_INFINITY
+                ? 2 * from
+                : to > 4 * from ? Math.sqrt(from) * Math.sqrt(to) : from + (to - from) / 2;
     }
 
     private static Interval taken(BoundFormula formula, double from, double to) {
@@ -196,7 +202,8 @@ final class IntervalPass {
                 yield difference.upper() < 0 ? da : difference.lower() > 0 ? db : da.hull(db);
             }
             case DAMP -> SpecialFunctions.dampSlope((int) a.lower(), b).times(db);
-            case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBesselSlope((int) a.lower(), b).times(db);
+            case SPHERICAL_BESSEL ->
+                SpecialFunctions.sphericalBesselSlope((int) a.lower(), b).times(db);
             case STEP -> a.contains(0) ? Interval.ENTIRE : Interval.ZERO;
             default -> da.lower() == 0 && da.upper() == 0 ? Interval.ZERO : da.times(partial(operation, a, v));
         };

@@ -66,7 +66,8 @@ final class RoundingPass {
             case ERF -> 6 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
             case ERFC ->
                 16 * U * size + 1.13 * ea * Math.exp(-square(Math.max(0, Math.abs(a) - ea))) + Double.MIN_VALUE;
-            case DAMP -> SpecialFunctions.DAMP_UNITS * U * size + eb * largestDampSlope((int) a, b, eb) + Double.MIN_VALUE;
+            case DAMP ->
+                SpecialFunctions.DAMP_UNITS * U * size + eb * largestDampSlope((int) a, b, eb) + Double.MIN_VALUE;
             case SPHERICAL_BESSEL -> SpecialFunctions.sphericalBesselError((int) a, b) + 0.5 * eb;
             case STEP -> Math.abs(a) > ea || a == 0 && ea == 0 ? 0 : 1;
             default -> 0;

@@ -4,7 +4,10 @@ import org.apache.commons.numbers.gamma.RegularizedGamma;
 import org.wellwright.solver.potential.Interval;
 import org.wellwright.solver.potential.Rounding;
 
-/** The damping function of dispersion forces and the spherical Bessel function, with slopes, bounds of rounding and enclosures. */
+/**
+ * The damping function of dispersion forces and the spherical Bessel function, with slopes, bounds of rounding and
+ * enclosures.
+ */
 final class SpecialFunctions {
     /** Largest order. */
     static final int MAX_ORDER = 30;
@@ -14,7 +17,10 @@ final class SpecialFunctions {
 
     private SpecialFunctions() {}
 
-    /** 1 − e^(−x) Σ x^k/k!, k = 0…n: the regularised incomplete gamma function P(n + 1, x); NaN for x < 0 (Tang and Toennies 1984). */
+    /**
+     * 1 − e^(−x) Σ x^k/k!, k = 0…n: the regularised incomplete gamma function P(n + 1, x); NaN for x < 0 (Tang and
+     * Toennies 1984).
+     */
     static double damp(int n, double x) {
         return x == Double.POSITIVE_INFINITY ? 1 : x >= 0 ? RegularizedGamma.P.value(n + 1.0, x) : Double.NaN;
     }
@@ -52,7 +58,8 @@ final class SpecialFunctions {
     }
 
     /**
-     * j_n(x): upward recurrence beyond x = n + 1, Miller's downward recurrence below (Abramowitz and Stegun 1964, 10.1.19 and 10.5).
+     * j_n(x): upward recurrence beyond x = n + 1, Miller's downward recurrence below (Abramowitz and Stegun 1964,
+     * 10.1.19 and 10.5).
      */
     static double sphericalBessel(int n, double x) {
         if (x < 0) {
@@ -124,7 +131,10 @@ final class SpecialFunctions {
         return (40 + 12 * n) * Rounding.UNIT * relative + Double.MIN_NORMAL;
     }
 
-    /** |j_n′| < 0.44 for every n and x (j₀′ = −j₁ has the largest), so that j_n stays within half the width of its value in the middle. */
+    /**
+     * |j_n′| < 0.44 for every n and x (j₀′ = −j₁ has the largest), so that j_n stays within half the width of its value
+     * in the middle.
+     */
     static Interval sphericalBessel(int n, Interval x) {
         Interval bounded = new Interval(n == 0 ? -0.22 : -0.5, n == 0 ? 1 : 0.5);
         if (!x.isBounded()) {
@@ -132,7 +142,8 @@ final class SpecialFunctions {
         }
         double middle = x.lower() + x.width() / 2;
         double radius = 0.5 * Math.max(x.upper() - middle, middle - x.lower());
-        return Interval.around(sphericalBessel(n, middle), radius * 1.01 + sphericalBesselError(n, middle)).meet(bounded);
+        return Interval.around(sphericalBessel(n, middle), radius * 1.01 + sphericalBesselError(n, middle))
+                .meet(bounded);
     }
 
     static Interval sphericalBesselSlope(int n, Interval x) {
@@ -143,6 +154,8 @@ final class SpecialFunctions {
         Interval factor = Interval.of(n + 1.0).over(x);
         return x.contains(0)
                 ? bounded
-                : sphericalBessel(n - 1, x).minus(factor.times(sphericalBessel(n, x))).meet(bounded);
+                : sphericalBessel(n - 1, x)
+                        .minus(factor.times(sphericalBessel(n, x)))
+                        .meet(bounded);
     }
 }
