@@ -11,7 +11,7 @@ final class LevelFinder {
     private static final double EPSILON = Math.ulp(1.0);
     private static final int MOST_ITERATIONS = 400;
 
-    private final Shooting shooting;
+    private final LevelShooting shooting;
     private final double threshold;
     private final SolveMonitor monitor;
     /** Count of levels below each energy asked so far. */
@@ -22,7 +22,7 @@ final class LevelFinder {
      *
      * @param hardyBound an energy below all levels
      */
-    LevelFinder(Shooting shooting, double threshold, double hardyBound, SolveMonitor monitor) {
+    LevelFinder(LevelShooting shooting, double threshold, double hardyBound, SolveMonitor monitor) {
         this.shooting = shooting;
         this.threshold = threshold;
         this.monitor = monitor;

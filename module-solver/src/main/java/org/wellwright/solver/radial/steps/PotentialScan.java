@@ -55,7 +55,7 @@ final class PotentialScan {
      * @throws InvalidModelException if V is not a number where it matters; names the radius
      */
     static PotentialScan of(
-            ScalarPotential potential,
+            SampledPotential potential,
             double kinetic,
             double centrifugal,
             double innerWall,
@@ -122,7 +122,7 @@ final class PotentialScan {
         return values[i] + kinetic * (centrifugal + 0.25) / radii[i] / radii[i];
     }
 
-    private static double[] chooseRadii(ScalarPotential potential, double kinetic, double innerWall, double outerWall) {
+    private static double[] chooseRadii(SampledPotential potential, double kinetic, double innerWall, double outerWall) {
         double from = Math.max(innerWall, Math.scalb(1.0, LOWEST_OCTAVE));
         double to = Math.min(outerWall, Math.scalb(1.0, HIGHEST_OCTAVE));
         int octaves = (int) Math.max(1, Math.ceil(Math.log(to / from) / Math.log(2)));
@@ -193,7 +193,7 @@ final class PotentialScan {
      * Beyond the last number V is a wall if infinite, its limit if it had already reached it, and a fault otherwise.
      */
     private static void checkOuterEnd(
-            ScalarPotential potential, double[] values, double[] radii, int last, double kinetic, String where) {
+            SampledPotential potential, double[] values, double[] radii, int last, double kinetic, String where) {
         if (last == radii.length - 1 || values[last + 1] == Double.POSITIVE_INFINITY) {
             return;
         }

@@ -14,7 +14,7 @@ import org.wellwright.solver.radial.RadialProblem;
  * V(r) of an uncoupled problem as this method sees it: every term and the channel's threshold in one sum. Counts its
  * evaluations; used by one thread.
  */
-final class ScalarPotential {
+final class ScalarPotential implements SampledPotential {
     private final List<TermEvaluator> terms = new ArrayList<>();
     private final double shift;
     private final double[] breaks;
@@ -52,8 +52,8 @@ final class ScalarPotential {
         tail = end;
     }
 
-    /** Fills {@code into[i] = V(radii[i])}, energy. */
-    void values(double[] radii, double[] into, int count) {
+    @Override
+    public void values(double[] radii, double[] into, int count) {
         evaluations += count;
         if (scratch.length < count) {
             scratch = new double[count];
@@ -70,14 +70,15 @@ final class ScalarPotential {
         }
     }
 
-    double value(double radius) {
+    @Override
+    public double value(double radius) {
         double[] into = new double[1];
         values(new double[] {radius}, into, 1);
         return into[0];
     }
 
-    /** Takes V as the constant {@code value} beyond {@code radius}, where its formula has no number any more. */
-    void cutAt(double radius, double value) {
+    @Override
+    public void cutAt(double radius, double value) {
         cutRadius = radius;
         cutValue = value;
     }
@@ -102,8 +103,8 @@ final class ScalarPotential {
         return 0;
     }
 
-    /** Break points in ascending order; not to be changed. */
-    double[] breaks() {
+    @Override
+    public double[] breaks() {
         return breaks;
     }
 
@@ -111,7 +112,8 @@ final class ScalarPotential {
         return origin;
     }
 
-    TailBehaviour tail() {
+    @Override
+    public TailBehaviour tail() {
         return tail;
     }
 

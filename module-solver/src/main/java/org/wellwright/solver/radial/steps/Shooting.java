@@ -7,7 +7,7 @@ package org.wellwright.solver.radial.steps;
  * logarithmic derivative is the smaller (Sturm). Newton's step is −W/(dW/dE) of the Wronskian W, exact since dη_m/dZ =
  * ½η_{m+1}. Used by one thread.
  */
-final class Shooting {
+final class Shooting implements LevelShooting {
     private final StepMesh mesh;
     private final PotentialScan scan;
     private final double kinetic;
@@ -27,23 +27,23 @@ final class Shooting {
         this.kinetic = kinetic;
     }
 
-    /** Number of levels below an energy. */
-    int count(double energy) {
+    @Override
+    public int count(double energy) {
         return shoot(energy, false);
     }
 
-    /** The same, and Newton's step with it. */
-    int countAndStep(double energy) {
+    @Override
+    public int countAndStep(double energy) {
         return shoot(energy, true);
     }
 
-    /** Newton's step in energy found by the last {@link #countAndStep}; NaN if motion is allowed nowhere. */
-    double step() {
+    @Override
+    public double step() {
         return shift;
     }
 
-    /** How many counts were made. */
-    int counts() {
+    @Override
+    public int counts() {
         return counts;
     }
 
@@ -128,7 +128,8 @@ final class Shooting {
      * Goes over the state at a level once more for what its error estimate needs; see {@link #weightedResidue()} and
      * {@link #meanPotential()}. ∫u² over a step is the difference of u′ ∂u/∂e − u ∂u′/∂e at its ends.
      */
-    void weigh(double energy) {
+    @Override
+    public void weigh(double energy) {
         weightedResidue = 0;
         meanPotential = 0;
         if (Double.isNaN(scan.firstAllowed(energy))) {
@@ -193,12 +194,14 @@ final class Shooting {
     }
 
     /** Σ over steps of what the polynomial leaves out of V, weighted by the probability there; energy. */
-    double weightedResidue() {
+    @Override
+    public double weightedResidue() {
         return weightedResidue;
     }
 
     /** ⟨|V + κλ/r²|⟩ by the steps' means; energy. */
-    double meanPotential() {
+    @Override
+    public double meanPotential() {
         return meanPotential;
     }
 }
