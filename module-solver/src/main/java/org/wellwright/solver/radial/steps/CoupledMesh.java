@@ -9,8 +9,9 @@ import org.wellwright.solver.potential.OriginBehaviour;
 import org.wellwright.solver.radial.SolveMonitor;
 
 /**
- * The steps of coupled channels for one energy and those close to it, outwards and inwards from the radius where the lowest curve + κ/4r² is least, and
- * the logarithmic derivatives at both ends. The ends are those of {@link StepMesh}, for matrices. One thread uses a mesh at a time.
+ * The steps of coupled channels for one energy and those close to it, outwards and inwards from the radius where the
+ * lowest curve + κ/4r² is least, and the logarithmic derivatives at both ends. The ends are those of {@link StepMesh},
+ * for matrices. One thread uses a mesh at a time.
  */
 final class CoupledMesh {
     private static final double ACTION = 22;
@@ -201,7 +202,12 @@ final class CoupledMesh {
             }
             least = Math.min(least, SmallMatrix.least(matrix, channels));
         }
-        double seen = Math.max(1e-6, Math.min(1, Math.pow(square * strength, 0.5 * (StepQuadrature.DEGREE + 1)) * EtaFunctions.atZero(StepQuadrature.DEGREE + 1)));
+        double seen = Math.max(
+                1e-6,
+                Math.min(
+                        1,
+                        Math.pow(square * strength, 0.5 * (StepQuadrature.DEGREE + 1))
+                                * EtaFunctions.atZero(StepQuadrature.DEGREE + 1)));
         double noise = NOISE * largest * square;
         double tail = 0;
         double amplitude = 0;
@@ -214,7 +220,12 @@ final class CoupledMesh {
                 shifted[k] = samples[element][k] - bulk;
             }
             StepQuadrature.project(shifted, legendre);
-            tail = Math.max(tail, square * Math.max(Math.abs(legendre[StepQuadrature.DEGREE + 1]), Math.abs(legendre[StepQuadrature.DEGREE + 2])));
+            tail = Math.max(
+                    tail,
+                    square
+                            * Math.max(
+                                    Math.abs(legendre[StepQuadrature.DEGREE + 1]),
+                                    Math.abs(legendre[StepQuadrature.DEGREE + 2])));
             java.util.Arrays.fill(polynomial, 0);
             int degree = StepQuadrature.DEGREE;
             while (degree > 0 && Math.abs(legendre[degree]) * square < 0.05 * Math.max(FIT, noise)) {
@@ -277,7 +288,8 @@ final class CoupledMesh {
     }
 
     /**
-     * Y at a radius so small that Y_ij = s_i δ_ij/r + W_ij/(r (q − 1 + s_i + s_j)) is enough, W = r²Q − s(s − 1) ~ r^q; from Y′ = Q − Y² to first order.
+     * Y at a radius so small that Y_ij = s_i δ_ij/r + W_ij/(r (q − 1 + s_i + s_j)) is enough, W = r²Q − s(s − 1) ~ r^q;
+     * from Y′ = Q − Y² to first order.
      *
      * @return whether it is
      */
@@ -312,16 +324,23 @@ final class CoupledMesh {
         return error < 1e-18 && largest < 1e-3;
     }
 
-    /** Y at a radius beyond which only thresholds and centrifugal terms count and the energy is at the lowest threshold; whether that holds. */
+    /**
+     * Y at a radius beyond which only thresholds and centrifugal terms count and the energy is at the lowest threshold;
+     * whether that holds.
+     */
     private boolean far(double r, double energy, double[][] into) {
-        if (Double.isInfinite(threshold) || r < 4 * scan.anchor() || !((threshold - energy) * r * r < 1e-14 * potential.kinetic())) {
+        if (Double.isInfinite(threshold)
+                || r < 4 * scan.anchor()
+                || !((threshold - energy) * r * r < 1e-14 * potential.kinetic())) {
             return false;
         }
         double[][] elements = new double[channels * channels][1];
         potential.matrices(new double[] {r}, 1, elements);
         for (int i = 0; i < channels; i++) {
             for (int j = 0; j < channels; j++) {
-                double limit = i == j ? potential.diagonalTail(i).limit() / potential.kinetic() + potential.centrifugal(i) / (r * r) : 0;
+                double limit = i == j
+                        ? potential.diagonalTail(i).limit() / potential.kinetic() + potential.centrifugal(i) / (r * r)
+                        : 0;
                 if (!(Math.abs(elements[i * channels + j][0] - limit) * r * r < 1e-13)) {
                     return false;
                 }
@@ -330,7 +349,8 @@ final class CoupledMesh {
             }
             double gap = (potential.diagonalTail(i).limit() - energy) / potential.kinetic();
             double nu = Math.sqrt(Math.max(0, 0.25 + potential.centrifugal(i)));
-            into[0][i * channels + i] = gap * r * r < 1e-12 ? (0.5 - nu) / r : -Math.sqrt(gap + potential.centrifugal(i) / (r * r));
+            into[0][i * channels + i] =
+                    gap * r * r < 1e-12 ? (0.5 - nu) / r : -Math.sqrt(gap + potential.centrifugal(i) / (r * r));
         }
         for (int i = scan.firstAbove(r); i < scan.size(); i++) {
             if (scan.sample(i) < threshold - 1e-6 * potential.kinetic() / (scan.radius(i) * scan.radius(i))) {

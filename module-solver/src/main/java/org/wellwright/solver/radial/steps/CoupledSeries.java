@@ -1,8 +1,9 @@
 package org.wellwright.solver.radial.steps;
 
 /**
- * The power series of a {@link CoupledStep}'s transfer matrix: u = Σ a_k x^k with (k + 2)(k + 1) a_{k+2} = Σ_j Q_j a_{k−j} − h² e a_k, for both starts (1, 0)
- * and (0, 1) at once. Its blocks A, B, C, D stand in u(1) = A u(0) + B u′(0), u′(1) = C u(0) + D u′(0). Room that one thread uses again and again.
+ * The power series of a {@link CoupledStep}'s transfer matrix: u = Σ a_k x^k with (k + 2)(k + 1) a_{k+2} = Σ_j Q_j
+ * a_{k−j} − h² e a_k, for both starts (1, 0) and (0, 1) at once. Its blocks A, B, C, D stand in u(1) = A u(0) + B
+ * u′(0), u′(1) = C u(0) + D u′(0). Room that one thread uses again and again.
  */
 final class CoupledSeries {
     private static final int MOST_POWERS = 160;

@@ -5,9 +5,10 @@ import java.util.List;
 /**
  * Propagates the matrix Y = u′u⁻¹ of coupled channels from both ends to one edge (Johnson 1973; Manolopoulos 1986).
  *
- * <p>Over a step with u(1) = A u(0) + B u′(0) the zeros of det u are the negative eigenvalues of Y(0) + B⁻¹A, since no step holds a half-wave; the count of
- * levels is the sum of these from both sides and of the negative eigenvalues of Y_inside − Y_outside at the edge. Newton's step comes from the eigenvalue of
- * that difference that is nearest to zero for its slope. Used by one thread.
+ * <p>Over a step with u(1) = A u(0) + B u′(0) the zeros of det u are the negative eigenvalues of Y(0) + B⁻¹A, since no
+ * step holds a half-wave; the count of levels is the sum of these from both sides and of the negative eigenvalues of
+ * Y_inside − Y_outside at the edge. Newton's step comes from the eigenvalue of that difference that is nearest to zero
+ * for its slope. Used by one thread.
  */
 final class CoupledShooting implements LevelShooting {
     private final CoupledMesh mesh;
@@ -91,7 +92,9 @@ final class CoupledShooting implements LevelShooting {
                 double slope = 0;
                 for (int i = 0; i < n; i++) {
                     for (int j = 0; j < n; j++) {
-                        slope += vectors[i * n + k] * (inside[1][i * n + j] - outside[1][i * n + j]) * vectors[j * n + k];
+                        slope += vectors[i * n + k]
+                                * (inside[1][i * n + j] - outside[1][i * n + j])
+                                * vectors[j * n + k];
                     }
                 }
                 double step = -kinetic * values[k] / slope;
@@ -101,7 +104,10 @@ final class CoupledShooting implements LevelShooting {
         return negative;
     }
 
-    /** Carries Y (and its derivative by e) over a step, outwards for direction 1 and inwards for −1; returns the zeros passed. */
+    /**
+     * Carries Y (and its derivative by e) over a step, outwards for direction 1 and inwards for −1; returns the zeros
+     * passed.
+     */
     private int propagate(CoupledStep step, double e, boolean derivative, boolean wall, int direction, double[][] y) {
         step.transfer(e, derivative, series);
         double[][] blocks = series.blocks().clone();
@@ -189,7 +195,9 @@ final class CoupledShooting implements LevelShooting {
         return into;
     }
 
-    /** The residue counts the steps where motion is allowed; the potential is taken as the depth of the lowest curve. */
+    /**
+     * The residue counts the steps where motion is allowed; the potential is taken as the depth of the lowest curve.
+     */
     @Override
     public void weigh(double energy) {
         residue = 0;

@@ -1,6 +1,9 @@
 package org.wellwright.solver.radial.steps;
 
-/** One step of coupled channels, u″ = (Q(x) − h² e) u in x = (r − left)/h on [0, 1] with Q a matrix of polynomials. Immutable. */
+/**
+ * One step of coupled channels, u″ = (Q(x) − h² e) u in x = (r − left)/h on [0, 1] with Q a matrix of polynomials.
+ * Immutable.
+ */
 final class CoupledStep {
     final double left;
     final double width;

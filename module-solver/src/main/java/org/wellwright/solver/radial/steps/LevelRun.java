@@ -49,7 +49,12 @@ final class LevelRun {
      * @param steps how many steps there are in the end
      * @param evaluations how often V was evaluated in the end
      */
-    Spectrum run(RadialProblem problem, LevelSearch search, SolveMonitor monitor, LongSupplier steps, LongSupplier evaluations) {
+    Spectrum run(
+            RadialProblem problem,
+            LevelSearch search,
+            SolveMonitor monitor,
+            LongSupplier steps,
+            LongSupplier evaluations) {
         double ceiling = Math.min(search.below(), threshold);
         boolean all = search.count() == LevelSearch.ALL;
         if (all) {
@@ -80,7 +85,9 @@ final class LevelRun {
     private void requireEnd(double ceiling) {
         if (endless && ceiling >= threshold) {
             throw new InvalidModelException(
-                    "the series of bound levels has no end", where, "ask for a number of levels, or for those below an energy");
+                    "the series of bound levels has no end",
+                    where,
+                    "ask for a number of levels, or for those below an energy");
         }
     }
 

@@ -10,10 +10,11 @@ import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.Spectrum;
 
 /**
- * Levels of coupled channels by propagation of the logarithmic derivative (Johnson 1973; Manolopoulos 1986), with steps of high order.
+ * Levels of coupled channels by propagation of the logarithmic derivative (Johnson 1973; Manolopoulos 1986), with steps
+ * of high order.
  *
- * <p>Energies come with an estimate of their error, confirmed by counts on either side; there are no states and no strict bounds. What couples channels must
- * be weaker than r⁻² at the origin.
+ * <p>Energies come with an estimate of their error, confirmed by counts on either side; there are no states and no
+ * strict bounds. What couples channels must be weaker than r⁻² at the origin.
  */
 public final class LogDerivativeSolver implements RadialSolver {
     @Override
@@ -47,8 +48,8 @@ public final class LogDerivativeSolver implements RadialSolver {
             potential = new CoupledPotential(problem);
             potential.requireRegularCouplings();
             double kinetic = problem.kinetic();
-            PotentialScan scan =
-                    PotentialScan.of(potential, kinetic, 0, problem.innerWall(), problem.outerWall(), potential.where(0));
+            PotentialScan scan = PotentialScan.of(
+                    potential, kinetic, 0, problem.innerWall(), problem.outerWall(), potential.where(0));
             OriginBehaviour[] origins = new OriginBehaviour[potential.channels()];
             double lowest = Double.POSITIVE_INFINITY;
             boolean endless = Double.isFinite(problem.outerWall());
@@ -70,7 +71,8 @@ public final class LogDerivativeSolver implements RadialSolver {
             for (int c = 0; c < origins.length; c++) {
                 endless |= isEndless(c, threshold);
             }
-            mesh = new CoupledMesh(potential, scan, origins, problem.innerWall(), problem.outerWall(), threshold, monitor);
+            mesh = new CoupledMesh(
+                    potential, scan, origins, problem.innerWall(), problem.outerWall(), threshold, monitor);
             CoupledShooting shooting = new CoupledShooting(mesh, scan, kinetic, origins.length);
             search = new LevelRun(shooting, threshold, scan.hardyBound(), endless, potential.where(0));
         }

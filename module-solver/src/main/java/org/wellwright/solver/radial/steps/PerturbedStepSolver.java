@@ -24,8 +24,7 @@ public final class PerturbedStepSolver implements RadialSolver {
     @Override
     public Spectrum solve(RadialProblem problem, LevelSearch search, SolveMonitor monitor) {
         Setting setting = new Setting(problem, monitor);
-        return setting.search.run(
-                problem, search, monitor, setting.mesh::stepCount, setting.potential::evaluations);
+        return setting.search.run(problem, search, monitor, setting.mesh::stepCount, setting.potential::evaluations);
     }
 
     @Override

@@ -122,7 +122,8 @@ final class PotentialScan {
         return values[i] + kinetic * (centrifugal + 0.25) / radii[i] / radii[i];
     }
 
-    private static double[] chooseRadii(SampledPotential potential, double kinetic, double innerWall, double outerWall) {
+    private static double[] chooseRadii(
+            SampledPotential potential, double kinetic, double innerWall, double outerWall) {
         double from = Math.max(innerWall, Math.scalb(1.0, LOWEST_OCTAVE));
         double to = Math.min(outerWall, Math.scalb(1.0, HIGHEST_OCTAVE));
         int octaves = (int) Math.max(1, Math.ceil(Math.log(to / from) / Math.log(2)));

@@ -2,7 +2,9 @@ package org.wellwright.solver.radial.steps;
 
 import java.util.Arrays;
 
-/** Dense square matrices of a few rows, stored by rows in one array. All methods are pure but for the array they fill. */
+/**
+ * Dense square matrices of a few rows, stored by rows in one array. All methods are pure but for the array they fill.
+ */
 final class SmallMatrix {
     private SmallMatrix() {}
 
@@ -39,7 +41,10 @@ final class SmallMatrix {
         }
     }
 
-    /** into = a⁻¹ by Gauss–Jordan elimination with row pivots; a vanishing pivot counts as rounding of the largest element. */
+    /**
+     * into = a⁻¹ by Gauss–Jordan elimination with row pivots; a vanishing pivot counts as rounding of the largest
+     * element.
+     */
     static void invert(double[] a, double[] into, int n) {
         double[] work = a.clone();
         Arrays.fill(into, 0);
@@ -124,7 +129,8 @@ final class SmallMatrix {
     }
 
     /**
-     * Eigenvalues and, in the columns of {@code vectors}, eigenvectors of a symmetric matrix by cyclic Jacobi rotations (Golub and Van Loan 1996, § 8.4).
+     * Eigenvalues and, in the columns of {@code vectors}, eigenvectors of a symmetric matrix by cyclic Jacobi rotations
+     * (Golub and Van Loan 1996, § 8.4).
      */
     static void eigen(double[] a, double[] values, double[] vectors, int n) {
         double[] m = a.clone();

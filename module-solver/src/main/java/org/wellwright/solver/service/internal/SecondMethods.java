@@ -10,7 +10,10 @@ import org.wellwright.solver.radial.steps.PerturbedStepSolver;
 final class SecondMethods {
     private SecondMethods() {}
 
-    /** The method for a problem: constant-reference perturbation for one channel, log-derivative propagation for several. */
+    /**
+     * The method for a problem: constant-reference perturbation for one channel, log-derivative propagation for
+     * several.
+     */
     static Optional<RadialSolver> of(RadialProblem problem) {
         return Optional.of(problem.channels().size() == 1 ? new PerturbedStepSolver() : new LogDerivativeSolver());
     }

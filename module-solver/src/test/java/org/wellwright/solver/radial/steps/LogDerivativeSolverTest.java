@@ -40,7 +40,8 @@ class LogDerivativeSolverTest {
         return new ChannelTerm(row, column, formula(text));
     }
 
-    private static RadialProblem coupled(double kinetic, List<RadialChannel> channels, String common, ChannelTerm... rest) {
+    private static RadialProblem coupled(
+            double kinetic, List<RadialChannel> channels, String common, ChannelTerm... rest) {
         return new RadialProblem(kinetic, channels, formula(common), List.of(rest), 0, Double.POSITIVE_INFINITY);
     }
 
@@ -75,11 +76,11 @@ class LogDerivativeSolverTest {
     void rotatedChannelsHaveTheLevelsOfBothPotentials() {
         List<RadialChannel> channels = List.of(RadialChannel.of(1), RadialChannel.of(1));
         // cos = 0.6, sin = 0.8: V = R diag(r²/2, 2r²) Rᵀ, then r²/2 and r²/2 + 3.3.
-        RadialProblem strengths = coupled(
-                0.5, channels, "0", term(0, 0, "1.46*r^2"), term(1, 1, "1.04*r^2"), term(0, 1, "-0.72*r^2"));
+        RadialProblem strengths =
+                coupled(0.5, channels, "0", term(0, 0, "1.46*r^2"), term(1, 1, "1.04*r^2"), term(0, 1, "-0.72*r^2"));
         check(strengths, first(16, n -> 2 * n + 2.5, n -> 4 * n + 5));
-        RadialProblem constants = coupled(
-                0.5, channels, "0.5*r^2", term(0, 0, "1.188"), term(1, 1, "2.112"), term(0, 1, "1.584"));
+        RadialProblem constants =
+                coupled(0.5, channels, "0.5*r^2", term(0, 0, "1.188"), term(1, 1, "2.112"), term(0, 1, "1.584"));
         check(constants, first(16, n -> 2 * n + 2.5, n -> 2 * n + 5.8));
     }
 
@@ -91,7 +92,9 @@ class LogDerivativeSolverTest {
         check(box, first(14, n -> level.applyAsDouble(n) - 2, n -> level.applyAsDouble(n) + 2));
     }
 
-    /** The same critical strengths as in CountTest, in a channel that a second one of higher threshold does not touch. */
+    /**
+     * The same critical strengths as in CountTest, in a channel that a second one of higher threshold does not touch.
+     */
     @ParameterizedTest
     @CsvSource({"2.6840046509240915383, 1", "17.795699547133907188, 2"})
     void countsAtTheThresholdChangeAtTheCriticalStrength(double critical, int levels) {
@@ -174,9 +177,14 @@ class LogDerivativeSolverTest {
             asked.add(level * (1 - Math.signum(level) * 1e-11));
         }
         for (double energy : asked) {
-            int expected = (int) DoubleStream.of(energies).filter(e -> e < energy).count();
-            assertThat(SOLVER.countBelow(problem, energy)).as("second method at %s", energy).isEqualTo(expected);
-            assertThat(first.countBelow(problem, energy)).as("first method at %s", energy).isEqualTo(expected);
+            int expected =
+                    (int) DoubleStream.of(energies).filter(e -> e < energy).count();
+            assertThat(SOLVER.countBelow(problem, energy))
+                    .as("second method at %s", energy)
+                    .isEqualTo(expected);
+            assertThat(first.countBelow(problem, energy))
+                    .as("first method at %s", energy)
+                    .isEqualTo(expected);
         }
     }
 
