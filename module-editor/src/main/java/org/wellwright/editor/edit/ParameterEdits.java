@@ -199,7 +199,7 @@ public final class ParameterEdits {
     }
 
     private static ExactNumber scaled(ExactNumber number, double factor) {
-        return number == null ? null : ExactNumber.of(number.value() * factor);
+        return number == null ? null : QuantityText.times(number, factor);
     }
 
     private static List<String> names(ModelDocument document) {

@@ -18,7 +18,8 @@ public final class Uncertain {
         if (!(sigma > 0) || Double.isInfinite(sigma)) {
             return number(value, SHOWN);
         }
-        BigDecimal error = new BigDecimal(sigma).round(new MathContext(2, RoundingMode.HALF_EVEN));
+        BigDecimal twoDigits = new BigDecimal(sigma).round(new MathContext(2, RoundingMode.HALF_EVEN));
+        BigDecimal error = twoDigits.setScale(twoDigits.scale() - twoDigits.precision() + 2, RoundingMode.UNNECESSARY);
         int exponent = value == 0 ? 0 : (int) Math.floor(Math.log10(Math.abs(value)));
         if (error.scale() <= 0 || exponent < -4) {
             return scientific(value, error, exponent);

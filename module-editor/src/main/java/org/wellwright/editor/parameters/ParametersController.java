@@ -124,8 +124,7 @@ final class ParametersController {
         }
         double factor = QuantityText.factor(typed, unit, units);
         return new Prior(
-                ExactNumber.of(measured.value().value() * factor),
-                ExactNumber.of(measured.sigmaPlus().value() * factor));
+                QuantityText.times(measured.value(), factor), QuantityText.times(measured.sigmaPlus(), factor));
     }
 
     Optional<Problem> setConvention(ParametersViewModel.Row row, String text) {

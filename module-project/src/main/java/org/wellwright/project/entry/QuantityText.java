@@ -1,5 +1,6 @@
 package org.wellwright.project.entry;
 
+import java.math.BigDecimal;
 import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.units.Dimension;
 import org.wellwright.solver.units.ExactNumber;
@@ -25,12 +26,20 @@ public final class QuantityText {
             return typed.number();
         }
         double factor = factor(typed.rest(), fieldUnit, system);
-        double converted = typed.number().value() * factor;
-        if (!Double.isFinite(converted)) {
+        if (!Double.isFinite(typed.number().value() * factor)) {
             throw new InvalidModelException(
                     "'%s' is too large in %s".formatted(text.strip(), fieldUnit), "", "check the unit");
         }
-        return factor == 1 ? typed.number() : ExactNumber.of(converted);
+        return times(typed.number(), factor);
+    }
+
+    /** A number times the factor between two units; a power of ten changes no digit. */
+    public static ExactNumber times(ExactNumber number, double factor) {
+        if (factor == 1) {
+            return number;
+        }
+        BigDecimal product = number.decimal().multiply(new BigDecimal(Double.toString(factor)));
+        return ExactNumber.of(product.doubleValue());
     }
 
     /**

@@ -67,7 +67,14 @@ public final class LevelSums {
             sign = c == '+' ? 1 : -1;
             start = at + 1;
         }
-        found.add(contribution(plain.substring(start), sign, names));
+        String last = plain.substring(start);
+        if (!readable(last, names)) {
+            // The first part that is at fault says more than the whole.
+            for (String part : last.split("\\s[+-]\\s|→")) {
+                contribution(part, 1, names);
+            }
+        }
+        found.add(contribution(last, sign, names));
         return List.copyOf(found);
     }
 
