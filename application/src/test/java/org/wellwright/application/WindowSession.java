@@ -16,6 +16,8 @@ import javax.imageio.ImageIO;
  * every run: status 0, nothing on standard error, no warning in the log.
  */
 final class WindowSession {
+    private static final int KILLED = 9;
+
     private final PackagedApplication application;
     private final VirtualDisplay display;
     private final Path folder;
@@ -49,18 +51,12 @@ final class WindowSession {
 
     /** Plays a script; see the driver's commands. {@code exit 0} is added. */
     void play(String... lines) throws IOException, InterruptedException {
-        List<String> script = new ArrayList<>(List.of(lines));
-        script.add("exit 0");
-        Path file = Files.write(folder.resolve("script.txt"), script);
-        Files.deleteIfExists(folder.resolve("script.txt.log"));
-        ProcessBuilder process = new ProcessBuilder(
-                application.folder().resolve("bin/wellwright").toString(),
-                "--userdir",
-                userdir().toString(),
-                "--ui-script",
-                file.toString());
-        process.environment().put("DISPLAY", display.name());
-        PackagedApplication.Outcome outcome = PackagedApplication.run(process, folder);
+        playOn(new String[0], lines);
+    }
+
+    /** Plays a script in a window that was started with files of this session's folder on its command line. */
+    void playOn(String[] files, String... lines) throws IOException, InterruptedException {
+        PackagedApplication.Outcome outcome = run(files, "exit 0", lines);
         String log = Files.exists(log()) ? Files.readString(log()) : "no log";
         assertThat(outcome.status())
                 .as("status; steps: %s; errors: %s", steps(), outcome.errors())
@@ -70,6 +66,34 @@ final class WindowSession {
                 .as("warnings in the log")
                 .isEmpty();
         assertThat(log).doesNotContain("Exception");
+    }
+
+    /** Plays a script and then kills the process. */
+    void playToTheKill(String[] files, String... lines) throws IOException, InterruptedException {
+        PackagedApplication.Outcome outcome = run(files, "halt " + KILLED, lines);
+        assertThat(outcome.status())
+                .as("status; steps: %s; errors: %s", steps(), outcome.errors())
+                .isEqualTo(KILLED);
+    }
+
+    private PackagedApplication.Outcome run(String[] files, String last, String... lines)
+            throws IOException, InterruptedException {
+        List<String> script = new ArrayList<>(List.of(lines));
+        script.add(last);
+        Path file = Files.write(folder.resolve("script.txt"), script);
+        Files.deleteIfExists(folder.resolve("script.txt.log"));
+        List<String> command = new ArrayList<>(List.of(
+                application.folder().resolve("bin/wellwright").toString(),
+                "--userdir",
+                userdir().toString(),
+                "--ui-script",
+                file.toString()));
+        for (String name : files) {
+            command.add(folder.resolve(name).toString());
+        }
+        ProcessBuilder process = new ProcessBuilder(command);
+        process.environment().put("DISPLAY", display.name());
+        return PackagedApplication.run(process, folder);
     }
 
     /** The lines that a step of the last script wrote into a file. */

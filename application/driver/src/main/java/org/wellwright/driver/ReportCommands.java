@@ -167,7 +167,7 @@ final class ReportCommands {
         }
     }
 
-    private static void write(Path file, List<String> lines) {
+    static void write(Path file, List<String> lines) {
         try {
             Files.write(file, lines);
         } catch (IOException failure) {

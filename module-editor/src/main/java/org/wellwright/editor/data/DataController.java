@@ -61,7 +61,7 @@ final class DataController {
                 last == null ? TransformText.title(Transform.NONE) : QuantityNames.text(last),
                 "",
                 last == null ? Units.of(document()).energy().symbol() : last.unit(),
-                last == null ? "" : String.join(" ", last.groups()),
+                last == null ? "" : String.join(", ", last.groups()),
                 last == null ? "" : last.source());
     }
 
@@ -217,7 +217,8 @@ final class DataController {
     private List<String> groups(String text) {
         List<String> known = document().groups().stream().map(DataGroup::id).toList();
         List<String> groups = new ArrayList<>();
-        for (String group : text.strip().split("[\\s,;]+")) {
+        for (String part : text.split("[,;]")) {
+            String group = part.strip();
             if (!group.isEmpty() && !known.contains(group)) {
                 throw new InvalidModelException(
                         "there is no data group '%s'".formatted(Names.shortened(group)),

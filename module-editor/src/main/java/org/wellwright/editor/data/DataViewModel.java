@@ -95,7 +95,7 @@ record DataViewModel(List<Row> rows, String summary) {
                 QuantityNames.text(datum),
                 MeasuredText.format(datum.value(), datum.sigmaMinus(), datum.sigmaPlus(), datum.limit()),
                 datum.unit(),
-                String.join(" ", datum.groups()),
+                String.join(", ", datum.groups()),
                 datum.source(),
                 datum.reason(),
                 joined(faults.at(at + "/levels"), faults.at(at + "/denominator")),

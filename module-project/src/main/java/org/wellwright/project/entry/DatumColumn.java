@@ -48,7 +48,7 @@ public enum DatumColumn {
     UNIT("unit", List.of("units")),
     /** What was measured: "vacuum wavelength", "frequency", ... */
     TRANSFORM("quantity", List.of("transform", "kind", "type")),
-    /** The data groups, separated by blanks or semicolons. */
+    /** The data groups, separated by commas or semicolons. */
     GROUPS("groups", List.of("group", "series")),
     /** Where the value comes from. */
     SOURCE("source", List.of("reference", "ref")),

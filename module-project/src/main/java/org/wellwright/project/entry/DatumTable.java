@@ -322,18 +322,22 @@ public record DatumTable(List<DatumColumn> columns, Defaults defaults) {
         Set<String> known = new HashSet<>();
         document.groups().stream().map(DataGroup::id).forEach(known::add);
         List<String> groups = new ArrayList<>();
-        for (String group : text.split("[\\s,;]+")) {
-            if (!group.isEmpty() && !known.contains(group)) {
-                throw new InvalidModelException(
-                        "there is no data group '%s'".formatted(Names.shortened(group)),
-                        "",
-                        known.isEmpty() ? "add the group first" : Names.remedy(group, known));
-            }
-            if (!group.isEmpty()) {
-                groups.add(group);
+        for (String part : text.split("[,;]")) {
+            if (!part.isBlank()) {
+                groups.add(known(part.strip(), known));
             }
         }
         return groups;
+    }
+
+    private static String known(String group, Set<String> known) {
+        if (!known.contains(group)) {
+            throw new InvalidModelException(
+                    "there is no data group '%s'".formatted(Names.shortened(group)),
+                    "",
+                    known.isEmpty() ? "add the group first" : Names.remedy(group, known));
+        }
+        return group;
     }
 
     private static boolean used(String text) {

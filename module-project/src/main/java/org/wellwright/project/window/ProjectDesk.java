@@ -125,6 +125,10 @@ final class ProjectDesk {
 
     private void changed() {
         List<ProjectSession> sessions = open.sessions();
+        SelectionKept selections = Lookup.getDefault().lookup(SelectionKept.class);
+        if (selections != null) {
+            selections.follow(open);
+        }
         if (!restoring) {
             remembered.note(sessions, open.selected());
         }
