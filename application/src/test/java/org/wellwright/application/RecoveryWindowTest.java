@@ -42,8 +42,8 @@ class RecoveryWindowTest {
         WindowSession session = session("kill");
         session.playToTheKill(
                 new String[] {"ion.wellwright"},
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 0.0612",
                 "wait-title \"Ol⁺ *\"",
                 "sleep 2500");
         assertThat(Files.readString(folder.resolve("kill/ion.wellwright"))).contains("0.0548");
@@ -52,17 +52,17 @@ class RecoveryWindowTest {
                 "screenshot offer.png",
                 "rows ask.items offered.txt",
                 "click ask.restore",
-                "wait-cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0612",
                 "wait-title \"Ol⁺ *\"",
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "wait-file ion.wellwright 0.0612",
                 "action Edit/org-openide-actions-UndoAction",
-                "wait-cell parameters.table 4 2 0.0548",
+                "wait-cell parameters.table 5 2 0.0548",
                 "action Edit/org-openide-actions-RedoAction",
-                "wait-cell parameters.table 4 2 0.0612");
+                "wait-cell parameters.table 5 2 0.0612");
         assertThat(session.lines("offered.txt").get(0)).contains("Ol⁺");
         session.picture("offer.png");
-        session.play("wait-cell parameters.table 4 2 0.0612", "sleep 500", "windows quiet.txt");
+        session.play("wait-cell parameters.table 5 2 0.0612", "sleep 500", "windows quiet.txt");
     }
 
     @Test
@@ -72,13 +72,13 @@ class RecoveryWindowTest {
                 new String[0],
                 "wait-text start.example.1 Ol",
                 "click start.example.1",
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 0.0612",
                 "sleep 2500");
         session.play(
                 "wait-text ask.question \"did not end as it should\"",
                 "click ask.restore",
-                "wait-cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0612",
                 "action File/org-wellwright-project-window-CloseProjectAction",
                 "wait-text ask.question \"unsaved changes\"",
                 "screenshot unsaved.png",
@@ -93,16 +93,16 @@ class RecoveryWindowTest {
         WindowSession session = session("outside");
         session.playOn(
                 new String[] {"ion.wellwright"},
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 0.0612",
                 "replace-in-file ion.wellwright 0.0548 0.0777",
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "wait-text ask.question \"changed by another program\"",
                 "screenshot outside.png",
                 "click ask.again",
-                "wait-cell parameters.table 4 2 0.0777",
+                "wait-cell parameters.table 5 2 0.0777",
                 "action Edit/org-openide-actions-UndoAction",
-                "wait-cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0612",
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "wait-file ion.wellwright 0.0612");
         assertThat(Files.readString(folder.resolve("outside/ion.wellwright.bak"))).contains("0.0777");
@@ -114,12 +114,12 @@ class RecoveryWindowTest {
         WindowSession session = session("quit");
         session.playOn(
                 new String[] {"ion.wellwright"},
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 0.0612",
                 "action System/org-netbeans-core-actions-SystemExit",
                 "wait-text ask.question \"unsaved changes\"",
                 "click ask.cancel",
-                "wait-cell parameters.table 4 2 0.0612",
+                "wait-cell parameters.table 5 2 0.0612",
                 "action System/org-netbeans-core-actions-SystemExit",
                 "wait-text ask.question \"unsaved changes\"",
                 "click ask.save",
@@ -139,8 +139,8 @@ class RecoveryWindowTest {
             assertThat(lock.isValid()).isTrue();
             session.playOn(
                     new String[] {"ion.wellwright"},
-                    "wait-cell parameters.table 4 2 0.0548",
-                    "cell parameters.table 4 2 0.0612",
+                    "wait-cell parameters.table 5 2 0.0548",
+                    "cell parameters.table 5 2 0.0612",
                     "action File/org-wellwright-project-window-SaveProjectAction",
                     "wait-text fault.text \"being written by\"",
                     "screenshot locked.png",
@@ -156,8 +156,8 @@ class RecoveryWindowTest {
         Files.writeString(file.resolveSibling("ion.wellwright.lock"), "process 1 since 2020-01-01T00:00:00Z #1");
         session.playOn(
                 new String[] {"ion.wellwright"},
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 0.0613",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 0.0613",
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "wait-file ion.wellwright 0.0613",
                 "sleep 500");

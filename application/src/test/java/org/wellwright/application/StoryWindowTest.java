@@ -54,18 +54,18 @@ class StoryWindowTest {
                 "screenshot start-page.png",
                 "click start.example.1",
                 "wait-title \"invented ion\"",
-                "wait-cell parameters.table 4 2 0.0548",
-                "cell parameters.table 4 2 \"0.55 angstrom\"",
-                "wait-cell parameters.table 4 2 0.055",
-                "refused-cell parameters.table 4 2 \"0.55 eV\"",
-                "refused-cell parameters.table 4 2 7",
+                "wait-cell parameters.table 5 2 0.0548",
+                "cell parameters.table 5 2 \"0.55 angstrom\"",
+                "wait-cell parameters.table 5 2 0.055",
+                "refused-cell parameters.table 5 2 \"0.55 eV\"",
+                "refused-cell parameters.table 5 2 7",
                 "action Edit/org-openide-actions-UndoAction",
-                "wait-cell parameters.table 4 2 0.0548",
-                "select-row parameters.table 4",
+                "wait-cell parameters.table 5 2 0.0548",
+                "select-row parameters.table 5",
                 "slide parameters.slider 1500 30",
                 "rows parameters.table dragged.txt",
                 "action Edit/org-openide-actions-UndoAction",
-                "wait-cell parameters.table 4 2 0.0548",
+                "wait-cell parameters.table 5 2 0.0548",
                 "action Window/org-wellwright-editor-data-DataTopComponent",
                 "wait-rows data.table 14",
                 "paste data.table rows.txt",
@@ -84,21 +84,20 @@ class StoryWindowTest {
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "choose-file ion.wellwright",
                 "wait-file ion.wellwright \"Gaussian core\"",
-                "wait-title ion.wellwright",
                 "sleep 500",
                 "rows projects.list projects-before.txt",
                 "rows models.tree models-before.txt",
                 "windows windows-before.txt");
         session.play(
                 "wait-title \"invented ion\"",
-                "wait-rows parameters.table 15",
+                "wait-rows parameters.table 18",
                 "sleep 500",
                 "rows parameters.table after.txt",
                 "rows projects.list projects-after.txt",
                 "rows models.tree models-after.txt",
                 "windows windows-after.txt",
                 "screenshot next-day.png");
-        assertThat(session.lines("dragged.txt").get(4)).doesNotContain("0.0548");
+        assertThat(session.lines("dragged.txt").get(5)).doesNotContain("0.0548");
         assertThat(unselected(session.lines("after.txt"))).isEqualTo(unselected(session.lines("before.txt")));
         assertThat(session.lines("projects-after.txt")).isEqualTo(session.lines("projects-before.txt"));
         assertThat(session.lines("models-after.txt")).isEqualTo(session.lines("models-before.txt"));

@@ -336,9 +336,11 @@ public final class FitTopComponent extends SessionWindow {
     /** Shows a running fit in the platform's status line, with a button that cancels it. */
     private static final class StatusLine implements FitController.FitWatcher {
         private ProgressHandle handle;
+        private int done;
 
         @Override
         public void started(String model, Runnable stop) {
+            done = 0;
             handle = ProgressHandle.createHandle(Bundle.PRG_Fit(model), () -> {
                 stop.run();
                 return true;
@@ -348,7 +350,9 @@ public final class FitTopComponent extends SessionWindow {
 
         @Override
         public void progress(double fraction, String what) {
-            handle.progress(what, (int) (1000 * Math.max(0, Math.min(1, fraction))));
+            // The platform's bar cannot go back.
+            done = Math.max(done, Math.min(1000, (int) (1000 * fraction)));
+            handle.progress(what, done);
         }
 
         @Override

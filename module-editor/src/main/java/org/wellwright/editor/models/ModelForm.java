@@ -184,6 +184,7 @@ final class ModelForm {
         name.show(model.name());
         if (!note.getText().equals(model.note())) {
             note.setText(model.note());
+            note.setCaretPosition(0);
         }
         geometry.setSelectedIndex(model.geometry().ordinal());
         for (int i = 0; i < systems.size(); i++) {

@@ -31,7 +31,7 @@ import org.wellwright.editor.parts.ToolStrip;
 /** The tree of models, curves and terms; a box before each term switches it on and off. */
 final class ModelTree extends JTree {
     private static final long serialVersionUID = 1L;
-    private static final int LONGEST_DETAIL = 32;
+    private static final int LONGEST_DETAIL = 26;
 
     private final transient BiConsumer<TermPath, Boolean> toggle;
     private transient ModelsViewModel shown = new ModelsViewModel(List.of());

@@ -57,6 +57,8 @@ final class ValueSlider extends JPanel {
         low.onEntry(text -> end(text, true), line);
         high.onEntry(text -> end(text, false), line);
         title.setPreferredSize(new Dimension(150, title.getPreferredSize().height));
+        low.setMaximumSize(low.getPreferredSize());
+        high.setMaximumSize(high.getPreferredSize());
         Box ends = Box.createHorizontalBox();
         ends.add(low);
         ends.add(slider);

@@ -30,6 +30,7 @@ final class SolveProgress implements SolveCoordinator.Observer {
         long start = System.nanoTime();
         return new SolveMonitor() {
             private volatile boolean cancelled;
+            private int done;
 
             @Override
             public void progress(double fraction, String what) {
@@ -54,7 +55,9 @@ final class SolveProgress implements SolveCoordinator.Observer {
                     handle.start(PARTS);
                 }
                 if (!what.isEmpty()) {
-                    handle.progress(what, Math.max(0, Math.min(PARTS, (int) (fraction * PARTS))));
+                    // One part of the work after another counts from nothing, and the platform's bar cannot go back.
+                    done = Math.max(done, Math.min(PARTS, (int) (fraction * PARTS)));
+                    handle.progress(what, done);
                 }
             }
         };
