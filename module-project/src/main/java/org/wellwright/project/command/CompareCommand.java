@@ -3,6 +3,7 @@ package org.wellwright.project.command;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import org.wellwright.project.report.Csv;
 import org.wellwright.project.Project;
 import org.wellwright.project.command.json.FitJson;
 import org.wellwright.project.file.ProjectFileException;
@@ -57,16 +58,16 @@ final class CompareCommand implements Command {
                         model.model(),
                         row.datum(),
                         Words.levels(project.document(), row.datum()),
-                        CsvText.number(row.measured()),
-                        CsvText.number(row.sigma()),
-                        CsvText.number(row.predicted()),
-                        CsvText.number(row.groupShift()),
-                        CsvText.number(row.residual()),
+                        Csv.number(row.measured()),
+                        Csv.number(row.sigma()),
+                        Csv.number(row.predicted()),
+                        Csv.number(row.groupShift()),
+                        Csv.number(row.residual()),
                         row.unit(),
                         row.used() ? "yes" : "no"));
             }
         }
-        return CsvText.of(
+        return Csv.of(
                 List.of(
                         "rank",
                         "model",

@@ -5,6 +5,7 @@ import java.time.Instant;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
+import org.wellwright.project.report.Csv;
 import org.wellwright.project.Project;
 import org.wellwright.project.command.json.FitJson;
 import org.wellwright.project.file.Json;
@@ -92,20 +93,20 @@ final class FitCommand implements Command {
         for (FittedParameter parameter : fit.parameters()) {
             rows.add(List.of(
                     parameter.name(),
-                    CsvText.number(parameter.value()),
-                    CsvText.number(parameter.sigma()),
+                    Csv.number(parameter.value()),
+                    Csv.number(parameter.sigma()),
                     parameter.unit(),
                     parameter.free() ? "yes" : "no"));
         }
         for (GroupError error : fit.groupErrors()) {
             rows.add(List.of(
                     "group " + error.group(),
-                    CsvText.number(error.value()),
-                    CsvText.number(error.sigma()),
+                    Csv.number(error.value()),
+                    Csv.number(error.sigma()),
                     error.unit(),
                     "yes"));
         }
-        return CsvText.of(List.of("name", "value", "sigma", "unit", "free"), rows);
+        return Csv.of(List.of("name", "value", "sigma", "unit", "free"), rows);
     }
 
     private static String table(FitResult fit, Project project) {

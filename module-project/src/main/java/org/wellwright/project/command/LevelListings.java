@@ -2,6 +2,7 @@ package org.wellwright.project.command;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.wellwright.project.report.Csv;
 import org.wellwright.project.command.json.LevelListing;
 import org.wellwright.project.command.json.LevelListing.ChannelRow;
 import org.wellwright.project.command.json.LevelListing.LevelRow;
@@ -41,16 +42,16 @@ final class LevelListings {
             cells.add(channel.coupled() ? "" : Integer.toString(channel.orbital()));
             cells.add(channel.twiceTotal() < 0 ? "" : half(channel.twiceTotal()));
             cells.add(Integer.toString(level.index()));
-            cells.add(CsvText.number(level.energy()));
-            cells.add(CsvText.number(level.lower()));
-            cells.add(CsvText.number(level.upper()));
+            cells.add(Csv.number(level.energy()));
+            cells.add(Csv.number(level.lower()));
+            cells.add(Csv.number(level.upper()));
             cells.add(LevelsJson.word(level.boundKind()));
-            cells.add(CsvText.number(level.width()));
+            cells.add(Csv.number(level.width()));
             cells.add(LevelsJson.word(completeness(listing, row.place())));
             cells.add(listing.energyUnit());
             rows.add(cells);
         }
-        return CsvText.of(header, rows);
+        return Csv.of(header, rows);
     }
 
     private static String table(LevelListing listing) {

@@ -1,5 +1,6 @@
 package org.wellwright.project.report;
 
+import java.util.Locale;
 import org.wellwright.solver.fit.FitQuality;
 import org.wellwright.solver.fit.FitResult;
 import org.wellwright.solver.fit.FittedParameter;
@@ -52,6 +53,11 @@ public final class Words {
             case WIDTH -> "width";
             case RATE -> "rate";
         };
+    }
+
+    /** The word of an enumeration constant: lower case with hyphens. */
+    static String hyphenated(Enum<?> constant) {
+        return constant.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
     /** Whether a fit could change a parameter, and what holds it. */

@@ -1,13 +1,13 @@
-package org.wellwright.project.command;
+package org.wellwright.project.report;
 
 import java.util.List;
 
 /** Rows as RFC 4180 text. */
-final class CsvText {
-    private CsvText() {}
+public final class Csv {
+    private Csv() {}
 
     /** A header and rows; a cell with a comma, quote or line break is quoted. */
-    static String of(List<String> header, List<List<String>> rows) {
+    public static String of(List<String> header, List<List<String>> rows) {
         StringBuilder text = new StringBuilder();
         line(text, header);
         rows.forEach(row -> line(text, row));
@@ -15,7 +15,7 @@ final class CsvText {
     }
 
     /** A number as it reads back to the same double; empty if it is not finite. */
-    static String number(double value) {
+    public static String number(double value) {
         return Double.isFinite(value) ? Double.toString(value) : "";
     }
 
