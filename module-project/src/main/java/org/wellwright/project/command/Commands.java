@@ -8,7 +8,7 @@ final class Commands {
 
     /** Names in the order of the overview. */
     static List<String> names() {
-        return List.of("bound", "solve", "compare", "fit", "validate");
+        return List.of("bound", "solve", "compare", "fit", "import", "figure", "report", "validate");
     }
 
     /** The command of a name, or null. Only this one is made. */
@@ -18,6 +18,9 @@ final class Commands {
             case "solve" -> new SolveCommand();
             case "compare" -> new CompareCommand();
             case "fit" -> new FitCommand();
+            case "import" -> new ImportCommand();
+            case "figure" -> new FigureCommand();
+            case "report" -> new ReportCommand();
             case "validate" -> new ValidateCommand();
             default -> null;
         };
