@@ -72,7 +72,7 @@ final class ResidualPainter {
             PlotStyle style) {
         List<PlacedMark> marks = new ArrayList<>();
         int models = plot.models().size();
-        double apart = models > 1 ? Math.min(2.2 * radius, 0.7 * rowHeight / (models - 1)) : 0;
+        double apart = models > 1 ? Math.min(2.2 * radius, 0.5 * rowHeight / (models - 1)) : 0;
         for (int k = 0; k < models; k++) {
             double residual = row.residuals().get(k);
             if (!Double.isFinite(residual)) {

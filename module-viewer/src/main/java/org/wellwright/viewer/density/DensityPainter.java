@@ -118,8 +118,7 @@ final class DensityPainter {
 
     static String unit(DensityPlane plane) {
         String length = plane.lengthUnit();
-        boolean plain = length.chars().allMatch(Character::isLetter);
-        return plain ? length + "⁻³" : "1/(" + length + ")³";
+        return length.endsWith("⁻¹") ? length.substring(0, length.length() - 2) + "³" : length + "⁻³";
     }
 
     private static String barLabel(DensityPlane plane) {

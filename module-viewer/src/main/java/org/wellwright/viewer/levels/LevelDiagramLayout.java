@@ -45,27 +45,45 @@ record LevelDiagramLayout(List<PlacedGroup> groups, List<PlacedBar> bars, List<P
     static LevelDiagramLayout of(LevelDiagram diagram, PlotFrame.Area area, PlotStyle style) {
         double em = style.em();
         Rectangle2D box = area.area();
-        int columnCount = diagram.groups().stream()
-                .mapToInt(group -> group.columns().size())
-                .sum();
         double groupGap = Math.min(
                 em * 1.6, box.getWidth() * 0.25 / Math.max(1, diagram.groups().size()));
-        double slot = (box.getWidth() - groupGap * diagram.groups().size()) / Math.max(1, columnCount);
+        List<Double> widths = widths(diagram, box.getWidth() - groupGap * diagram.groups().size(), style);
         List<PlacedGroup> groups = new ArrayList<>();
         List<PlacedBar> bars = new ArrayList<>();
         List<PlacedLabel> labels = new ArrayList<>();
         double x = box.getX() + groupGap / 2;
-        for (Group group : diagram.groups()) {
+        for (int i = 0; i < diagram.groups().size(); i++) {
+            Group group = diagram.groups().get(i);
             double left = x;
+            double slot = widths.get(i) / Math.max(1, group.columns().size());
             List<PlacedColumn> columns = new ArrayList<>();
             for (Column column : group.columns()) {
                 columns.add(place(column, group, x, slot, area, style, bars, labels));
                 x += slot;
             }
+            x = left + widths.get(i);
             groups.add(new PlacedGroup(group, left, x, List.copyOf(columns)));
             x += groupGap;
         }
         return new LevelDiagramLayout(groups, bars, labels);
+    }
+
+    /** Widths of the groups: by their columns, but none narrower than its header as long as there is room. */
+    private static List<Double> widths(LevelDiagram diagram, double room, PlotStyle style) {
+        double fair = 0.9 * room / Math.max(1, diagram.groups().size());
+        double columns = diagram.groups().stream()
+                .mapToInt(group -> group.columns().size())
+                .sum();
+        List<Double> wanted = new ArrayList<>();
+        double sum = 0;
+        for (Group group : diagram.groups()) {
+            double header = Math.min(fair, ScriptText.width(style.font(), group.header()));
+            double width = Math.max(header, room * group.columns().size() / Math.max(1, columns));
+            wanted.add(width);
+            sum += width;
+        }
+        double scale = sum > 0 ? room / sum : 1;
+        return wanted.stream().map(width -> width * scale).toList();
     }
 
     private static PlacedColumn place(
@@ -161,6 +179,10 @@ record LevelDiagramLayout(List<PlacedGroup> groups, List<PlacedBar> bars, List<P
             return alone;
         }
         Bar last = run.get(run.size() - 1).bar();
+        if (first.key().equals(last.key())) {
+            // The same level, measured twice.
+            return alone;
+        }
         for (String text : List.of(
                 alone + " – " + (numbered ? last.shortLabel() : last.label()),
                 first.shortLabel() + "–" + last.shortLabel(),

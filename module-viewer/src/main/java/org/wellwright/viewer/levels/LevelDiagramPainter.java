@@ -170,11 +170,33 @@ final class LevelDiagramPainter {
             ScriptText.draw(g, style.smallFont(), note, group.left(), baseline + line * 0.92);
         }
         g.setColor(style.theme().text());
-        for (PlacedColumn column : group.columns()) {
-            double width = column.end() - column.left();
-            String text = ScriptText.fitted(style.smallFont(), column.column().header(), width);
+        columnNames(g, group, area.area().getMaxY() + line * 1.05, style);
+    }
+
+    /** The channels under their columns; where they do not fit, the first and the last for the whole group. */
+    private static void columnNames(Graphics2D g, PlacedGroup group, double baseline, PlotStyle style) {
+        boolean fit = group.columns().stream()
+                .allMatch(column -> ScriptText.width(
+                                style.smallFont(), column.column().header())
+                        <= column.end() - column.left());
+        if (fit) {
+            for (PlacedColumn column : group.columns()) {
+                ScriptText.draw(g, style.smallFont(), column.column().header(), column.left(), baseline);
+            }
+        } else {
+            String first = group.columns().get(0).column().header();
+            String last = group.columns().get(group.columns().size() - 1).column().header();
+            int same = 0;
+            while (same < Math.min(first.length(), last.length()) && first.charAt(same) == last.charAt(same) && !Character.isDigit(first.charAt(same))) {
+                same++;
+            }
+            String text = first + " … " + last.substring(same);
             ScriptText.draw(
-                    g, style.smallFont(), text, column.left(), area.area().getMaxY() + line * 1.05);
+                    g,
+                    style.smallFont(),
+                    ScriptText.fitted(style.smallFont(), text, group.right() - group.left() + style.em() * 0.8),
+                    group.left(),
+                    baseline);
         }
     }
 

@@ -70,14 +70,14 @@ final class PotentialPlot {
         return new XyPlotModel(
                 "Potential with levels",
                 "%s, channel %s".formatted(front.model(), names.channel(channel.key(0))),
-                AxisSpec.of("r (%s)".formatted(input.units().length().printed()), 0, range.right()),
+                AxisSpec.of("r (%s)".formatted(input.units().length().printed()), range.left(), range.right()),
                 AxisSpec.of("%s (%s)".formatted(what, energy), range.bottom(), range.top()),
                 curves,
                 rungs,
                 true);
     }
 
-    private record Range(double right, double bottom, double top) {}
+    private record Range(double left, double right, double bottom, double top) {}
 
     private static Range range(PotentialCurve curve, List<Level> levels) {
         double right = 0;
@@ -92,7 +92,7 @@ final class PotentialPlot {
                 levels.get(Math.min(LEVELS_IN_RANGE, levels.size()) - 1).energy() + origin;
         double threshold = levels.get(0).threshold() + origin;
         double span = highest - lowest;
-        if (Double.isFinite(threshold) && threshold - highest < Math.max(span, threshold - lowest)) {
+        if (Double.isFinite(threshold) && threshold - highest <= Math.max(span, 0.3 * (threshold - lowest))) {
             highest = Math.max(highest, threshold);
         }
         double floor = Double.POSITIVE_INFINITY;
@@ -103,7 +103,18 @@ final class PotentialPlot {
         // A bottomless potential is cut below the lowest level; a bottom near by is shown.
         double bottom = lowest - floor <= 1.5 * span ? floor - 0.06 * span : lowest - 0.5 * span;
         double top = highest + 0.22 * (highest - bottom);
-        return new Range(right, bottom, top);
+        return new Range(left(curve, right, top), right, bottom, top);
+    }
+
+    /** The centre, or for a potential that is repulsive far out a little inside its wall. */
+    private static double left(PotentialCurve curve, double right, double top) {
+        for (int i = 1; i <= SAMPLES; i++) {
+            double r = right * i / SAMPLES;
+            if (curve.at(r) < top) {
+                return r < 0.25 * right ? 0 : r - 0.12 * (right - r);
+            }
+        }
+        return 0;
     }
 
     private static Points sample(PotentialCurve curve, Range range) {

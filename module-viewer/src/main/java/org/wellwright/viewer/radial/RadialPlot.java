@@ -20,7 +20,7 @@ final class RadialPlot {
     private static final int MOST_LEVELS = 8;
     private static final int USUAL_LEVELS = 3;
 
-    /** The probability beyond which nothing is drawn. */
+    /** The probability that is left out on either side. */
     private static final double TAIL = 2e-4;
 
     private RadialPlot() {}
@@ -33,10 +33,14 @@ final class RadialPlot {
         keys = keys.subList(0, Math.min(MOST_LEVELS, keys.size()));
         LevelText names = LevelText.of(input.document());
         List<Drawn> drawn = keys.size() == 1 ? ofAllModels(input, front, keys.get(0)) : ofOneModel(front, keys, names);
+        double left = Double.POSITIVE_INFINITY;
         double right = 0;
         for (Drawn one : drawn) {
-            right = Math.max(right, reach(one.state()));
+            left = Math.min(left, radiusHolding(one.state(), TAIL));
+            right = Math.max(right, radiusHolding(one.state(), 1 - TAIL));
         }
+        // Functions that live far out need not be shown from the centre.
+        left = left < 0.3 * right ? 0 : left - 0.1 * (right - left);
         double[] radii = radii(right);
         List<XyPlotModel.Curve> curves = new ArrayList<>();
         double lowest = 0;
@@ -54,7 +58,7 @@ final class RadialPlot {
         return new XyPlotModel(
                 "Radial functions",
                 of,
-                AxisSpec.of("r (%s)".formatted(input.units().length().printed()), 0, right),
+                AxisSpec.of("r (%s)".formatted(input.units().length().printed()), left, right),
                 AxisSpec.of(
                         quantity.label(input.units().length().printed()),
                         lowest < 0 ? lowest - margin : 0,
@@ -85,12 +89,12 @@ final class RadialPlot {
         return drawn;
     }
 
-    /** The radius that holds all but {@link #TAIL}. */
-    private static double reach(RadialState state) {
+    /** The radius within which a share of the probability lies. */
+    private static double radiusHolding(RadialState state, double share) {
         double[] radii = radii(state.outerRadius());
         double[] within = RadialQuantity.CUMULATIVE.sample(state, radii);
         for (int i = 0; i < radii.length; i++) {
-            if (within[i] > 1 - TAIL) {
+            if (within[i] > share) {
                 return radii[i];
             }
         }
