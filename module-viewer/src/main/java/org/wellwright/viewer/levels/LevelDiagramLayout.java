@@ -47,7 +47,8 @@ record LevelDiagramLayout(List<PlacedGroup> groups, List<PlacedBar> bars, List<P
         Rectangle2D box = area.area();
         double groupGap = Math.min(
                 em * 1.6, box.getWidth() * 0.25 / Math.max(1, diagram.groups().size()));
-        List<Double> widths = widths(diagram, box.getWidth() - groupGap * diagram.groups().size(), style);
+        List<Double> widths =
+                widths(diagram, box.getWidth() - groupGap * diagram.groups().size(), style);
         List<PlacedGroup> groups = new ArrayList<>();
         List<PlacedBar> bars = new ArrayList<>();
         List<PlacedLabel> labels = new ArrayList<>();

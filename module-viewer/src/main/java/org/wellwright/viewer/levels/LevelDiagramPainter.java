@@ -176,18 +176,20 @@ final class LevelDiagramPainter {
     /** The channels under their columns; where they do not fit, the first and the last for the whole group. */
     private static void columnNames(Graphics2D g, PlacedGroup group, double baseline, PlotStyle style) {
         boolean fit = group.columns().stream()
-                .allMatch(column -> ScriptText.width(
-                                style.smallFont(), column.column().header())
-                        <= column.end() - column.left());
+                .allMatch(column ->
+                        ScriptText.width(style.smallFont(), column.column().header()) <= column.end() - column.left());
         if (fit) {
             for (PlacedColumn column : group.columns()) {
                 ScriptText.draw(g, style.smallFont(), column.column().header(), column.left(), baseline);
             }
         } else {
             String first = group.columns().get(0).column().header();
-            String last = group.columns().get(group.columns().size() - 1).column().header();
+            String last =
+                    group.columns().get(group.columns().size() - 1).column().header();
             int same = 0;
-            while (same < Math.min(first.length(), last.length()) && first.charAt(same) == last.charAt(same) && !Character.isDigit(first.charAt(same))) {
+            while (same < Math.min(first.length(), last.length())
+                    && first.charAt(same) == last.charAt(same)
+                    && !Character.isDigit(first.charAt(same))) {
                 same++;
             }
             String text = first + " … " + last.substring(same);
