@@ -81,19 +81,12 @@ record PotentialCurve(SolvedChannel channel, boolean centrifugal) {
         return 0.5 * (a + b);
     }
 
-    /** Where the state of a level ends for the eye, or NaN if there is no state. */
-    double reach(Level level) {
-        for (Level found : channel.spectrum().levels()) {
-            if (found.index() == level.index()
-                    && found.index() < channel.spectrum().outcomes().size()) {
-                List<Allowed> allowed = allowed(
-                        level.energy() + channel.origin(),
-                        channel.spectrum().state(level.index()).outerRadius());
-                return allowed.isEmpty()
-                        ? Double.NaN
-                        : allowed.get(allowed.size() - 1).to();
-            }
-        }
-        return Double.NaN;
+    /** From the innermost to the outermost turning point of a level; null if it is nowhere allowed or there is no state. */
+    Allowed span(Level level) {
+        double end = channel.spectrum().state(level.index()).outerRadius();
+        List<Allowed> allowed = allowed(level.energy() + channel.origin(), end);
+        return allowed.isEmpty()
+                ? null
+                : new Allowed(allowed.get(0).from(), allowed.get(allowed.size() - 1).to());
     }
 }

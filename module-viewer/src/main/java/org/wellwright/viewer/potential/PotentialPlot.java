@@ -80,12 +80,16 @@ final class PotentialPlot {
     private record Range(double left, double right, double bottom, double top) {}
 
     private static Range range(PotentialCurve curve, List<Level> levels) {
-        double right = 0;
-        for (int i = 0; i < Math.min(LEVELS_IN_RANGE, levels.size()); i++) {
-            double reach = curve.reach(levels.get(i));
-            right = Double.isNaN(reach) ? right : Math.max(right, reach);
+        double inner = Double.POSITIVE_INFINITY;
+        double outer = 0;
+        for (Level level : levels.subList(0, Math.min(LEVELS_IN_RANGE, levels.size()))) {
+            PotentialCurve.Allowed span = curve.span(level);
+            if (span != null) {
+                inner = Math.min(inner, span.from());
+                outer = Math.max(outer, span.to());
+            }
         }
-        right *= 1.3;
+        double right = outer + 0.3 * (outer - Math.min(inner, outer));
         double origin = curve.channel().origin();
         double lowest = levels.get(0).energy() + origin;
         double highest =
@@ -111,7 +115,7 @@ final class PotentialPlot {
         for (int i = 1; i <= SAMPLES; i++) {
             double r = right * i / SAMPLES;
             if (curve.at(r) < top) {
-                return r < 0.25 * right ? 0 : r - 0.12 * (right - r);
+                return r < 0.25 * right ? 0 : r - 0.06 * (right - r);
             }
         }
         return 0;
