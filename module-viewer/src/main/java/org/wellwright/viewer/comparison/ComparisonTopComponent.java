@@ -56,7 +56,7 @@ public final class ComparisonTopComponent extends FigureWindow {
         head.setPreferredSize(new Dimension(100, height));
         tables.add(head, BorderLayout.NORTH);
         tables.add(new JScrollPane(data), BorderLayout.CENTER);
-        JSplitPane split = new JSplitPane(JSplitPane.VERTICAL_SPLIT, picture, tables);
+        JSplitPane split = new JSplitPane(JSplitPane.HORIZONTAL_SPLIT, picture, tables);
         split.setResizeWeight(0.5);
         split.setContinuousLayout(true);
         return split;

@@ -224,6 +224,10 @@ public abstract class FigureWindow extends SessionWindow {
             showProblem(Bundle.MSG_FigureSolving());
             return;
         }
+        if (solution.problem() != null && solution.results().models().isEmpty()) {
+            showProblem(solution.problem().sentence());
+            return;
+        }
         FigureSelection selection = selection();
         if (states != null) {
             states.show(solution.results(), selection);
