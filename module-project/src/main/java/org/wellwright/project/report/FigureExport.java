@@ -1,15 +1,13 @@
 package org.wellwright.project.report;
 
 import java.io.IOException;
-import java.nio.file.AtomicMoveNotSupportedException;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.nio.file.StandardCopyOption;
 import java.util.Optional;
 import org.openide.util.lookup.ServiceProvider;
 import org.wellwright.project.FigureProvider;
 import org.wellwright.project.FigureRequest;
 import org.wellwright.project.FigureWriter;
+import org.wellwright.project.file.SafeFile;
 import org.wellwright.solver.InvalidModelException;
 import org.wellwright.solver.Problem;
 
@@ -21,19 +19,7 @@ import org.wellwright.solver.Problem;
 public final class FigureExport implements FigureWriter {
     @Override
     public void write(FigureProvider figure, FigureRequest request, Sheet sheet, Path file) throws IOException {
-        byte[] bytes = bytes(figure, request, sheet);
-        Path folder = file.toAbsolutePath().getParent();
-        Path fresh = Files.createTempFile(folder, ".figure", ".tmp");
-        try {
-            Files.write(fresh, bytes);
-            try {
-                Files.move(fresh, file, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
-            } catch (AtomicMoveNotSupportedException e) {
-                Files.move(fresh, file, StandardCopyOption.REPLACE_EXISTING);
-            }
-        } finally {
-            Files.deleteIfExists(fresh);
-        }
+        SafeFile.replace(file, bytes(figure, request, sheet), false);
     }
 
     @Override

@@ -176,7 +176,7 @@ record LevelDiagramLayout(List<PlacedGroup> groups, List<PlacedBar> bars, List<P
     private static String text(List<PlacedBar> run, boolean numbered, double room, PlotStyle style) {
         Bar first = run.get(0).bar();
         String alone = numbered ? first.shortLabel() : first.label();
-        if (run.size() == 1) {
+        if (run.stream().allMatch(bar -> bar.bar().shortLabel().equals(first.shortLabel()))) {
             return alone;
         }
         Bar last = run.get(run.size() - 1).bar();
