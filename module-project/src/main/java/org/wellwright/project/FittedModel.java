@@ -16,7 +16,8 @@ public record FittedModel(String model, FitResult fit, Problem problem) {
     public FittedModel {
         Objects.requireNonNull(model, "model");
         if ((fit == null) == (problem == null)) {
-            throw new IllegalArgumentException("the model '" + model + "' needs either a fit or the reason why it has none");
+            throw new IllegalArgumentException(
+                    "the model '" + model + "' needs either a fit or the reason why it has none");
         }
     }
 }

@@ -3,8 +3,8 @@ package org.wellwright.project;
 import java.util.List;
 
 /**
- * A section of a report. Registered with {@code @ServiceProvider(service = ReportSection.class)} and found through the Lookup, so that a module adds one by
- * being there. Implementations hold no state.
+ * A section of a report. Registered with {@code @ServiceProvider(service = ReportSection.class)} and found through the
+ * Lookup, so that a module adds one by being there. Implementations hold no state.
  */
 public interface ReportSection {
     /** Identifier, unique; lower case with hyphens. */

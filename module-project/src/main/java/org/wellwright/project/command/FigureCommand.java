@@ -50,7 +50,9 @@ final class FigureCommand implements Command {
         Project project = ProjectArgument.read(file);
         Model model = ProjectArgument.model(input, project, file);
         FigureSelection selection = selection(input, project.document(), model);
-        SolveScope scope = selection.levels().isEmpty() ? SolveScope.USUAL : scope(selection.levels().get(0));
+        SolveScope scope = selection.levels().isEmpty()
+                ? SolveScope.USUAL
+                : scope(selection.levels().get(0));
         FigureInput results = ProjectResults.of(project, scope, Services.solver(), Services.fit(), SolveMonitor.NONE);
         FigureRequest request = new FigureRequest(
                 results, selection, variant, FigureRequest.Ground.LIGHT, new Font(Font.SANS_SERIF, Font.PLAIN, 12));
@@ -59,7 +61,11 @@ final class FigureCommand implements Command {
             writer.write(figure, request, sheet, target);
         } catch (IOException e) {
             throw new ProjectFileException(
-                    new Problem("the figure cannot be written: " + SafeFile.reason(e), target.toString(), "check the folder"), e);
+                    new Problem(
+                            "the figure cannot be written: " + SafeFile.reason(e),
+                            target.toString(),
+                            "check the folder"),
+                    e);
         }
         return 0;
     }
@@ -76,7 +82,8 @@ final class FigureCommand implements Command {
             }
         }
         List<String> ids = figures.stream().map(FigureProvider::id).toList();
-        throw new UsageException("there is no figure '" + Names.shortened(id) + "'", "use one of " + String.join(", ", ids));
+        throw new UsageException(
+                "there is no figure '" + Names.shortened(id) + "'", "use one of " + String.join(", ", ids));
     }
 
     private static String variant(Input input, FigureProvider figure) {
@@ -84,9 +91,12 @@ final class FigureCommand implements Command {
         if (wanted == null) {
             return "";
         }
-        List<String> ids = figure.variants().stream().map(FigureProvider.Variant::id).toList();
+        List<String> ids =
+                figure.variants().stream().map(FigureProvider.Variant::id).toList();
         if (!ids.contains(wanted)) {
-            throw new UsageException("the figure has no variant '" + Names.shortened(wanted) + "'", "use one of " + String.join(", ", ids));
+            throw new UsageException(
+                    "the figure has no variant '" + Names.shortened(wanted) + "'",
+                    "use one of " + String.join(", ", ids));
         }
         return wanted;
     }
@@ -94,20 +104,22 @@ final class FigureCommand implements Command {
     private static FigureWriter.Sheet sheet(Input input, Path target) {
         String name = target.getFileName().toString().toLowerCase(Locale.ROOT);
         int dot = name.lastIndexOf('.');
-        FigureWriter.Format format =
-                switch (name.substring(dot + 1)) {
-                    case "png" -> FigureWriter.Format.PNG;
-                    case "svg" -> FigureWriter.Format.SVG;
-                    case "pdf" -> FigureWriter.Format.PDF;
-                    default -> throw new UsageException("'" + target + "' does not say what kind of file it is", "end it in .png, .svg or .pdf");
-                };
+        FigureWriter.Format format = switch (name.substring(dot + 1)) {
+            case "png" -> FigureWriter.Format.PNG;
+            case "svg" -> FigureWriter.Format.SVG;
+            case "pdf" -> FigureWriter.Format.PDF;
+            default ->
+                throw new UsageException(
+                        "'" + target + "' does not say what kind of file it is", "end it in .png, .svg or .pdf");
+        };
         String size = input.value("size");
         int width = 900;
         int height = 600;
         if (size != null) {
             int times = size.indexOf('x');
             if (times < 0) {
-                throw new UsageException("--size is '" + Names.shortened(size) + "'", "write width and height, such as 900x600");
+                throw new UsageException(
+                        "--size is '" + Names.shortened(size) + "'", "write width and height, such as 900x600");
             }
             width = Input.whole("--size", size.substring(0, times), 320, 20_000);
             height = Input.whole("--size", size.substring(times + 1), 200, 20_000);
@@ -123,7 +135,8 @@ final class FigureCommand implements Command {
         }
         String[] parts = state.split(",", -1);
         if (parts.length != 3) {
-            throw new UsageException("--state is '" + Names.shortened(state) + "'", "write radial nodes, l and m, such as 1,2,0");
+            throw new UsageException(
+                    "--state is '" + Names.shortened(state) + "'", "write radial nodes, l and m, such as 1,2,0");
         }
         int nodes = Input.whole("--state", parts[0], 0, 10_000);
         int orbital = Input.whole("--state", parts[1], 0, 10_000);
@@ -132,7 +145,8 @@ final class FigureCommand implements Command {
                 .map(pair -> pair.id())
                 .filter(model::serves)
                 .findFirst()
-                .orElseThrow(() -> new InvalidModelException("the model serves no system", "model '" + model.name() + "'", "add one"));
+                .orElseThrow(() -> new InvalidModelException(
+                        "the model serves no system", "model '" + model.name() + "'", "add one"));
         LevelKey key = new LevelKey(system, model.curves().get(0).name(), ChannelKey.ofOrbital(orbital), nodes);
         return new FigureSelection(model.name(), List.of(key), magnetic);
     }

@@ -30,7 +30,11 @@ import org.wellwright.solver.units.UnitExpression;
 final class ImportCommand implements Command {
     @Override
     public Syntax syntax() {
-        return new Syntax("import", "Reads measured data from a table; shows them, or adds them with --write.", "PROJECT", "FILE.csv")
+        return new Syntax(
+                        "import",
+                        "Reads measured data from a table; shows them, or adds them with --write.",
+                        "PROJECT",
+                        "FILE.csv")
                 .option(
                         "columns",
                         "MAP",
@@ -74,7 +78,8 @@ final class ImportCommand implements Command {
         ModelDocument document = project.document();
         DelimitedText table = DelimitedText.parse(text(source));
         if (table.rows().isEmpty()) {
-            throw new ProjectFileException(new Problem("the table has no rows", source.toString(), "is it the file you meant?"));
+            throw new ProjectFileException(
+                    new Problem("the table has no rows", source.toString(), "is it the file you meant?"));
         }
         List<DatumColumn> columns = columns(input.value("columns"), table);
         List<Problem> faults = new ArrayList<>();
@@ -112,7 +117,8 @@ final class ImportCommand implements Command {
     private static DatumTable.Defaults defaults(Input input, ModelDocument document) {
         DatumTable.Defaults usual = DatumTable.Defaults.of(document);
         Transform transform = input.has("quantity") ? TransformText.parse(input.value("quantity")) : usual.transform();
-        String unit = input.has("unit") ? UnitExpression.parse(input.value("unit")).text() : usual.unit();
+        String unit =
+                input.has("unit") ? UnitExpression.parse(input.value("unit")).text() : usual.unit();
         return new DatumTable.Defaults(transform, unit, List.of(), input.has("source") ? input.value("source") : "");
     }
 
@@ -120,7 +126,9 @@ final class ImportCommand implements Command {
         if (map == null) {
             List<DatumColumn> guess = DatumTable.guess(table);
             if (!guess.contains(DatumColumn.VALUE)) {
-                throw new UsageException("the table does not say which column holds the values", "add --columns levels=1,value=2,sigma=3");
+                throw new UsageException(
+                        "the table does not say which column holds the values",
+                        "add --columns levels=1,value=2,sigma=3");
             }
             return guess;
         }
@@ -129,12 +137,15 @@ final class ImportCommand implements Command {
         for (String part : map.split(",", -1)) {
             int equals = part.indexOf('=');
             if (equals < 1) {
-                throw new UsageException("--columns has '" + Names.shortened(part) + "'", "write FIELD=COLUMN, such as value=3");
+                throw new UsageException(
+                        "--columns has '" + Names.shortened(part) + "'", "write FIELD=COLUMN, such as value=3");
             }
             DatumColumn field = field(part.substring(0, equals).strip());
             int column = column(part.substring(equals + 1).strip(), heading, table.columns());
             if (columns.get(column) != DatumColumn.NONE || columns.contains(field)) {
-                throw new UsageException("--columns names '" + Names.shortened(part) + "' beside another for the same", "give each field one column");
+                throw new UsageException(
+                        "--columns names '" + Names.shortened(part) + "' beside another for the same",
+                        "give each field one column");
             }
             columns.set(column, field);
         }
@@ -150,7 +161,8 @@ final class ImportCommand implements Command {
                     names.add(column.title());
                 }
             }
-            throw new UsageException("--columns has no field '" + Names.shortened(name) + "'", Names.remedy(name, names));
+            throw new UsageException(
+                    "--columns has no field '" + Names.shortened(name) + "'", Names.remedy(name, names));
         }
         return field;
     }
@@ -165,15 +177,20 @@ final class ImportCommand implements Command {
                 return i;
             }
         }
-        throw new UsageException("the table has no column '" + Names.shortened(name) + "'", Names.remedy(name, heading.cells()));
+        throw new UsageException(
+                "the table has no column '" + Names.shortened(name) + "'", Names.remedy(name, heading.cells()));
     }
 
     private static String text(Path source) {
         byte[] bytes = SafeFile.read(source);
         try {
-            return StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+            return StandardCharsets.UTF_8
+                    .newDecoder()
+                    .decode(ByteBuffer.wrap(bytes))
+                    .toString();
         } catch (CharacterCodingException e) {
-            throw new ProjectFileException(new Problem("the file is not UTF-8 text", source.toString(), "save the table as UTF-8"), e);
+            throw new ProjectFileException(
+                    new Problem("the file is not UTF-8 text", source.toString(), "save the table as UTF-8"), e);
         }
     }
 

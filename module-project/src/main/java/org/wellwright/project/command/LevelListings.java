@@ -2,12 +2,12 @@ package org.wellwright.project.command;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.wellwright.project.report.Csv;
 import org.wellwright.project.command.json.LevelListing;
 import org.wellwright.project.command.json.LevelListing.ChannelRow;
 import org.wellwright.project.command.json.LevelListing.LevelRow;
 import org.wellwright.project.command.json.LevelListing.Place;
 import org.wellwright.project.command.json.LevelsJson;
+import org.wellwright.project.report.Csv;
 import org.wellwright.project.report.Digits;
 import org.wellwright.solver.model.ChannelKey;
 import org.wellwright.solver.radial.Completeness;

@@ -27,7 +27,10 @@ import org.wellwright.solver.radial.SolveMonitor;
 final class ReportCommand implements Command {
     @Override
     public Syntax syntax() {
-        return new Syntax("report", "Fits every model, ranks them, and writes report.html with its figures and CSV files.", "PROJECT")
+        return new Syntax(
+                        "report",
+                        "Fits every model, ranks them, and writes report.html with its figures and CSV files.",
+                        "PROJECT")
                 .option("output", "DIR", "folder for the files, made if it is not there (also -o DIR)");
     }
 
@@ -37,15 +40,18 @@ final class ReportCommand implements Command {
         Path file = ProjectArgument.path(input);
         Project project = ProjectArgument.read(file);
         ProjectArgument.model(input, project, file);
-        ReportInput report = new ReportBuilder(Services.solver(), Services.fit()).build(project, file.getFileName().toString(), SolveMonitor.NONE);
+        ReportInput report = new ReportBuilder(Services.solver(), Services.fit())
+                .build(project, file.getFileName().toString(), SolveMonitor.NONE);
         Map<String, String> files = Report.files(report);
         make(folder);
-        files.forEach((name, text) -> SafeFile.replace(folder.resolve(name), text.getBytes(StandardCharsets.UTF_8), false));
+        files.forEach(
+                (name, text) -> SafeFile.replace(folder.resolve(name), text.getBytes(StandardCharsets.UTF_8), false));
         boolean whole = true;
         for (FittedModel model : report.fits()) {
             if (model.problem() != null && !project.document().data().isEmpty()) {
                 whole = false;
-                console.say("model '" + model.model() + "' was not fitted: " + model.problem().sentence());
+                console.say("model '" + model.model() + "' was not fitted: "
+                        + model.problem().sentence());
             }
         }
         console.print(summary(project, report, folder, files));
@@ -57,7 +63,11 @@ final class ReportCommand implements Command {
             Files.createDirectories(folder);
         } catch (IOException e) {
             throw new ProjectFileException(
-                    new Problem("the folder cannot be made: " + SafeFile.reason(e), folder.toString(), "name another folder"), e);
+                    new Problem(
+                            "the folder cannot be made: " + SafeFile.reason(e),
+                            folder.toString(),
+                            "name another folder"),
+                    e);
         }
     }
 
@@ -87,7 +97,11 @@ final class ReportCommand implements Command {
                     .forEach(model -> parameters(parameters, model.fit()));
             text.append(parameters).append('\n');
         }
-        text.append("written to ").append(folder).append(": ").append(String.join(", ", files.keySet())).append('\n');
+        text.append("written to ")
+                .append(folder)
+                .append(": ")
+                .append(String.join(", ", files.keySet()))
+                .append('\n');
         return text.toString();
     }
 
@@ -104,7 +118,12 @@ final class ReportCommand implements Command {
             }
         }
         for (GroupError error : fit.groupErrors()) {
-            table.row(List.of(fit.model(), "shift of " + error.group(), Digits.plusMinus(error.value(), error.sigma()), error.unit(), ""));
+            table.row(List.of(
+                    fit.model(),
+                    "shift of " + error.group(),
+                    Digits.plusMinus(error.value(), error.sigma()),
+                    error.unit(),
+                    ""));
         }
     }
 }

@@ -51,15 +51,18 @@ public final class ComparisonSection implements ReportSection {
         }
         StringBuilder out = new StringBuilder(
                 Html.table(List.of("rank", "model", "χ²", "ν", "χ²/ν", "p", "χ² + 2k", "worst datum"), ranking));
-        out.append("<p>χ² is the sum of the squared residuals over the data that count, the priors and the shared errors; ν is their number less that of the")
-                .append(" k adjusted numbers; p is the chance of a larger χ² if the model and the uncertainties hold. Models are ranked by χ² + 2k")
+        out.append(
+                        "<p>χ² is the sum of the squared residuals over the data that count, the priors and the shared errors; ν is their number less that of the")
+                .append(
+                        " k adjusted numbers; p is the chance of a larger χ² if the model and the uncertainties hold. Models are ranked by χ² + 2k")
                 .append(" (Akaike 1974); a model that predicts fewer of the data comes last. Uncertainties: ")
                 .append(Html.text(Words.weighting(comparison.mode())))
                 .append(".</p>\n");
         for (FittedModel model : input.fits()) {
             if (model.problem() != null) {
                 out.append("<p class=\"warn\">")
-                        .append(Html.text(model.model() + " was not fitted: " + model.problem().sentence() + "."))
+                        .append(Html.text(model.model() + " was not fitted: "
+                                + model.problem().sentence() + "."))
                         .append("</p>\n");
             }
         }
@@ -72,8 +75,9 @@ public final class ComparisonSection implements ReportSection {
         List<List<String>> rows = new ArrayList<>();
         for (int i = 0; i < comparison.models().get(0).rows().size(); i++) {
             ResidualRow first = comparison.models().get(0).rows().get(i);
-            List<String> cells = new ArrayList<>(
-                    List.of(first.datum() + (first.used() ? "" : " (not used)"), Words.levels(input.project().document(), first.datum())));
+            List<String> cells = new ArrayList<>(List.of(
+                    first.datum() + (first.used() ? "" : " (not used)"),
+                    Words.levels(input.project().document(), first.datum())));
             for (ModelComparison model : comparison.models()) {
                 cells.add(Digits.decimals(model.rows().get(i).residual(), 2));
             }
@@ -113,10 +117,23 @@ public final class ComparisonSection implements ReportSection {
             }
         }
         return List.of(
-                new ReportTable("ranking.csv", List.of("rank", "model", "chiSquare", "degreesOfFreedom", "criterion", "worstDatum"), ranking),
+                new ReportTable(
+                        "ranking.csv",
+                        List.of("rank", "model", "chiSquare", "degreesOfFreedom", "criterion", "worstDatum"),
+                        ranking),
                 new ReportTable(
                         "residuals.csv",
-                        List.of("model", "datum", "measured", "sigma", "calculated", "calculatedSigma", "groupShift", "residual", "unit", "used"),
+                        List.of(
+                                "model",
+                                "datum",
+                                "measured",
+                                "sigma",
+                                "calculated",
+                                "calculatedSigma",
+                                "groupShift",
+                                "residual",
+                                "unit",
+                                "used"),
                         residuals));
     }
 }

@@ -49,7 +49,9 @@ public final class DataSection implements ReportSection {
         }
         StringBuilder out = new StringBuilder(Html.table(
                 List.of("datum", "levels", "quantity", "value", "σ", "unit", "groups", "source", "remark"), rows));
-        out.append("<p>Uncertainties: ").append(Html.text(Words.weighting(document.weighting()))).append(".</p>\n");
+        out.append("<p>Uncertainties: ")
+                .append(Html.text(Words.weighting(document.weighting())))
+                .append(".</p>\n");
         List<List<String>> groups = new ArrayList<>();
         for (DataGroup group : document.groups()) {
             String sigma = group.sigma() == null ? "" : group.sigma().text();
@@ -81,7 +83,18 @@ public final class DataSection implements ReportSection {
         }
         return List.of(new ReportTable(
                 "data.csv",
-                List.of("datum", "levels", "quantity", "value", "sigma-", "sigma+", "unit", "limit", "groups", "used", "source"),
+                List.of(
+                        "datum",
+                        "levels",
+                        "quantity",
+                        "value",
+                        "sigma-",
+                        "sigma+",
+                        "unit",
+                        "limit",
+                        "groups",
+                        "used",
+                        "source"),
                 rows));
     }
 

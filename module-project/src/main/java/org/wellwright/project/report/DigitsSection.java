@@ -65,7 +65,14 @@ public final class DigitsSection implements ReportSection {
                 + " two independent methods count the levels of every channel. The table gives the largest of these bounds: they are far below every"
                 + " uncertainty printed above, and no digit above is limited by them.</p>\n"
                 + Html.table(
-                        List.of("model", "channels", "levels", "largest bound (" + units.energy().printed() + ")", "kind", "count"), rows)
+                        List.of(
+                                "model",
+                                "channels",
+                                "levels",
+                                "largest bound (" + units.energy().printed() + ")",
+                                "kind",
+                                "count"),
+                        rows)
                 + problems
                 + "<p>Uncertainties of the parameters come from the least-squares fit: inverse normal matrix with exact derivatives of every level, shared errors"
                 + " of the data groups solved along. They hold if the model does. Constants of nature and masses are those of the editions below; their own"

@@ -88,7 +88,9 @@ public final class FiguresSection implements ReportSection {
         }
         absent.values().forEach(title -> missing.add(title + ": the module that draws it is not installed"));
         for (String line : missing) {
-            out.append("<p class=\"warn\">Missing figure, ").append(Html.text(line)).append(".</p>\n");
+            out.append("<p class=\"warn\">Missing figure, ")
+                    .append(Html.text(line))
+                    .append(".</p>\n");
         }
         return out.toString();
     }
@@ -96,7 +98,8 @@ public final class FiguresSection implements ReportSection {
     /** The picture as an SVG element; its identifiers are made its own, since several pictures share the page. */
     private static String picture(FigureProvider figure, FigureRequest request, FigureWriter writer) {
         try {
-            byte[] bytes = writer.bytes(figure, request, new FigureWriter.Sheet(FigureWriter.Format.SVG, WIDTH, HEIGHT, 96));
+            byte[] bytes =
+                    writer.bytes(figure, request, new FigureWriter.Sheet(FigureWriter.Format.SVG, WIDTH, HEIGHT, 96));
             String svg = new String(bytes, StandardCharsets.UTF_8);
             svg = svg.substring(svg.indexOf("<svg"));
             return IDENTIFIER.matcher(svg).replaceAll("$1" + figure.id() + "-$2") + "\n";

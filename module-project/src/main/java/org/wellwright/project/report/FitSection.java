@@ -43,8 +43,10 @@ public final class FitSection implements ReportSection {
             out.append("<h3>").append(Html.text(model.model())).append("</h3>\n");
             out.append(Html.table(List.of("parameter", "value ± σ", "unit", "", "convention"), rows(fit)));
             out.append("<p>").append(Html.text(Words.quality(fit))).append(".</p>\n");
-            fit.remarks().forEach(remark ->
-                    out.append("<p class=\"warn\">").append(Html.text(remark.sentence())).append(".</p>\n"));
+            fit.remarks()
+                    .forEach(remark -> out.append("<p class=\"warn\">")
+                            .append(Html.text(remark.sentence()))
+                            .append(".</p>\n"));
             out.append(correlations(fit.covariance()));
         }
         return out.toString();
@@ -56,14 +58,29 @@ public final class FitSection implements ReportSection {
             String value = parameter.free()
                     ? Digits.plusMinus(parameter.value(), parameter.sigma())
                     : Digits.plain(parameter.value());
-            rows.add(List.of(parameter.name(), value, parameter.unit(), Words.state(parameter), convention(fit, parameter.parameter())));
+            rows.add(List.of(
+                    parameter.name(),
+                    value,
+                    parameter.unit(),
+                    Words.state(parameter),
+                    convention(fit, parameter.parameter())));
         }
         for (GroupError error : fit.groupErrors()) {
-            rows.add(List.of("shift of " + error.group(), Digits.plusMinus(error.value(), error.sigma()), error.unit(), "shared error", ""));
+            rows.add(List.of(
+                    "shift of " + error.group(),
+                    Digits.plusMinus(error.value(), error.sigma()),
+                    error.unit(),
+                    "shared error",
+                    ""));
         }
         for (ModelErrorEstimate error : fit.modelErrors()) {
             String of = error.group().isEmpty() ? "" : " of " + error.group();
-            rows.add(List.of("σ_mod" + of, Digits.significant(error.value(), 2), error.unit(), error.fitted() ? "fitted" : "fixed", ""));
+            rows.add(List.of(
+                    "σ_mod" + of,
+                    Digits.significant(error.value(), 2),
+                    error.unit(),
+                    error.fitted() ? "fitted" : "fixed",
+                    ""));
         }
         return rows;
     }
@@ -113,7 +130,12 @@ public final class FitSection implements ReportSection {
             }
             for (GroupError error : model.fit().groupErrors()) {
                 rows.add(List.of(
-                        model.model(), "shift of " + error.group(), Csv.number(error.value()), Csv.number(error.sigma()), error.unit(), "shared error"));
+                        model.model(),
+                        "shift of " + error.group(),
+                        Csv.number(error.value()),
+                        Csv.number(error.sigma()),
+                        error.unit(),
+                        "shared error"));
             }
             Covariance covariance = model.fit().covariance();
             for (int i = 0; i < covariance.size(); i++) {
@@ -128,7 +150,11 @@ public final class FitSection implements ReportSection {
             }
         }
         return List.of(
-                new ReportTable("parameters.csv", List.of("model", "parameter", "value", "sigma", "unit", "state"), rows),
-                new ReportTable("covariance.csv", List.of("model", "first", "second", "covariance", "correlation"), correlations));
+                new ReportTable(
+                        "parameters.csv", List.of("model", "parameter", "value", "sigma", "unit", "state"), rows),
+                new ReportTable(
+                        "covariance.csv",
+                        List.of("model", "first", "second", "covariance", "correlation"),
+                        correlations));
     }
 }

@@ -27,7 +27,9 @@ final class Html {
         StringBuilder out = new StringBuilder();
         for (String paragraph : text.strip().split("\\R\\s*\\R")) {
             if (!paragraph.isBlank()) {
-                out.append("<p>").append(text(paragraph).replace("\n", "<br>\n")).append("</p>\n");
+                out.append("<p>")
+                        .append(text(paragraph).replace("\n", "<br>\n"))
+                        .append("</p>\n");
             }
         }
         return out.toString();
@@ -46,13 +48,17 @@ final class Html {
         }
         out.append("<thead><tr>");
         for (int c = 0; c < header.size(); c++) {
-            out.append(number(rows, c) ? "<th scope=\"col\" class=\"n\">" : "<th scope=\"col\">").append(text(header.get(c))).append("</th>");
+            out.append(number(rows, c) ? "<th scope=\"col\" class=\"n\">" : "<th scope=\"col\">")
+                    .append(text(header.get(c)))
+                    .append("</th>");
         }
         out.append("</tr></thead>\n<tbody>\n");
         for (List<String> row : rows) {
             out.append("<tr>");
             for (int c = 0; c < row.size(); c++) {
-                out.append(number(rows, c) ? "<td class=\"n\">" : "<td>").append(text(row.get(c))).append("</td>");
+                out.append(number(rows, c) ? "<td class=\"n\">" : "<td>")
+                        .append(text(row.get(c)))
+                        .append("</td>");
             }
             out.append("</tr>\n");
         }

@@ -46,7 +46,9 @@ public final class ModelsSection implements ReportSection {
                 String caption = model.curves().size() == 1 ? "" : "curve " + curve.name();
                 out.append(Html.table(caption, List.of("term", "V(r)", ""), rows));
                 if (!curve.energyOrigin().equals(Argument.ZERO)) {
-                    out.append("<p>Energy origin ").append(Html.text(argument(curve.energyOrigin()))).append(".</p>\n");
+                    out.append("<p>Energy origin ")
+                            .append(Html.text(argument(curve.energyOrigin())))
+                            .append(".</p>\n");
                 }
             }
         }
@@ -84,7 +86,8 @@ public final class ModelsSection implements ReportSection {
         int from = frame.channels().orbitalFrom();
         int to = frame.channels().orbitalTo();
         if (from > 0 || to < Integer.MAX_VALUE) {
-            texts.add(from == to ? "l = " + from : to == Integer.MAX_VALUE ? "l ≥ " + from : "l = " + from + " to " + to);
+            texts.add(
+                    from == to ? "l = " + from : to == Integer.MAX_VALUE ? "l ≥ " + from : "l = " + from + " to " + to);
         }
         return String.join(", ", texts);
     }

@@ -35,7 +35,8 @@ public final class PredictionSection implements ReportSection {
 
     @Override
     public String html(ReportInput input) {
-        List<FittedModel> fitted = input.fits().stream().filter(model -> model.fit() != null).toList();
+        List<FittedModel> fitted =
+                input.fits().stream().filter(model -> model.fit() != null).toList();
         if (fitted.isEmpty() || fitted.get(0).fit().predictions().isEmpty()) {
             return "";
         }
@@ -60,7 +61,11 @@ public final class PredictionSection implements ReportSection {
             }
             rows.add(cells);
         }
-        return Html.table("Energies in " + units.energy().printed() + ", ± the standard uncertainty from the fitted parameters", header, rows)
+        return Html.table(
+                        "Energies in " + units.energy().printed()
+                                + ", ± the standard uncertainty from the fitted parameters",
+                        header,
+                        rows)
                 + "<p>The uncertainty is that of the parameters if the model holds. Where surviving models differ by more, the difference between them"
                 + " is the better guide. A dash stands for a level that the model does not bind.</p>\n";
     }
@@ -89,6 +94,8 @@ public final class PredictionSection implements ReportSection {
             }
         }
         return List.of(new ReportTable(
-                "predictions.csv", List.of("model", "level", "energy", "parameterSigma", "numericalHalfWidth", "unit"), rows));
+                "predictions.csv",
+                List.of("model", "level", "energy", "parameterSigma", "numericalHalfWidth", "unit"),
+                rows));
     }
 }

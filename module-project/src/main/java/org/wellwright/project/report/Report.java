@@ -37,32 +37,55 @@ public final class Report {
     }
 
     private static String page(ReportInput input, List<ReportSection> sections, List<String> files) {
-        String title = input.project().title().isEmpty() ? input.file() : input.project().title();
+        String title = input.project().title().isEmpty()
+                ? input.file()
+                : input.project().title();
         StringBuilder body = new StringBuilder();
         StringBuilder contents = new StringBuilder();
         for (ReportSection section : sections) {
             String html = section.html(input);
             if (!html.isEmpty()) {
-                contents.append("<li><a href=\"#").append(section.id()).append("\">").append(Html.text(section.title())).append("</a></li>\n");
-                body.append("<section id=\"").append(section.id()).append("\">\n<h2>").append(Html.text(section.title())).append("</h2>\n");
+                contents.append("<li><a href=\"#")
+                        .append(section.id())
+                        .append("\">")
+                        .append(Html.text(section.title()))
+                        .append("</a></li>\n");
+                body.append("<section id=\"")
+                        .append(section.id())
+                        .append("\">\n<h2>")
+                        .append(Html.text(section.title()))
+                        .append("</h2>\n");
                 body.append(html).append("</section>\n");
             }
         }
-        StringBuilder page = new StringBuilder("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n");
+        StringBuilder page =
+                new StringBuilder("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n");
         page.append("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n");
-        page.append("<title>").append(Html.text(title)).append("</title>\n<style>\n").append(STYLE).append("</style>\n</head>\n<body>\n");
+        page.append("<title>")
+                .append(Html.text(title))
+                .append("</title>\n<style>\n")
+                .append(STYLE)
+                .append("</style>\n</head>\n<body>\n");
         page.append("<header>\n<h1>").append(Html.text(title)).append("</h1>\n");
-        page.append(Html.paragraphs(input.project().notes())).append("</header>\n<nav><ul>\n").append(contents).append("</ul></nav>\n");
-        page.append("<main>\n").append(body).append("</main>\n<footer>\n<p>").append(Html.text(CAUTION)).append("</p>\n<p>All digits: ");
+        page.append(Html.paragraphs(input.project().notes()))
+                .append("</header>\n<nav><ul>\n")
+                .append(contents)
+                .append("</ul></nav>\n");
+        page.append("<main>\n")
+                .append(body)
+                .append("</main>\n<footer>\n<p>")
+                .append(Html.text(CAUTION))
+                .append("</p>\n<p>All digits: ");
         List<String> links = new ArrayList<>();
         for (String file : files.subList(1, files.size())) {
             links.add("<a href=\"" + Html.text(file) + "\">" + Html.text(file) + "</a>");
         }
-        return page.append(String.join(", ", links)).append(".</p>\n</footer>\n</body>\n</html>\n").toString();
+        return page.append(String.join(", ", links))
+                .append(".</p>\n</footer>\n</body>\n</html>\n")
+                .toString();
     }
 
-    private static final String STYLE =
-            """
+    private static final String STYLE = """
             :root { color-scheme: light; }
             body { margin: 0 auto; padding: 1.5rem; max-width: 62rem; font: 15px/1.5 system-ui, "Segoe UI", "DejaVu Sans", sans-serif; color: #1c2430; background: #fff; }
             h1 { font-size: 1.7rem; line-height: 1.25; margin: 0 0 .6rem; }

@@ -56,7 +56,8 @@ public final class ReportBuilder {
             fitted.add(fit(document, model, monitor));
         }
         fitted.sort(Comparator.comparingInt(ReportBuilder::unpredicted).thenComparingDouble(ReportBuilder::criterion));
-        Comparison comparison = fitted.stream().anyMatch(model -> model.fit() != null) ? comparison(document, fitted) : null;
+        Comparison comparison =
+                fitted.stream().anyMatch(model -> model.fit() != null) ? comparison(document, fitted) : null;
         List<SolvedModel> solved = new ArrayList<>();
         for (Model model : document.models()) {
             ModelDocument best = document;
@@ -86,7 +87,10 @@ public final class ReportBuilder {
                     fits.fit(new FitRequest(document, model.name(), predict, FitRequest.STANDARD_ITERATIONS), monitor);
             return fit.converged()
                     ? new FittedModel(model.name(), fit, null)
-                    : new FittedModel(model.name(), null, new Problem("the fit did not converge", "", "start from better values"));
+                    : new FittedModel(
+                            model.name(),
+                            null,
+                            new Problem("the fit did not converge", "", "start from better values"));
         } catch (WellwrightException e) {
             return new FittedModel(model.name(), null, e.problem());
         }
@@ -103,7 +107,9 @@ public final class ReportBuilder {
     }
 
     private static double criterion(FittedModel model) {
-        return model.fit() == null ? Double.POSITIVE_INFINITY : model.fit().quality().criterion();
+        return model.fit() == null
+                ? Double.POSITIVE_INFINITY
+                : model.fit().quality().criterion();
     }
 
     /** The fits side by side. */
@@ -125,7 +131,9 @@ public final class ReportBuilder {
                     fit.groupErrors(),
                     fit.remarks()));
             Set<String> predicted = new LinkedHashSet<>();
-            fit.rows().stream().filter(row -> row.used() && Double.isFinite(row.predicted())).forEach(row -> predicted.add(row.datum()));
+            fit.rows().stream()
+                    .filter(row -> row.used() && Double.isFinite(row.predicted()))
+                    .forEach(row -> predicted.add(row.datum()));
             if (common == null) {
                 common = predicted;
             } else {
@@ -151,6 +159,7 @@ public final class ReportBuilder {
                 Version.text(),
                 solver.displayName() + ", " + solver.version(),
                 Instant.now().truncatedTo(ChronoUnit.SECONDS).toString(),
-                "Java " + System.getProperty("java.version") + ", " + System.getProperty("os.name") + " " + System.getProperty("os.arch"));
+                "Java " + System.getProperty("java.version") + ", " + System.getProperty("os.name") + " "
+                        + System.getProperty("os.arch"));
     }
 }

@@ -47,9 +47,17 @@ public final class SystemsSection implements ReportSection {
                     system.abundance() == null ? "" : system.abundance().text()));
         }
         return Html.table(
-                        List.of("system", "", "first body", "second body", "reduced mass (" + units.mass().printed() + ")", "mass convention", "abundance"),
+                        List.of(
+                                "system",
+                                "",
+                                "first body",
+                                "second body",
+                                "reduced mass (" + units.mass().printed() + ")",
+                                "mass convention",
+                                "abundance"),
                         rows)
-                + "<p>Energies are in " + Html.text(units.energy().printed()) + ", lengths in " + Html.text(units.length().printed())
+                + "<p>Energies are in " + Html.text(units.energy().printed()) + ", lengths in "
+                + Html.text(units.length().printed())
                 + (units.natural() ? ", with ħ = c = 1" : "") + ", unless a unit stands beside them.</p>\n";
     }
 
@@ -69,7 +77,8 @@ public final class SystemsSection implements ReportSection {
     private static String reducedMass(ModelDocument document, PairSystem system) {
         try {
             ParameterPool pool = ParameterPool.of(document);
-            return Digits.significant(pool.reducedMass(system.id(), pool.typedValues()).value(), 8);
+            return Digits.significant(
+                    pool.reducedMass(system.id(), pool.typedValues()).value(), 8);
         } catch (WellwrightException e) {
             return "–";
         }

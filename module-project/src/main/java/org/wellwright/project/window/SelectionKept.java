@@ -15,10 +15,11 @@ import org.wellwright.project.ViewStateProvider;
 import org.wellwright.solver.model.ChannelKey;
 import org.wellwright.solver.model.LevelKey;
 
-/** Keeps the selected model and levels of each project: while another one is selected, and in its file. Event thread only. */
-@ServiceProviders({
-    @ServiceProvider(service = ViewStateProvider.class),
-    @ServiceProvider(service = SelectionKept.class)
+/**
+ * Keeps the selected model and levels of each project: while another one is selected, and in its file. Event thread
+ * only.
+ */
+@ServiceProviders({@ServiceProvider(service = ViewStateProvider.class), @ServiceProvider(service = SelectionKept.class)
 })
 public final class SelectionKept implements ViewStateProvider {
     private final Map<ProjectSession, FigureSelection> kept = new WeakHashMap<>();
@@ -101,13 +102,17 @@ public final class SelectionKept implements ViewStateProvider {
             String[] numbers = lines[0].split(" ");
             try {
                 ChannelKey channel = new ChannelKey(
-                        Integer.parseInt(numbers[0]), Integer.parseInt(numbers[1]), Integer.parseInt(numbers[2]), Integer.parseInt(numbers[3]));
+                        Integer.parseInt(numbers[0]),
+                        Integer.parseInt(numbers[1]),
+                        Integer.parseInt(numbers[2]),
+                        Integer.parseInt(numbers[3]));
                 levels.add(new LevelKey(lines[1], lines[2], channel, Integer.parseInt(numbers[4])));
             } catch (IllegalArgumentException | ArrayIndexOutOfBoundsException e) {
                 continue;
             }
         }
         String m = state.getOrDefault("m", "0");
-        return new FigureSelection(state.getOrDefault("model", ""), levels, m.matches("-?\\d{1,3}") ? Integer.parseInt(m) : 0);
+        return new FigureSelection(
+                state.getOrDefault("model", ""), levels, m.matches("-?\\d{1,3}") ? Integer.parseInt(m) : 0);
     }
 }

@@ -30,7 +30,16 @@ class OutsideChangeTest {
     void open() {
         file = folder.resolve("a.wellwright");
         ModelDocument document = new ModelDocument(
-                "CODATA 2022", "", "atomic", LabelConvention.ATOMIC, Weighting.KNOWN, List.of(), List.of(), List.of(), List.of(), List.of());
+                "CODATA 2022",
+                "",
+                "atomic",
+                LabelConvention.ATOMIC,
+                Weighting.KNOWN,
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of());
         ProjectFile.save(file, Project.of("mine", document));
         session = projects.open(file);
     }

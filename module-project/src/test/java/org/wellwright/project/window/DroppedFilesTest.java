@@ -32,9 +32,11 @@ class DroppedFilesTest {
     void takesFilesAndTheirAddresses() {
         assertThat(DroppedFiles.files(new Files(List.of(new File("/a/b.wellwright"), new File("/c.wellwright")))))
                 .containsExactly(Path.of("/a/b.wellwright"), Path.of("/c.wellwright"));
-        assertThat(DroppedFiles.files(new StringSelection("file:///a/with%20blank.wellwright\r\nfile:///c.wellwright\r\n")))
+        assertThat(DroppedFiles.files(
+                        new StringSelection("file:///a/with%20blank.wellwright\r\nfile:///c.wellwright\r\n")))
                 .containsExactly(Path.of("/a/with blank.wellwright"), Path.of("/c.wellwright"));
         assertThat(DroppedFiles.files(new StringSelection("some text"))).isEmpty();
-        assertThat(DroppedFiles.files(new StringSelection("file:not an address at all://"))).isEmpty();
+        assertThat(DroppedFiles.files(new StringSelection("file:not an address at all://")))
+                .isEmpty();
     }
 }

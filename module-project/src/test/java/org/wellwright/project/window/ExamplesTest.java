@@ -23,7 +23,9 @@ class ExamplesTest {
         ProjectFile.save(folder.resolve("a.wellwright"), project.withTitle("Another"));
         Files.writeString(folder.resolve("c.wellwright"), "{broken");
         assertThat(Examples.all(folder)).extracting(Examples.Example::title).containsExactly("Another", "An ion");
-        assertThat(Examples.all(folder).get(1).note()).hasSizeLessThanOrEqualTo(220).startsWith("First sentence.");
+        assertThat(Examples.all(folder).get(1).note())
+                .hasSizeLessThanOrEqualTo(220)
+                .startsWith("First sentence.");
         assertThat(Examples.copy(Examples.all(folder).get(1)).title()).isEqualTo("An ion");
         assertThat(Examples.all(folder.resolve("nowhere"))).isEmpty();
     }

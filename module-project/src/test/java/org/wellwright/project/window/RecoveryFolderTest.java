@@ -20,7 +20,8 @@ class RecoveryFolderTest {
     @TempDir
     Path folder;
 
-    private final Project project = NewProject.project("Füllung, \"1\"", UnitSystem.EV_NM, "e-", "p", LabelConvention.ATOMIC);
+    private final Project project =
+            NewProject.project("Füllung, \"1\"", UnitSystem.EV_NM, "e-", "p", LabelConvention.ATOMIC);
 
     private RecoveryFolder recovery() {
         return new RecoveryFolder(folder.resolve("recovery"));

@@ -32,7 +32,8 @@ class RememberedTest {
 
     @Test
     void openProjectsAreRememberedByTheirFiles() {
-        ProjectSession one = new ProjectSession(NewProject.project("one", UnitSystem.ATOMIC, "e-", "p", LabelConvention.ATOMIC), file(1));
+        ProjectSession one = new ProjectSession(
+                NewProject.project("one", UnitSystem.ATOMIC, "e-", "p", LabelConvention.ATOMIC), file(1));
         ProjectSession unsaved = new ProjectSession(one.project(), null);
         ProjectSession two = new ProjectSession(one.project(), file(2));
         remembered.note(List.of(one, unsaved, two), Optional.of(two));

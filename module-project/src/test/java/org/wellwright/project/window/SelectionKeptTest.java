@@ -2,7 +2,6 @@ package org.wellwright.project.window;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
@@ -33,7 +32,8 @@ class SelectionKeptTest {
 
     @Test
     void whatCannotBeReadIsLeftOut() {
-        assertThat(SelectionKept.selection(Map.of("model", "m", "level 1", "x", "level 2", "0 -1 -1 0 0\nX\nV", "m", "north")))
+        assertThat(SelectionKept.selection(
+                        Map.of("model", "m", "level 1", "x", "level 2", "0 -1 -1 0 0\nX\nV", "m", "north")))
                 .isEqualTo(new FigureSelection("m", List.of(new LevelKey("X", "V", ChannelKey.ofOrbital(0), 0)), 0));
     }
 
@@ -57,6 +57,5 @@ class SelectionKeptTest {
         open.close(one);
         open.close(other);
         assertThat(open.sessions()).isEmpty();
-
     }
 }

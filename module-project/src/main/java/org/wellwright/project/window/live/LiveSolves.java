@@ -15,7 +15,10 @@ import org.wellwright.project.SolveCache;
 import org.wellwright.project.SolveCoordinator;
 import org.wellwright.solver.service.SolverService;
 
-/** Starts a coordinator for every project that was selected once, and ends it when the project is closed. Started when the window is on screen. */
+/**
+ * Starts a coordinator for every project that was selected once, and ends it when the project is closed. Started when
+ * the window is on screen.
+ */
 @OnShowing
 public final class LiveSolves implements Runnable {
     private static final RequestProcessor SOLVES =
@@ -46,7 +49,9 @@ public final class LiveSolves implements Runnable {
 
     private synchronized void follow() {
         Set<ProjectSession> open = new HashSet<>(projects.sessions());
-        for (Iterator<Map.Entry<ProjectSession, SolveCoordinator>> all = coordinators.entrySet().iterator(); all.hasNext(); ) {
+        for (Iterator<Map.Entry<ProjectSession, SolveCoordinator>> all =
+                        coordinators.entrySet().iterator();
+                all.hasNext(); ) {
             Map.Entry<ProjectSession, SolveCoordinator> entry = all.next();
             if (!open.contains(entry.getKey())) {
                 all.remove();

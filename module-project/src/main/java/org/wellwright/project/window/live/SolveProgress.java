@@ -8,7 +8,10 @@ import org.wellwright.project.ProjectSolution;
 import org.wellwright.project.SolveCoordinator;
 import org.wellwright.solver.radial.SolveMonitor;
 
-/** Shows work that takes longer than half a second as a bar with a cancel button; says in the status line how long the last solve took. */
+/**
+ * Shows work that takes longer than half a second as a bar with a cancel button; says in the status line how long the
+ * last solve took.
+ */
 @Messages({
     "# {0} - name of the project",
     "MSG_Solving=Solving {0}",
@@ -48,10 +51,11 @@ final class SolveProgress implements SolveCoordinator.Observer {
                     return;
                 }
                 if (handle == null) {
-                    handle = ProgressHandle.createHandle(Bundle.MSG_Solving(coordinator.session().displayName()), () -> {
-                        cancelled = true;
-                        return true;
-                    });
+                    handle = ProgressHandle.createHandle(
+                            Bundle.MSG_Solving(coordinator.session().displayName()), () -> {
+                                cancelled = true;
+                                return true;
+                            });
                     handle.start(PARTS);
                 }
                 if (!what.isEmpty()) {
@@ -81,6 +85,8 @@ final class SolveProgress implements SolveCoordinator.Observer {
 
     static String time(long nanos) {
         double millis = nanos / 1e6;
-        return millis < 1000 ? String.format(Locale.ROOT, "%.0f ms", millis) : String.format(Locale.ROOT, "%.1f s", millis / 1000);
+        return millis < 1000
+                ? String.format(Locale.ROOT, "%.0f ms", millis)
+                : String.format(Locale.ROOT, "%.1f s", millis / 1000);
     }
 }
