@@ -54,7 +54,8 @@ final class DenseSpectralMesh {
             r[i] = task.inner + s * (1 + x[i]) / (c - x[i]);
             slope[i] = s * (c + 1) / ((c - x[i]) * (c - x[i]));
         }
-        // Derivatives of the Lagrange polynomials: D_ki = P(x_k)/(P(x_i)(x_k − x_i)), Abramowitz and Stegun (1964), 25.3.
+        // Derivatives of the Lagrange polynomials: D_ki = P(x_k)/(P(x_i)(x_k − x_i)), Abramowitz and Stegun (1964),
+        // 25.3.
         double[][] d = new double[n][n];
         for (int k = 0; k < n; k++) {
             for (int i = 0; i < n; i++) {

@@ -91,7 +91,9 @@ final class ReferenceTask {
         return r;
     }
 
-    /** Largest error of energies in the order of the levels, relative to each level's scale; +∞ if there are too few. */
+    /**
+     * Largest error of energies in the order of the levels, relative to each level's scale; +∞ if there are too few.
+     */
     double error(double[] found) {
         double worst = found.length < energies.length ? Double.POSITIVE_INFINITY : 0;
         for (int i = 0; i < Math.min(found.length, energies.length); i++) {

@@ -25,9 +25,10 @@ import org.wellwright.solver.service.SolverService;
  */
 @ServiceProvider(service = Benchmark.class, position = 200)
 public final class SolverBenchmark implements Benchmark {
-    private static final String HEADER = "problem,levels,error,ours_ms,floor_ms,enclosure_ms,proof_ms,dense_ms,dense_error,"
-            + "ode_ms,ode_error,second_ms,second_error,difference_ms,difference_error,dense_setting,ode_setting,"
-            + "difference_setting,evaluations";
+    private static final String HEADER =
+            "problem,levels,error,ours_ms,floor_ms,enclosure_ms,proof_ms,dense_ms,dense_error,"
+                    + "ode_ms,ode_error,second_ms,second_error,difference_ms,difference_error,dense_setting,ode_setting,"
+                    + "difference_setting,evaluations";
 
     @Override
     public String name() {
