@@ -14,7 +14,7 @@ public final class ExpandedMorseFamily extends FormulaFamily {
                 new Description(
                         "expanded-morse",
                         "Expanded Morse oscillator",
-                        "y=(r^q-re^q)/(r^q+re^q); D*((1-exp(-(b0+b1*y+b2*y^2+b3*y^3)*(r-re)))^2-1)",
+                        "y=(r^q-re^q)/(r^q+re^q); w=exp(-(b0+b1*y+b2*y^2+b3*y^3)*(r-re)); D*w*(w-2)",
                         "A diatomic curve fitted to levels; exponential at long range.",
                         "Lee, Seto, Hirao, Bernath and Le Roy 1999"),
                 new FamilyParameter(

@@ -14,7 +14,7 @@ public final class MorseLongRangeFamily extends FormulaFamily {
                 new Description(
                         "morse-long-range",
                         "Morse/long-range",
-                        "y=(r^p-re^p)/(r^p+re^p); u=(C6/r^6+C8/r^8)/(C6/re^6+C8/re^8); s=y*ln(2*D/(C6/re^6+C8/re^8))+(1-y)*(b0+b1*y+b2*y^2); D*((1-u*exp(-s*y))^2-1)",
+                        "y=(r^p-re^p)/(r^p+re^p); u=(C6/r^6+C8/r^8)/(C6/re^6+C8/re^8); s=y*ln(2*D/(C6/re^6+C8/re^8))+(1-y)*(b0+b1*y+b2*y^2); w=u*exp(-s*y); D*w*(w-2)",
                         "A diatomic curve fitted to levels with the dispersion tail -C6/r^6 - C8/r^8 imposed.",
                         "Le Roy, Huang and Jary 2006; Le Roy, Dattani, Coxon, Ross, Crozet and Linton 2009"),
                 new FamilyParameter(

@@ -101,7 +101,7 @@ class FamilyLawsTest {
             double[] values = values(family, random);
             double length = length(family, values);
             TermEvaluator v = family.bind(values, CHANNEL);
-            EvaluatorLaws.enclosuresContainSamples(v, 1e-3 * length, 1e2 * length, 40, 50, random);
+            EvaluatorLaws.enclosuresContainSamples(v, 1e-3 * length, 1e2 * length, 10, 200, random);
             double a = length * (0.5 + random.nextDouble());
             double b = a * 1.01;
             double least = Double.POSITIVE_INFINITY;
