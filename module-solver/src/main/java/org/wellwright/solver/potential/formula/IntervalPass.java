@@ -14,7 +14,7 @@ final class IntervalPass {
     private static final Interval TWO_OVER_ROOT_PI =
             new Interval(Math.nextDown(1.1283791670955126), Math.nextUp(1.1283791670955126));
 
-    private static final int MAX_SPLITS = 40;
+    private static final int MAX_SPLITS = 150;
     private static final double NEAR = 0.005;
 
     private final Graph graph;
