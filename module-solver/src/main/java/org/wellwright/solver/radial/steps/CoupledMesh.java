@@ -242,6 +242,11 @@ final class CoupledMesh {
         }
         boolean rough = tail > 1e-5 * amplitude;
         double fit = rough ? FIT * Math.min(1, width * Math.sqrt(largest)) : FIT / seen;
+        if (tail > Math.max(fit, noise)) {
+            double rounding = Math.max(
+                    potential.roundingBound(radii[0]), potential.roundingBound(radii[StepQuadrature.POINTS - 1]));
+            noise = Math.max(noise, 4 * rounding * square / potential.kinetic());
+        }
         double allowed = Math.max(fit, noise);
         double byFit = 0.9 * Math.pow(allowed / Math.max(tail - 0.7 * noise, 1e-300), 1.0 / StepQuadrature.POINTS);
         double byStrength = 0.95 * Math.sqrt(STRENGTH / Math.max(square * strength, 1e-300));
@@ -301,6 +306,7 @@ final class CoupledMesh {
         potential.matrices(new double[] {r}, 1, elements);
         double largest = 0;
         double rest = 0;
+        double rounding = 4 * r * r * potential.roundingBound(r) / potential.kinetic();
         double smallest = Double.POSITIVE_INFINITY;
         for (int i = 0; i < channels; i++) {
             smallest = Math.min(smallest, exponents[i]);
@@ -317,7 +323,7 @@ final class CoupledMesh {
                     into[0][i * channels + j] += (exponents[i] - e * r * r / (1 + sum)) / r;
                 }
                 largest = Math.max(largest, Math.abs(w) + (diagonal ? r * r * Math.abs(e) : 0));
-                rest = Math.max(rest, Math.abs(w - known));
+                rest = Math.max(rest, Math.abs(w - known) - rounding);
             }
         }
         double error = (largest * largest + rest) * Math.pow(r / scan.anchor(), 2 * smallest - 1);

@@ -190,6 +190,15 @@ final class CoupledPotential implements SampledPotential {
         cutRadius = radius;
     }
 
+    @Override
+    public double roundingBound(double radius) {
+        double sum = problem.common().roundingBound(radius);
+        for (ChannelTerm term : problem.rest()) {
+            sum += 2 * term.potential().roundingBound(radius);
+        }
+        return radius > cutRadius ? 0 : sum;
+    }
+
     /** First break point above {@code radius}, +∞ if there is none. */
     double breakAbove(double radius) {
         for (double point : breaks) {

@@ -47,6 +47,9 @@ final class OriginSeries {
         StepQuadrature.project(samples, c);
         double tail = Math.max(Math.abs(c[StepQuadrature.DEGREE + 1]), Math.abs(c[StepQuadrature.DEGREE + 2]));
         double noise = 8e-16 * largest;
+        for (int i = 0; i < StepQuadrature.POINTS && tail > Math.max(TOLERANCE, noise); i++) {
+            noise = Math.max(noise, 4 * radius * radii[i] * potential.roundingBound(radii[i]) / kinetic);
+        }
         if (tail > Math.max(TOLERANCE, noise)) {
             return null;
         }

@@ -65,17 +65,16 @@ final class PotentialScan {
         double[] values = new double[radii.length];
         potential.values(radii, values, radii.length);
         // Hardy's inequality: every level lies above the least V + κ(λ + ¼)/r² (Hardy 1920).
-        int best = -1;
         for (int i = 0; i < radii.length; i++) {
             if (values[i] == Double.NEGATIVE_INFINITY) {
                 throw notFinite(values[i], radii[i], where);
             }
-            if (Double.isFinite(values[i])
-                    && (best < 0
-                            || hardy(values, radii, i, kinetic, centrifugal)
-                                    < hardy(values, radii, best, kinetic, centrifugal))) {
-                best = i;
-            }
+        }
+        int best = lowest(values, radii, kinetic, centrifugal);
+        // A minimum that is made of rounding, as of a difference of nearly equal numbers over r³, is none.
+        while (best >= 0 && isRounding(potential, values[best], radii[best])) {
+            values[best] = Math.abs(values[best]) + potential.roundingBound(radii[best]);
+            best = lowest(values, radii, kinetic, centrifugal);
         }
         if (best < 0) {
             throw notFinite(values[0], radii[0], where);
@@ -116,6 +115,23 @@ final class PotentialScan {
             }
         }
         return new PotentialScan(r, v, kinetic, centrifugal, anchor, bound);
+    }
+
+    private static int lowest(double[] values, double[] radii, double kinetic, double centrifugal) {
+        int best = -1;
+        double least = Double.POSITIVE_INFINITY;
+        for (int i = 0; i < radii.length; i++) {
+            double value = hardy(values, radii, i, kinetic, centrifugal);
+            if (Math.abs(values[i]) <= Double.MAX_VALUE && value < least) {
+                least = value;
+                best = i;
+            }
+        }
+        return best;
+    }
+
+    private static boolean isRounding(SampledPotential potential, double value, double radius) {
+        return value < 0 && potential.roundingBound(radius) > 0.01 * -value;
     }
 
     private static double hardy(double[] values, double[] radii, int i, double kinetic, double centrifugal) {

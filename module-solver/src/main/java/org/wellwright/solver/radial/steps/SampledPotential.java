@@ -10,6 +10,9 @@ interface SampledPotential {
     /** V at one radius. */
     double value(double radius);
 
+    /** A bound on the rounding inside {@link #value}, energy. */
+    double roundingBound(double radius);
+
     /** Break points in ascending order; not to be changed. */
     double[] breaks();
 

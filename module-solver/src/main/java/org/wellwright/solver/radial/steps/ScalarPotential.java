@@ -83,6 +83,16 @@ final class ScalarPotential implements SampledPotential {
         cutValue = value;
     }
 
+    /** A bound on the rounding inside V(radius), energy. */
+    @Override
+    public double roundingBound(double radius) {
+        double sum = 0;
+        for (TermEvaluator term : terms) {
+            sum += term.roundingBound(radius);
+        }
+        return radius > cutRadius ? 0 : sum;
+    }
+
     /** First break point above {@code radius}, +∞ if there is none. */
     double breakAbove(double radius) {
         for (double point : breaks) {

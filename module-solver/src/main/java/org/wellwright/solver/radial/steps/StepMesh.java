@@ -282,7 +282,8 @@ final class StepMesh {
         }
         // The first-order correction is exact for the declared power and rough for the rest; what is wrong with it dies
         // out as the irregular solution does.
-        double rest = Math.abs(w - originStrength * Math.pow(r, originPower + 2));
+        double rounding = r * r * potential.roundingBound(r) / kinetic;
+        double rest = Math.max(0, Math.abs(w - originStrength * Math.pow(r, originPower + 2)) - 4 * rounding);
         double error = (w0 * w0 + rest) * Math.pow(r / scan.anchor(), 2 * exponent - 1);
         startKind = End.POWER;
         return error < 1e-18 && w0 < 1e-3 && potential.breakBelow(r) == 0;
@@ -437,6 +438,11 @@ final class StepMesh {
         boolean rough = tail > 1e-5 * amplitude;
         double seen = rough ? 1 : harmonic(square, smallest, greatest);
         double fit = rough ? FIT * Math.min(1, width * Math.sqrt(largest)) : FIT / seen;
+        if (tail > Math.max(fit, noise)) {
+            double rounding = Math.max(
+                    potential.roundingBound(radii[0]), potential.roundingBound(radii[StepQuadrature.POINTS - 1]));
+            noise = Math.max(noise, 4 * rounding * square / kinetic);
+        }
         double allowed = Math.max(fit, noise);
         int degree = StepQuadrature.DEGREE;
         while (degree > 0 && Math.abs(legendre[degree]) * square <= 0.05 * Math.max(Math.min(fit, FIT), noise)) {
