@@ -125,10 +125,9 @@ final class AsymptotePass {
             case ATAN -> atan(a);
             case SINH -> hyperbolic(a, -1);
             case COSH -> hyperbolic(a, 1);
-            case TANH ->
-                Double.isNaN(a.limit())
-                        ? saturated(a, -1, 1)
-                        : times(hyperbolic(a, -1), hyperbolic(a, 1).power(-1));
+            case TANH -> Math.abs(a.limit()) < 300
+                    ? times(hyperbolic(a, -1), inverse(hyperbolic(a, 1)))
+                    : saturated(a, -1, 1);
             case ERF -> Double.isNaN(a.limit()) ? saturated(a, -1, 1) : a.compose(Taylor.erf(a.limit()));
             case ERFC ->
                 Double.isNaN(a.limit())
@@ -147,6 +146,10 @@ final class AsymptotePass {
 
     private static Asymptote times(Asymptote a, Asymptote b) {
         return a == null || b == null ? null : a.times(b);
+    }
+
+    private static Asymptote inverse(Asymptote a) {
+        return a == null ? null : a.power(-1);
     }
 
     private static Asymptote exp(Asymptote a) {
@@ -186,7 +189,7 @@ final class AsymptotePass {
 
     /** A function that reaches its limits exponentially fast, of an argument that grows without limit. */
     private static Asymptote saturated(Asymptote a, double below, double above) {
-        boolean grows = a.trend() > 0
+        boolean grows = Math.abs(a.limit()) >= 300 || a.trend() > 0
                 || a.series().hasLead() && a.series().lead().order().power() > 1e-12;
         if (!grows || a.sign() == null) {
             return Asymptote.BOUNDED;

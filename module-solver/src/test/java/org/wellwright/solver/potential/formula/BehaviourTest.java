@@ -87,6 +87,8 @@ class BehaviourTest {
                 "exp(-a*ln(r))              | 0   | -2        | 1",
                 "r^(-a)                     | 0   | -2        | 1",
                 "sinh(r)/cosh(r)            | 1   | -Infinity | 0",
+                "tanh(1000+1/r)             | 1   | -Infinity | 0",
+                "tanh(-1e3-exp(-r))         | -1  | -Infinity | 0",
             })
     void tailIsFound(String text, double limit, double power, double coefficient) {
         TailBehaviour tail = bound(text).tail();
