@@ -20,9 +20,11 @@ import javax.swing.SwingConstants;
 import javax.swing.SwingUtilities;
 import org.openide.awt.ActionID;
 import org.openide.awt.ActionReference;
+import org.openide.awt.UndoRedo;
 import org.openide.util.NbBundle.Messages;
 import org.openide.windows.TopComponent;
 import org.openide.windows.WindowManager;
+import org.wellwright.project.window.session.SessionUndo;
 import org.wellwright.solver.WellwrightException;
 
 /** The start page: a new project, one from disk, an example, or a recent one. */
@@ -177,6 +179,11 @@ public final class StartTopComponent extends TopComponent {
         Dimension size = button.getPreferredSize();
         button.setMaximumSize(new Dimension(Math.max(size.width, TEXT_WIDTH + 180), size.height));
         return button;
+    }
+
+    @Override
+    public UndoRedo getUndoRedo() {
+        return SessionUndo.ofSelected();
     }
 
     @Override

@@ -171,6 +171,11 @@ public final class StartUp implements Runnable {
             } else {
                 start.close();
             }
+            // Undo and redo belong to the active window, and after a dialog at the start there may be none.
+            TopComponent projects = WindowManager.getDefault().findTopComponent(ProjectsTopComponent.ID);
+            if (TopComponent.getRegistry().getActivated() == null && projects != null && projects.isOpened()) {
+                projects.requestActive();
+            }
         });
     }
 }
