@@ -44,9 +44,8 @@ final class FitController {
 
             @Override
             public void ended() {}
-
             @Override
-            public void fitted(ProjectSession session, String digest, FitResult result) {}
+            public void accepted(ProjectSession session, String digest, FitResult result) {}
         };
 
         void started(String model, Runnable cancel);
@@ -55,8 +54,8 @@ final class FitController {
 
         void ended();
 
-        /** A fit came to its end; called on the worker. */
-        void fitted(ProjectSession session, String digest, FitResult result);
+        /** A fit was put into its project. */
+        void accepted(ProjectSession session, String digest, FitResult result);
     }
 
     FitController(
@@ -102,7 +101,6 @@ final class FitController {
         Monitor monitor = new Monitor(model, stop);
         try {
             FitResult fitted = service.fit(FitRequest.of(project.document(), model), monitor);
-            watcher.fitted(session, of, fitted);
             ui.execute(() -> {
                 result = fitted;
                 digest = of;
@@ -137,6 +135,7 @@ final class FitController {
         if (!done && outdated()) {
             return Optional.of(new Problem("the project has changed since this fit was started", "", "run it again"));
         }
+        watcher.accepted(session, digest, accepted);
         result = null;
         show(FitViewModel.idle());
         return Optional.empty();

@@ -36,6 +36,7 @@ import org.wellwright.editor.parts.GridColumn;
 import org.wellwright.editor.parts.GridColumn.Kind;
 import org.wellwright.editor.parts.ProblemLine;
 import org.wellwright.project.FigureSelection;
+import org.wellwright.project.FitRecorder;
 import org.wellwright.project.OpenProjects;
 import org.wellwright.project.ProjectSession;
 import org.wellwright.project.window.session.SessionWindow;
@@ -361,8 +362,11 @@ public final class FitTopComponent extends SessionWindow {
         }
 
         @Override
-        public void fitted(ProjectSession session, String digest, FitResult result) {
-            // The run history takes it up where it is kept.
+        public void accepted(ProjectSession session, String digest, FitResult result) {
+            FitRecorder recorder = Lookup.getDefault().lookup(FitRecorder.class);
+            if (recorder != null) {
+                recorder.accepted(session, digest, result);
+            }
         }
     }
 

@@ -1,19 +1,15 @@
 package org.wellwright.project.command;
 
 import java.nio.file.Path;
-import java.time.Instant;
-import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
 import org.wellwright.project.Project;
 import org.wellwright.project.command.json.FitJson;
-import org.wellwright.project.file.Json;
+import org.wellwright.project.command.json.FitRecord;
 import org.wellwright.project.file.ProjectLock;
 import org.wellwright.project.report.Csv;
 import org.wellwright.project.report.Digits;
-import org.wellwright.project.report.Version;
 import org.wellwright.project.report.Words;
-import org.wellwright.project.run.Run;
 import org.wellwright.project.run.RunHistory;
 import org.wellwright.solver.Problem;
 import org.wellwright.solver.SolverException;
@@ -48,7 +44,7 @@ final class FitCommand implements Command {
             Project project = ProjectArgument.read(file);
             FitResult fit = fit(input, file, project, console);
             lock.save(project.withDocument(fit.document()));
-            RunHistory.of(file).add(record(file, project, fit));
+            RunHistory.of(file).add(FitRecord.of(file, project.digest(), fit, Services.solver().version()));
             print(input, format, fit, project, console);
         }
         return 0;
@@ -65,17 +61,6 @@ final class FitCommand implements Command {
                     "start from better values, or fix a parameter that the data do not determine");
         }
         return fit;
-    }
-
-    private static Run record(Path file, Project project, FitResult fit) {
-        return new Run(
-                Instant.now().truncatedTo(ChronoUnit.SECONDS),
-                "fit",
-                project.digest(),
-                Version.text(),
-                Services.solver().version(),
-                List.of("wellwright-batch", "fit", file.getFileName().toString(), "--model", fit.model()),
-                Json.parse(FitJson.write(fit), "fit"));
     }
 
     private static void print(Input input, Input.Format format, FitResult fit, Project project, Console console) {
