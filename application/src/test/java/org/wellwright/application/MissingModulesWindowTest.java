@@ -51,7 +51,8 @@ class MissingModulesWindowTest {
         session.picture("open.png");
         session.play("wait-title \"invented ion\"", "rows projects.list projects.txt");
         assertThat(session.lines("projects.txt")).hasSize(2);
-        String example = Files.readString(copy.folder().resolve("examples/alkali-ion.wellwright")).strip();
+        String example = Files.readString(copy.folder().resolve("examples/alkali-ion.wellwright"))
+                .strip();
         // What follows in the saved file is the state of windows.
         assertThat(Files.readString(own.resolve("saved.wellwright")))
                 .startsWith(example.substring(0, example.length() - 2));

@@ -33,7 +33,9 @@ class RecoveryWindowTest {
 
     private WindowSession session(String name) throws IOException {
         Path own = Files.createDirectory(folder.resolve(name));
-        Files.copy(PackagedApplication.built().folder().resolve("examples/alkali-ion.wellwright"), own.resolve("ion.wellwright"));
+        Files.copy(
+                PackagedApplication.built().folder().resolve("examples/alkali-ion.wellwright"),
+                own.resolve("ion.wellwright"));
         return new WindowSession(PackagedApplication.built(), display, own);
     }
 
@@ -105,7 +107,8 @@ class RecoveryWindowTest {
                 "wait-cell parameters.table 5 2 0.0612",
                 "action File/org-wellwright-project-window-SaveProjectAction",
                 "wait-file ion.wellwright 0.0612");
-        assertThat(Files.readString(folder.resolve("outside/ion.wellwright.bak"))).contains("0.0777");
+        assertThat(Files.readString(folder.resolve("outside/ion.wellwright.bak")))
+                .contains("0.0777");
         session.picture("outside.png");
     }
 

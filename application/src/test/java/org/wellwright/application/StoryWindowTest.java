@@ -35,12 +35,14 @@ class StoryWindowTest {
     }
 
     /**
-     * Opens the example, changes a parameter in its field, undoes, drags another, pastes three rows, fits, accepts, saves and quits. The next
-     * start has the same project, windows, selection and values, and the command finds the same χ² in the file.
+     * Opens the example, changes a parameter in its field, undoes, drags another, pastes three rows, fits, accepts,
+     * saves and quits. The next start has the same project, windows, selection and values, and the command finds the
+     * same χ² in the file.
      */
     @Test
     void aDaysWorkIsThereTheNextDayAndInTheCommand() throws Exception {
-        WindowSession session = new WindowSession(PackagedApplication.built(), display, Files.createDirectory(folder.resolve("story")));
+        WindowSession session =
+                new WindowSession(PackagedApplication.built(), display, Files.createDirectory(folder.resolve("story")));
         Path file = folder.resolve("story/ion.wellwright");
         Files.writeString(
                 folder.resolve("story/rows.txt"),
@@ -124,9 +126,13 @@ class StoryWindowTest {
         PackagedApplication.Outcome outcome =
                 PackagedApplication.built().batch(folder, "compare", file.toString(), "--format", "json");
         assertThat(outcome.status()).as(outcome.errors()).isZero();
-        Matcher matcher = Pattern.compile("\"model\"\\s*:\\s*\"Gaussian core\".*?\"chiSquare\"\\s*:\\s*([0-9.eE+-]+)", Pattern.DOTALL)
+        Matcher matcher = Pattern.compile(
+                        "\"model\"\\s*:\\s*\"Gaussian core\".*?\"chiSquare\"\\s*:\\s*([0-9.eE+-]+)", Pattern.DOTALL)
                 .matcher(outcome.output());
         assertThat(matcher.find()).as(outcome.output()).isTrue();
-        return new BigDecimal(matcher.group(1)).round(new MathContext(5)).stripTrailingZeros().toPlainString();
+        return new BigDecimal(matcher.group(1))
+                .round(new MathContext(5))
+                .stripTrailingZeros()
+                .toPlainString();
     }
 }

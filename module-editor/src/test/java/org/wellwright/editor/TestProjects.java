@@ -25,7 +25,10 @@ import org.wellwright.solver.potential.TermFrame;
 import org.wellwright.solver.units.Constants;
 import org.wellwright.solver.units.ExactNumber;
 
-/** A small project for the editor's tests: one pair, two models that share a parameter, two lines. All numbers are invented. */
+/**
+ * A small project for the editor's tests: one pair, two models that share a parameter, two lines. All numbers are
+ * invented.
+ */
 public final class TestProjects {
     private TestProjects() {}
 
@@ -43,12 +46,14 @@ public final class TestProjects {
                 List.of(Curve.of(
                         "V",
                         List.of(
-                                new FamilyTerm(TermFrame.named("tail"), "coulomb", Map.of("strength", Argument.named("k"))),
+                                new FamilyTerm(
+                                        TermFrame.named("tail"), "coulomb", Map.of("strength", Argument.named("k"))),
                                 new FormulaTerm(TermFrame.named("core"), "-depth*exp(-(r/radius)^2)", Map.of())))));
         Model soft = Model.of(
                 "soft",
                 List.of(Curve.of("V", List.of(new FormulaTerm(TermFrame.named("well"), "-k/(r+radius)", Map.of())))));
-        PairSystem pair = PairSystem.of("X", ParticleCatalogue.STANDARD.body("e-"), ParticleCatalogue.STANDARD.body("p"));
+        PairSystem pair =
+                PairSystem.of("X", ParticleCatalogue.STANDARD.body("e-"), ParticleCatalogue.STANDARD.body("p"));
         return new ModelDocument(
                 Constants.EDITION,
                 ParticleCatalogue.EDITION,

@@ -17,7 +17,9 @@ import org.wellwright.driver.WindowCommands.Command;
 final class FileCommands {
     private FileCommands() {}
 
-    /** Chooses a file, relative to the script's folder, in the file chooser on the screen, waiting until there is one. */
+    /**
+     * Chooses a file, relative to the script's folder, in the file chooser on the screen, waiting until there is one.
+     */
     @ServiceProvider(service = DriverCommand.class)
     public static final class ChooseFile extends Command {
         public ChooseFile() {
@@ -72,8 +74,11 @@ final class FileCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class Windows extends Command {
         public Windows() {
-            super("windows", "FILE", (script, words) -> ReportCommands.write(
-                    script.resolve(words.get(0)), Screen.onEventThread(FileCommands::windows)));
+            super(
+                    "windows",
+                    "FILE",
+                    (script, words) -> ReportCommands.write(
+                            script.resolve(words.get(0)), Screen.onEventThread(FileCommands::windows)));
         }
     }
 

@@ -31,12 +31,15 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class Cell extends Command {
         public Cell() {
-            super("cell", "TABLE ROW COLUMN TEXT", (script, words) -> Screen.onEventThread(() -> {
-                if (!type(table(words.get(0)), number(words.get(1)), number(words.get(2)), words.get(3))) {
-                    throw new ScriptFailure("the cell does not take " + words.get(3));
-                }
-                return null;
-            }));
+            super(
+                    "cell",
+                    "TABLE ROW COLUMN TEXT",
+                    (script, words) -> Screen.onEventThread(() -> {
+                        if (!type(table(words.get(0)), number(words.get(1)), number(words.get(2)), words.get(3))) {
+                            throw new ScriptFailure("the cell does not take " + words.get(3));
+                        }
+                        return null;
+                    }));
         }
     }
 
@@ -44,14 +47,17 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class RefusedCell extends Command {
         public RefusedCell() {
-            super("refused-cell", "TABLE ROW COLUMN TEXT", (script, words) -> Screen.onEventThread(() -> {
-                JTable table = table(words.get(0));
-                if (type(table, number(words.get(1)), number(words.get(2)), words.get(3))) {
-                    throw new ScriptFailure("the cell takes " + words.get(3));
-                }
-                table.getCellEditor().cancelCellEditing();
-                return null;
-            }));
+            super(
+                    "refused-cell",
+                    "TABLE ROW COLUMN TEXT",
+                    (script, words) -> Screen.onEventThread(() -> {
+                        JTable table = table(words.get(0));
+                        if (type(table, number(words.get(1)), number(words.get(2)), words.get(3))) {
+                            throw new ScriptFailure("the cell takes " + words.get(3));
+                        }
+                        table.getCellEditor().cancelCellEditing();
+                        return null;
+                    }));
         }
     }
 
@@ -67,7 +73,8 @@ final class TableCommands {
                         int row = number(words.get(1));
                         return found instanceof JTable table
                                 && row < table.getRowCount()
-                                && String.valueOf(table.getValueAt(row, number(words.get(2)))).contains(words.get(3));
+                                && String.valueOf(table.getValueAt(row, number(words.get(2))))
+                                        .contains(words.get(3));
                     }));
         }
     }
@@ -76,8 +83,13 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class WaitRows extends Command {
         public WaitRows() {
-            super("wait-rows", "TABLE COUNT", (script, words) -> Screen.await(
-                    words.get(1) + " rows", () -> Screen.findOrNull(words.get(0)) instanceof JTable table && table.getRowCount() == number(words.get(1))));
+            super(
+                    "wait-rows",
+                    "TABLE COUNT",
+                    (script, words) -> Screen.await(
+                            words.get(1) + " rows",
+                            () -> Screen.findOrNull(words.get(0)) instanceof JTable table
+                                    && table.getRowCount() == number(words.get(1))));
         }
     }
 
@@ -85,18 +97,22 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class SelectRow extends Command {
         public SelectRow() {
-            super("select-row", "NAME ROW", (script, words) -> Screen.onEventThread(() -> {
-                int row = number(words.get(1));
-                Component found = Screen.find(words.get(0));
-                if (found instanceof JTable table && row < table.getRowCount()) {
-                    table.setRowSelectionInterval(row, row);
-                } else if (found instanceof JList<?> list && row < list.getModel().getSize()) {
-                    list.setSelectedIndex(row);
-                } else {
-                    throw new ScriptFailure("%s has no row %d".formatted(words.get(0), row));
-                }
-                return null;
-            }));
+            super(
+                    "select-row",
+                    "NAME ROW",
+                    (script, words) -> Screen.onEventThread(() -> {
+                        int row = number(words.get(1));
+                        Component found = Screen.find(words.get(0));
+                        if (found instanceof JTable table && row < table.getRowCount()) {
+                            table.setRowSelectionInterval(row, row);
+                        } else if (found instanceof JList<?> list
+                                && row < list.getModel().getSize()) {
+                            list.setSelectedIndex(row);
+                        } else {
+                            throw new ScriptFailure("%s has no row %d".formatted(words.get(0), row));
+                        }
+                        return null;
+                    }));
         }
     }
 
@@ -104,18 +120,23 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class SelectNode extends Command {
         public SelectNode() {
-            super("select-node", "TREE TEXT", (script, words) -> Screen.onEventThread(() -> {
-                JTree tree = (JTree) Screen.find(words.get(0));
-                for (int row = 0; row < tree.getRowCount(); row++) {
-                    TreePath path = tree.getPathForRow(row);
-                    String text = tree.convertValueToText(path.getLastPathComponent(), false, false, false, row, false);
-                    if (text.startsWith(words.get(1))) {
-                        tree.setSelectionRow(row);
-                        return null;
-                    }
-                }
-                throw new ScriptFailure("%s has no line that starts with %s".formatted(words.get(0), words.get(1)));
-            }));
+            super(
+                    "select-node",
+                    "TREE TEXT",
+                    (script, words) -> Screen.onEventThread(() -> {
+                        JTree tree = (JTree) Screen.find(words.get(0));
+                        for (int row = 0; row < tree.getRowCount(); row++) {
+                            TreePath path = tree.getPathForRow(row);
+                            String text = tree.convertValueToText(
+                                    path.getLastPathComponent(), false, false, false, row, false);
+                            if (text.startsWith(words.get(1))) {
+                                tree.setSelectionRow(row);
+                                return null;
+                            }
+                        }
+                        throw new ScriptFailure(
+                                "%s has no line that starts with %s".formatted(words.get(0), words.get(1)));
+                    }));
         }
     }
 
@@ -148,16 +169,19 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class Choose extends Command {
         public Choose() {
-            super("choose", "NAME TEXT", (script, words) -> Screen.onEventThread(() -> {
-                JComboBox<?> box = (JComboBox<?>) Screen.find(words.get(0));
-                for (int i = 0; i < box.getItemCount(); i++) {
-                    if (words.get(1).equals(String.valueOf(box.getItemAt(i)))) {
-                        box.setSelectedIndex(i);
-                        return null;
-                    }
-                }
-                throw new ScriptFailure("%s has no entry %s".formatted(words.get(0), words.get(1)));
-            }));
+            super(
+                    "choose",
+                    "NAME TEXT",
+                    (script, words) -> Screen.onEventThread(() -> {
+                        JComboBox<?> box = (JComboBox<?>) Screen.find(words.get(0));
+                        for (int i = 0; i < box.getItemCount(); i++) {
+                            if (words.get(1).equals(String.valueOf(box.getItemAt(i)))) {
+                                box.setSelectedIndex(i);
+                                return null;
+                            }
+                        }
+                        throw new ScriptFailure("%s has no entry %s".formatted(words.get(0), words.get(1)));
+                    }));
         }
     }
 
@@ -188,14 +212,20 @@ final class TableCommands {
     @ServiceProvider(service = DriverCommand.class)
     public static final class WaitEnabled extends Command {
         public WaitEnabled() {
-            super("wait-enabled", "NAME", (script, words) -> Screen.await(words.get(0) + " not to be grey", () -> {
-                Component found = Screen.findOrNull(words.get(0));
-                return found != null && found.isEnabled();
-            }));
+            super(
+                    "wait-enabled",
+                    "NAME",
+                    (script, words) -> Screen.await(words.get(0) + " not to be grey", () -> {
+                        Component found = Screen.findOrNull(words.get(0));
+                        return found != null && found.isEnabled();
+                    }));
         }
     }
 
-    /** Writes the cells of a table, or the lines of a tree or list: one row a line, cells separated by tabs, then which rows are selected. */
+    /**
+     * Writes the cells of a table, or the lines of a tree or list: one row a line, cells separated by tabs, then which
+     * rows are selected.
+     */
     @ServiceProvider(service = DriverCommand.class)
     public static final class Rows extends Command {
         public Rows() {

@@ -184,7 +184,9 @@ final class GroupsDialog {
             String id = text.strip();
             if (!id.matches("[\\p{L}\\p{N}_.\\-][\\p{L}\\p{N}_.\\- ]*")) {
                 throw new InvalidModelException(
-                        "'%s' is not an id".formatted(id), "", "use letters, digits, blanks, dots, dashes and underscores");
+                        "'%s' is not an id".formatted(id),
+                        "",
+                        "use letters, digits, blanks, dots, dashes and underscores");
             }
             if (!id.equals(group.id())
                     && groups.stream().anyMatch(other -> other.id().equals(id))) {

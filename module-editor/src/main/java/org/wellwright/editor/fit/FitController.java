@@ -44,6 +44,7 @@ final class FitController {
 
             @Override
             public void ended() {}
+
             @Override
             public void accepted(ProjectSession session, String digest, FitResult result) {}
         };

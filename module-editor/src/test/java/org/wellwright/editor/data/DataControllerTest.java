@@ -23,7 +23,8 @@ class DataControllerTest {
     }
 
     private List<Row> rows() {
-        return DataViewModel.of(session.project().document(), controller.draft()).rows();
+        return DataViewModel.of(session.project().document(), controller.draft())
+                .rows();
     }
 
     @Test
@@ -32,7 +33,9 @@ class DataControllerTest {
         assertThat(rows().get(0).levels()).isEqualTo("2p - 1s");
         assertThat(rows().get(0).value()).isEqualTo("82000.1(2)");
         assertThat(rows().get(2).draft()).isTrue();
-        assertThat(DataViewModel.of(session.project().document(), controller.draft()).summary()).isEqualTo("2 values, 2 of them used");
+        assertThat(DataViewModel.of(session.project().document(), controller.draft())
+                        .summary())
+                .isEqualTo("2 values, 2 of them used");
     }
 
     @Test
@@ -85,7 +88,8 @@ class DataControllerTest {
 
     @Test
     void pastedRowsAreOneStep() {
-        List<DatumTable.Outcome> outcomes = controller.read("3p - 1s\t97000.5(3)\n3s - 1s\t97000.1\t0.3\n4s - 1s\t102000\t0.5\n");
+        List<DatumTable.Outcome> outcomes =
+                controller.read("3p - 1s\t97000.5(3)\n3s - 1s\t97000.1\t0.3\n4s - 1s\t102000\t0.5\n");
         assertThat(outcomes).extracting(DatumTable.Outcome::problem).containsOnlyNulls();
         controller.add(outcomes.stream().map(DatumTable.Outcome::datum).toList(), 0, "Paste 3 values");
         assertThat(data()).hasSize(5);
@@ -100,7 +104,8 @@ class DataControllerTest {
         assertThat(controller.setGroups(rows().get(0), "lamp")).isEmpty();
         assertThat(controller.setGroups(rows().get(0), "lamq"))
                 .hasValueSatisfying(problem -> assertThat(problem.sentence()).contains("lamp"));
-        DataGroup renamed = new DataGroup("neon", "neon lamp", DataGroup.Kind.ADDITIVE, new ExactNumber("0.1"), "cm^-1");
+        DataGroup renamed =
+                new DataGroup("neon", "neon lamp", DataGroup.Kind.ADDITIVE, new ExactNumber("0.1"), "cm^-1");
         assertThat(controller.setGroups(List.of(renamed), List.of("lamp"))).isEmpty();
         assertThat(data().get(0).groups()).containsExactly("neon");
         assertThat(controller.setGroups(List.of(), List.of())).isEmpty();

@@ -43,10 +43,13 @@ class ReferencesTest {
                 1,
                 new ParameterShape.BySystem(
                         List.of(new ParameterShape.BySystem.Entry(
-                                "X", ParameterEdits.setting(document.parameters().get(1), 0))),
+                                "X",
+                                ParameterEdits.setting(document.parameters().get(1), 0))),
                         null));
         ModelDocument renamed = References.renameSystem(bySystem, "X", "Y");
-        assertThat(renamed.data()).allMatch(datum -> datum.levels().stream().allMatch(c -> c.level().system().equals("Y")));
+        assertThat(renamed.data())
+                .allMatch(datum ->
+                        datum.levels().stream().allMatch(c -> c.level().system().equals("Y")));
         assertThat(ModelCheck.problems(renamed)).isEmpty();
     }
 
@@ -69,9 +72,16 @@ class ReferencesTest {
     @Test
     void anotherUnitConvertsTheNumbers() {
         ModelDocument changed = ParameterEdits.withUnit(document, 2, "nm");
-        assertThat(ParameterEdits.setting(changed.parameters().get(2), 0).value().value()).isEqualTo(0.15);
-        assertThat(ParameterEdits.setting(changed.parameters().get(2), 0).upper().value()).isEqualTo(0.4);
+        assertThat(ParameterEdits.setting(changed.parameters().get(2), 0)
+                        .value()
+                        .value())
+                .isEqualTo(0.15);
+        assertThat(ParameterEdits.setting(changed.parameters().get(2), 0)
+                        .upper()
+                        .value())
+                .isEqualTo(0.4);
         ModelDocument kept = ParameterEdits.withUnit(document, 2, "eV");
-        assertThat(ParameterEdits.setting(kept.parameters().get(2), 0).value().text()).isEqualTo("1.5");
+        assertThat(ParameterEdits.setting(kept.parameters().get(2), 0).value().text())
+                .isEqualTo("1.5");
     }
 }

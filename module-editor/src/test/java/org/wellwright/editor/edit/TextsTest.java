@@ -45,10 +45,13 @@ class TextsTest {
 
     @Test
     void argumentsAreNamesNumbersOrNumbersWithUnits() {
-        assertThat(ArgumentText.parse("k", new Dimension(1, 1, 0), null, document)).isEqualTo(Argument.named("k"));
-        assertThat(ArgumentText.parse("1.2 eV", Dimension.ENERGY, null, document)).isEqualTo(new Argument.Literal(1.2, "eV"));
+        assertThat(ArgumentText.parse("k", new Dimension(1, 1, 0), null, document))
+                .isEqualTo(Argument.named("k"));
+        assertThat(ArgumentText.parse("1.2 eV", Dimension.ENERGY, null, document))
+                .isEqualTo(new Argument.Literal(1.2, "eV"));
         assertThat(ArgumentText.parse("-3e2", Dimension.ENERGY, null, document)).isEqualTo(Argument.of(-300));
-        assertThat(ArgumentText.parse("", Dimension.LENGTH, Argument.UNBOUNDED, document)).isEqualTo(Argument.UNBOUNDED);
+        assertThat(ArgumentText.parse("", Dimension.LENGTH, Argument.UNBOUNDED, document))
+                .isEqualTo(Argument.UNBOUNDED);
         assertThat(ArgumentText.text(Argument.UNBOUNDED)).isEmpty();
         assertThat(ArgumentText.text(new Argument.Literal(1.2, "eV"))).isEqualTo("1.2 eV");
     }

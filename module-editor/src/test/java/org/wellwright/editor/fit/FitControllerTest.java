@@ -28,8 +28,8 @@ class FitControllerTest {
     private final ProjectSession session = TestProjects.session();
     private final Deque<Runnable> work = new ArrayDeque<>();
     private final List<FitViewModel> shown = new ArrayList<>();
-    private final FitController controller =
-            new FitController(session, new HalvingFit(), work::add, Runnable::run, shown::add, FitController.FitWatcher.NONE);
+    private final FitController controller = new FitController(
+            session, new HalvingFit(), work::add, Runnable::run, shown::add, FitController.FitWatcher.NONE);
 
     /** Halves the depth and reports it with an uncertainty; stops when told to. */
     private static final class HalvingFit implements FitService {
@@ -52,7 +52,8 @@ class FitControllerTest {
             return new FitResult(
                     fitted,
                     request.model(),
-                    List.of(new FittedParameter("depth", "depth", 2500, 12.5, "cm^-1", true, FittedParameter.Bound.NONE)),
+                    List.of(new FittedParameter(
+                            "depth", "depth", 2500, 12.5, "cm^-1", true, FittedParameter.Bound.NONE)),
                     List.of(),
                     Covariance.of(List.of("depth"), new double[][] {{156.25}}),
                     new FitQuality(1.5, 2, 1, Double.NaN),
@@ -68,7 +69,9 @@ class FitControllerTest {
     }
 
     private String depth() {
-        return ParameterEdits.setting(session.project().document().parameters().get(1), 0).value().text();
+        return ParameterEdits.setting(session.project().document().parameters().get(1), 0)
+                .value()
+                .text();
     }
 
     private void finish() {
@@ -98,8 +101,10 @@ class FitControllerTest {
     @Test
     void aResultOfOtherValuesIsNotAccepted() {
         controller.run("screened");
-        session.edit("Change radius", project -> project.withDocument(
-                ParameterEdits.withSetting(project.document(), 2, 0, s -> s.withValue(new ExactNumber("2")))));
+        session.edit(
+                "Change radius",
+                project -> project.withDocument(
+                        ParameterEdits.withSetting(project.document(), 2, 0, s -> s.withValue(new ExactNumber("2")))));
         finish();
         assertThat(controller.outdated()).isTrue();
         assertThat(controller.accept())

@@ -36,7 +36,9 @@ class ModelsControllerTest {
         assertThat(model.models()).extracting(ModelsViewModel.Node::title).containsExactly("screened", "soft");
         ModelsViewModel.Node curve = model.models().get(0).children().get(0);
         assertThat(curve.detail()).isEqualTo("2 terms");
-        assertThat(curve.children()).extracting(ModelsViewModel.Node::detail).containsExactly("Coulomb", "-depth*exp(-(r/radius)^2)");
+        assertThat(curve.children())
+                .extracting(ModelsViewModel.Node::detail)
+                .containsExactly("Coulomb", "-depth*exp(-(r/radius)^2)");
         assertThat(model.node(CORE).title()).isEqualTo("core");
     }
 
@@ -89,19 +91,23 @@ class ModelsControllerTest {
 
     @Test
     void theStrengthBetweenChargesFollowsFromTheSystem() {
-        assertThat(controller.suggestedNames(FamilyCatalogue.require("coulomb"))).containsValue("coulomb");
+        assertThat(controller.suggestedNames(FamilyCatalogue.require("coulomb")))
+                .containsValue("coulomb");
     }
 
     @Test
     void anotherFamilyKeepsWhatBothHave() {
         controller.addFamily(
-                CORE, FamilyCatalogue.require("morse"), Map.of("depth", "depth", "steepness", "1", "equilibrium", "radius"));
+                CORE,
+                FamilyCatalogue.require("morse"),
+                Map.of("depth", "depth", "steepness", "1", "equilibrium", "radius"));
         TermPath at = new TermPath(0, 0, 2);
         assertThat(controller.setFamily(at, "woods-saxon")).isEmpty();
         FamilyTerm term = (FamilyTerm) ModelEdits.term(document(), at);
         assertThat(term.family()).isEqualTo("woods-saxon");
         assertThat(term.arguments()).containsEntry("depth", Argument.named("depth"));
-        assertThat(term.frame().name()).isEqualTo(FamilyCatalogue.require("woods-saxon").displayName());
+        assertThat(term.frame().name())
+                .isEqualTo(FamilyCatalogue.require("woods-saxon").displayName());
         assertThat(ModelsViewModel.of(document()).node(at).problem()).isEmpty();
     }
 
@@ -117,7 +123,8 @@ class ModelsControllerTest {
     @Test
     void duplicatesMovesAndRemovesAtEveryDepth() {
         assertThat(controller.duplicate(CORE)).isEqualTo(new TermPath(0, 0, 2));
-        assertThat(ModelEdits.term(document(), new TermPath(0, 0, 2)).frame().name()).isEqualTo("core 2");
+        assertThat(ModelEdits.term(document(), new TermPath(0, 0, 2)).frame().name())
+                .isEqualTo("core 2");
         assertThat(controller.move(new TermPath(0, 0, 2), -1)).isEqualTo(CORE);
         assertThat(ModelEdits.term(document(), CORE).frame().name()).isEqualTo("core 2");
         assertThat(controller.move(TermPath.model(0), 1)).isEqualTo(TermPath.model(1));
@@ -156,7 +163,8 @@ class ModelsControllerTest {
 
     @Test
     void pastedPointsAreSortedAndFaultyOnesNamed() {
-        List<TableKnot> knots = TableForm.points("r\tV\n2\t-1\n1\t-3\n3 -0.5\n4,-0.1\n".replace(" ", "\t").replace(",", "\t"));
+        List<TableKnot> knots = TableForm.points(
+                "r\tV\n2\t-1\n1\t-3\n3 -0.5\n4,-0.1\n".replace(" ", "\t").replace(",", "\t"));
         assertThat(knots).extracting(TableKnot::radius).containsExactly(1.0, 2.0, 3.0, 4.0);
         assertThatThrownBy(() -> TableForm.points("1;2\n2;x\n")).hasMessageContaining("line 2");
     }

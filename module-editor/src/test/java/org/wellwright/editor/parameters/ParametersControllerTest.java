@@ -42,11 +42,11 @@ class ParametersControllerTest {
 
     @Test
     void badInputChangesNothingAndSaysWhatToDo() {
-        assertThat(controller.setValue(row("depth"), "1.2 nm")).hasValueSatisfying(problem -> assertThat(problem.sentence())
-                .contains("does not fit")
-                .contains("cm^-1"));
-        assertThat(controller.setValue(row("radius"), "9")).hasValueSatisfying(problem ->
-                assertThat(problem.sentence()).contains("above the upper bound 4"));
+        assertThat(controller.setValue(row("depth"), "1.2 nm"))
+                .hasValueSatisfying(problem ->
+                        assertThat(problem.sentence()).contains("does not fit").contains("cm^-1"));
+        assertThat(controller.setValue(row("radius"), "9"))
+                .hasValueSatisfying(problem -> assertThat(problem.sentence()).contains("above the upper bound 4"));
         assertThat(controller.rename(row("k"), "depth")).isPresent();
         assertThat(controller.rename(row("k"), "2k")).isPresent();
         assertThat(controller.setPrior(row("k"), "1.4")).isPresent();
@@ -59,8 +59,8 @@ class ParametersControllerTest {
         assertThat(controller.setValue(row("depth"), "= 3*k")).isEmpty();
         assertThat(row("depth").status()).isEqualTo("tied");
         assertThat(row("depth").value()).isEqualTo("= 3*k");
-        assertThat(controller.setValue(row("depth"), "= 3*(k")).hasValueSatisfying(problem ->
-                assertThat(problem.sentence()).contains("column"));
+        assertThat(controller.setValue(row("depth"), "= 3*(k"))
+                .hasValueSatisfying(problem -> assertThat(problem.sentence()).contains("column"));
         assertThat(controller.setValue(row("depth"), "12")).isEmpty();
         assertThat(row("depth").status()).isEqualTo("fixed");
     }
@@ -130,7 +130,8 @@ class ParametersControllerTest {
     @Test
     void dependencesCarryNumbersOver() {
         var document = session.project().document();
-        ParameterShape byL = Dependence.ORBITAL.shape(document.parameters().get(2).shape(), "0, 1", true, document);
+        ParameterShape byL =
+                Dependence.ORBITAL.shape(document.parameters().get(2).shape(), "0, 1", true, document);
         assertThat(ParametersViewModel.places(byL)).containsExactly("l = 0", "l = 1", "others");
         assertThat(controller.setShape(2, byL)).isEmpty();
         assertThat(ParametersViewModel.of(session.project().document()).rows())
@@ -140,6 +141,7 @@ class ParametersControllerTest {
         ParameterShape scaled = Dependence.MASS.shape(byL, "X -1", false, document);
         assertThat(scaled).isInstanceOf(ParameterShape.MassScaled.class);
         assertThat(Dependence.places(scaled, document)).isEqualTo("X -1");
-        assertThat(SliderScale.around(ParameterEdits.settings(byL).get(0)).high()).isEqualTo(4);
+        assertThat(SliderScale.around(ParameterEdits.settings(byL).get(0)).high())
+                .isEqualTo(4);
     }
 }

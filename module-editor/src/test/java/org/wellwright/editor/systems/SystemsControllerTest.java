@@ -23,7 +23,11 @@ class SystemsControllerTest {
         assertThat(controller.setMass(0, true, "mu-")).isEmpty();
         assertThat(system().first().charge().text()).isEqualTo("-1");
         assertThat(system().first().twiceSpin()).isEqualTo(1);
-        assertThat(SystemsViewModel.of(session.project().document()).systems().get(0).derived()).startsWith("reduced mass 0.10194854");
+        assertThat(SystemsViewModel.of(session.project().document())
+                        .systems()
+                        .get(0)
+                        .derived())
+                .startsWith("reduced mass 0.10194854");
     }
 
     @Test
@@ -31,9 +35,12 @@ class SystemsControllerTest {
         assertThat(controller.setMass(0, true, "0.067 m_e")).isEmpty();
         assertThat(system().first().mass()).isInstanceOf(BodyMass.Typed.class);
         assertThat(controller.setMass(0, true, "38.96(1) u")).isEmpty();
-        assertThat(controller.setMass(0, true, "0.067")).hasValueSatisfying(p -> assertThat(p.sentence()).contains("no unit"));
-        assertThat(controller.setMass(0, true, "0.067 nm")).hasValueSatisfying(p -> assertThat(p.sentence()).contains("not a unit of mass"));
-        assertThat(controller.setMass(0, true, "protn")).hasValueSatisfying(p -> assertThat(p.sentence()).contains("neither a particle"));
+        assertThat(controller.setMass(0, true, "0.067"))
+                .hasValueSatisfying(p -> assertThat(p.sentence()).contains("no unit"));
+        assertThat(controller.setMass(0, true, "0.067 nm"))
+                .hasValueSatisfying(p -> assertThat(p.sentence()).contains("not a unit of mass"));
+        assertThat(controller.setMass(0, true, "protn"))
+                .hasValueSatisfying(p -> assertThat(p.sentence()).contains("neither a particle"));
         assertThat(controller.setMass(0, true, "depth")).isEmpty();
         assertThat(system().massConvention()).isEqualTo(MassConvention.MODEL_PARAMETER);
     }
@@ -54,9 +61,18 @@ class SystemsControllerTest {
 
     @Test
     void aSystemWithDataStaysAndItsNewIdIsFollowed() {
-        assertThat(controller.remove(0)).hasValueSatisfying(p -> assertThat(p.sentence()).contains("2 measured values"));
+        assertThat(controller.remove(0))
+                .hasValueSatisfying(p -> assertThat(p.sentence()).contains("2 measured values"));
         assertThat(controller.rename(0, "ion")).isEmpty();
-        assertThat(session.project().document().data().get(0).levels().get(0).level().system()).isEqualTo("ion");
+        assertThat(session.project()
+                        .document()
+                        .data()
+                        .get(0)
+                        .levels()
+                        .get(0)
+                        .level()
+                        .system())
+                .isEqualTo("ion");
         int copy = controller.duplicate(0);
         assertThat(controller.rename(copy, "ion")).isPresent();
         assertThat(controller.rename(copy, "a:b")).isPresent();

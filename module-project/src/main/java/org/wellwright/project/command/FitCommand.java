@@ -44,7 +44,9 @@ final class FitCommand implements Command {
             Project project = ProjectArgument.read(file);
             FitResult fit = fit(input, file, project, console);
             lock.save(project.withDocument(fit.document()));
-            RunHistory.of(file).add(FitRecord.of(file, project.digest(), fit, Services.solver().version()));
+            RunHistory.of(file)
+                    .add(FitRecord.of(
+                            file, project.digest(), fit, Services.solver().version()));
             print(input, format, fit, project, console);
         }
         return 0;

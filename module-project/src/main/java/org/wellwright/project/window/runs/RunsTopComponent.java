@@ -118,14 +118,19 @@ public final class RunsTopComponent extends SessionWindow {
         READER.post(() -> {
             RunsViewModel model;
             try {
-                model = RunsViewModel.of(RunHistory.of(session.file().orElseThrow()).read(), digest, ZoneId.systemDefault());
+                model = RunsViewModel.of(
+                        RunHistory.of(session.file().orElseThrow()).read(), digest, ZoneId.systemDefault());
             } catch (WellwrightException e) {
                 model = new RunsViewModel(List.of(), e.problem().sentence());
             }
             RunsViewModel read = model;
             SwingUtilities.invokeLater(() -> {
                 if (session == session()) {
-                    fill(read, read.rows().isEmpty() ? Bundle.MSG_NoRuns() : Bundle.MSG_RunsCounted(read.rows().size()));
+                    fill(
+                            read,
+                            read.rows().isEmpty()
+                                    ? Bundle.MSG_NoRuns()
+                                    : Bundle.MSG_RunsCounted(read.rows().size()));
                 }
             });
         });
@@ -145,7 +150,10 @@ public final class RunsTopComponent extends SessionWindow {
 
     private void showDetail() {
         int row = table.getSelectedRow();
-        detail.setText(row < 0 || row >= rows.size() ? "" : rows.get(row).command() + "\n\n" + rows.get(row).result());
+        detail.setText(
+                row < 0 || row >= rows.size()
+                        ? ""
+                        : rows.get(row).command() + "\n\n" + rows.get(row).result());
         detail.setCaretPosition(0);
     }
 

@@ -35,7 +35,14 @@ record RunsViewModel(List<Row> rows, String message) {
      * @param result what came out, as JSON
      */
     record Row(
-            String time, String kind, String model, String quality, String program, String input, String command, String result) {}
+            String time,
+            String kind,
+            String model,
+            String quality,
+            String program,
+            String input,
+            String command,
+            String result) {}
 
     RunsViewModel {
         rows = List.copyOf(rows);
@@ -49,7 +56,8 @@ record RunsViewModel(List<Row> rows, String message) {
         int damaged = history.damaged().size();
         String message = damaged == 0
                 ? ""
-                : "%d line%s of the history %s damaged and left out".formatted(damaged, damaged == 1 ? "" : "s", damaged == 1 ? "is" : "are");
+                : "%d line%s of the history %s damaged and left out"
+                        .formatted(damaged, damaged == 1 ? "" : "s", damaged == 1 ? "is" : "are");
         return new RunsViewModel(rows, message);
     }
 
