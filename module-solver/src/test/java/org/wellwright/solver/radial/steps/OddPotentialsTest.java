@@ -15,15 +15,17 @@ import org.wellwright.solver.radial.RadialProblem;
 import org.wellwright.solver.radial.SolveMonitor;
 import org.wellwright.solver.radial.spectral.SpectralElementSolver;
 
-/** Potentials chosen to be awkward: kinks, edges, odd powers, and formulas whose own rounding explodes at the origin. */
+/**
+ * Potentials chosen to be awkward: kinks, edges, odd powers, and formulas whose own rounding explodes at the origin.
+ */
 class OddPotentialsTest {
     private static final PerturbedStepSolver STEPS = new PerturbedStepSolver();
     private static final SpectralElementSolver SPECTRAL = new SpectralElementSolver();
 
     private static void bothAgree(String formula, double kinetic, int l, int count) {
         RadialProblem problem = Problems.formula(formula, kinetic, l);
-        List<Level> levels =
-                STEPS.solve(problem, LevelSearch.first(count), SolveMonitor.NONE).levels();
+        List<Level> levels = STEPS.solve(problem, LevelSearch.first(count), SolveMonitor.NONE)
+                .levels();
         List<Level> bounds = SPECTRAL.solve(problem, LevelSearch.first(count), SolveMonitor.NONE)
                 .levels();
         assertThat(levels).as(formula).hasSameSizeAs(bounds);
