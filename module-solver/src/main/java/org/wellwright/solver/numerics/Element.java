@@ -9,6 +9,9 @@ package org.wellwright.solver.numerics;
  * Bampton 1968 for the modes). Vertex matrices are C×C.
  */
 public final class Element {
+    /** Extra bubbles whose couplings are kept. */
+    public static final int TESTED = 2;
+
     /** Channels C. */
     public final int channels;
     /** Modes N = C·n. */
@@ -44,12 +47,16 @@ public final class Element {
     /** Right with right. */
     public final double[] mRightRight;
     /**
-     * Couplings of the extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C + 1)]}: N modes, C left,
-     * C right vertices, itself; and the same of the mass.
+     * Couplings of the first extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C)]} for x &lt; TESTED:
+     * N modes, C left, C right vertices; and the same of the mass.
      */
     public final double[] extraA;
     /** See {@link #extraA}. */
     public final double[] extraM;
+    /** Energy of each extra bubble, {@code [x * C + c]}. */
+    public final double[] ownA;
+    /** Mass of each extra bubble. */
+    public final double[] ownM;
 
     /** Scratch for building elements one after the other; one per thread. */
     public static final class Scratch {
@@ -84,7 +91,7 @@ public final class Element {
         int n = basis[0].bubbles;
         int big = channels * n;
         modes = big;
-        int stride = big + 2 * channels + 1;
+        int stride = big + 2 * channels;
         lambda = new double[big];
         vector = new double[big * big];
         alphaLeft = new double[channels * big];
@@ -97,15 +104,17 @@ public final class Element {
         mLeftLeft = new double[channels];
         mLeftRight = new double[channels];
         mRightRight = new double[channels];
-        extraA = new double[ElementBasis.EXTRA * channels * stride];
-        extraM = new double[ElementBasis.EXTRA * channels * stride];
+        extraA = new double[TESTED * channels * stride];
+        extraM = new double[TESTED * channels * stride];
+        ownA = new double[ElementBasis.EXTRA * channels];
+        ownM = new double[ElementBasis.EXTRA * channels];
         scratch.fit(basis[0].pairs(), big);
         double[] plainLeft = new double[channels * big];
         double[] plainRight = new double[channels * big];
         double[] massLeft = new double[channels * big];
         double[] massRight = new double[channels * big];
-        double[] plainExtra = new double[ElementBasis.EXTRA * channels * big];
-        double[] massExtra = new double[ElementBasis.EXTRA * channels * big];
+        double[] plainExtra = new double[TESTED * channels * big];
+        double[] massExtra = new double[TESTED * channels * big];
         for (int c = 0; c < channels; c++) {
             for (int d = 0; d < channels; d++) {
                 double[] w = potential[c * channels + d];
@@ -121,12 +130,12 @@ public final class Element {
             addKinetic(c, n, massLeft, massRight, massExtra, stride);
         }
         SymmetricEigen.decompose(vector, big, lambda, scratch.work);
-        transform(plainLeft, alphaLeft, channels, big, channels * 0 + big);
+        transform(plainLeft, alphaLeft, channels, big, big);
         transform(plainRight, alphaRight, channels, big, big);
         transform(massLeft, betaLeft, channels, big, big);
         transform(massRight, betaRight, channels, big, big);
-        transform(plainExtra, extraA, ElementBasis.EXTRA * channels, big, stride);
-        transform(massExtra, extraM, ElementBasis.EXTRA * channels, big, stride);
+        transform(plainExtra, extraA, TESTED * channels, big, stride);
+        transform(massExtra, extraM, TESTED * channels, big, stride);
     }
 
     private void transform(double[] from, double[] into, int rows, int big, int stride) {
@@ -184,14 +193,16 @@ public final class Element {
         aLeftLeft[cc] = unit * packed[at++];
         aLeftRight[cc] = unit * packed[at++];
         aRightRight[cc] = unit * packed[at++];
-        for (int x = 0; x < ElementBasis.EXTRA; x++) {
+        for (int x = 0; x < TESTED; x++) {
             int row = x * channels + c;
             for (int j = 0; j < n; j++) {
                 extra[row * big + c * n + j] = root * packed[at++];
             }
             extraA[row * stride + big + c] = unit * packed[at++];
             extraA[row * stride + big + channels + c] = unit * packed[at++];
-            extraA[row * stride + big + 2 * channels] = unit * packed[at++];
+        }
+        for (int x = 0; x < ElementBasis.EXTRA; x++) {
+            ownA[x * channels + c] = unit * packed[at++];
         }
     }
 
@@ -220,7 +231,7 @@ public final class Element {
             aLeftLeft[c * channels + d] += unit * leftC * o.assembly.left[g];
             aLeftRight[c * channels + d] += unit * leftC * o.assembly.right[g];
             aRightRight[c * channels + d] += unit * rightC * o.assembly.right[g];
-            for (int x = 0; x < ElementBasis.EXTRA; x++) {
+            for (int x = 0; x < TESTED; x++) {
                 int row = x * channels + c;
                 double wx = wg * b.assembly.bubble[n + x][g];
                 for (int j = 0; j < n; j++) {
@@ -253,15 +264,17 @@ public final class Element {
         mLeftLeft[c] = unit * b.massLeftLeft;
         mLeftRight[c] = unit * b.massLeftRight;
         mRightRight[c] = unit * b.massRightRight;
-        for (int x = 0; x < ElementBasis.EXTRA; x++) {
+        for (int x = 0; x < TESTED; x++) {
             int row = x * channels + c;
             for (int j = 0; j < n; j++) {
                 massExtra[row * big + c * n + j] = root * b.extraMass[x][j];
             }
             extraM[row * stride + big + c] = unit * b.extraMass[x][n];
             extraM[row * stride + big + channels + c] = unit * b.extraMass[x][n + 1];
-            extraM[row * stride + big + 2 * channels] = unit * b.extraMass[x][n + 2];
-            extraA[row * stride + big + 2 * channels] += stiffness;
+        }
+        for (int x = 0; x < ElementBasis.EXTRA; x++) {
+            ownM[x * channels + c] = unit * b.extraMass[x][n + 2];
+            ownA[x * channels + c] += stiffness;
         }
     }
 
@@ -276,22 +289,34 @@ public final class Element {
             int c, double[] amplitude, int from, int step, double[] scratch, double[] into, int at) {
         int n = basis[c].bubbles;
         int big = modes;
-        java.util.Arrays.fill(scratch, 0, n, 0);
-        for (int k = 0; k < big; k++) {
-            double a = amplitude[from + k * step];
-            int z = k * big + c * n;
-            for (int j = 0; j < n; j++) {
-                scratch[j] += a * vector[z + j];
-            }
-        }
+        combine(amplitude, from, step, vector, c * n, big, big, scratch, n);
         double scale = 1 / Math.sqrt(unit);
         java.util.Arrays.fill(into, at, at + n, 0);
         for (int j = 0; j < n; j++) {
             double a = scratch[j] * scale;
             double[] row = basis[c].toBubbles[j];
-            for (int i = 0; i < n; i++) {
-                into[at + i] += a * row[i];
+            // On an ordinary element combinations have a parity, and half of each row is zero.
+            int first = row[0] == 0 ? 1 : 0;
+            int by = row[1 - first] == 0 ? 2 : 1;
+            addMultiple(a, row, first, by, into, at, n);
+        }
+    }
+
+    private static void combine(
+            double[] amplitude, int from, int step, double[] rows, int column, int stride, int count, double[] into, int n) {
+        java.util.Arrays.fill(into, 0, n, 0);
+        for (int k = 0; k < count; k++) {
+            double a = amplitude[from + k * step];
+            int z = k * stride + column;
+            for (int j = 0; j < n; j++) {
+                into[j] += a * rows[z + j];
             }
+        }
+    }
+
+    private static void addMultiple(double a, double[] row, int first, int by, double[] into, int at, int n) {
+        for (int i = first; i < n; i += by) {
+            into[at + i] += a * row[i];
         }
     }
 }

@@ -46,6 +46,19 @@ public final class ElementBasis {
         public final double[] left;
         /** Right vertex function. */
         public final double[] right;
+        /**
+         * Values by parity at the nodes below ½, for ordinary tables of an even number of nodes: bubbles 0, 2, 4, … at
+         * {@code even[h * halfStride + i]}, bubbles 1, 3, … in {@code odd}; the same of {@link #second}.
+         */
+        public double[] even;
+        /** See {@link #even}. */
+        public double[] odd;
+        /** See {@link #even}. */
+        public double[] evenSecond;
+        /** See {@link #even}. */
+        public double[] oddSecond;
+        /** Length of a row of {@link #even}, a multiple of 4. */
+        public int halfStride;
         /** −L²/κ times kinetic (and at the origin centrifugal) energy density operator on each bubble. */
         public final double[][] second;
 
@@ -61,6 +74,24 @@ public final class ElementBasis {
             second = new double[functions][size];
             left = new double[size];
             right = new double[size];
+        }
+
+        /** Fills the tables by parity. */
+        void split() {
+            int functions = bubble.length;
+            int half = size / 2;
+            halfStride = ((functions + 1) / 2 + 3) / 4 * 4;
+            even = new double[half * halfStride];
+            odd = new double[half * halfStride];
+            evenSecond = new double[half * halfStride];
+            oddSecond = new double[half * halfStride];
+            for (int h = 0; h < half; h++) {
+                for (int k = 0; k < functions; k++) {
+                    int at = h * halfStride + k / 2;
+                    (k % 2 == 0 ? even : odd)[at] = bubble[k][h];
+                    (k % 2 == 0 ? evenSecond : oddSecond)[at] = second[k][h];
+                }
+            }
         }
     }
 
@@ -116,23 +147,10 @@ public final class ElementBasis {
                 mass[j * n + i] = m;
             }
         }
-        double[] mu = new double[n];
-        SymmetricEigen.decompose(mass, n, mu, new double[n + n * n]);
         massOfMode = new double[n];
         toBubbles = new double[n][n];
         orthonormal = new double[n][assembly.size];
-        // Largest mass first: the matrices of the elements are then graded from small to large.
-        for (int j = 0; j < n; j++) {
-            int from = n - 1 - j;
-            massOfMode[j] = mu[from];
-            double scale = 1 / Math.sqrt(mu[from]);
-            for (int k = 0; k < n; k++) {
-                toBubbles[j][k] = mass[from * n + k] * scale;
-                for (int g = 0; g < assembly.size; g++) {
-                    orthonormal[j][g] += toBubbles[j][k] * assembly.bubble[k][g];
-                }
-            }
-        }
+        orthonormalise(mass);
         massLeft = new double[n];
         massRight = new double[n];
         for (int j = 0; j < n; j++) {
@@ -157,11 +175,58 @@ public final class ElementBasis {
     }
 
     /**
+     * Combinations of the bubbles with unit mass and diagonal stiffness, least kinetic energy first, so that the matrices
+     * of the elements are graded from small to large. On an ordinary element they are even or odd exactly.
+     */
+    private void orthonormalise(double[] mass) {
+        int n = bubbles;
+        int classes = atOrigin() ? 1 : 2;
+        double[][] vectors = new double[n][];
+        double[] values = new double[n];
+        int count = 0;
+        for (int parity = 0; parity < classes; parity++) {
+            int size = (n - parity + classes - 1) / classes;
+            double[] part = new double[size * size];
+            for (int i = 0; i < size; i++) {
+                for (int j = 0; j < size; j++) {
+                    part[i * size + j] = mass[(parity + i * classes) * n + parity + j * classes];
+                }
+            }
+            double[] mu = new double[size];
+            SymmetricEigen.decompose(part, size, mu, new double[size + size * size]);
+            for (int i = 0; i < size; i++) {
+                double scale = 1 / Math.sqrt(mu[i]);
+                vectors[count] = new double[n];
+                for (int j = 0; j < size; j++) {
+                    vectors[count][parity + j * classes] = part[i * size + j] * scale;
+                }
+                values[count++] = mu[i];
+            }
+        }
+        for (int j = 0; j < n; j++) {
+            int largest = -1;
+            for (int i = 0; i < n; i++) {
+                if (vectors[i] != null && (largest < 0 || values[i] > values[largest])) {
+                    largest = i;
+                }
+            }
+            massOfMode[j] = values[largest];
+            toBubbles[j] = vectors[largest];
+            vectors[largest] = null;
+            for (int k = 0; k < n; k++) {
+                for (int g = 0; g < assembly.size; g++) {
+                    orthonormal[j][g] += toBubbles[j][k] * assembly.bubble[k][g];
+                }
+            }
+        }
+    }
+
+    /**
      * Order of the packed pairs: χ_i χ_j for j ≤ i; then left χ_j; right χ_j; left², left·right, right²; then for each
-     * extra bubble x: x χ_j, x left, x right, x².
+     * tested extra bubble x: x χ_j, x left, x right; then x² for all extra bubbles.
      */
     public int pairs() {
-        return bubbles * (bubbles + 1) / 2 + 2 * bubbles + 3 + EXTRA * (bubbles + 3);
+        return bubbles * (bubbles + 1) / 2 + 2 * bubbles + 3 + Element.TESTED * (bubbles + 2) + EXTRA;
     }
 
     private double[][] products() {
@@ -187,14 +252,16 @@ public final class ElementBasis {
             row[at++] = w * left * left;
             row[at++] = w * left * right;
             row[at++] = w * right * right;
-            for (int x = 0; x < EXTRA; x++) {
+            for (int x = 0; x < Element.TESTED; x++) {
                 double extra = assembly.bubble[n + x][g];
                 for (int j = 0; j < n; j++) {
                     row[at++] = w * extra * orthonormal[j][g];
                 }
                 row[at++] = w * extra * left;
                 row[at++] = w * extra * right;
-                row[at++] = w * extra * extra;
+            }
+            for (int x = 0; x < EXTRA; x++) {
+                row[at++] = w * assembly.bubble[n + x][g] * assembly.bubble[n + x][g];
             }
         }
         return table;
@@ -219,11 +286,11 @@ public final class ElementBasis {
     }
 
     private static int assemblyNodes(int degree) {
-        return degree + 7;
+        return degree + 8;
     }
 
     private static int checkNodes(int degree) {
-        return degree + 11;
+        return degree + 12;
     }
 
     private static ElementBasis computeOrdinary(int degree) {
@@ -268,6 +335,7 @@ public final class ElementBasis {
             table.left[g] = 1 - t;
             table.right[g] = t;
         }
+        table.split();
         return table;
     }
 

@@ -1,5 +1,7 @@
 package org.wellwright.solver.numerics;
 
+import java.util.Arrays;
+
 /**
  * A chain of elements of one channel, zero at both ends, as a condensed pencil in the element edges: counts of levels
  * and null vectors at any shift.
@@ -14,8 +16,10 @@ public final class ScalarChain implements CondensedPencil {
     private final Element[] element;
     private final int count;
     private final int modes;
+    private final int stride;
     private final double[] lambda;
-    private final double[] lambdaByElement;
+    /** How near σ must come to a mode for it to be kept as an unknown. */
+    private final double[] reach;
     private final double[] alphaLeft;
     private final double[] betaLeft;
     private final double[] alphaRight;
@@ -27,6 +31,7 @@ public final class ScalarChain implements CondensedPencil {
     private final double[] mLeftRight;
     private final double[] mRightRight;
     private final double[] natural;
+    private final double[] vertexWeight;
 
     /** The state of one shift; made once per thread and used again and again. */
     private final class State implements Work {
@@ -36,10 +41,21 @@ public final class ScalarChain implements CondensedPencil {
         private final int[] nearest = new int[count];
         private final double[] delta = new double[count];
         private final boolean[] near = new boolean[count];
+        private final double[] nearLeft = new double[count];
+        private final double[] nearRight = new double[count];
+        private final int[] position = new int[count];
+        /** Amplitude of the explicit mode of each element that has one. */
+        private final double[] explicit = new double[count];
+        private final double[] poleLeftLeft = new double[stride * count];
+        private final double[] poleLeftRight = new double[stride * count];
+        private final double[] poleRightRight = new double[stride * count];
+        private final double[] leftValue = new double[count];
+        private final double[] rightValue = new double[count];
+        private final double[] own = new double[count];
         private final double[] forward = new double[count];
         private final double[] backward = new double[count];
         private final double[] vertex = new double[Math.max(0, count - 1)];
-        private final double[] amplitude = new double[modes * count];
+        private final double[] amplitude = new double[stride * count];
 
         private double shift;
         private int below;
@@ -55,11 +71,20 @@ public final class ScalarChain implements CondensedPencil {
 
         @Override
         public int countOpen(double at, double[] boundary) {
-            int below = ScalarChain.this.count(at, this);
+            int held = ScalarChain.this.count(at, this);
             int e = count - 1;
             double d = forward[e - 1] + leftLeft[e];
-            double end = rightRight[e] - leftRight[e] * leftRight[e] / awayFromZero(d, e) + boundary[0];
-            return below + (end < 0 ? 1 : 0);
+            double s = leftRight[e];
+            double end = rightRight[e] + boundary[0];
+            if (near[e]) {
+                double l = nearLeft[e];
+                double r = nearRight[e];
+                double det = d * delta[e] - l * l;
+                end -= (s * s * delta[e] - 2 * s * l * r + r * r * d) / safe(det, l);
+            } else {
+                end -= s * s / awayFromZero(d, e);
+            }
+            return held + (end < 0 ? 1 : 0);
         }
 
         @Override
@@ -94,12 +119,12 @@ public final class ScalarChain implements CondensedPencil {
 
         @Override
         public int first(int e) {
-            return e;
+            return e * stride;
         }
 
         @Override
         public int step() {
-            return count;
+            return 1;
         }
     }
 
@@ -111,9 +136,11 @@ public final class ScalarChain implements CondensedPencil {
         element = elements;
         count = elements.length;
         modes = elements[0].modes;
-        int total = count * modes;
+        stride = (modes + 3) / 4 * 4;
+        int total = count * stride;
         lambda = new double[total];
-        lambdaByElement = new double[total];
+        Arrays.fill(lambda, Double.POSITIVE_INFINITY);
+        reach = new double[total];
         alphaLeft = new double[total];
         betaLeft = new double[total];
         alphaRight = new double[total];
@@ -125,16 +152,19 @@ public final class ScalarChain implements CondensedPencil {
         mLeftRight = new double[count];
         mRightRight = new double[count];
         natural = new double[count];
+        vertexWeight = new double[count - 1];
         for (int e = 0; e < count; e++) {
             Element one = elements[e];
             for (int k = 0; k < modes; k++) {
-                int at = k * count + e;
+                int at = e * stride + k;
                 lambda[at] = one.lambda[k];
-                lambdaByElement[e * modes + k] = one.lambda[k];
                 alphaLeft[at] = one.alphaLeft[k];
                 betaLeft[at] = one.betaLeft[k];
                 alphaRight[at] = one.alphaRight[k];
                 betaRight[at] = one.betaRight[k];
+                double left = one.alphaLeft[k] - one.lambda[k] * one.betaLeft[k];
+                double right = one.alphaRight[k] - one.lambda[k] * one.betaRight[k];
+                reach[at] = Math.max(left * left, right * right) * one.unit / (16 * one.kinetic);
             }
             aLeftLeft[e] = one.aLeftLeft[0];
             aLeftRight[e] = one.aLeftRight[0];
@@ -143,6 +173,9 @@ public final class ScalarChain implements CondensedPencil {
             mLeftRight[e] = one.mLeftRight[0];
             mRightRight[e] = one.mRightRight[0];
             natural[e] = one.kinetic / one.unit;
+        }
+        for (int v = 0; v < count - 1; v++) {
+            vertexWeight[v] = 1 / (mRightRight[v] + mLeftLeft[v + 1]);
         }
     }
 
@@ -159,93 +192,63 @@ public final class ScalarChain implements CondensedPencil {
     private int count(double shift, State work) {
         condense(shift, work);
         eliminateForward(work);
-        double last = work.leftLeft[count - 1] + work.forward[count - 2];
-        return work.below + (last < 0 ? 1 : 0);
+        return work.below;
     }
 
     private void condense(double shift, State work) {
         int n = count;
-        double[] ll = work.leftLeft;
-        double[] lr = work.leftRight;
-        double[] rr = work.rightRight;
-        for (int e = 0; e < n; e++) {
-            ll[e] = aLeftLeft[e] - shift * mLeftLeft[e];
-            lr[e] = aLeftRight[e] - shift * mLeftRight[e];
-            rr[e] = aRightRight[e] - shift * mRightRight[e];
-        }
-        for (int k = 0; k < modes; k++) {
-            int base = k * n;
-            for (int e = 0; e < n; e++) {
-                double inverse = 1 / (lambda[base + e] - shift);
-                double left = alphaLeft[base + e] - shift * betaLeft[base + e];
-                double right = alphaRight[base + e] - shift * betaRight[base + e];
-                ll[e] -= left * left * inverse;
-                lr[e] -= left * right * inverse;
-                rr[e] -= right * right * inverse;
-            }
-        }
-        int below = 0;
-        for (int e = 0; e < n; e++) {
-            int first = e * modes;
-            int k = 0;
-            while (k < modes && lambdaByElement[first + k] < shift) {
-                k++;
-            }
-            below += k;
-            if (k == modes || (k > 0 && shift - lambdaByElement[first + k - 1] < lambdaByElement[first + k] - shift)) {
-                k--;
-            }
-            double delta = lambdaByElement[first + k] - shift;
-            work.nearest[e] = k;
-            work.delta[e] = delta;
-            int at = k * n + e;
-            double left = alphaLeft[at] - shift * betaLeft[at];
-            double right = alphaRight[at] - shift * betaRight[at];
-            double size = Math.max(left * left, right * right);
-            // Not "size > …": a zero delta must be near, and NaN must not pass.
-            boolean near = !(size <= 4 * natural[e] * Math.abs(delta));
-            if (near && (e == 0 || e == n - 1) && delta != 0) {
-                near = false;
-            }
-            work.near[e] = near;
-            if (near) {
-                withoutMode(e, k, shift, work);
-                if (delta < 0) {
-                    below--;
-                }
-            }
-        }
-        work.below = below;
+        ChainKernels.shifted(shift, aLeftLeft, mLeftLeft, work.leftLeft, n);
+        ChainKernels.shifted(shift, aLeftRight, mLeftRight, work.leftRight, n);
+        ChainKernels.shifted(shift, aRightRight, mRightRight, work.rightRight, n);
+        ChainKernels.poles(
+                shift,
+                lambda,
+                alphaLeft,
+                betaLeft,
+                alphaRight,
+                betaRight,
+                work.poleLeftLeft,
+                work.poleLeftRight,
+                work.poleRightRight,
+                n * stride);
         work.shift = shift;
-    }
-
-    private void withoutMode(int e, int skip, double shift, State work) {
-        double ll = aLeftLeft[e] - shift * mLeftLeft[e];
-        double lr = aLeftRight[e] - shift * mLeftRight[e];
-        double rr = aRightRight[e] - shift * mRightRight[e];
-        for (int k = 0; k < modes; k++) {
-            if (k != skip) {
-                int at = k * count + e;
-                double inverse = 1 / (lambda[at] - shift);
-                double left = alphaLeft[at] - shift * betaLeft[at];
-                double right = alphaRight[at] - shift * betaRight[at];
-                ll -= left * left * inverse;
-                lr -= left * right * inverse;
-                rr -= right * right * inverse;
+        work.below = ChainKernels.nearest(
+                shift,
+                lambda,
+                reach,
+                alphaLeft,
+                betaLeft,
+                alphaRight,
+                betaRight,
+                work.position,
+                work.nearest,
+                work.delta,
+                work.nearLeft,
+                work.nearRight,
+                work.near,
+                stride,
+                modes,
+                n);
+        for (int e = 0; e < n; e++) {
+            if (work.near[e]) {
+                int at = e * stride + work.nearest[e];
+                work.poleLeftLeft[at] = 0;
+                work.poleLeftRight[at] = 0;
+                work.poleRightRight[at] = 0;
             }
         }
-        work.leftLeft[e] = ll;
-        work.leftRight[e] = lr;
-        work.rightRight[e] = rr;
+        ChainKernels.subtractSums(work.poleLeftLeft, stride, work.leftLeft, n);
+        ChainKernels.subtractSums(work.poleLeftRight, stride, work.leftRight, n);
+        ChainKernels.subtractSums(work.poleRightRight, stride, work.rightRight, n);
     }
 
     private double couplingLeft(int e, int k, double shift) {
-        int at = k * count + e;
+        int at = e * stride + k;
         return alphaLeft[at] - shift * betaLeft[at];
     }
 
     private double couplingRight(int e, int k, double shift) {
-        int at = k * count + e;
+        int at = e * stride + k;
         return alphaRight[at] - shift * betaRight[at];
     }
 
@@ -254,84 +257,109 @@ public final class ScalarChain implements CondensedPencil {
         return Math.abs(pivot) < least ? least : pivot;
     }
 
-    /** Pivots from the left: forward[e] is what elements 0 … e leave at the right edge of e. */
-    private void eliminateForward(State work) {
-        double shift = work.shift;
-        double f;
-        if (work.near[0]) {
-            // Only at delta = 0: the mode ties the first edge to zero.
-            double r = couplingRight(0, work.nearest[0], shift);
-            double pivot = awayFromZero(work.delta[0], 0);
-            f = work.rightRight[0] - r * r / pivot;
-        } else {
-            f = work.rightRight[0];
+    /** λ − σ of the explicit mode of an end element, kept away from zero. */
+    private double endDelta(int e, State work) {
+        double least = natural[e] / element[e].unit * 0x1p-200;
+        double delta = work.delta[e];
+        return Math.abs(delta) < least ? least : delta;
+    }
+
+    /** What the first element leaves at its right edge. */
+    private double firstPivot(State work) {
+        if (!work.near[0]) {
+            return work.rightRight[0];
         }
-        work.forward[0] = f;
-        for (int e = 1; e < count - 1; e++) {
-            double d = f + work.leftLeft[e];
-            if (work.near[e]) {
-                int k = work.nearest[e];
+        double delta = endDelta(0, work);
+        if (delta < 0) {
+            work.below++;
+        }
+        double r = work.nearRight[0];
+        return work.rightRight[0] - r * r / delta;
+    }
+
+    /** What the last element leaves at its left edge. */
+    private double lastPivot(State work) {
+        int e = count - 1;
+        if (!work.near[e]) {
+            return work.leftLeft[e];
+        }
+        double l = work.nearLeft[e];
+        return work.leftLeft[e] - l * l / endDelta(e, work);
+    }
+
+    /** Pivots from the left: forward[e] is what elements 0 … e leave at the right edge of e. Completes the count. */
+    private void eliminateForward(State work) {
+        double f = firstPivot(work);
+        double[] forward = work.forward;
+        double[] leftLeft = work.leftLeft;
+        double[] leftRight = work.leftRight;
+        double[] rightRight = work.rightRight;
+        boolean[] near = work.near;
+        int below = work.below;
+        int last = count - 1;
+        forward[0] = f;
+        for (int e = 1; e < last; e++) {
+            double d = f + leftLeft[e];
+            double s = leftRight[e];
+            if (near[e]) {
                 double delta = work.delta[e];
-                double l = couplingLeft(e, k, shift);
-                double r = couplingRight(e, k, shift);
-                double s = work.leftRight[e];
+                double l = work.nearLeft[e];
+                double r = work.nearRight[e];
                 double det = d * delta - l * l;
                 if (det < 0) {
-                    work.below++;
+                    below++;
                 } else if (d < 0) {
-                    work.below += 2;
+                    below += 2;
                 }
-                det = det == 0 ? l * l * 0x1p-60 + Double.MIN_NORMAL : det;
-                f = work.rightRight[e] - (s * s * delta - 2 * s * l * r + r * r * d) / det;
+                f = rightRight[e] - (s * s * delta - 2 * s * l * r + r * r * d) / safe(det, l);
             } else {
-                d = awayFromZero(d, e);
-                if (d < 0) {
-                    work.below++;
-                }
-                double s = work.leftRight[e];
-                f = work.rightRight[e] - s * s / d;
+                d = d == 0 ? awayFromZero(d, e) : d;
+                below += d < 0 ? 1 : 0;
+                f = rightRight[e] - s * s / d;
             }
-            work.forward[e] = f;
+            forward[e] = f;
         }
-        if (work.near[count - 1]) {
-            int e = count - 1;
-            double l = couplingLeft(e, work.nearest[e], shift);
-            work.leftLeft[e] -= l * l / awayFromZero(work.delta[e], e);
-            work.near[e] = false;
+        if (near[last] && endDelta(last, work) < 0) {
+            below++;
         }
+        if (f + lastPivot(work) < 0) {
+            below++;
+        }
+        work.below = below;
+    }
+
+    private static double safe(double det, double coupling) {
+        return det == 0 ? coupling * coupling * 0x1p-60 + Double.MIN_NORMAL : det;
     }
 
     /** Pivots from the right: backward[e] is what elements e … end leave at the left edge of e. */
     private void eliminateBackward(State work) {
-        double shift = work.shift;
-        double b = work.leftLeft[count - 1];
-        work.backward[count - 1] = b;
+        double b = lastPivot(work);
+        double[] backward = work.backward;
+        double[] leftLeft = work.leftLeft;
+        double[] leftRight = work.leftRight;
+        double[] rightRight = work.rightRight;
+        boolean[] near = work.near;
+        backward[count - 1] = b;
         for (int e = count - 2; e > 0; e--) {
-            double d = b + work.rightRight[e];
-            double s = work.leftRight[e];
-            if (work.near[e]) {
-                int k = work.nearest[e];
+            double d = b + rightRight[e];
+            double s = leftRight[e];
+            if (near[e]) {
                 double delta = work.delta[e];
-                double l = couplingLeft(e, k, shift);
-                double r = couplingRight(e, k, shift);
+                double l = work.nearLeft[e];
+                double r = work.nearRight[e];
                 double det = d * delta - r * r;
-                det = det == 0 ? r * r * 0x1p-60 + Double.MIN_NORMAL : det;
-                b = work.leftLeft[e] - (s * s * delta - 2 * s * l * r + l * l * d) / det;
+                b = leftLeft[e] - (s * s * delta - 2 * s * l * r + l * l * d) / safe(det, r);
             } else {
-                d = awayFromZero(d, e);
-                b = work.leftLeft[e] - s * s / d;
+                b = leftLeft[e] - s * s / (d == 0 ? awayFromZero(d, e) : d);
             }
-            work.backward[e] = b;
+            backward[e] = b;
         }
     }
 
     private void solve(double shift, State work, boolean[] allowed) {
         condense(shift, work);
         eliminateForward(work);
-        double last = work.leftLeft[count - 1] + work.forward[count - 2];
-        if (last < 0) {
-            work.below++;
-        }
         eliminateBackward(work);
         chooseTwist(work, allowed);
         fill(work);
@@ -342,27 +370,23 @@ public final class ScalarChain implements CondensedPencil {
         work.twistVertex = -1;
         work.twistElement = -1;
         for (int v = 0; v < count - 1; v++) {
-            if (allowed != null && !allowed[v]) {
-                continue;
-            }
             double g = work.forward[v] + work.backward[v + 1];
-            double measure = Math.abs(g) / (mRightRight[v] + mLeftLeft[v + 1]);
-            if (measure < best) {
+            double measure = Math.abs(g) * vertexWeight[v];
+            if (measure < best && (allowed == null || allowed[v])) {
                 best = measure;
                 work.twistVertex = v;
                 work.gamma = g;
             }
         }
         for (int e = 0; e < count; e++) {
-            if (allowed != null && !allowed[e]) {
-                continue;
-            }
-            double g = modeGamma(e, work);
-            if (Math.abs(g) < best) {
-                best = Math.abs(g);
-                work.twistVertex = -1;
-                work.twistElement = e;
-                work.gamma = g;
+            if (work.near[e] && (allowed == null || allowed[e])) {
+                double g = modeGamma(e, work);
+                if (Math.abs(g) < best) {
+                    best = Math.abs(g);
+                    work.twistVertex = -1;
+                    work.twistElement = e;
+                    work.gamma = g;
+                }
             }
         }
         if (work.twistVertex < 0 && work.twistElement < 0) {
@@ -371,147 +395,161 @@ public final class ScalarChain implements CondensedPencil {
         }
     }
 
-    /** γ of the nearest mode of an element: λ − σ minus what the rest of the chain takes. */
+    /** γ of the explicit mode of an element: λ − σ minus what the rest of the chain takes. */
     private double modeGamma(int e, State work) {
-        int k = work.nearest[e];
         double delta = work.delta[e];
-        double l = couplingLeft(e, k, work.shift);
-        double r = couplingRight(e, k, work.shift);
-        double ll = work.leftLeft[e];
-        double lr = work.leftRight[e];
-        double rr = work.rightRight[e];
-        if (!work.near[e] && delta != 0) {
-            ll += l * l / delta;
-            lr += l * r / delta;
-            rr += r * r / delta;
-        }
+        double l = work.nearLeft[e];
+        double r = work.nearRight[e];
         if (e == 0) {
-            return delta - r * r / awayFromZero(rr + work.backward[1], 0);
+            return delta - r * r / awayFromZero(work.rightRight[e] + work.backward[1], 0);
         }
-        double da = work.forward[e - 1] + ll;
+        double da = work.forward[e - 1] + work.leftLeft[e];
         if (e == count - 1) {
             return delta - l * l / awayFromZero(da, e);
         }
-        double db = work.backward[e + 1] + rr;
+        double db = work.backward[e + 1] + work.rightRight[e];
+        double lr = work.leftRight[e];
         double det = da * db - lr * lr;
         return delta - (l * l * db - 2 * l * r * lr + r * r * da) / det;
     }
 
     private void fill(State work) {
-        double shift = work.shift;
         double[] y = work.vertex;
-        int explicit = -1;
         int leftFrom;
         int rightFrom;
-        double z = 0;
-        if (work.twistElement >= 0) {
-            int e = work.twistElement;
-            explicit = e;
-            z = 1;
-            int k = work.nearest[e];
-            double delta = work.delta[e];
-            double l = couplingLeft(e, k, shift);
-            double r = couplingRight(e, k, shift);
-            double ll = work.leftLeft[e];
-            double lr = work.leftRight[e];
-            double rr = work.rightRight[e];
-            if (!work.near[e] && delta != 0) {
-                ll += l * l / delta;
-                lr += l * r / delta;
-                rr += r * r / delta;
-            }
-            if (e == 0) {
-                y[0] = -r / awayFromZero(rr + work.backward[1], 0);
-            } else if (e == count - 1) {
-                y[e - 1] = -l / awayFromZero(work.forward[e - 1] + ll, e);
-            } else {
-                double da = work.forward[e - 1] + ll;
-                double db = work.backward[e + 1] + rr;
-                double det = da * db - lr * lr;
-                y[e - 1] = -(l * db - lr * r) / det;
-                y[e] = -(r * da - lr * l) / det;
-            }
-            leftFrom = e - 1;
-            rightFrom = e;
+        int t = work.twistElement;
+        if (t >= 0) {
+            besideMode(t, work);
+            leftFrom = t - 1;
+            rightFrom = t;
         } else {
             y[work.twistVertex] = 1;
             leftFrom = work.twistVertex;
             rightFrom = work.twistVertex;
         }
-        double[] a = work.amplitude;
+        double[] a = work.explicit;
         // To the left: element e ties y[e] (known) to y[e - 1].
         for (int e = leftFrom; e > 0; e--) {
             double d = work.forward[e - 1] + work.leftLeft[e];
+            double s = work.leftRight[e];
             if (work.near[e]) {
-                int k = work.nearest[e];
-                double l = couplingLeft(e, k, shift);
-                double r = couplingRight(e, k, shift);
+                double l = work.nearLeft[e];
+                double r = work.nearRight[e];
                 double delta = work.delta[e];
-                double s = work.leftRight[e];
-                double det = d * delta - l * l;
-                det = det == 0 ? l * l * 0x1p-60 + Double.MIN_NORMAL : det;
+                double det = safe(d * delta - l * l, l);
                 y[e - 1] = -y[e] * (s * delta - l * r) / det;
-                a[k * count + e] = -y[e] * (r * d - l * s) / det;
+                a[e] = -y[e] * (r * d - l * s) / det;
             } else {
-                y[e - 1] = -y[e] * work.leftRight[e] / awayFromZero(d, e);
+                y[e - 1] = -y[e] * s / awayFromZero(d, e);
             }
         }
         for (int e = rightFrom + 1; e < count - 1; e++) {
             double d = work.backward[e + 1] + work.rightRight[e];
+            double s = work.leftRight[e];
             if (work.near[e]) {
-                int k = work.nearest[e];
-                double l = couplingLeft(e, k, shift);
-                double r = couplingRight(e, k, shift);
+                double l = work.nearLeft[e];
+                double r = work.nearRight[e];
                 double delta = work.delta[e];
-                double s = work.leftRight[e];
-                double det = d * delta - r * r;
-                det = det == 0 ? r * r * 0x1p-60 + Double.MIN_NORMAL : det;
+                double det = safe(d * delta - r * r, r);
                 y[e] = -y[e - 1] * (s * delta - l * r) / det;
-                a[k * count + e] = -y[e - 1] * (l * d - r * s) / det;
+                a[e] = -y[e - 1] * (l * d - r * s) / det;
             } else {
-                y[e] = -y[e - 1] * work.leftRight[e] / awayFromZero(d, e);
+                y[e] = -y[e - 1] * s / awayFromZero(d, e);
             }
         }
-        amplitudes(work, explicit, z);
+        int last = count - 1;
+        if (work.near[0] && t != 0) {
+            a[0] = -work.nearRight[0] * y[0] / endDelta(0, work);
+        }
+        if (work.near[last] && t != last) {
+            a[last] = -work.nearLeft[last] * y[last - 1] / endDelta(last, work);
+        }
+        amplitudes(work);
     }
 
-    private void amplitudes(State work, int explicit, double z) {
-        double shift = work.shift;
+    /** The twist's mode is 1; the two edges of its element follow. */
+    private void besideMode(int e, State work) {
         double[] y = work.vertex;
+        work.explicit[e] = 1;
+        double l = work.nearLeft[e];
+        double r = work.nearRight[e];
+        if (e == 0) {
+            y[0] = -r / awayFromZero(work.rightRight[e] + work.backward[1], 0);
+        } else if (e == count - 1) {
+            y[e - 1] = -l / awayFromZero(work.forward[e - 1] + work.leftLeft[e], e);
+        } else {
+            double da = work.forward[e - 1] + work.leftLeft[e];
+            double db = work.backward[e + 1] + work.rightRight[e];
+            double lr = work.leftRight[e];
+            double det = da * db - lr * lr;
+            y[e - 1] = -(l * db - lr * r) / det;
+            y[e] = -(r * da - lr * l) / det;
+        }
+    }
+
+    private void amplitudes(State work) {
+        double shift = work.shift;
         double[] a = work.amplitude;
+        double[] left = work.leftValue;
+        double[] right = work.rightValue;
+        double[] own = work.own;
+        int n = count;
+        left[0] = 0;
+        right[n - 1] = 0;
+        System.arraycopy(work.vertex, 0, left, 1, n - 1);
+        System.arraycopy(work.vertex, 0, right, 0, n - 1);
+        for (int e = 0; e < n; e++) {
+            own[e] = mLeftLeft[e] * left[e] * left[e]
+                    + 2 * mLeftRight[e] * left[e] * right[e]
+                    + mRightRight[e] * right[e] * right[e];
+        }
+        double[] leftAll = work.poleLeftLeft;
+        double[] rightAll = work.poleLeftRight;
+        ChainKernels.spread(left, leftAll, stride, n);
+        ChainKernels.spread(right, rightAll, stride, n);
+        ChainKernels.responses(
+                shift,
+                lambda,
+                alphaLeft,
+                betaLeft,
+                alphaRight,
+                betaRight,
+                leftAll,
+                rightAll,
+                a,
+                work.poleRightRight,
+                n * stride);
+        // What is subtracted is the norm, so the vertices' part goes in with the same sign.
+        for (int e = 0; e < n; e++) {
+            own[e] = -own[e];
+        }
+        ChainKernels.subtractSums(work.poleRightRight, stride, own, n);
         double mass = 0;
-        for (int e = 0; e < count; e++) {
-            double left = e == 0 ? 0 : y[e - 1];
-            double right = e == count - 1 ? 0 : y[e];
-            double own = mLeftLeft[e] * left * left + 2 * mLeftRight[e] * left * right + mRightRight[e] * right * right;
-            int skip = work.near[e] || e == explicit ? work.nearest[e] : -1;
-            for (int k = 0; k < modes; k++) {
-                int at = k * count + e;
-                double value;
-                if (k == skip) {
-                    if (e == explicit) {
-                        a[at] = z;
-                    } else if (e == 0) {
-                        a[at] = -couplingRight(e, k, shift) * right / awayFromZero(work.delta[e], e);
-                    }
-                    value = a[at];
-                } else {
-                    double coupling = (alphaLeft[at] - shift * betaLeft[at]) * left
-                            + (alphaRight[at] - shift * betaRight[at]) * right;
-                    double d = lambda[at] - shift;
-                    value = coupling == 0 ? 0 : -coupling / d;
-                    a[at] = value;
-                }
-                own += value * (value + 2 * (betaLeft[at] * left + betaRight[at] * right));
+        for (int e = 0; e < n; e++) {
+            if (work.near[e]) {
+                a[e * stride + work.nearest[e]] = work.explicit[e];
+                mass += massOn(e, work);
+            } else {
+                mass -= own[e];
             }
-            mass += own;
         }
         work.mass = mass;
     }
 
-    /** Whether a mode is an unknown of its own at the current shift. */
+    private double massOn(int e, State work) {
+        double left = work.leftValue[e];
+        double right = work.rightValue[e];
+        double sum = mLeftLeft[e] * left * left + 2 * mLeftRight[e] * left * right + mRightRight[e] * right * right;
+        for (int k = 0; k < modes; k++) {
+            int at = e * stride + k;
+            double value = work.amplitude[at];
+            sum += value * (value + 2 * (betaLeft[at] * left + betaRight[at] * right));
+        }
+        return sum;
+    }
+
     private boolean explicit(int e, int k, State work) {
-        return k == work.nearest[e] && (work.near[e] || e == work.twistElement);
+        return work.near[e] && k == work.nearest[e];
     }
 
     private void respond(double[] load, double[] modeLoad, State work) {
@@ -522,8 +560,10 @@ public final class ScalarChain implements CondensedPencil {
         int inner = count - 1;
         for (int e = 0; e < count; e++) {
             for (int k = 0; k < modes; k++) {
-                if (!explicit(e, k, work)) {
-                    double scaled = modeLoad[k * count + e] / (lambda[k * count + e] - shift);
+                boolean end = e != t && (e == 0 || e == inner);
+                if (end || !explicit(e, k, work)) {
+                    double delta = end && explicit(e, k, work) ? endDelta(e, work) : lambda[e * stride + k] - shift;
+                    double scaled = modeLoad[e * stride + k] / delta;
                     if (e > 0) {
                         load[e - 1] -= couplingLeft(e, k, shift) * scaled;
                     }
@@ -557,10 +597,14 @@ public final class ScalarChain implements CondensedPencil {
             double left = e == 0 ? 0 : y[e - 1];
             double right = e == inner ? 0 : y[e];
             for (int k = 0; k < modes; k++) {
-                int at = k * count + e;
+                int at = e * stride + k;
                 if (explicit(e, k, work)) {
                     if (e == t) {
                         a[at] = 0;
+                    } else if (e == 0) {
+                        a[at] = (modeLoad[at] - couplingRight(0, k, shift) * right) / endDelta(0, work);
+                    } else if (e == inner) {
+                        a[at] = (modeLoad[at] - couplingLeft(e, k, shift) * left) / endDelta(e, work);
                     }
                 } else {
                     double coupling = couplingLeft(e, k, shift) * left + couplingRight(e, k, shift) * right;
@@ -582,7 +626,7 @@ public final class ScalarChain implements CondensedPencil {
         double other = rightward ? couplingRight(e, k, work.shift) : couplingLeft(e, k, work.shift);
         double delta = work.delta[e];
         double det = d * delta - own * own;
-        double b = modeLoad[k * count + e];
+        double b = modeLoad[e * stride + k];
         double p = (load[from] * delta - own * b) / det;
         double q = (d * b - own * load[from]) / det;
         load[to] -= s * p + other * q;
@@ -602,24 +646,17 @@ public final class ScalarChain implements CondensedPencil {
         double delta = work.delta[e];
         double det = d * delta - own * own;
         double b1 = load[unknown] - s * y[known];
-        double b2 = modeLoad[k * count + e] - other * y[known];
+        double b2 = modeLoad[e * stride + k] - other * y[known];
         y[unknown] = (b1 * delta - own * b2) / det;
-        work.amplitude[k * count + e] = (d * b2 - own * b1) / det;
+        work.amplitude[e * stride + k] = (d * b2 - own * b1) / det;
     }
 
     /** The twist's mode is zero; the two edges of its element remain. */
     private void betweenEdgesOf(int e, double[] load, State work) {
         double[] y = work.vertex;
-        double l = couplingLeft(e, work.nearest[e], work.shift);
-        double r = couplingRight(e, work.nearest[e], work.shift);
         double ll = work.leftLeft[e];
         double lr = work.leftRight[e];
         double rr = work.rightRight[e];
-        if (!work.near[e] && work.delta[e] != 0) {
-            ll += l * l / work.delta[e];
-            lr += l * r / work.delta[e];
-            rr += r * r / work.delta[e];
-        }
         if (e == 0) {
             y[0] = load[0] / awayFromZero(rr + work.backward[1], e);
         } else if (e == count - 1) {

@@ -20,12 +20,26 @@ final class CheckGrid {
 
     private final double[][][] assembly;
     private final double[][] rounding;
+    private final boolean[] definite;
 
     private CheckGrid(int channels, double[][][] check, double[][][] assembly, double[][] rounding) {
         this.channels = channels;
         this.check = check;
         this.assembly = assembly;
         this.rounding = rounding;
+        definite = new boolean[check.length];
+        for (int e = 0; e < check.length; e++) {
+            definite[e] = channels == 1 && hasOneSign(check[e][0]);
+        }
+    }
+
+    private static boolean hasOneSign(double[] w) {
+        for (double x : w) {
+            if (x > 0 != w[0] > 0) {
+                return false;
+            }
+        }
+        return true;
     }
 
     static CheckGrid of(ChannelPotentials potentials, List<Leaf> leaves) {
@@ -100,6 +114,11 @@ final class CheckGrid {
     /** W at the assembly nodes. */
     double[] assembly(int e, int c, int d) {
         return assembly[e][c * channels + d];
+    }
+
+    /** Whether W has one sign on an element, in a single channel. */
+    boolean definite(int e) {
+        return definite[e];
     }
 
     /** Bound of V's own rounding at the check nodes. */

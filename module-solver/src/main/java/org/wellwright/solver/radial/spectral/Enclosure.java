@@ -37,14 +37,15 @@ final class Enclosure {
     static Enclosure of(List<Solution> levels, MeshData mesh, double above) {
         Enclosure result = new Enclosure(levels, mesh, above);
         int n = levels.size();
+        for (int i = 0; i < n; i++) {
+            result.single(i);
+        }
         for (int i = 0; i < n; ) {
             int end = i + 1;
             while (end < n && end - i < LARGEST_CLUSTER && result.tooNear(end - 1, end)) {
                 end++;
             }
-            if (end == i + 1) {
-                result.single(i);
-            } else {
+            if (end > i + 1) {
                 result.together(i, end);
             }
             i = end;
@@ -98,11 +99,9 @@ final class Enclosure {
         List<Trial> trials = new ArrayList<>();
         double rounding = 0;
         double reference = 0;
-        double residual = 0;
         for (int i = from; i < to; i++) {
             trials.add(smooth(quotient, levels.get(i).trial()));
             rounding = Math.max(rounding, levels.get(i).rounding());
-            residual = Math.max(residual, levels.get(i).residual());
             reference += levels.get(i).smoothEnergy() / (to - from);
         }
         Cluster cluster = ClusterMatrices.of(mesh.grid(), trials, reference);
@@ -111,13 +110,17 @@ final class Enclosure {
         double[] high = from == 0 ? cluster.ritz() : cluster.bounds(ceilingOf(from - 1));
         for (int i = from; i < to; i++) {
             double rho = levels.get(i).smoothEnergy();
-            double fallback = residual + rounding + Math.abs(rho - reference);
-            lower[i] = (low[i - from] <= rho + rounding ? low[i - from] : rho - fallback) - rounding;
-            upper[i] = (high[i - from] >= rho - rounding ? high[i - from] : rho + fallback) + rounding;
-            gap[i] = next - rho;
-            if (from > 0) {
-                gap[i] = Math.min(gap[i], rho - ceilingOf(from - 1));
+            // Both kinds of bounds hold, so the tighter of each end does.
+            double below = low[i - from] - rounding;
+            double over = high[i - from] + rounding;
+            if (below > lower[i] && below <= rho + rounding) {
+                lower[i] = below;
             }
+            if (over < upper[i] && over >= rho - rounding) {
+                upper[i] = over;
+            }
+            double room = from > 0 ? Math.min(next - rho, rho - ceilingOf(from - 1)) : next - rho;
+            gap[i] = Math.max(gap[i], room);
         }
     }
 

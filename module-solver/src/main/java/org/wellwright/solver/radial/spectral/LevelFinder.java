@@ -19,6 +19,8 @@ final class LevelFinder {
     private final int wanted;
     private final double[] low;
     private final double[] high;
+    private final int[] countAtLow;
+    private final int[] countAtHigh;
     private final double floor;
     private final double top;
     private int counts;
@@ -38,6 +40,9 @@ final class LevelFinder {
         work = pencil.work();
         low = new double[wanted];
         high = new double[wanted];
+        countAtLow = new int[wanted];
+        countAtHigh = new int[wanted];
+        Arrays.fill(countAtHigh, Integer.MAX_VALUE);
         Arrays.fill(low, floor);
         Arrays.fill(high, top);
     }
@@ -49,9 +54,13 @@ final class LevelFinder {
     private void note(double shift, int below) {
         for (int i = 0; i < wanted; i++) {
             if (i < below) {
-                high[i] = Math.min(high[i], shift);
-            } else {
-                low[i] = Math.max(low[i], shift);
+                if (shift < high[i]) {
+                    high[i] = shift;
+                    countAtHigh[i] = below;
+                }
+            } else if (shift > low[i]) {
+                low[i] = shift;
+                countAtLow[i] = below;
             }
         }
     }
@@ -75,15 +84,26 @@ final class LevelFinder {
         return found;
     }
 
-    /** Extrapolates the levels found so far as a polynomial in their index, or halves the bracket. */
+    /**
+     * The next level from the spacings s of those before: ln s as a polynomial in the index, exact for powers of the index
+     * in the limit; or half the bracket.
+     */
     private double guess(int i, List<Trial> found) {
         double a = low[i];
         double b = high[i];
         double value = Double.NaN;
-        if (i >= 6) {
-            value = 4 * (shift(found, 1) + shift(found, 3)) - 6 * shift(found, 2) - shift(found, 4);
-        } else if (i >= 3) {
-            value = 3 * (shift(found, 1) - shift(found, 2)) + shift(found, 3);
+        if (i >= 4) {
+            double s1 = shift(found, 1) - shift(found, 2);
+            double s2 = shift(found, 2) - shift(found, 3);
+            double s3 = shift(found, 3) - shift(found, 4);
+            double next = s1 * s1 * s1 * s3 / (s2 * s2 * s2);
+            if (i >= 6) {
+                double s4 = shift(found, 4) - shift(found, 5);
+                double ratio = s1 * s3 / (s2 * s2);
+                next = s1 * s1 * s1 * s1 * s3 * s3 * s3 * s3 / (s2 * s2 * s2 * s2 * s2 * s2 * s4);
+                next = ratio > 0.5 && ratio < 2 ? next : s1;
+            }
+            value = shift(found, 1) + next;
         }
         return value > a && value < b ? value : 0.5 * (a + b);
     }
@@ -95,26 +115,28 @@ final class LevelFinder {
     private Trial refine(int i, List<Trial> found, double[] edges) {
         double shift = guess(i, found);
         double before = i > 0 ? found.get(i - 1).shift() : floor;
-        double lastMove = Double.POSITIVE_INFINITY;
+        double lastMove = Double.NaN;
         for (int step = 0; step < 300; step++) {
-            counts++;
-            work.solve(shift, null);
-            note(shift, work.below());
-            double next = shift + work.correction();
-            double move = Math.abs(work.correction());
+            solve(shift);
+            double correction = work.correction();
+            double move = Math.abs(correction);
+            double next = shift + correction;
             double noise = blur(shift);
             boolean inside = next >= low[i] - noise && next <= high[i] + noise;
             double gap = Math.min(next - before, top - next);
             if (inside && move <= Math.max(1e-7 * gap, noise)) {
-                counts++;
-                work.solve(next, null);
-                double settled = next + work.correction();
-                if (Math.abs(work.correction()) <= 100 * noise && confirmed(i, settled)) {
-                    Trial trial = Trial.of(pencil.elements(), edges, work, settled);
-                    if (i == 0 || settled - before > 1e5 * noise || independent(trial, found)) {
+                // The vector at this shift is good to move/gap; one more makes it good to rounding.
+                if (move > Math.max(1e-13 * gap, noise)) {
+                    solve(next);
+                    next += work.correction();
+                    inside = Math.abs(work.correction()) <= Math.max(1e-12 * gap, 100 * noise);
+                }
+                if (inside && confirmed(i, next, before)) {
+                    Trial trial = Trial.of(pencil.elements(), edges, work, next);
+                    if (i == 0 || next - before > 1e5 * noise || independent(trial, found)) {
                         return trial;
                     }
-                    return cluster(i, settled, found, edges);
+                    return cluster(i, next, found, edges);
                 }
                 inside = false;
             }
@@ -122,11 +144,37 @@ final class LevelFinder {
             if (width <= noise) {
                 return cluster(i, 0.5 * (low[i] + high[i]), found, edges);
             }
-            boolean shrinking = move < 0.5 * lastMove;
-            lastMove = inside && shrinking ? move : Double.POSITIVE_INFINITY;
-            shift = inside && shrinking ? Math.min(Math.max(next, low[i]), high[i]) : 0.5 * (low[i] + high[i]);
+            boolean shrinking = !(move >= 0.5 * Math.abs(lastMove));
+            if (inside && shrinking) {
+                shift = Math.min(Math.max(accelerated(shift, correction, lastMove), low[i]), high[i]);
+                lastMove = correction;
+            } else {
+                shift = 0.5 * (low[i] + high[i]);
+                lastMove = Double.NaN;
+            }
         }
         return cluster(i, 0.5 * (low[i] + high[i]), found, edges);
+    }
+
+    /**
+     * Newton's step with its error removed: corrections θ = d + c d² at distances d from the level give c after two steps,
+     * so the third lands with a cubic error.
+     */
+    private static double accelerated(double shift, double correction, double lastMove) {
+        double next = shift + correction;
+        if (Double.isNaN(lastMove) || Math.abs(correction) > 0.2 * Math.abs(lastMove)) {
+            return next;
+        }
+        double distance = lastMove + correction;
+        double curvature = -correction / (distance * distance);
+        double change = -curvature * correction * correction;
+        return Math.abs(change) < 0.1 * Math.abs(correction) ? next + change : next;
+    }
+
+    private void solve(double shift) {
+        counts++;
+        work.solve(shift, null);
+        note(shift, work.below());
     }
 
     /** How far counts may be off by rounding. */
@@ -134,17 +182,17 @@ final class LevelFinder {
         return 0x1p-50 * Math.max(Math.abs(energy), 0.1 * Math.abs(top - floor));
     }
 
-    /** Whether level i lies where it was found: at most i levels below, at least i + 1 above. */
-    private boolean confirmed(int i, double energy) {
+    /**
+     * Whether level i lies where it was found: an energy below it with exactly i levels under it and one above with i + 1,
+     * both beyond the blur of counts; or, where neighbours are nearer than that, at most i below and at least i + 1 above.
+     */
+    private boolean confirmed(int i, double energy, double before) {
         double offset = 16 * blur(energy);
-        if (low[i] < energy - offset) {
-            count(energy - offset);
-        }
-        if (high[i] > energy + offset) {
-            count(energy + offset);
-        }
-        // Never below the last count that showed rounding.
-        return low[i] >= energy - offset && high[i] <= energy + offset;
+        double room = Math.max(offset, 0.25 * Math.min(energy - before, top - energy));
+        boolean below = countAtLow[i] == i && low[i] < energy - offset || count(energy - room) == i;
+        boolean above =
+                below && (countAtHigh[i] == i + 1 && high[i] > energy + offset || count(energy + room) == i + 1);
+        return above || count(energy - offset) <= i && count(energy + offset) > i;
     }
 
     private boolean independent(Trial trial, List<Trial> found) {

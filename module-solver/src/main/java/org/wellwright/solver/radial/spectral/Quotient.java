@@ -3,14 +3,18 @@ package org.wellwright.solver.radial.spectral;
 import java.util.Arrays;
 import org.wellwright.solver.numerics.Element;
 import org.wellwright.solver.numerics.ElementBasis;
+import org.wellwright.solver.numerics.ElementKernels;
 
 /**
- * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that
- * rounding is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
+ * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that rounding
+ * is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
  *
  * <p>One object is used for many levels of one mesh; results are read before the next call.
  */
 final class Quotient {
+    /** Bubbles beyond the trial space that take part in estimates and in smoothing. */
+    private static final int EXTRA = 4;
+
     private final Element[] elements;
     private final double[] edges;
     private final CheckGrid grid;
@@ -19,33 +23,37 @@ final class Quotient {
     private final int channels;
     private final int functions;
     private final int bubbles;
-    private final double[][] value;
-    private final double[][] second;
+    private final int nodes;
+    private final double[][][] value;
+    private final double[] force;
+    private final double[][] product;
+    private final double[] scratch;
+    private final double[] norms;
     private final double[] enriched;
     private final double[] share;
     private final double[] jump;
+    private final double[] residualShare;
+    private final double[] quadratureShare;
+    private final Sum norm = new Sum();
+    private final Sum energySum = new Sum();
+    private double squaredNorm;
 
     /** Rayleigh quotient of the trial function. */
     double energy;
     /** ⟨T⟩ + ⟨|W|⟩. */
     double scale;
-    /** ⟨T⟩ without the centrifugal part, except at the origin. */
-    double kinetic;
     /** Σ over bubbles beyond the space of residual²/(A − EM): how far the energy is above the exact one. */
     double truncation;
-    /** Difference of the two Gauss rules. */
-    double quadrature;
     /** Effect of the cut at the ends. */
     double cut;
+    /** Difference of the two Gauss rules. */
+    double quadrature;
     /** ⟨rounding bound of V⟩. */
     double rounding;
     /** Rayleigh quotient of the smoothed trial function. */
     double smoothEnergy;
     /** ‖Hu − ρu‖/‖u‖ of the smoothed trial function. */
     double residual;
-
-    private final double[] residualShare;
-    private final double[] quadratureShare;
 
     Quotient(Element[] elements, double[] edges, CheckGrid grid, boolean innerWall, boolean outerWall) {
         this.elements = elements;
@@ -54,11 +62,18 @@ final class Quotient {
         this.innerWall = innerWall;
         this.outerWall = outerWall;
         channels = elements[0].channels;
-        bubbles = elements[0].basis[0].bubbles;
+        ElementBasis basis = elements[0].basis[0];
+        bubbles = basis.bubbles;
         functions = bubbles + ElementBasis.EXTRA;
-        int nodes = elements[0].basis[0].check.size;
-        value = new double[channels][nodes];
-        second = new double[channels][nodes];
+        nodes = basis.check.size;
+        value = new double[elements.length][channels][nodes];
+        force = new double[nodes];
+        product = new double[channels][nodes];
+        scratch = new double[2 * functions + 16];
+        norms = new double[functions];
+        for (int k = 0; k < functions; k++) {
+            norms[k] = 1 / Math.sqrt(2 * (2 * k + 3));
+        }
         enriched = new double[elements.length * channels * functions];
         share = new double[elements.length];
         jump = new double[(elements.length + 1) * channels];
@@ -87,71 +102,33 @@ final class Quotient {
         }
     }
 
-    private double squaredNorm;
-    private final Sum norm = new Sum();
-    private final Sum energySum = new Sum();
-    private final Sum absolute = new Sum();
-
-    /** Energy, scale and error estimate of a trial function. */
+    /** Energy, scale and truncation error of a trial function. */
     void evaluate(Trial trial) {
+        double[] coefficient = trial.coefficients();
         norm.clear();
         energySum.clear();
-        absolute.clear();
-        double kineticSum = 0;
-        double roundingSum = 0;
-        double difference = 0;
+        double absolute = 0;
         for (int e = 0; e < elements.length; e++) {
             Element element = elements[e];
-            double squares = kineticOn(trial, trial.coefficients(), e);
-            kineticSum += squares;
-            values(trial, trial.coefficients(), e, bubbles, true);
-            double mass = 0;
-            double energyOn = 0;
-            double absoluteOn = 0;
-            double[] weight = element.basis[0].check.weight;
-            double[] bound = grid.rounding(e);
-            double roundingOn = 0;
+            double squares = kineticOn(trial, coefficient, e, bubbles);
             for (int c = 0; c < channels; c++) {
-                double[] u = value[c];
-                for (int d = 0; d < channels; d++) {
-                    double[] w = grid.check(e, c, d);
-                    if (w == null) {
-                        continue;
-                    }
-                    double[] v = value[d];
-                    for (int g = 0; g < u.length; g++) {
-                        double x = weight[g] * u[g] * v[g];
-                        energyOn += x * w[g];
-                        absoluteOn += Math.abs(x * w[g]);
-                    }
-                }
-                for (int g = 0; g < u.length; g++) {
-                    double x = weight[g] * u[g] * u[g];
-                    mass += x;
-                    roundingOn += x * bound[g];
-                }
+                values(trial, coefficient, e, c, bubbles, value[e][c]);
             }
-            norm.add(element.unit * mass);
+            double potential = element.unit * potentialOn(e, value[e]);
+            norm.add(element.unit * massOn(trial, coefficient, e, bubbles, value[e]));
             energySum.add(squares);
-            energySum.add(element.unit * energyOn);
-            absolute.add(squares + element.unit * absoluteOn);
-            roundingSum += element.unit * roundingOn;
-            double other = quadratureOn(trial, e);
-            quadratureShare[e] = element.unit * Math.abs(other - energyOn);
-            difference += element.unit * (other - energyOn);
+            energySum.add(potential);
+            absolute += squares + (grid.definite(e) ? Math.abs(potential) : element.unit * absoluteOn(e, value[e]));
         }
-        double n = norm.value();
-        squaredNorm = n;
-        energy = energySum.value() / n;
-        scale = Math.max(absolute.value() / n, Math.abs(energy));
-        kinetic = kineticSum / n;
-        rounding = roundingSum / n;
-        quadrature = Math.abs(difference) / n;
+        squaredNorm = norm.value();
+        energy = energySum.value() / squaredNorm;
+        scale = Math.max(absolute / squaredNorm, Math.abs(energy));
+        truncation = 0;
         for (int e = 0; e < elements.length; e++) {
-            quadratureShare[e] /= n;
+            share[e] = truncationOn(trial, e) / squaredNorm;
+            truncation += share[e];
         }
-        enrich(trial, n);
-        cut = cutError(trial) / n;
+        cut = cutError(trial) / squaredNorm;
     }
 
     /** ∫u² of the last function of {@link #evaluate}. */
@@ -159,15 +136,12 @@ final class Quotient {
         return squaredNorm;
     }
 
-    private double kineticOn(Trial trial, double[] coefficient, int e) {
+    private double kineticOn(Trial trial, double[] coefficient, int e, int count) {
         Element element = elements[e];
         double sum = 0;
         for (int c = 0; c < channels; c++) {
             int at = (e * channels + c) * functions;
-            double squares = 0;
-            for (int k = 0; k < functions; k++) {
-                squares += coefficient[at + k] * coefficient[at + k];
-            }
+            double squares = ElementKernels.sumOfSquares(coefficient, at, count);
             double right = trial.vertex(e + 1, c);
             if (element.basis[c].atOrigin()) {
                 squares += element.basis[c].vertexStiffness * right * right;
@@ -177,105 +151,106 @@ final class Quotient {
             }
             sum += squares;
         }
-        return sum * element.kinetic / element.unit;
+        return sum * (element.kinetic / element.unit);
     }
 
-    private void values(Trial trial, double[] coefficient, int e, int count, boolean check) {
+    private void values(Trial trial, double[] coefficient, int e, int c, int count, double[] into) {
+        ElementKernels.values(
+                elements[e].basis[c].check,
+                trial.vertex(e, c),
+                trial.vertex(e + 1, c),
+                coefficient,
+                (e * channels + c) * functions,
+                count,
+                scratch,
+                into);
+    }
+
+    private double massOn(Trial trial, double[] coefficient, int e, int count, double[][] u) {
+        double sum = 0;
         for (int c = 0; c < channels; c++) {
             ElementBasis basis = elements[e].basis[c];
-            fill(trial, coefficient, e, c, count, check ? basis.check : basis.assembly, value[c]);
+            sum += basis.atOrigin()
+                    ? ElementKernels.squareSum(basis.check.weight, u[c], nodes)
+                    : ElementKernels.legendreSquare(
+                            trial.vertex(e, c),
+                            trial.vertex(e + 1, c),
+                            coefficient,
+                            (e * channels + c) * functions,
+                            count,
+                            norms);
         }
+        return sum;
     }
 
-    private void fill(
-            Trial trial, double[] coefficient, int e, int c, int count, ElementBasis.Table table, double[] into) {
-        double left = trial.vertex(e, c);
-        double right = trial.vertex(e + 1, c);
-        int n = table.size;
-        double[] l = table.left;
-        double[] r = table.right;
-        for (int g = 0; g < n; g++) {
-            into[g] = left * l[g] + right * r[g];
-        }
-        int at = (e * channels + c) * functions;
-        for (int k = 0; k < count; k++) {
-            double a = coefficient[at + k];
-            double[] row = table.bubble[k];
-            for (int g = 0; g < n; g++) {
-                into[g] += a * row[g];
-            }
-        }
-    }
-
-    /** ∫ W u² over the element by the first rule, in units of L. */
-    private double quadratureOn(Trial trial, int e) {
-        Element element = elements[e];
-        int n = element.basis[0].assembly.size;
-        double[] weight = element.basis[0].assembly.weight;
-        // The first rule has fewer nodes, so its values fit into the second arrays.
-        for (int c = 0; c < channels; c++) {
-            fill(trial, trial.coefficients(), e, c, bubbles, element.basis[c].assembly, second[c]);
-        }
+    /** ∫ Σ W u u by the check rule, in units of L. */
+    private double potentialOn(int e, double[][] u) {
+        double[] weight = elements[e].basis[0].check.weight;
         double sum = 0;
         for (int c = 0; c < channels; c++) {
             for (int d = 0; d < channels; d++) {
-                double[] w = grid.assembly(e, c, d);
+                double[] w = grid.check(e, c, d);
                 if (w != null) {
-                    for (int g = 0; g < n; g++) {
-                        sum += weight[g] * second[c][g] * second[d][g] * w[g];
-                    }
+                    sum += ElementKernels.weightedSum(weight, w, u[c], u[d], nodes);
                 }
             }
         }
         return sum;
     }
 
-    /** Coefficients of the bubbles beyond the space by one Jacobi step, and the error they account for. */
-    private void enrich(Trial trial, double n) {
-        double[] source = trial.coefficients();
-        System.arraycopy(source, 0, enriched, 0, source.length);
-        int modes = elements[0].modes;
-        int stride = modes + 2 * channels + 1;
+    private double absoluteOn(int e, double[][] u) {
+        double[] weight = elements[e].basis[0].check.weight;
         double sum = 0;
-        for (int e = 0; e < elements.length; e++) {
-            Element element = elements[e];
-            values(trial, source, e, bubbles, true);
-            double[] weight = element.basis[0].check.weight;
-            double shareOn = 0;
-            for (int c = 0; c < channels; c++) {
-                double[] force = second[c];
-                for (int g = 0; g < force.length; g++) {
-                    force[g] = -energy * value[c][g];
-                }
-                for (int d = 0; d < channels; d++) {
-                    double[] w = grid.check(e, c, d);
-                    if (w != null) {
-                        for (int g = 0; g < force.length; g++) {
-                            force[g] += w[g] * value[d][g];
-                        }
-                    }
-                }
-                for (int g = 0; g < force.length; g++) {
-                    force[g] *= weight[g];
-                }
-                for (int x = 0; x < ElementBasis.EXTRA; x++) {
-                    double[] bubble = element.basis[c].check.bubble[bubbles + x];
-                    double r = 0;
-                    for (int g = 0; g < force.length; g++) {
-                        r += force[g] * bubble[g];
-                    }
-                    r *= element.unit;
-                    int at = (x * channels + c) * stride + modes + 2 * channels;
-                    double own = element.extraA[at] - energy * element.extraM[at];
-                    own = own > 0 ? own : element.kinetic / element.unit;
-                    enriched[(e * channels + c) * functions + bubbles + x] -= r / own;
-                    shareOn += r * r / own;
+        for (int c = 0; c < channels; c++) {
+            sum += ElementKernels.absoluteSum(weight, grid.check(e, c, c), u[c], nodes);
+        }
+        return sum;
+    }
+
+    /** (W − E)u of one channel at the check nodes into {@code force}. */
+    private void force(int e, int c, double[][] u) {
+        residualForce(grid.check(e, c, c), u[c], energy, force, nodes);
+        for (int d = 0; d < channels; d++) {
+            double[] w = d == c ? null : grid.check(e, c, d);
+            if (w != null) {
+                for (int g = 0; g < nodes; g++) {
+                    force[g] += w[g] * u[d][g];
                 }
             }
-            share[e] = shareOn / n;
-            sum += shareOn;
         }
-        truncation = sum / n;
+    }
+
+    private static void residualForce(double[] w, double[] u, double energy, double[] into, int n) {
+        for (int g = 0; g < n; g++) {
+            into[g] = (w[g] - energy) * u[g];
+        }
+    }
+
+    /** Coefficients of the bubbles beyond the space by one Jacobi step, and the error that they account for. */
+    private double truncationOn(Trial trial, int e) {
+        Element element = elements[e];
+        double sum = 0;
+        for (int c = 0; c < channels; c++) {
+            ElementBasis.Table table = element.basis[c].check;
+            force(e, c, value[e]);
+            multiply(force, table.weight, nodes);
+            int at = (e * channels + c) * functions;
+            System.arraycopy(trial.coefficients(), at, enriched, at, functions);
+            for (int x = 0; x < EXTRA; x++) {
+                double r = element.unit * ElementKernels.product(force, table.bubble[bubbles + x], nodes);
+                double own = element.ownA[x * channels + c] - energy * element.ownM[x * channels + c];
+                own = own > 0 ? own : element.kinetic / element.unit;
+                enriched[at + bubbles + x] -= r / own;
+                sum += r * r / own;
+            }
+        }
+        return sum;
+    }
+
+    private static void multiply(double[] x, double[] by, int n) {
+        for (int g = 0; g < n; g++) {
+            x[g] *= by[g];
+        }
     }
 
     /** What each element contributed to the errors of the last function. */
@@ -288,7 +263,7 @@ final class Quotient {
         double right = trial.vertex(e + 1, c);
         double slope = basis.atOrigin() ? basis.exponent * right : 0.5 * (right - trial.vertex(e, c));
         int at = (e * channels + c) * functions;
-        for (int k = 0; k < functions; k++) {
+        for (int k = 0; k < bubbles + EXTRA; k++) {
             slope += coefficient[at + k] * basis.slopeRight[k];
         }
         return slope / elements[e].unit;
@@ -298,7 +273,7 @@ final class Quotient {
         ElementBasis basis = elements[e].basis[c];
         double slope = 0.5 * (trial.vertex(e + 1, c) - trial.vertex(e, c));
         int at = (e * channels + c) * functions;
-        for (int k = 0; k < functions; k++) {
+        for (int k = 0; k < bubbles + EXTRA; k++) {
             slope += coefficient[at + k] * basis.slopeLeft[k];
         }
         return slope / elements[e].unit;
@@ -311,8 +286,7 @@ final class Quotient {
         for (int c = 0; c < channels; c++) {
             if (!outerWall) {
                 double slope = slopeRight(trial, trial.coefficients(), last, c);
-                double[] w = grid.check(last, c, c);
-                sum += cutAt(slope, w[w.length - 1], last);
+                sum += cutAt(slope, grid.check(last, c, c)[nodes - 1], last);
             }
             if (!innerWall && !elements[0].basis[c].atOrigin()) {
                 double slope = slopeLeft(trial, trial.coefficients(), 0, c);
@@ -330,57 +304,35 @@ final class Quotient {
 
     /**
      * Makes the trial function C¹ with zero slope at cut ends, and computes its Rayleigh quotient and the norm of its
-     * residual, from which two-sided bounds follow. After {@link #evaluate} of the same function.
+     * residual, from which two-sided bounds follow; with them what quadrature and V's own rounding may do. After
+     * {@link #evaluate} of the same function.
      */
     void smooth(Trial trial) {
+        quadratureAndRounding(trial);
         mendSlopes(trial);
+        int count = bubbles + EXTRA;
         norm.clear();
         energySum.clear();
         double total = 0;
-        Arrays.fill(residualShare, 0);
         for (int e = 0; e < elements.length; e++) {
             Element element = elements[e];
-            energySum.add(kineticOn(trial, enriched, e));
-            values(trial, enriched, e, functions, true);
-            double[] weight = element.basis[0].check.weight;
-            double mass = 0;
-            double energyOn = 0;
+            energySum.add(kineticOn(trial, enriched, e, count));
             for (int c = 0; c < channels; c++) {
-                double[] bend = second[c];
-                Arrays.fill(bend, 0);
-                int at = (e * channels + c) * functions;
-                double[][] table = element.basis[c].check.second;
-                for (int k = 0; k < functions; k++) {
-                    double a = enriched[at + k];
-                    double[] row = table[k];
-                    for (int g = 0; g < bend.length; g++) {
-                        bend[g] += a * row[g];
-                    }
-                }
-                double factor = -element.kinetic / (element.unit * element.unit);
-                double[] u = value[c];
-                for (int g = 0; g < bend.length; g++) {
-                    bend[g] = bend[g] * factor - energy * u[g];
-                }
-                for (int d = 0; d < channels; d++) {
-                    double[] w = grid.check(e, c, d);
-                    if (w != null) {
-                        double[] v = value[d];
-                        for (int g = 0; g < bend.length; g++) {
-                            bend[g] += w[g] * v[g];
-                            energyOn += weight[g] * u[g] * w[g] * v[g];
-                        }
-                    }
-                }
-                double squares = 0;
-                for (int g = 0; g < bend.length; g++) {
-                    squares += weight[g] * bend[g] * bend[g];
-                    mass += weight[g] * u[g] * u[g];
-                }
-                residualShare[e] += squares * element.unit;
+                values(trial, enriched, e, c, count, value[e][c]);
             }
-            norm.add(element.unit * mass);
-            energySum.add(element.unit * energyOn);
+            norm.add(element.unit * massOn(trial, enriched, e, count, value[e]));
+            energySum.add(element.unit * potentialOn(e, value[e]));
+            double squares = 0;
+            double factor = -element.kinetic / (element.unit * element.unit);
+            for (int c = 0; c < channels; c++) {
+                ElementBasis.Table table = element.basis[c].check;
+                double[] bend = product[c];
+                ElementKernels.second(table, enriched, (e * channels + c) * functions, count, scratch, bend);
+                force(e, c, value[e]);
+                addMultiple(factor, bend, force, nodes);
+                squares += ElementKernels.squareSum(table.weight, force, nodes);
+            }
+            residualShare[e] = squares * element.unit;
             total += residualShare[e];
         }
         double n = norm.value();
@@ -390,6 +342,59 @@ final class Quotient {
         }
         double shift = energy - smoothEnergy;
         residual = Math.sqrt(Math.max(total / n - shift * shift, 0));
+    }
+
+    private static void addMultiple(double a, double[] x, double[] into, int n) {
+        for (int g = 0; g < n; g++) {
+            into[g] += a * x[g];
+        }
+    }
+
+    private void quadratureAndRounding(Trial trial) {
+        double difference = 0;
+        double roundingSum = 0;
+        for (int e = 0; e < elements.length; e++) {
+            Element element = elements[e];
+            double checked = potentialOn(e, value[e]);
+            double[] bound = grid.rounding(e);
+            for (int c = 0; c < channels; c++) {
+                roundingSum += element.unit
+                        * ElementKernels.weightedSum(
+                                element.basis[c].check.weight, bound, value[e][c], value[e][c], nodes);
+            }
+            double other = otherRule(trial, e);
+            quadratureShare[e] = element.unit * Math.abs(other - checked) / squaredNorm;
+            difference += element.unit * (other - checked);
+        }
+        rounding = roundingSum / squaredNorm;
+        quadrature = Math.abs(difference) / squaredNorm;
+    }
+
+    /** ∫ W u² over an element by the first rule, in units of L. */
+    private double otherRule(Trial trial, int e) {
+        Element element = elements[e];
+        for (int c = 0; c < channels; c++) {
+            ElementKernels.values(
+                    element.basis[c].assembly,
+                    trial.vertex(e, c),
+                    trial.vertex(e + 1, c),
+                    trial.coefficients(),
+                    (e * channels + c) * functions,
+                    bubbles,
+                    scratch,
+                    product[c]);
+        }
+        double sum = 0;
+        ElementBasis.Table table = element.basis[0].assembly;
+        for (int c = 0; c < channels; c++) {
+            for (int d = 0; d < channels; d++) {
+                double[] w = grid.assembly(e, c, d);
+                if (w != null) {
+                    sum += ElementKernels.weightedSum(table.weight, w, product[c], product[d], table.size);
+                }
+            }
+        }
+        return sum;
     }
 
     private void mendSlopes(Trial trial) {
@@ -411,9 +416,9 @@ final class Quotient {
         }
         for (int e = 0; e <= last; e++) {
             double unit = elements[e].unit;
+            double before = e == 0 ? 0 : elements[e - 1].unit;
+            double after = e == last ? 0 : elements[e + 1].unit;
             for (int c = 0; c < channels; c++) {
-                double before = e == 0 ? 0 : elements[e - 1].unit;
-                double after = e == last ? 0 : elements[e + 1].unit;
                 // The share of a correction that costs the least residual is proportional to the length.
                 double atLeft = -jump[e * channels + c] * unit / (unit + before) * unit;
                 double atRight = jump[(e + 1) * channels + c] * unit / (unit + after) * unit;

@@ -1,7 +1,6 @@
 package org.wellwright.solver.radial.spectral;
 
 import org.wellwright.solver.numerics.Element;
-import org.wellwright.solver.numerics.ElementBasis;
 
 /**
  * Whether an element resolves the solutions at an energy: the local energy error per norm, from the residual on the
@@ -44,10 +43,10 @@ final class ResolutionTest {
         }
         masses(element, first);
         java.util.Arrays.fill(error, 0);
-        int stride = modes + 2 * channels + 1;
-        for (int row = 0; row < ElementBasis.EXTRA * channels; row++) {
+        int stride = modes + 2 * channels;
+        for (int row = 0; row < Element.TESTED * channels; row++) {
             int at = row * stride;
-            double own = element.extraA[at + modes + 2 * channels] - energy * element.extraM[at + modes + 2 * channels];
+            double own = element.ownA[row] - energy * element.ownM[row];
             if (!(own > 0)) {
                 return Double.POSITIVE_INFINITY;
             }

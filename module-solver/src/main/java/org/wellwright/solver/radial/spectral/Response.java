@@ -16,9 +16,7 @@ final class Response {
     static Trial solve(MeshData mesh, Trial u, SourceFunction source) {
         Element[] elements = u.elements();
         int channels = u.channels();
-        int modes = elements[0].modes;
         double[] vertexLoad = new double[(elements.length + 1) * channels];
-        double[] modeLoad = new double[elements.length * modes];
         double[][][] f = sampled(u, source);
         double overlap = 0;
         for (int e = 0; e < elements.length; e++) {
@@ -31,6 +29,7 @@ final class Response {
         }
         CondensedPencil.Work work = mesh.pencil().work();
         work.solve(u.shift(), null);
+        double[] modeLoad = new double[work.amplitudes().length];
         for (int e = 0; e < elements.length; e++) {
             load(u, e, f[e], overlap, vertexLoad, modeLoad, work);
         }

@@ -17,10 +17,11 @@ final class SpectralRun {
     /** Truncation of a mesh at full accuracy, relative to ⟨T⟩ + ⟨|V|⟩. */
     private static final double FINEST = 1e-18;
     /** Rounding of a Rayleigh quotient relative to ⟨T⟩ + ⟨|V|⟩. */
-    private static final double QUOTIENT_ROUNDING = 5e-16;
+    private static final double QUOTIENT_ROUNDING = 6e-16;
     /** Times the mesh may be refined because bounds are too wide. */
     private static final int PASSES = 5;
 
+    static boolean debug;
     private final RadialProblem problem;
     private final LevelSearch search;
     private final SolveMonitor monitor;
@@ -67,6 +68,7 @@ final class SpectralRun {
             List<Solution> solutions = evaluate(trials, data);
             Enclosure enclosure = Enclosure.of(solutions, data, above);
             boolean[] marked = pass < PASSES ? mark(solutions, enclosure) : null;
+            if (debug) { int c=0; double worst=0; int wi=0; if(marked!=null) for(boolean b:marked) if(b)c++; for(int i=0;i<solutions.size();i++){ Solution q=solutions.get(i); double x=q.residual()*q.residual()/Math.max(enclosure.gap(i),1e-300)/q.scale(); if(x>worst){worst=x;wi=i;} } System.out.println("pass "+pass+" elements "+(mesh.edges().length-1)+" marked "+c+" worst bound "+worst+" at "+wi+" gap "+enclosure.gap(wi)+" counts "+finder.counts()); if(marked!=null) for(int e=0;e<marked.length;e++) if(marked[e]) System.out.print(mesh.edges()[e]+".."+mesh.edges()[e+1]+" "); System.out.println(); }
             if (marked == null) {
                 return result(solutions, enclosure, data, above);
             }
@@ -98,13 +100,13 @@ final class SpectralRun {
 
     private static Solution evaluate(Quotient quotient, Trial trial) {
         quotient.evaluate(trial);
+        Trial normalised = trial.times(1 / Math.sqrt(quotient.norm()));
+        quotient.smooth(trial);
         double energy = quotient.energy;
         double scale = quotient.scale;
         double quadrature = trusted(quotient.quadrature, scale);
         double rounding = QUOTIENT_ROUNDING * scale + quotient.rounding + quadrature + quotient.cut;
         double estimate = quotient.truncation + quadrature + quotient.cut + 0.5 * Math.ulp(1.0) * scale;
-        Trial normalised = trial.times(1 / Math.sqrt(quotient.norm()));
-        quotient.smooth(trial);
         return new Solution(
                 normalised,
                 energy,
@@ -144,7 +146,7 @@ final class SpectralRun {
             double allowance = 0.25 * target * gap / marked.length;
             for (int e = 0; e < marked.length; e++) {
                 Solution.Shares shares = level.shares();
-                boolean bad = wide && shares.residual(e) > Math.max(allowance, 0.01 * square);
+                boolean bad = wide && shares.residual(e) > allowance;
                 bad |= coarse && shares.quadrature(e) > target / marked.length;
                 bad |= !potentials.residualExists() && shares.truncation(e) > target / marked.length;
                 marked[e] |= bad;

@@ -49,11 +49,15 @@ final class StateRefinement {
         for (int round = 0; round < ROUNDS; round++) {
             Trial next = low(high(u), mesh.edges());
             double change = next.minus(u).norm() / next.norm();
-            u = next;
-            if (change < 1e-31 || change > before) {
+            // A state is good to 1e-6 before the first round; a larger step is a failed factorisation.
+            if (!(change < Math.min(before, 1e-12))) {
                 break;
             }
+            u = next;
             before = change;
+            if (change < 1e-31) {
+                break;
+            }
         }
         return u.times(1 / Math.sqrt(u.norm()));
     }
@@ -133,14 +137,12 @@ final class StateRefinement {
     private Trial high(Trial u) {
         residuals(u);
         double[] changed = u.coefficients().clone();
-        int modes = elements[0].modes;
-        int stride = modes + 2 * channels + 1;
         for (int e = 0; e < elements.length; e++) {
             Element element = elements[e];
             for (int c = 0; c < channels; c++) {
                 for (int x = 0; x < ElementBasis.EXTRA; x++) {
-                    int own = (x * channels + c) * stride + modes + 2 * channels;
-                    double diagonal = element.extraA[own] - u.shift() * element.extraM[own];
+                    int own = x * channels + c;
+                    double diagonal = element.ownA[own] - u.shift() * element.ownM[own];
                     int at = (e * channels + c) * functions + bubbles + x;
                     changed[at] -= residual[at] / (diagonal > 0 ? diagonal : element.kinetic / element.unit);
                 }
@@ -156,7 +158,7 @@ final class StateRefinement {
         for (int i = 0; i < load.length; i++) {
             load[i] = -vertexResidual[channels + i];
         }
-        double[] modeLoad = new double[elements.length * modes];
+        double[] modeLoad = new double[work.amplitudes().length];
         double[] plain = new double[modes];
         for (int e = 0; e < elements.length; e++) {
             Element element = elements[e];
