@@ -16,6 +16,7 @@ final class Survey {
     private double[] radius;
     private double[] envelope;
     private int lowest;
+    private double[] weight = new double[0];
 
     private Survey(ChannelPotentials potentials, double[] radius) {
         this.potentials = potentials;
@@ -97,13 +98,19 @@ final class Survey {
         findLowest();
     }
 
-    /** Halves the intervals beside every local minimum until no phase hides in them. */
+    /**
+     * Halves the intervals beside every local minimum until no phase hides in them, and the intervals in which a high wall
+     * ends, since a well may lie at its foot.
+     */
     private void closeIn() {
         double threshold = potentials.threshold();
         double[] more = new double[64];
         for (int round = 0; round < 60; round++) {
             int count = 0;
-            for (int i = 1; i + 1 < radius.length && count + 2 <= more.length; i++) {
+            for (int i = 1; i + 1 < radius.length && count + 3 <= more.length; i++) {
+                if (footOfWall(i, threshold)) {
+                    more[count++] = 0.5 * (radius[i] + radius[i + 1]);
+                }
                 boolean minimum = envelope[i] <= envelope[i - 1] && envelope[i] <= envelope[i + 1];
                 if (!minimum || envelope[i] == envelope[i - 1] && envelope[i] == envelope[i + 1]) {
                     continue;
@@ -119,8 +126,28 @@ final class Survey {
             if (count == 0) {
                 return;
             }
-            insert(more, count);
+            Arrays.sort(more, 0, count);
+            insert(more, distinct(more, count));
         }
+    }
+
+    private boolean footOfWall(int i, double threshold) {
+        if (Double.isInfinite(threshold) || radius[i + 1] - radius[i] < 1e-6 * radius[i]) {
+            return false;
+        }
+        double here = (envelope[i] - threshold) * radius[i] * radius[i] / kinetic;
+        double next = (envelope[i + 1] - threshold) * radius[i + 1] * radius[i + 1] / kinetic;
+        return here > 1e3 && Math.abs(next) < 10 || next > 1e3 && Math.abs(here) < 10;
+    }
+
+    private static int distinct(double[] sorted, int count) {
+        int kept = 0;
+        for (int i = 0; i < count; i++) {
+            if (kept == 0 || sorted[i] > sorted[kept - 1]) {
+                sorted[kept++] = sorted[i];
+            }
+        }
+        return kept;
     }
 
     /** Samples wells below an energy that interval bounds of V allow and no sample has met. */
@@ -175,19 +202,38 @@ final class Survey {
 
     /** Rough number of levels below E: (1/π) ∫ √((E − envelope)/κ) dr by trapezoids in ln r. */
     double levels(double energy) {
+        if (weight.length != radius.length) {
+            weight = weights();
+        }
+        return sum(energy, envelope, weight, radius.length);
+    }
+
+    private double[] weights() {
+        int n = radius.length;
+        double[] w = new double[n];
+        for (int i = 0; i + 1 < n; i++) {
+            double half = 0.5 * Math.log(radius[i + 1] / radius[i]) / (Math.PI * Math.sqrt(kinetic));
+            w[i] += half * radius[i];
+            w[i + 1] += half * radius[i + 1];
+        }
+        return w;
+    }
+
+    private static double sum(double energy, double[] envelope, double[] weight, int n) {
         double sum = 0;
-        for (int i = 0; i + 1 < radius.length; i++) {
-            double here = Math.sqrt(Math.max(0, energy - envelope[i]) / kinetic) * radius[i];
-            double next = Math.sqrt(Math.max(0, energy - envelope[i + 1]) / kinetic) * radius[i + 1];
-            if (here + next > 0) {
-                sum += 0.5 * (here + next) * Math.log(radius[i + 1] / radius[i]);
+        for (int i = 0; i < n; i++) {
+            if (envelope[i] < energy) {
+                sum += weight[i] * Math.sqrt(energy - envelope[i]);
             }
         }
-        return sum / Math.PI;
+        return sum;
     }
 
     /** An energy below {@code top} with about {@code wanted} levels under it; {@code top} if there are fewer. */
     double energyOf(double wanted, double top) {
+        if (!(floor() < top)) {
+            return top;
+        }
         double low = floor();
         double high = top;
         if (Double.isInfinite(high)) {
@@ -200,7 +246,7 @@ final class Survey {
         } else if (levels(high) <= wanted) {
             return top;
         }
-        for (int k = 0; k < 60 && levels(high) > wanted * 1.02; k++) {
+        for (int k = 0; k < 60 && levels(high) > wanted * 1.05 + 0.02; k++) {
             double middle = Double.isInfinite(top) ? 0.5 * (low + high) : between(low, high, top);
             if (levels(middle) >= wanted) {
                 high = middle;
