@@ -49,7 +49,9 @@ final class RoundingPass {
             case MULTIPLY -> Math.abs(a) * eb + Math.abs(b) * ea + ea * eb + under(U * size, size);
             case DIVIDE -> quotient(size, ea, b, eb);
             case NEGATE, ABS -> ea;
-            case MIN, MAX -> Math.max(ea, eb);
+            // Operands further apart than their errors cannot change places.
+            case MIN -> a + ea < b - eb ? ea : b + eb < a - ea ? eb : Math.max(ea, eb);
+            case MAX -> a - ea > b + eb ? ea : b - eb > a + ea ? eb : Math.max(ea, eb);
             case POWER -> power(size, a, ea, b, eb);
             case EXP -> library(Math.max(size, Double.MIN_VALUE) * Math.expm1(ea) * (1 + 4 * U), size);
             // The slope e^a is v + 1, next to nothing for large negative a.

@@ -104,7 +104,7 @@ final class SpectralRun {
         quotient.smooth(trial);
         double energy = quotient.energy;
         double scale = quotient.scale;
-        double quadrature = trusted(quotient.quadrature, scale);
+        double quadrature = quotient.quadrature;
         double rounding = QUOTIENT_ROUNDING * scale + quotient.rounding + quadrature + quotient.cut;
         double estimate = quotient.truncation + quadrature + quotient.cut + 0.5 * Math.ulp(1.0) * scale;
         return new Solution(
@@ -117,14 +117,6 @@ final class SpectralRun {
                 quadrature + quotient.cut,
                 scale,
                 quotient.shares());
-    }
-
-    /**
-     * What the difference of the two rules says of the better one: as it is when it is large, and quadratically less
-     * below 1e-12, since both converge geometrically there.
-     */
-    private static double trusted(double difference, double scale) {
-        return difference * Math.min(1, difference / (1e-12 * scale));
     }
 
     /**

@@ -2,7 +2,6 @@ package org.wellwright.solver.service.internal;
 
 import java.util.List;
 import java.util.Locale;
-import java.util.Optional;
 import org.wellwright.solver.SolverException;
 import org.wellwright.solver.WellwrightException;
 import org.wellwright.solver.radial.Completeness;
@@ -18,9 +17,9 @@ import org.wellwright.solver.radial.Spectrum;
  * difference beyond the bounds is our fault and said so.
  */
 final class CrossCheck {
-    private final Optional<RadialSolver> second;
+    private final RadialSolver second;
 
-    CrossCheck(Optional<RadialSolver> second) {
+    CrossCheck(RadialSolver second) {
         this.second = second;
     }
 
@@ -28,13 +27,10 @@ final class CrossCheck {
         if (spectrum.completeness() == Completeness.NO) {
             return spectrum;
         }
-        if (second.isEmpty()) {
-            return with(spectrum, Completeness.NO, "the count was not confirmed: no second method is present");
-        }
         int expected = spectrum.outcomes().size();
         int counted;
         try {
-            counted = second.get().countBelow(spectrum.problem(), spectrum.searchedBelow());
+            counted = second.countBelow(spectrum.problem(), spectrum.searchedBelow());
         } catch (WellwrightException e) {
             return with(
                     spectrum,
@@ -58,7 +54,7 @@ final class CrossCheck {
         LevelSearch search =
                 new LevelSearch(Math.max(1, spectrum.outcomes().size()), spectrum.searchedBelow(), LevelSearch.FULL);
         List<Level> others =
-                second.get().solve(spectrum.problem(), search, monitor).levels();
+                second.solve(spectrum.problem(), search, monitor).levels();
         for (Level level : spectrum.levels()) {
             for (Level other : others) {
                 if (other.index() == level.index() && !agree(level, other)) {

@@ -1,6 +1,5 @@
 package org.wellwright.solver.service.internal;
 
-import java.util.Optional;
 import org.wellwright.solver.radial.RadialProblem;
 import org.wellwright.solver.radial.RadialSolver;
 import org.wellwright.solver.radial.steps.LogDerivativeSolver;
@@ -10,11 +9,8 @@ import org.wellwright.solver.radial.steps.PerturbedStepSolver;
 final class SecondMethods {
     private SecondMethods() {}
 
-    /**
-     * The method for a problem: constant-reference perturbation for one channel, log-derivative propagation for
-     * several.
-     */
-    static Optional<RadialSolver> of(RadialProblem problem) {
-        return Optional.of(problem.channels().size() == 1 ? new PerturbedStepSolver() : new LogDerivativeSolver());
+    /** Constant-reference perturbation for one channel, log-derivative propagation for several. */
+    static RadialSolver of(RadialProblem problem) {
+        return problem.channels().size() == 1 ? new PerturbedStepSolver() : new LogDerivativeSolver();
     }
 }
