@@ -15,7 +15,7 @@ public final class ColourScale {
     private static final int STEPS = 1024;
 
     private static final ColourScale SEQUENTIAL =
-            new ColourScale(t -> OkLab.polar(0.20 + 0.75 * t, 0.045 + 0.093 * Math.sin(Math.PI * t), 285 + 155 * t));
+            new ColourScale(t -> OkLab.polar(0.25 + 0.70 * t, 0.04 + 0.05 * Math.sin(Math.PI * t), 150 - 65 * t));
     private static final ColourScale DIVERGING = new ColourScale(t -> arms(t, 0.965, 0.42, 0.116));
     private static final ColourScale DIVERGING_DARK = new ColourScale(t -> arms(t, 0.22, 0.79, 0.108));
     private static final ColourScale CYCLIC = new ColourScale(t -> loop(2 * Math.PI * t));
