@@ -3,9 +3,9 @@ package org.wellwright.solver.numerics;
 import java.util.Arrays;
 
 /**
- * The loops of {@link ScalarChain} over all elements and modes. Arrays come as arguments: only then are they compiled to
- * vector instructions. Modes of element e stand at {@code e * stride}, stride a multiple of 4; what pads a row has λ = ∞
- * and no coupling.
+ * The loops of {@link ScalarChain} over all elements and modes. Arrays come as arguments: only then are they compiled
+ * to vector instructions. Modes of element e stand at {@code e * stride}, stride a multiple of 4; what pads a row has λ
+ * = ∞ and no coupling.
  */
 final class ChainKernels {
     private ChainKernels() {}

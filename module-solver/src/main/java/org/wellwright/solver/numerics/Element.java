@@ -47,8 +47,8 @@ public final class Element {
     /** Right with right. */
     public final double[] mRightRight;
     /**
-     * Couplings of the first extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C)]} for x &lt; TESTED:
-     * N modes, C left, C right vertices; and the same of the mass.
+     * Couplings of the first extra bubbles, for error estimates: {@code extraA[(x * C + c) * (N + 2C)]} for x &lt;
+     * TESTED: N modes, C left, C right vertices; and the same of the mass.
      */
     public final double[] extraA;
     /** See {@link #extraA}. */
@@ -303,7 +303,15 @@ public final class Element {
     }
 
     private static void combine(
-            double[] amplitude, int from, int step, double[] rows, int column, int stride, int count, double[] into, int n) {
+            double[] amplitude,
+            int from,
+            int step,
+            double[] rows,
+            int column,
+            int stride,
+            int count,
+            double[] into,
+            int n) {
         java.util.Arrays.fill(into, 0, n, 0);
         for (int k = 0; k < count; k++) {
             double a = amplitude[from + k * step];

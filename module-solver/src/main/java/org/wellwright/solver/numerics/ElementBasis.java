@@ -175,8 +175,8 @@ public final class ElementBasis {
     }
 
     /**
-     * Combinations of the bubbles with unit mass and diagonal stiffness, least kinetic energy first, so that the matrices
-     * of the elements are graded from small to large. On an ordinary element they are even or odd exactly.
+     * Combinations of the bubbles with unit mass and diagonal stiffness, least kinetic energy first, so that the
+     * matrices of the elements are graded from small to large. On an ordinary element they are even or odd exactly.
      */
     private void orthonormalise(double[] mass) {
         int n = bubbles;

@@ -1,8 +1,8 @@
 package org.wellwright.solver.numerics;
 
 /**
- * Values of functions on one element and sums over its nodes, in loops that compile well; ordinary elements use the parity
- * of their functions, which halves the work.
+ * Values of functions on one element and sums over its nodes, in loops that compile well; ordinary elements use the
+ * parity of their functions, which halves the work.
  */
 public final class ElementKernels {
     private ElementKernels() {}

@@ -20,6 +20,7 @@ public final class ScalarChain implements CondensedPencil {
     private final double[] lambda;
     /** How near σ must come to a mode for it to be kept as an unknown. */
     private final double[] reach;
+
     private final double[] alphaLeft;
     private final double[] betaLeft;
     private final double[] alphaRight;
@@ -46,6 +47,7 @@ public final class ScalarChain implements CondensedPencil {
         private final int[] position = new int[count];
         /** Amplitude of the explicit mode of each element that has one. */
         private final double[] explicit = new double[count];
+
         private final double[] poleLeftLeft = new double[stride * count];
         private final double[] poleLeftRight = new double[stride * count];
         private final double[] poleRightRight = new double[stride * count];

@@ -30,7 +30,8 @@ class CondensedPencilTest {
         for (int e = 0; e < count; e++) {
             double from = 6.0 * e / count;
             double to = 6.0 * (e + 1) / count;
-            elements[e] = new Element(all, 0.7, 0.5 * (to - from), potential(channels, from, to, basis), new Element.Scratch());
+            elements[e] = new Element(
+                    all, 0.7, 0.5 * (to - from), potential(channels, from, to, basis), new Element.Scratch());
         }
         return elements;
     }
@@ -167,14 +168,21 @@ class CondensedPencilTest {
         check(new BlockChain(elements), dense(elements));
     }
 
-    /** A free box cut into equal elements: every level of even order vanishes at every edge, at a pole of the condensation. */
+    /**
+     * A free box cut into equal elements: every level of even order vanishes at every edge, at a pole of the
+     * condensation.
+     */
     @Test
     void levelsThatVanishAtEveryEdgeAreCountedAndFound() {
         ElementBasis basis = ElementBasis.ordinary(16);
         Element[] elements = new Element[4];
         for (int e = 0; e < 4; e++) {
             elements[e] = new Element(
-                    new ElementBasis[] {basis}, 1, 0.5, new double[][] {new double[basis.assembly.size]}, new Element.Scratch());
+                    new ElementBasis[] {basis},
+                    1,
+                    0.5,
+                    new double[][] {new double[basis.assembly.size]},
+                    new Element.Scratch());
         }
         CondensedPencil.Work work = new ScalarChain(elements).work();
         for (int n = 1; n <= 12; n++) {

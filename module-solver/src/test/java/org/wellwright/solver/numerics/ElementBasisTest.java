@@ -73,7 +73,8 @@ class ElementBasisTest {
                     double operator = basis.atOrigin() ? bend - s * (s - 1) / (t * t) * value(basis, k, t) : bend;
                     assertThat(table.bubble[k][g] * shift).isCloseTo(value(basis, k, t), within(1e-13));
                     double expected = table.second[k][g] * shift;
-                    assertThat(operator).isCloseTo(expected, within(1e-4 * (1 + Math.abs(expected)) * (k + 1) * (k + 1)));
+                    assertThat(operator)
+                            .isCloseTo(expected, within(1e-4 * (1 + Math.abs(expected)) * (k + 1) * (k + 1)));
                 }
             }
         }

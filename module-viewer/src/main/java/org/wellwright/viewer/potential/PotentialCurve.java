@@ -81,12 +81,15 @@ record PotentialCurve(SolvedChannel channel, boolean centrifugal) {
         return 0.5 * (a + b);
     }
 
-    /** From the innermost to the outermost turning point of a level; null if it is nowhere allowed or there is no state. */
+    /**
+     * From the innermost to the outermost turning point of a level; null if it is nowhere allowed or there is no state.
+     */
     Allowed span(Level level) {
         double end = channel.spectrum().state(level.index()).outerRadius();
         List<Allowed> allowed = allowed(level.energy() + channel.origin(), end);
         return allowed.isEmpty()
                 ? null
-                : new Allowed(allowed.get(0).from(), allowed.get(allowed.size() - 1).to());
+                : new Allowed(
+                        allowed.get(0).from(), allowed.get(allowed.size() - 1).to());
     }
 }

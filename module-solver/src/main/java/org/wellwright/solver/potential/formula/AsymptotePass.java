@@ -125,9 +125,8 @@ final class AsymptotePass {
             case ATAN -> atan(a);
             case SINH -> hyperbolic(a, -1);
             case COSH -> hyperbolic(a, 1);
-            case TANH -> Math.abs(a.limit()) < 300
-                    ? times(hyperbolic(a, -1), inverse(hyperbolic(a, 1)))
-                    : saturated(a, -1, 1);
+            case TANH ->
+                Math.abs(a.limit()) < 300 ? times(hyperbolic(a, -1), inverse(hyperbolic(a, 1))) : saturated(a, -1, 1);
             case ERF -> Double.isNaN(a.limit()) ? saturated(a, -1, 1) : a.compose(Taylor.erf(a.limit()));
             case ERFC ->
                 Double.isNaN(a.limit())
@@ -189,7 +188,8 @@ final class AsymptotePass {
 
     /** A function that reaches its limits exponentially fast, of an argument that grows without limit. */
     private static Asymptote saturated(Asymptote a, double below, double above) {
-        boolean grows = Math.abs(a.limit()) >= 300 || a.trend() > 0
+        boolean grows = Math.abs(a.limit()) >= 300
+                || a.trend() > 0
                 || a.series().hasLead() && a.series().lead().order().power() > 1e-12;
         if (!grows || a.sign() == null) {
             return Asymptote.BOUNDED;

@@ -85,8 +85,8 @@ final class LevelFinder {
     }
 
     /**
-     * The next level from the spacings s of those before: ln s as a polynomial in the index, exact for powers of the index
-     * in the limit; or half the bracket.
+     * The next level from the spacings s of those before: ln s as a polynomial in the index, exact for powers of the
+     * index in the limit; or half the bracket.
      */
     private double guess(int i, List<Trial> found) {
         double a = low[i];
@@ -157,8 +157,8 @@ final class LevelFinder {
     }
 
     /**
-     * Newton's step with its error removed: corrections θ = d + c d² at distances d from the level give c after two steps,
-     * so the third lands with a cubic error.
+     * Newton's step with its error removed: corrections θ = d + c d² at distances d from the level give c after two
+     * steps, so the third lands with a cubic error.
      */
     private static double accelerated(double shift, double correction, double lastMove) {
         double next = shift + correction;
@@ -183,8 +183,9 @@ final class LevelFinder {
     }
 
     /**
-     * Whether level i lies where it was found: an energy below it with exactly i levels under it and one above with i + 1,
-     * both beyond the blur of counts; or, where neighbours are nearer than that, at most i below and at least i + 1 above.
+     * Whether level i lies where it was found: an energy below it with exactly i levels under it and one above with i +
+     * 1, both beyond the blur of counts; or, where neighbours are nearer than that, at most i below and at least i + 1
+     * above.
      */
     private boolean confirmed(int i, double energy, double before) {
         double offset = 16 * blur(energy);

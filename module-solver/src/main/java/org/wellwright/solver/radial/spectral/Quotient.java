@@ -6,8 +6,8 @@ import org.wellwright.solver.numerics.ElementBasis;
 import org.wellwright.solver.numerics.ElementKernels;
 
 /**
- * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that rounding
- * is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
+ * The energy of a trial function, its parts and its errors: E = (squares for T + quadrature of W u²)/∫u², so that
+ * rounding is proportional to ⟨T⟩ + ⟨|V|⟩ and not to the norm of a matrix.
  *
  * <p>One object is used for many levels of one mesh; results are read before the next call.
  */

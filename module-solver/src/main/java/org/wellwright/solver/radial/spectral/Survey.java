@@ -99,8 +99,8 @@ final class Survey {
     }
 
     /**
-     * Halves the intervals beside every local minimum until no phase hides in them, and the intervals in which a high wall
-     * ends, since a well may lie at its foot.
+     * Halves the intervals beside every local minimum until no phase hides in them, and the intervals in which a high
+     * wall ends, since a well may lie at its foot.
      */
     private void closeIn() {
         double threshold = potentials.threshold();

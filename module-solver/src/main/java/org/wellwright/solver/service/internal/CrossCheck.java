@@ -53,8 +53,7 @@ final class CrossCheck {
     private void compare(Spectrum spectrum, SolveMonitor monitor) {
         LevelSearch search =
                 new LevelSearch(Math.max(1, spectrum.outcomes().size()), spectrum.searchedBelow(), LevelSearch.FULL);
-        List<Level> others =
-                second.solve(spectrum.problem(), search, monitor).levels();
+        List<Level> others = second.solve(spectrum.problem(), search, monitor).levels();
         for (Level level : spectrum.levels()) {
             for (Level other : others) {
                 if (other.index() == level.index() && !agree(level, other)) {
