@@ -21,7 +21,6 @@ final class SpectralRun {
     /** Times the mesh may be refined because bounds are too wide. */
     private static final int PASSES = 5;
 
-    static boolean debug;
     private final RadialProblem problem;
     private final LevelSearch search;
     private final SolveMonitor monitor;
@@ -68,27 +67,6 @@ final class SpectralRun {
             List<Solution> solutions = evaluate(trials, data);
             Enclosure enclosure = Enclosure.of(solutions, data, above);
             boolean[] marked = pass < PASSES ? mark(solutions, enclosure) : null;
-            if (debug) {
-                int c = 0;
-                double worst = 0;
-                int wi = 0;
-                if (marked != null) for (boolean b : marked) if (b) c++;
-                for (int i = 0; i < solutions.size(); i++) {
-                    Solution q = solutions.get(i);
-                    double x = q.residual() * q.residual() / Math.max(enclosure.gap(i), 1e-300) / q.scale();
-                    if (x > worst) {
-                        worst = x;
-                        wi = i;
-                    }
-                }
-                System.out.println(
-                        "pass " + pass + " elements " + (mesh.edges().length - 1) + " marked " + c + " worst bound "
-                                + worst + " at " + wi + " gap " + enclosure.gap(wi) + " counts " + finder.counts());
-                if (marked != null)
-                    for (int e = 0; e < marked.length; e++)
-                        if (marked[e]) System.out.print(mesh.edges()[e] + ".." + mesh.edges()[e + 1] + " ");
-                System.out.println();
-            }
             if (marked == null) {
                 return result(solutions, enclosure, data, above);
             }
