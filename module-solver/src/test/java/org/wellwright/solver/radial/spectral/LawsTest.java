@@ -61,8 +61,10 @@ class LawsTest {
             for (int i = 1; i < 20000; i++) {
                 double r = u.innerRadius() + (20 - u.innerRadius()) * i / 20000;
                 double value = u.value(0, r);
-                nodes += value * previous < 0 ? 1 : 0;
-                previous = Math.abs(value) > 1e-12 ? value : previous;
+                if (Math.abs(value) > 1e-9) {
+                    nodes += value * previous < 0 ? 1 : 0;
+                    previous = value;
+                }
             }
             assertThat(nodes).isEqualTo(level.index());
         }
@@ -205,7 +207,7 @@ class LawsTest {
         assertThatThrownBy(() -> solve(problem("-1/r", 0.5, 0), LevelSearch.all()))
                 .isInstanceOf(InvalidModelException.class)
                 .hasMessageContaining("no end");
-        assertThatThrownBy(() -> solve(problem("-1/r^2", 0.5, 1), LevelSearch.first(1)))
+        assertThatThrownBy(() -> solve(problem("-2/r^2", 0.5, 1), LevelSearch.first(1)))
                 .isInstanceOf(InvalidModelException.class)
                 .hasMessageContaining("l = 1");
         assertThatThrownBy(() -> solve(problem("-r", 0.5, 0), LevelSearch.first(1)))
