@@ -2,6 +2,7 @@ package org.wellwright.project.command;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.wellwright.project.report.Digits;
 
 /** Columns of text with two spaces between them; numbers to the right. */
 final class TextTable {
@@ -28,7 +29,7 @@ final class TextTable {
             for (List<String> row : rows) {
                 String cell = row.get(c);
                 widths[c] = Math.max(widths[c], cell.length());
-                numbers[c] &= cell.isEmpty() || "+-−∞–0123456789(".indexOf(cell.charAt(0)) >= 0;
+                numbers[c] &= Digits.number(cell);
             }
         }
         StringBuilder text = new StringBuilder();

@@ -78,6 +78,16 @@ public final class Digits {
                 : Double.toString(value);
     }
 
+    /** Whether a cell of a table is a number, perhaps with its uncertainty, and stands to the right. */
+    public static boolean number(String cell) {
+        for (int i = 0; i < cell.length(); i++) {
+            if ("0123456789.+-−±∞–()e ≤≥".indexOf(cell.charAt(i)) < 0) {
+                return false;
+            }
+        }
+        return true;
+    }
+
     private static String special(double value) {
         return Double.isNaN(value) ? "–" : value > 0 ? "∞" : "−∞";
     }

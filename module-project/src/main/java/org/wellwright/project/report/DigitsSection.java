@@ -3,11 +3,13 @@ package org.wellwright.project.report;
 import java.util.ArrayList;
 import java.util.List;
 import org.openide.util.lookup.ServiceProvider;
+import org.wellwright.project.FittedModel;
 import org.wellwright.project.ReportInput;
 import org.wellwright.project.ReportSection;
 import org.wellwright.project.SolvedChannel;
 import org.wellwright.project.SolvedModel;
 import org.wellwright.solver.Problem;
+import org.wellwright.solver.fit.Prediction;
 import org.wellwright.solver.radial.Completeness;
 import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.units.UnitSystem;
@@ -28,6 +30,31 @@ public final class DigitsSection implements ReportSection {
     @Override
     public int position() {
         return 800;
+    }
+
+    /** How the numerical bounds compare with the uncertainties that the fits leave. */
+    private static String numericalShare(ReportInput input) {
+        double largest = 0;
+        for (FittedModel model : input.fits()) {
+            if (model.fit() == null) {
+                continue;
+            }
+            for (Prediction prediction : model.fit().predictions()) {
+                double share = prediction.numericalHalfWidth() / prediction.parameterSigma();
+                // A level that no free parameter moves has no uncertainty of that kind.
+                if (prediction.parameterSigma() > 0 && share > largest) {
+                    largest = share;
+                }
+            }
+        }
+        if (largest == 0) {
+            return "";
+        }
+        String share = Digits.significant(largest, 2);
+        return largest < 0.1
+                ? "<p>The numerical bounds are at most " + share + " of the uncertainty that the parameters leave in a predicted level.</p>\n"
+                : "<p class=\"warn\">The numerical bounds reach " + share
+                        + " of the uncertainty that the parameters leave in a predicted level: numerics limit some digits above.</p>\n";
     }
 
     @Override
@@ -61,18 +88,11 @@ public final class DigitsSection implements ReportSection {
                         .append(".</p>\n");
             }
         }
-        return "<p>Every energy is the Rayleigh quotient of a computed state of the radial equation. Its numerical bounds enclose the exact level of the model;"
-                + " two independent methods count the levels of every channel. The table gives the largest of these bounds: they are far below every"
-                + " uncertainty printed above, and no digit above is limited by them.</p>\n"
+        return "<p>Every energy is the Rayleigh quotient of a computed state of the radial equation. Its numerical bounds enclose the exact level of the model."
+                + " The table gives the largest of these bounds, and whether two independent methods count the same levels in every channel.</p>\n"
                 + Html.table(
-                        List.of(
-                                "model",
-                                "channels",
-                                "levels",
-                                "largest bound (" + units.energy().printed() + ")",
-                                "kind",
-                                "count"),
-                        rows)
+                        List.of("model", "channels", "levels", "largest bound (" + units.energy().printed() + ")", "kind", "count"), rows)
+                + numericalShare(input)
                 + problems
                 + "<p>Uncertainties of the parameters come from the least-squares fit: inverse normal matrix with exact derivatives of every level, shared errors"
                 + " of the data groups solved along. They hold if the model does. Constants of nature and masses are those of the editions below; their own"

@@ -70,7 +70,7 @@ final class Html {
         boolean any = false;
         for (List<String> row : rows) {
             String cell = row.get(column);
-            if (!cell.isEmpty() && "+-−±∞–0123456789(".indexOf(cell.charAt(0)) < 0) {
+            if (!Digits.number(cell)) {
                 return false;
             }
             any |= !cell.isEmpty();
