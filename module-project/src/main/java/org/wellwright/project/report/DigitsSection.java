@@ -52,7 +52,8 @@ public final class DigitsSection implements ReportSection {
         }
         String share = Digits.significant(largest, 2);
         return largest < 0.1
-                ? "<p>The numerical bounds are at most " + share + " of the uncertainty that the parameters leave in a predicted level.</p>\n"
+                ? "<p>The numerical bounds are at most " + share
+                        + " of the uncertainty that the parameters leave in a predicted level.</p>\n"
                 : "<p class=\"warn\">The numerical bounds reach " + share
                         + " of the uncertainty that the parameters leave in a predicted level: numerics limit some digits above.</p>\n";
     }
@@ -91,7 +92,14 @@ public final class DigitsSection implements ReportSection {
         return "<p>Every energy is the Rayleigh quotient of a computed state of the radial equation. Its numerical bounds enclose the exact level of the model."
                 + " The table gives the largest of these bounds, and whether two independent methods count the same levels in every channel.</p>\n"
                 + Html.table(
-                        List.of("model", "channels", "levels", "largest bound (" + units.energy().printed() + ")", "kind", "count"), rows)
+                        List.of(
+                                "model",
+                                "channels",
+                                "levels",
+                                "largest bound (" + units.energy().printed() + ")",
+                                "kind",
+                                "count"),
+                        rows)
                 + numericalShare(input)
                 + problems
                 + "<p>Uncertainties of the parameters come from the least-squares fit: inverse normal matrix with exact derivatives of every level, shared errors"

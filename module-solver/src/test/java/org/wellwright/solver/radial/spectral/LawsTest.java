@@ -88,11 +88,15 @@ class LawsTest {
     void gradientsAgreeWithDifferencesEdgesIncluded() {
         double h = 1e-4;
         for (int l : new int[] {0, 2}) {
-            RadialState u = solve(RadialProblem.single(0.7, l, PlainPotential.squareWell(60, 1.3)), LevelSearch.first(2))
+            RadialState u = solve(
+                            RadialProblem.single(0.7, l, PlainPotential.squareWell(60, 1.3)), LevelSearch.first(2))
                     .state(1);
-            double depth = difference(h, x -> energy(RadialProblem.single(0.7, l, PlainPotential.squareWell(60 + x, 1.3))));
-            double radius = difference(h, x -> energy(RadialProblem.single(0.7, l, PlainPotential.squareWell(60, 1.3 + x))));
-            double kinetic = difference(h, x -> energy(RadialProblem.single(0.7 + x, l, PlainPotential.squareWell(60, 1.3))));
+            double depth =
+                    difference(h, x -> energy(RadialProblem.single(0.7, l, PlainPotential.squareWell(60 + x, 1.3))));
+            double radius =
+                    difference(h, x -> energy(RadialProblem.single(0.7, l, PlainPotential.squareWell(60, 1.3 + x))));
+            double kinetic =
+                    difference(h, x -> energy(RadialProblem.single(0.7 + x, l, PlainPotential.squareWell(60, 1.3))));
             assertThat(u.gradient().common(0)).isCloseTo(depth, within(1e-8));
             assertThat(u.gradient().common(1)).isCloseTo(radius, within(1e-5));
             assertThat(u.gradient().kinetic()).isCloseTo(kinetic, within(1e-5));
@@ -107,10 +111,13 @@ class LawsTest {
         return (f.applyAsDouble(h) - f.applyAsDouble(-h)) / (2 * h);
     }
 
-    /** du/dZ of a hydrogen-like state solves (H − E) w = u/r − ⟨1/r⟩ u; ⟨r⟩ = 5/Z for 2p gives d⟨r⟩/dZ = 2⟨u|r|w⟩ = −5. */
+    /**
+     * du/dZ of a hydrogen-like state solves (H − E) w = u/r − ⟨1/r⟩ u; ⟨r⟩ = 5/Z for 2p gives d⟨r⟩/dZ = 2⟨u|r|w⟩ = −5.
+     */
     @Test
     void responseGivesDerivativesOfExpectationValues() {
-        RadialState u = solve(RadialProblem.single(0.5, 1, PlainPotential.coulomb(1)), LevelSearch.first(1)).state(0);
+        RadialState u = solve(RadialProblem.single(0.5, 1, PlainPotential.coulomb(1)), LevelSearch.first(1))
+                .state(0);
         RadialState w = u.response((c, r) -> u.value(c, r) / r);
         assertThat(u.overlap(0, w, 0, r -> 1)).isCloseTo(0, within(1e-12));
         assertThat(2 * u.overlap(0, w, 0, r -> r)).isCloseTo(-5, within(1e-9));
@@ -136,7 +143,9 @@ class LawsTest {
                 Double.POSITIVE_INFINITY);
         List<Double> exact = new ArrayList<>();
         for (DoubleUnaryOperator v : List.of(first, second)) {
-            solve(RadialProblem.single(0.5, 1, plain("v" + exact.size(), v, tail)), LevelSearch.first(8)).levels().stream()
+            solve(RadialProblem.single(0.5, 1, plain("v" + exact.size(), v, tail)), LevelSearch.first(8))
+                    .levels()
+                    .stream()
                     .map(Level::energy)
                     .forEach(exact::add);
         }
