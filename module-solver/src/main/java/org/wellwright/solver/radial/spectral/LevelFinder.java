@@ -245,7 +245,8 @@ final class LevelFinder {
         double from = Math.max(last, floor);
         double to = top;
         if (count(to) == wanted) {
-            return to;
+            // The top itself may lie on the next level, where a count is rounding.
+            return last + 0.6 * (to - last);
         }
         double least = from;
         for (int step = 0; step < 60; step++) {

@@ -20,6 +20,7 @@ import org.wellwright.solver.potential.OriginBehaviour;
 import org.wellwright.solver.potential.TailBehaviour;
 import org.wellwright.solver.potential.TermEvaluator;
 import org.wellwright.solver.radial.ChannelTerm;
+import org.wellwright.solver.radial.Completeness;
 import org.wellwright.solver.radial.Level;
 import org.wellwright.solver.radial.LevelSearch;
 import org.wellwright.solver.radial.RadialChannel;
@@ -44,6 +45,24 @@ class LawsTest {
 
     private static RadialProblem problem(String text, double kinetic, int l) {
         return RadialProblem.single(kinetic, l, formula(text));
+    }
+
+    /** A first guess of where to stop may fall on the next level: −1/50 for the first four at l = 0. */
+    @Test
+    void aSearchForTheFirstLevelsEndsBetweenTheLastAndTheNext() {
+        SolverService service = Lookup.getDefault().lookup(SolverService.class);
+        for (int l = 0; l <= 2; l++) {
+            for (int count = 1; count <= 10; count++) {
+                Spectrum spectrum = service.solve(
+                        SolveRequest.of(problem("-1/r", 0.5, l), LevelSearch.first(count)), SolveMonitor.NONE);
+                int last = count + l;
+                assertThat(spectrum.searchedBelow())
+                        .as("l = %d, count = %d: %s", l, count, spectrum.message())
+                        .isGreaterThan(-0.5 / (last * last))
+                        .isLessThan(-0.5 / ((last + 1) * (last + 1)) * (1 + 1e-6));
+                assertThat(spectrum.completeness()).isEqualTo(Completeness.COUNTED);
+            }
+        }
     }
 
     @Test
