@@ -97,7 +97,7 @@ public final class Report {
             table { border-collapse: collapse; margin: .6rem 0 1rem; font-variant-numeric: tabular-nums; }
             caption { text-align: left; font-weight: 600; padding: .3rem 0; }
             th, td { padding: .22rem .7rem .22rem 0; text-align: left; vertical-align: top; border-bottom: 1px solid #e3e8ee; overflow-wrap: anywhere; }
-            th { border-bottom: 1px solid #8b97a6; font-weight: 600; }
+            th { border-bottom: 1px solid #8b97a6; font-weight: 600; overflow-wrap: normal; }
             .n { text-align: right; white-space: nowrap; padding-left: .7rem; }
             .warn { border-left: 4px solid #b25e00; padding: .1rem .8rem; background: #fdf4e9; }
             figure { margin: 1rem 0 1.6rem; }
